@@ -5,10 +5,11 @@ import { vitePreprocess } from '@sveltejs/vite-plugin-svelte';
 export default {
 	preprocess: vitePreprocess(),
 	kit: {
-		adapter: adapter(),
+		// The tests build into a folder of their own, so that they never pull the files from under a running server.
+		adapter: adapter({ out: process.env.BUILD_FOLDER ?? 'build' }),
 		typescript: {
 			config: (config) => {
-				config.include.push('../migrations/**/*.ts', '../*.config.ts');
+				config.include.push('../migrations/**/*.ts', '../*.config.ts', '../*.config.js');
 			}
 		}
 	}

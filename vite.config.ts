@@ -1,22 +1,48 @@
-import { fileURLToPath } from 'node:url';
 import { sveltekit } from '@sveltejs/kit/vite';
+import { svelte } from '@sveltejs/vite-plugin-svelte';
 import tailwindcss from '@tailwindcss/vite';
+import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
 
 const lib = fileURLToPath(new URL('./src/lib', import.meta.url));
+const pureRooms = ['units', 'measure', 'schemas', 'server/bench', 'server/domain'];
 
 export default defineConfig({
 	plugins: process.env.VITEST ? [] : [tailwindcss(), sveltekit()],
 	test: {
 		expect: { requireAssertions: true },
+		coverage: {
+			provider: 'v8',
+			include: pureRooms.map((room) => `src/lib/${room}/**/*.ts`),
+			reporter: ['text-summary', 'json-summary'],
+			reportsDirectory: '.data/test/coverage'
+		},
 		projects: [
 			{
+				plugins: [svelte()],
 				resolve: { alias: { $lib: lib } },
 				test: { name: 'unit', environment: 'node', include: ['tests/unit/**/*.test.ts', 'tests/*.test.ts'] }
 			},
 			{
 				resolve: { alias: { $lib: lib } },
-				test: { name: 'reference', environment: 'node', include: ['tests/reference/**/*.test.ts'], testTimeout: 60_000 }
+				test: {
+					name: 'reference',
+					environment: 'node',
+					include: ['tests/reference/**/*.test.ts'],
+					testTimeout: 60_000
+				}
+			},
+			{
+				plugins: [sveltekit()],
+				test: {
+					name: 'integration',
+					environment: 'node',
+					include: ['tests/integration/**/*.test.ts'],
+					globalSetup: ['tests/integration/database-server.ts'],
+					setupFiles: ['tests/integration/own-schema.ts'],
+					testTimeout: 30_000,
+					hookTimeout: 60_000
+				}
 			}
 		]
 	}
