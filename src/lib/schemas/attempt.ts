@@ -1,0 +1,138 @@
+/** Everything that crosses the wire about an attempt, both ways, but the sweeps themselves (schemas/sweep-stream.ts). */
+import { z } from 'zod';
+import { exerciseView } from './exercise-view';
+import { finding } from './finding';
+import { readingRequest } from './reading';
+import { settings, type ResolvedSettings } from './settings';
+import { receiverFlag, rowNumber } from './sweep-stream';
+
+export const slug = z
+	.string()
+	.min(1)
+	.max(80)
+	.regex(/^[a-z0-9]+(-[a-z0-9]+)*$/, 'small letters, digits and single hyphens');
+export const attemptId = z.int().min(1);
+export const readingId = z.int().min(1);
+const questionId = z.string().min(1).max(60);
+
+/** `POST /api/attempts`: 201 with a fresh attempt, 200 with the one of this exercise that is still open. */
+export const startAttemptRequest = z.strictObject({ exercise: slug });
+
+/** A number as the person typed it, in which unit, resting on which reading. */
+export const typedAnswer = z.strictObject({
+	text: z.string().max(60),
+	unit: z.string().min(1).max(16),
+	readingId: readingId.nullish()
+});
+const typedAnswers = z
+	.record(questionId, typedAnswer)
+	.refine((answers) => Object.keys(answers).length <= 50, { message: 'no exercise asks so many questions' });
+
+/** `PUT /api/attempts/[id]/drafts`: what is typed so far, right or wrong. Replaces the earlier draft. */
+export const draftsRequest = z.strictObject({ answers: typedAnswers });
+export const draftsResponse = z.strictObject({ savedAt: z.iso.datetime() });
+
+/** `POST /api/attempts/[id]/answers`: hands in and closes. Every question needs an answer. */
+export const answersRequest = z.strictObject({ answers: typedAnswers });
+export const findingResponse = z.strictObject({ finding });
+
+/** `POST /api/attempts/[id]/hints`: the next hint. */
+export const hintResponse = z.strictObject({ hint: z.string(), revealed: z.int(), left: z.int() });
+
+/** `POST /api/attempts/[id]/readings`: the server replays these rows and takes the reading itself. */
+export const takeReadingRequest = z.strictObject({
+	/** The rows the trace holds: the first and the last. A live trace is its last row alone. */
+	rows: z
+		.strictObject({ from: rowNumber, to: rowNumber })
+		.refine((rows) => rows.to >= rows.from, { message: 'to must not be less than from', path: ['to'] }),
+	/** Index of the trace in the set-up that swept the last row. */
+	trace: z.int().min(0).max(3),
+	request: readingRequest
+});
+
+export const remarkView = z.strictObject({ code: z.string(), text: z.string() });
+/** A reading as the server took it. */
+export const readingView = z.strictObject({
+	id: readingId,
+	rows: z.strictObject({ from: rowNumber, to: rowNumber }),
+	trace: z.int(),
+	/** What the trace was: "average of 16" is mode average, count 16. */
+	mode: z.string(),
+	count: z.int(),
+	request: readingRequest,
+	kind: z.string(),
+	value: z.number(),
+	unit: z.string(),
+	/** One standard deviation from the set-up, in the reading's unit (dB for levels). */
+	spread: z.number(),
+	remarks: z.array(remarkView),
+	parts: z.unknown().optional(),
+	/** Number of the set-up in the log, from 0. */
+	setUp: z.int(),
+	takenAt: z.iso.datetime()
+});
+export const readingResponse = z.strictObject({ reading: readingView });
+
+export const draftsView = z.strictObject({
+	answers: z.record(z.string(), typedAnswer),
+	savedAt: z.iso.datetime().nullable()
+});
+
+/** Where the bench stands. To show it again: fetch rows restartRow…drawnTo, then ask for sweeps from drawnTo + 1. */
+export const benchView = z.strictObject({
+	/** As typed; the exercise's start settings until the first sweep. */
+	settings,
+	resolved: z.custom<ResolvedSettings>((value) => typeof value === 'object' && value !== null),
+	/** Number of the set-up in the log, null before the first sweep. */
+	setUp: z.int().nullable(),
+	nextRow: rowNumber,
+	/** Last row of this set-up known to be drawn; null when none is. */
+	drawnTo: rowNumber.nullable(),
+	/** What to give as `from` to go on here. */
+	resumeFrom: rowNumber,
+	/** Where holds and averages of this set-up start. */
+	restartRow: rowNumber,
+	clockS: z.number(),
+	benchTimeUsedS: z.number(),
+	flags: z.array(receiverFlag),
+	/** The input protection has tripped and waits for a pad, attenuation and a reset. */
+	protectionTripped: z.boolean()
+});
+
+export const attemptView = z.strictObject({
+	id: attemptId,
+	/** The first, second … attempt of this person at this exercise. */
+	number: z.int(),
+	triesLeft: z.int(),
+	state: z.enum(['open', 'closed']),
+	startedAt: z.iso.datetime(),
+	closedAt: z.iso.datetime().nullable(),
+	exercise: exerciseView,
+	bench: benchView,
+	readings: z.array(readingView),
+	drafts: draftsView,
+	hints: z.strictObject({ count: z.int(), revealed: z.array(z.string()) })
+});
+export const attemptResponse = z.strictObject({ attempt: attemptView });
+
+/** Every refusal: which field, and why. */
+export const problemResponse = z.object({
+	message: z.string(),
+	issues: z.array(z.object({ field: z.string(), message: z.string() })).optional()
+});
+
+export type StartAttemptRequest = z.infer<typeof startAttemptRequest>;
+export type TypedAnswer = z.infer<typeof typedAnswer>;
+export type DraftsRequest = z.infer<typeof draftsRequest>;
+export type DraftsResponse = z.infer<typeof draftsResponse>;
+export type AnswersRequest = z.infer<typeof answersRequest>;
+export type FindingResponse = z.infer<typeof findingResponse>;
+export type HintResponse = z.infer<typeof hintResponse>;
+export type TakeReadingRequest = z.infer<typeof takeReadingRequest>;
+export type ReadingView = z.infer<typeof readingView>;
+export type ReadingResponse = z.infer<typeof readingResponse>;
+export type DraftsView = z.infer<typeof draftsView>;
+export type BenchView = z.infer<typeof benchView>;
+export type AttemptView = z.infer<typeof attemptView>;
+export type AttemptResponse = z.infer<typeof attemptResponse>;
+export type ProblemResponse = z.infer<typeof problemResponse>;

@@ -1,0 +1,66 @@
+/** What a learner is shown of an exercise: nothing here may hold a scene, a seed, a truth or a mistake watched for. */
+import { z } from 'zod';
+import { correctionTable, settings } from './settings';
+
+/** What the receiver's data sheet says and the bench page needs to offer only what it has. */
+export const receiverView = z.strictObject({
+	name: z.string(),
+	startHz: z.number(),
+	stopHz: z.number(),
+	rbwHz: z.array(z.number()),
+	attenuatorDb: z.array(z.number()),
+	/** Gain of the preamplifier, dB; null when the receiver has none. */
+	preampGainDb: z.number().nullable(),
+	maxSafeInputDbm: z.number(),
+	levelErrorDb: z.number(),
+	referencePpm: z.number()
+});
+
+/** One part of the chain sketch, from the source to the receiver. */
+export const chainPartView = z.strictObject({
+	kind: z.enum(['box', 'lead', 'branch', 'plane']),
+	label: z.string()
+});
+
+export const questionView = z.strictObject({
+	id: z.string(),
+	text: z.string(),
+	/** The unit asked for, and every unit the answer may be given in (that one first). */
+	unit: z.string(),
+	units: z.array(z.string()),
+	/** Decimals the answer is asked to. */
+	digits: z.int(),
+	/** For example "Right within ±0.7 dB". */
+	toleranceText: z.string()
+});
+
+export const exerciseView = z.strictObject({
+	slug: z.string(),
+	title: z.string(),
+	/** Where it stands: "Unit 6, Power of a spread signal". */
+	course: z.strictObject({ slug: z.string(), title: z.string() }),
+	unit: z.strictObject({ slug: z.string(), title: z.string(), number: z.int() }),
+	/** Position in its unit, from 1: exercise 6.2 is unit 6, number 2. */
+	number: z.int(),
+	client: z.string(),
+	/** Sanitised on the server when the course was imported. */
+	situationHtml: z.string(),
+	/** The reference plane the answers are for, in words. */
+	plane: z.string(),
+	chain: z.array(chainPartView),
+	/** Loss between the reference plane and the receiver as the learner is told it, dB or a table; null when none is told. */
+	leadLossDb: z.union([z.number(), correctionTable]).nullable(),
+	cautions: z.array(z.string()),
+	receiver: receiverView,
+	start: settings,
+	questions: z.array(questionView),
+	/** Receiver time the exercise allows, s of bench clock. */
+	benchTimeS: z.number(),
+	/** Attempts allowed. */
+	tries: z.int()
+});
+
+export type ReceiverView = z.infer<typeof receiverView>;
+export type ChainPartView = z.infer<typeof chainPartView>;
+export type QuestionView = z.infer<typeof questionView>;
+export type ExerciseView = z.infer<typeof exerciseView>;
