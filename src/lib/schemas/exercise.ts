@@ -1,0 +1,146 @@
+/**
+ * An exercise as its author writes it (YAML under content/): what is drawn per seed, the scene made of it, the brief,
+ * the questions, the taught method as data, and the mistakes watched. Unknown keys are refused by name.
+ * Texts may hold {name} or {expression | digits}, over the values listed in `shown` and nothing else.
+ */
+import { z } from 'zod';
+import { receiverProfile } from './receiver';
+import { device, emitter, lossTable } from './scene';
+import { settings } from './settings';
+import { expression, numberOrExpression, templateObject, templateOf } from './template';
+
+const slug = z.string().regex(/^[a-z0-9]+(-[a-z0-9]+)*$/, 'lower-case words joined by hyphens');
+/** Names of values: letters and digits, a letter first; units in the name (leadLossDb). */
+export const valueName = z
+	.string()
+	.regex(/^[a-zA-Z][a-zA-Z0-9]{0,39}$/, 'letters and digits, a letter first');
+const text = z.string().trim().min(1).max(4000);
+const line = z.string().trim().min(1).max(300);
+
+/** How a parameter is drawn from the attempt's seed. `step` draws from … to inclusive on a grid. */
+export const parameterDraw = z.discriminatedUnion('draw', [
+	z
+		.strictObject({ draw: z.literal('uniform'), from: z.number(), to: z.number() })
+		.refine((p) => p.to > p.from, { message: 'to must be greater than from', path: ['to'] }),
+	z
+		.strictObject({ draw: z.literal('integer'), from: z.int(), to: z.int() })
+		.refine((p) => p.to > p.from, { message: 'to must be greater than from', path: ['to'] }),
+	z
+		.strictObject({ draw: z.literal('step'), from: z.number(), to: z.number(), step: z.number().positive() })
+		.refine((p) => p.to > p.from, { message: 'to must be greater than from', path: ['to'] }),
+	z.strictObject({
+		draw: z.literal('choice'),
+		of: z
+			.array(z.union([z.number(), z.string().min(1).max(40)]))
+			.min(2)
+			.max(50)
+	})
+]);
+
+const choiceValue = z.union([z.number(), z.string()]);
+/** Present only when each named parameter has (one of) the given value(s). */
+const when = z.record(valueName, z.union([choiceValue, z.array(choiceValue).min(1)]));
+
+const emitterTemplates = emitter.options.map((option) =>
+	templateObject(option as z.ZodObject).extend({ when: when.optional() })
+);
+export const sceneTemplate = z.strictObject({
+	emitters: z
+		.array(z.discriminatedUnion('kind', emitterTemplates as unknown as [z.ZodObject, ...z.ZodObject[]]))
+		.min(1)
+		.max(200),
+	device: templateOf(device).optional(),
+	path: templateOf(lossTable).optional()
+});
+export const settingsTemplate = templateOf(settings);
+
+/** What is asked of the scene or read off a trace: kind and fields as the bench has them, checked when filled in. */
+const requestTemplate = z.looseObject({ kind: z.string().min(1).max(40) });
+
+/** The sketch of what is connected, from source to receiver; `plane` marks where the answers hold. */
+export const chainPart = z.discriminatedUnion('part', [
+	z.strictObject({ part: z.literal('box'), label: line, branch: line.optional() }),
+	z.strictObject({ part: z.literal('lead'), label: line }),
+	z.strictObject({ part: z.literal('pad'), label: line }),
+	z.strictObject({ part: z.literal('plane'), label: line })
+]);
+
+export const answerUnits = ['dBm', 'dBm/Hz', 'dBc', 'dBc/Hz', 'dB', 'dBµV', 'Hz', 's', '%', '1'] as const;
+
+/** A mistake watched on a question: its kind, and the parameters that the kind asks for (checked by the bench by name). */
+const watchedMistake = z.looseObject({ kind: slug });
+
+export const exerciseQuestion = z.strictObject({
+	id: slug,
+	text: line,
+	quantity: requestTemplate,
+	unit: z.enum(answerUnits),
+	/** Half width of what counts as right: in the question's unit, or as a share of the true value. */
+	tolerance: z.union(
+		[
+			z.strictObject({ absolute: z.number().positive() }),
+			z.strictObject({ relative: z.number().positive().max(1) })
+		],
+		{ error: 'give either absolute or relative, greater than 0' }
+	),
+	digits: z.int().min(0).max(6),
+	mistakes: z.array(watchedMistake).min(1).max(20)
+});
+
+const why = line.optional();
+/** The taught method, step by step; settings are changes to what was set before. */
+export const methodStep = z.discriminatedUnion('do', [
+	z.strictObject({ do: z.literal('set'), settings: settingsTemplate, why }),
+	z.strictObject({ do: z.literal('sweep'), sweeps: z.int().min(1).max(1000), why }),
+	z.strictObject({
+		do: z.literal('read'),
+		reading: requestTemplate,
+		trace: z.int().min(1).max(4).default(1),
+		as: valueName,
+		why
+	}),
+	z.strictObject({
+		do: z.literal('answer'),
+		question: slug,
+		value: expression,
+		/** The reading handed in as evidence, by the name given to it. */
+		reading: valueName,
+		why
+	})
+]);
+
+export const exercise = z.strictObject({
+	slug,
+	title: line,
+	client: line,
+	situation: text,
+	/** Where the answers hold, in words: "the coupler's port". */
+	plane: line,
+	chain: z.array(chainPart).min(2).max(8),
+	/** Loss shown to the learner for each lead or pad in the chain. */
+	leads: z.array(z.strictObject({ label: line, loss: templateOf(lossTable) })).max(4),
+	cautions: z.array(line).min(1).max(6),
+	receiver: z.union([z.enum(['field', 'modest']), receiverProfile]),
+	parameters: z.record(valueName, parameterDraw),
+	/** Values computed from the parameters, in order. */
+	derived: z.record(valueName, numberOrExpression).default({}),
+	/** Parameters and derived values that the learner is told; only these may stand in texts. */
+	shown: z.array(valueName).max(40),
+	scene: sceneTemplate,
+	start: settingsTemplate,
+	questions: z.array(exerciseQuestion).min(1).max(6),
+	hints: z.array(line).max(6),
+	method: z.array(methodStep).min(3).max(60),
+	/** Receiver time an attempt may use, s. */
+	benchTimeS: z.number().positive().max(86_400),
+	tries: z.int().min(1).max(20)
+});
+
+export type ParameterDraw = z.infer<typeof parameterDraw>;
+export type ChainPart = z.infer<typeof chainPart>;
+export type AnswerUnit = (typeof answerUnits)[number];
+export type Tolerance = z.infer<typeof exerciseQuestion>['tolerance'];
+export type WatchedMistake = z.infer<typeof watchedMistake>;
+export type ExerciseQuestion = z.infer<typeof exerciseQuestion>;
+export type MethodStep = z.infer<typeof methodStep>;
+export type Exercise = z.infer<typeof exercise>;
