@@ -45,8 +45,8 @@ export const takeReadingRequest = z.strictObject({
 	rows: z
 		.strictObject({ from: rowNumber, to: rowNumber })
 		.refine((rows) => rows.to >= rows.from, { message: 'to must not be less than from', path: ['to'] }),
-	/** Index of the trace in the set-up that swept the last row. */
-	trace: z.int().min(0).max(3),
+	/** Which trace, 1…4, of the set-up that swept the last row. */
+	trace: z.int().min(1).max(4),
 	request: readingRequest
 });
 

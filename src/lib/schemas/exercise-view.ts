@@ -1,6 +1,8 @@
 /** What a learner is shown of an exercise: nothing here may hold a scene, a seed, a truth or a mistake watched for. */
 import { z } from 'zod';
-import { correctionTable, settings } from './settings';
+import { answerUnits, chainPart } from './exercise';
+import { lossTable } from './scene';
+import { settings } from './settings';
 
 /** What the receiver's data sheet says and the bench page needs to offer only what it has. */
 export const receiverView = z.strictObject({
@@ -16,17 +18,11 @@ export const receiverView = z.strictObject({
 	referencePpm: z.number()
 });
 
-/** One part of the chain sketch, from the source to the receiver. */
-export const chainPartView = z.strictObject({
-	kind: z.enum(['box', 'lead', 'branch', 'plane']),
-	label: z.string()
-});
-
 export const questionView = z.strictObject({
 	id: z.string(),
 	text: z.string(),
 	/** The unit asked for, and every unit the answer may be given in (that one first). */
-	unit: z.string(),
+	unit: z.enum(answerUnits),
 	units: z.array(z.string()),
 	/** Decimals the answer is asked to. */
 	digits: z.int(),
@@ -47,9 +43,9 @@ export const exerciseView = z.strictObject({
 	situationHtml: z.string(),
 	/** The reference plane the answers are for, in words. */
 	plane: z.string(),
-	chain: z.array(chainPartView),
-	/** Loss between the reference plane and the receiver as the learner is told it, dB or a table; null when none is told. */
-	leadLossDb: z.union([z.number(), correctionTable]).nullable(),
+	chain: z.array(chainPart),
+	/** Loss of each lead or pad in the chain, as the learner is told it. */
+	leads: z.array(z.strictObject({ label: z.string(), loss: lossTable })),
 	cautions: z.array(z.string()),
 	receiver: receiverView,
 	start: settings,
@@ -61,6 +57,5 @@ export const exerciseView = z.strictObject({
 });
 
 export type ReceiverView = z.infer<typeof receiverView>;
-export type ChainPartView = z.infer<typeof chainPartView>;
 export type QuestionView = z.infer<typeof questionView>;
 export type ExerciseView = z.infer<typeof exerciseView>;

@@ -59,7 +59,9 @@ export function encodeFrame(frame: Frame): Uint8Array<ArrayBuffer> {
 function encodePiece(frame: PieceFrame): Uint8Array<ArrayBuffer> {
 	const count = frame.levelsDbm.length;
 	if (count < 1 || frame.fromPoint + count > frame.points || frame.points > 65535) {
-		throw new FrameError(`a piece of ${count} points from ${frame.fromPoint} does not fit a row of ${frame.points}`);
+		throw new FrameError(
+			`a piece of ${count} points from ${frame.fromPoint} does not fit a row of ${frame.points}`
+		);
 	}
 	const bytes = new Uint8Array(FRAME_HEADER_BYTES + 4 * count);
 	const view = new DataView(bytes.buffer);
@@ -73,7 +75,8 @@ function encodePiece(frame: PieceFrame): Uint8Array<ArrayBuffer> {
 
 function encodeNote(frame: NoteFrame): Uint8Array<ArrayBuffer> {
 	const payload = new TextEncoder().encode(JSON.stringify(frame.json));
-	if (payload.length > MAX_PAYLOAD_BYTES) throw new FrameError(`a ${frame.type} of ${payload.length} bytes is too long`);
+	if (payload.length > MAX_PAYLOAD_BYTES)
+		throw new FrameError(`a ${frame.type} of ${payload.length} bytes is too long`);
 	const bytes = new Uint8Array(FRAME_HEADER_BYTES + payload.length);
 	writeHeader(new DataView(bytes.buffer), TYPE[frame.type], 0, frame, payload.length);
 	bytes.set(payload, FRAME_HEADER_BYTES);

@@ -5,7 +5,10 @@
 import { z } from 'zod';
 import { settings, type ResolvedSettings } from './settings';
 
-export const rowNumber = z.int().min(0).max(2 ** 32 - 2);
+export const rowNumber = z
+	.int()
+	.min(0)
+	.max(2 ** 32 - 2);
 
 export const sweepsRequest = z.strictObject({
 	/** As typed. The same as the current set-up: the log goes on. Anything else: a new entry in the log. */
@@ -56,9 +59,7 @@ export const streamEndReasons = [
 	/** The attempt was handed in. */
 	'closed',
 	/** The server is going away: ask again with `from`. */
-	'server-stopping',
-	/** Something failed on the server; the rows sent are good. */
-	'failed'
+	'server-stopping'
 ] as const;
 
 /** The last frame of a stream. */
