@@ -5,6 +5,8 @@ import { tableDb } from './table-db';
 
 /** Automatic attenuation lets a signal at the reference level reach the mixer at this level at most. */
 const MIXER_LIMIT_DBM = -10;
+/** Rounding of the sum, dB: a level that is −10 dBm on paper needs no further step. */
+const ROUNDING_DB = 1e-9;
 
 /**
  * The attenuator's step, dB: the one stated, or the smallest with
@@ -27,7 +29,9 @@ export function resolveAttenuation(settings: Settings, profile: ReceiverProfile,
 	const correctionHereDb = typeof correctionDb === 'number' ? correctionDb : tableDb(correctionDb, centreHz);
 	const gainDb = settings.preamp && profile.preamp ? profile.preamp.gainDb : 0;
 	const steps = [...profile.attenuatorDb].sort((a, b) => a - b);
-	const enough = steps.find((step) => referenceDbm - correctionHereDb - step + gainDb <= MIXER_LIMIT_DBM);
+	const enough = steps.find(
+		(step) => referenceDbm - correctionHereDb - step + gainDb <= MIXER_LIMIT_DBM + ROUNDING_DB
+	);
 	if (enough === undefined) {
 		const field =
 			settings.referenceDbm === undefined && settings.correctionDb !== undefined
