@@ -1,0 +1,65 @@
+import { DataTypes, QueryTypes } from 'sequelize';
+import { beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import { sequelize } from '$lib/server/db/connection';
+import { inTransaction } from '$lib/server/db/transaction';
+
+const slip = () => sequelize.getQueryInterface();
+const all = () =>
+	sequelize.query<{ id: number; word: string }>('SELECT * FROM slip', { type: QueryTypes.SELECT });
+
+beforeAll(() =>
+	slip().createTable('slip', { id: { type: DataTypes.INTEGER, primaryKey: true }, word: DataTypes.STRING(5) })
+);
+beforeEach(() => sequelize.query('DELETE FROM slip'));
+
+describe('inTransaction(work)', () => {
+	it('keeps what the work wrote and gives back what it returned', async () => {
+		const given = await inTransaction(async (transaction) => {
+			await slip().bulkInsert('slip', [{ id: 1, word: 'kept' }], { transaction });
+			return 'given';
+		});
+		expect(given).toBe('given');
+		expect(await all()).toEqual([{ id: 1, word: 'kept' }]);
+	});
+
+	it('leaves the table as it was when the work fails late', async () => {
+		const failing = inTransaction(async (transaction) => {
+			await slip().bulkInsert('slip', [{ id: 2, word: 'lost' }], { transaction });
+			throw new Error('late');
+		});
+		await expect(failing).rejects.toThrow('late');
+		expect(await all()).toEqual([]);
+	});
+
+	it('runs at READ COMMITTED', async () => {
+		const seen = await inTransaction(async (transaction) => {
+			await slip().bulkInsert('slip', [{ id: 3, word: 'own' }], { transaction });
+			return sequelize.query<{ level: string }>(
+				'SELECT trx_isolation_level AS level FROM information_schema.innodb_trx WHERE trx_mysql_thread_id = CONNECTION_ID()',
+				{ type: QueryTypes.SELECT, transaction }
+			);
+		}).catch((error: Error) => error.message);
+		// innodb_trx needs a privilege that the application's account hasn't: then the server's own refusal shows it asked.
+		expect(JSON.stringify(seen)).toMatch(/READ COMMITTED|PROCESS privilege/);
+	});
+});
+
+describe('the database the application talks to', () => {
+	it('refuses a text that is too long instead of cutting it', async () => {
+		await expect(slip().bulkInsert('slip', [{ id: 4, word: 'too long' }])).rejects.toThrow(/too long/i);
+		expect(await all()).toEqual([]);
+	});
+
+	it('keeps its clock in UTC and its text in utf8mb4', async () => {
+		const [{ zone, charset, collation }] = await sequelize.query<Record<string, string>>(
+			`SELECT @@session.time_zone AS zone, @@character_set_connection AS charset, TABLE_COLLATION AS collation
+			 FROM information_schema.tables WHERE table_schema = DATABASE() AND table_name = 'slip'`,
+			{ type: QueryTypes.SELECT }
+		);
+		expect({ zone, charset, collation }).toEqual({
+			zone: '+00:00',
+			charset: 'utf8mb4',
+			collation: 'utf8mb4_unicode_ci'
+		});
+	});
+});
