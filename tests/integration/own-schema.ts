@@ -12,7 +12,12 @@ await createDatabase(databaseUrl);
 // Imported only now: the pool takes its address from the environment when it is made.
 const { sequelize } = await import('$lib/server/db/connection');
 const { migrateUp } = await import('$lib/server/db/migrate');
-await migrateUp(sequelize, import.meta.glob<Migration>('/migrations/*.ts', { eager: true }));
+await migrateUp(sequelize, import.meta.glob<Migration>('/migrations/*.ts', { eager: true })).catch(
+	(error: Error) => {
+		// The runner prints all that hangs on an error, and the driver hangs the statement on it five times.
+		throw new Error(error.message);
+	}
+);
 
 afterAll(async () => {
 	await sequelize.close();
