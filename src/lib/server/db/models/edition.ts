@@ -1,0 +1,38 @@
+import {
+	DataTypes,
+	Model,
+	type CreationOptional,
+	type InferAttributes,
+	type InferCreationAttributes,
+	type NonAttribute
+} from 'sequelize';
+import { sequelize } from '../connection';
+import { Course } from './course';
+
+/** A published version of a course. Never changed: attempts name theirs. */
+export class Edition extends Model<InferAttributes<Edition>, InferCreationAttributes<Edition>> {
+	declare id: CreationOptional<number>;
+	declare courseId: number;
+	/** 1, 2, … within the course. */
+	declare number: number;
+	declare title: string;
+	declare summary: string;
+	/** SHA-256 of the content it was made of. */
+	declare contentHash: string;
+	declare createdAt: Date;
+	declare course?: NonAttribute<Course>;
+}
+
+Edition.init(
+	{
+		id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
+		courseId: DataTypes.BIGINT.UNSIGNED,
+		number: DataTypes.INTEGER.UNSIGNED,
+		title: DataTypes.STRING(300),
+		summary: DataTypes.STRING(300),
+		contentHash: DataTypes.CHAR(64),
+		createdAt: DataTypes.DATE(3)
+	},
+	{ sequelize, tableName: 'editions', timestamps: false }
+);
+Edition.belongsTo(Course, { as: 'course', foreignKey: 'courseId' });
