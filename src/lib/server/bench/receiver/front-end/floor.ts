@@ -1,0 +1,58 @@
+/** The receiver's own noise, referred to the connector. */
+import type { NoiseFigureTable, ReceiverProfile } from '$lib/schemas/receiver';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+import { dbToPowerRatio } from '$lib/units/decibel';
+import { tableDb } from '../table-db';
+
+/** k·T₀ at 290 K in mW/Hz: k = 1.380649·10⁻²³ J/K exactly (SI Brochure, 9th ed., 2019). */
+export const THERMAL_MW_PER_HZ = 1.380649e-23 * 290 * 1e3;
+
+/** One stage of a chain: power gain and noise factor at 290 K, both linear. */
+export interface Stage {
+	gain: number;
+	noiseFactor: number;
+}
+
+/**
+ * Noise factor of stages in a row, linear: F = F₁ + (F₂ − 1)/G₁ + (F₃ − 1)/(G₁G₂) + … (Friis, Proc. IRE 32, 419, 1944).
+ * @param stages in the order the signal meets them; at least one
+ */
+export function cascadeNoiseFactor(stages: readonly Stage[]): number {
+	let factor = 1;
+	let gain = 1;
+	for (const stage of stages) {
+		factor += (stage.noiseFactor - 1) / gain;
+		gain *= stage.gain;
+	}
+	return factor;
+}
+
+/** A loss at 290 K: its noise factor is its loss. */
+export const lossStage = (lossDb: number): Stage => ({
+	gain: dbToPowerRatio(-lossDb),
+	noiseFactor: dbToPowerRatio(lossDb)
+});
+
+const noiseFactorAt = (table: NoiseFigureTable, frequencyHz: number) =>
+	dbToPowerRatio(tableDb(table, frequencyHz));
+
+/**
+ * Noise density of the receiver against frequency, referred to its connector, mW/Hz:
+ * attenuator (a loss at 290 K), preamplifier when on, then the rest with the profile's noise figure.
+ * 10 dB of attenuation raise it by 10 dB.
+ */
+export function floorDensity(
+	profile: ReceiverProfile,
+	settings: Pick<ResolvedSettings, 'attenuationDb' | 'preamp'>
+): (frequencyHz: number) => number {
+	const attenuator = lossStage(settings.attenuationDb);
+	const preamp = settings.preamp ? profile.preamp : null;
+	const preampGain = preamp ? dbToPowerRatio(preamp.gainDb) : 1;
+	return (frequencyHz) => {
+		const stages = [attenuator];
+		if (preamp)
+			stages.push({ gain: preampGain, noiseFactor: noiseFactorAt(preamp.noiseFigureDb, frequencyHz) });
+		stages.push({ gain: 1, noiseFactor: noiseFactorAt(profile.noiseFigureDb, frequencyHz) });
+		return THERMAL_MW_PER_HZ * cascadeNoiseFactor(stages);
+	};
+}
