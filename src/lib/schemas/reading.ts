@@ -121,5 +121,9 @@ export const readingRequest = z.discriminatedUnion('kind', [
 /** A frequency count: no trace can give it, the bench takes it with a gate time of its own. */
 export const countRequest = z.strictObject({ ...kind('count'), atHz: frequency, gateS: positive.max(2000) });
 
+/** Everything a learner can ask for on the bench. */
+export const benchRequest = z.discriminatedUnion('kind', [...readingRequest.options, countRequest]);
+
 export type ReadingRequest = z.infer<typeof readingRequest>;
 export type CountRequest = z.infer<typeof countRequest>;
+export type BenchRequest = z.infer<typeof benchRequest>;
