@@ -1,0 +1,43 @@
+/** What an attempt leaves behind, as the grader takes it: stored by the services, made afresh by proofs. */
+import type { Reading } from '$lib/measure/reading';
+import type { ReadingRequest } from '$lib/measure/reading-request';
+import type { Settings } from '$lib/schemas/settings';
+
+/** One set-up and the sweeps drawn with it. */
+export interface SettingsLogEntry {
+	/** As typed. */
+	settings: Settings;
+	/** Row number of its first sweep, counted over the attempt, and how many were drawn. */
+	firstRow: number;
+	sweeps: number;
+	/** Bench clock at its first sweep. */
+	clockS: number;
+	/** Wall time in words, for the finding only. */
+	at?: string;
+}
+
+/** A reading as the server took it off replayed rows. */
+export interface TakenReading {
+	id: string;
+	request: ReadingRequest;
+	reading: Reading;
+	/** Which trace of the set-up, 1…4. */
+	trace: number;
+	/** First and last row in the trace. */
+	rows: { from: number; to: number };
+	at?: string;
+}
+
+export interface GivenAnswer {
+	/** In the question's unit. */
+	value: number;
+	/** The reading it is said to rest on. */
+	readingId?: string;
+}
+
+export interface AttemptRecord {
+	log: SettingsLogEntry[];
+	readings: TakenReading[];
+	/** By question; a question left out is unanswered. */
+	answers: Record<string, GivenAnswer>;
+}

@@ -1,0 +1,106 @@
+import { combineRows } from '$lib/measure/combine-rows';
+import { isProblem } from '$lib/measure/reading';
+import type { ReadingRequest } from '$lib/measure/reading-request';
+import { takeReading } from '$lib/measure/take-reading';
+import type { Trace } from '$lib/measure/trace';
+import type { ReceiverProfile } from '$lib/schemas/receiver';
+import type { Scene } from '$lib/schemas/scene';
+import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
+import { BenchError } from '../bench-error';
+import type { Seed } from '../receiver/random';
+import { resolveSettings } from '../receiver/resolve-settings';
+import type { SettingsLogEntry, TakenReading } from './attempt-record';
+import { patchSettings } from './patch-settings';
+
+/** What sweeps: row after row of detected levels, and how long each takes on the bench clock. */
+export interface Sweeper {
+	row(n: number, clockS: number): ArrayLike<number>;
+	durationS(n: number): number;
+}
+/** Makes a sweeper for one set-up. The receiver's own, unless a proof plants a fault in it. */
+export type SweepWith = (
+	scene: Scene,
+	profile: ReceiverProfile,
+	resolved: ResolvedSettings,
+	seed: Seed
+) => Sweeper;
+
+/** Holds and averages go on over a change of these; over any other they start again. */
+const heldOver = ({ traces: _, referenceDbm: __, ...rest }: ResolvedSettings): string => JSON.stringify(rest);
+
+/** One person at one bench: settings typed, sweeps drawn, readings taken, with the log that an attempt stores. */
+export class BenchSession {
+	readonly log: SettingsLogEntry[] = [];
+	readonly readings: TakenReading[] = [];
+	private settings: Settings;
+	private resolved: ResolvedSettings;
+	private rows: ArrayLike<number>[] = [];
+	private row = 0;
+	private clockS = 0;
+
+	constructor(
+		private readonly scene: Scene,
+		private readonly profile: ReceiverProfile,
+		private readonly seed: Seed,
+		start: Settings,
+		private readonly sweepWith: SweepWith
+	) {
+		this.settings = start;
+		this.resolved = resolveSettings(start, profile);
+	}
+
+	/** Types changes over the present settings. @throws BenchError by field when the receiver can't do that */
+	set(changes: Settings): void {
+		this.settings = patchSettings(this.settings, changes);
+		const resolved = resolveSettings(this.settings, this.profile);
+		if (heldOver(resolved) !== heldOver(this.resolved)) this.rows = [];
+		this.resolved = resolved;
+	}
+
+	sweep(count: number): void {
+		const sweeper = this.sweepWith(this.scene, this.profile, this.resolved, this.seed);
+		this.log.push({ settings: this.settings, firstRow: this.row, sweeps: count, clockS: this.clockS });
+		for (let i = 0; i < count; i++) {
+			this.rows.push(sweeper.row(this.row, this.clockS));
+			this.clockS += sweeper.durationS(this.row);
+			this.row += 1;
+		}
+	}
+
+	/**
+	 * Takes a reading off a trace of the present set-up.
+	 * @param traceNumber 1…4
+	 * @throws BenchError when nothing was swept, there is no such trace, or no number exists
+	 */
+	read(request: ReadingRequest, traceNumber: number): TakenReading {
+		const { trace, rowCount } = this.trace(traceNumber);
+		const reading = takeReading(trace, request);
+		if (isProblem(reading)) throw new BenchError('reading', `${reading.problem} (${reading.needs})`);
+		const taken: TakenReading = {
+			id: String(this.readings.length + 1),
+			request,
+			reading,
+			trace: traceNumber,
+			rows: { from: this.row - rowCount, to: this.row - 1 }
+		};
+		this.readings.push(taken);
+		return taken;
+	}
+
+	private trace(traceNumber: number): { trace: Trace; rowCount: number } {
+		const { resolved } = this;
+		const shown = resolved.traces[traceNumber - 1];
+		if (!shown)
+			throw new BenchError('trace', `the set-up has ${resolved.traces.length}; asked for ${traceNumber}`);
+		const last = shown.mode === 'average' ? shown.count : shown.mode === 'live' ? 1 : this.rows.length;
+		const rows = this.rows.slice(-last);
+		if (rows.length === 0) throw new BenchError('sweep', 'nothing has been swept with this set-up');
+		const { startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb } = resolved;
+		const levelsDbm = combineRows(rows, shown.mode, shown.count, scale);
+		const setUp = { startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb };
+		return {
+			trace: { ...setUp, mode: shown.mode, count: rows.length, levelsDbm },
+			rowCount: rows.length
+		};
+	}
+}

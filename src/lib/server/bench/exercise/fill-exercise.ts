@@ -1,0 +1,123 @@
+import { lossDbAt } from './loss-db-at';
+import { readingRequest } from '$lib/schemas/reading';
+import { scene as sceneSchema, lossTable, type Scene } from '$lib/schemas/scene';
+import { settings as settingsSchema, type Settings } from '$lib/schemas/settings';
+import type { Exercise, ExerciseQuestion, MethodStep, WatchedMistake } from '$lib/schemas/exercise';
+import { quantity as quantitySchema } from '$lib/schemas/quantity';
+import type { z } from 'zod';
+import { profileNamed } from '../receiver/profiles';
+import type { Seed } from '../receiver/random';
+import { truth } from '../truth/truth';
+import type { Brief, DrawnExercise, DrawnQuestion, FilledQuantity, FilledStep } from './drawn-exercise';
+import { ExerciseError } from './exercise-error';
+import { parseExpression, type Scope } from './expression';
+import { fillTemplate } from './fill-template';
+import { fillText } from './fill-text';
+import { quantityFrequencyHz } from './quantity-frequency';
+import { issuesOf } from './zod-issues';
+
+/** A template filled in and checked against the schema it stands for. @throws ExerciseError by field */
+function filled<T>(schema: z.ZodType<T>, template: unknown, scope: Scope, field: string): T {
+	const parsed = schema.safeParse(fillTemplate(template, scope, field));
+	if (!parsed.success) throw new ExerciseError(issuesOf(parsed.error, field));
+	return parsed.data;
+}
+
+type When = Record<string, string | number | (string | number)[]>;
+const holds = (when: When | undefined, scope: Scope): boolean =>
+	Object.entries(when ?? {}).every(([name, wanted]) => [wanted].flat().includes(scope[name]));
+
+/** The scene of one draw: emitters whose `when` holds, numbers in place. */
+function fillScene(exercise: Exercise, scope: Scope): Scene {
+	const emitters = exercise.scene.emitters.map((template, i) => {
+		const { when, ...fields } = template as { when?: When; kind: string };
+		return { present: holds(when, scope), fields, field: `scene.emitters[${i}]` };
+	});
+	const { emitters: _, ...rest } = exercise.scene;
+	const present = emitters.filter((emitter) => emitter.present);
+	return filled(
+		sceneSchema,
+		{ ...rest, emitters: present.map(({ fields, field }) => fillTemplate(fields, scope, field)) },
+		scope,
+		'scene'
+	);
+}
+
+function fillBrief(exercise: Exercise, scope: Scope): Brief {
+	const text = (source: string, field: string) => fillText(source, scope, field);
+	return {
+		situation: text(exercise.situation, 'situation'),
+		plane: text(exercise.plane, 'plane'),
+		chain: exercise.chain.map((part, i) => ({ ...part, label: text(part.label, `chain[${i}].label`) })),
+		leads: exercise.leads.map(({ label, loss }, i) => ({
+			label: text(label, `leads[${i}].label`),
+			loss: filled(lossTable, loss, scope, `leads[${i}].loss`)
+		})),
+		cautions: exercise.cautions.map((caution, i) => text(caution, `cautions[${i}]`)),
+		hints: exercise.hints.map((hint, i) => text(hint, `hints[${i}]`)),
+		start: filled(settingsSchema, exercise.start, scope, 'start')
+	};
+}
+
+function fillQuestion(question: ExerciseQuestion, scene: Scene, scope: Scope, field: string): DrawnQuestion {
+	const quantity = filled(quantitySchema, question.quantity, scope, `${field}.quantity`);
+	const { value, unit } = truth(scene, quantity);
+	if (unit !== question.unit) {
+		throw new ExerciseError([
+			{ field: `${field}.unit`, message: `${quantity.kind} is in ${unit}, not ${question.unit}` }
+		]);
+	}
+	const { tolerance } = question;
+	const frequencyHz = quantityFrequencyHz(quantity as FilledQuantity);
+	return {
+		id: question.id,
+		text: fillText(question.text, scope, `${field}.text`),
+		quantity: quantity as FilledQuantity,
+		unit,
+		digits: question.digits,
+		truth: value,
+		tolerance: 'absolute' in tolerance ? tolerance.absolute : Math.abs(value) * tolerance.relative,
+		frequencyHz,
+		leadDb: scene.path ? lossDbAt(scene.path, frequencyHz) : 0,
+		mistakes: question.mistakes.map(
+			(mistake, i) => fillTemplate(mistake, scope, `${field}.mistakes[${i}]`) as WatchedMistake
+		)
+	};
+}
+
+function fillStep(step: MethodStep, scope: Scope, field: string): FilledStep {
+	switch (step.do) {
+		case 'set':
+			return {
+				...step,
+				settings: filled<Settings>(settingsSchema, step.settings, scope, `${field}.settings`)
+			};
+		case 'sweep':
+			return step;
+		case 'read':
+			return { ...step, reading: filled(readingRequest, step.reading, scope, `${field}.reading`) };
+		case 'answer': {
+			const value = parseExpression(step.value, `${field}.value`);
+			return { ...step, value: (readings) => value.evaluate({ ...scope, ...readings }) };
+		}
+	}
+}
+
+/**
+ * An exercise with the numbers of one draw in every place.
+ * @throws ExerciseError naming the field that doesn't come out valid
+ */
+export function fillExercise(exercise: Exercise, scope: Scope, seed: Seed, redraws: number): DrawnExercise {
+	const scene = fillScene(exercise, scope);
+	return {
+		exercise,
+		seed,
+		redraws,
+		profile: typeof exercise.receiver === 'string' ? profileNamed(exercise.receiver) : exercise.receiver,
+		parameters: scope,
+		scene,
+		brief: fillBrief(exercise, scope),
+		questions: exercise.questions.map((q, i) => fillQuestion(q, scene, scope, `questions[${i}]`)),
+		method: exercise.method.map((step, i) => fillStep(step, scope, `method[${i}]`))
+	};
+}

@@ -1,0 +1,59 @@
+import { prepareSweep } from '../receiver/sweep';
+import type { AttemptRecord, TakenReading } from './attempt-record';
+import { BenchSession, type SweepWith } from './bench-session';
+import type { DrawnExercise, FilledStep } from './drawn-exercise';
+
+/** A step as it was done: what it read, or what it answered. */
+export interface PlayedStep {
+	step: FilledStep;
+	taken?: TakenReading;
+	value?: number;
+}
+export interface PlayedMethod {
+	record: AttemptRecord;
+	steps: PlayedStep[];
+	/** By question: the reading handed in with the answer. */
+	evidence: Record<string, TakenReading>;
+}
+
+/**
+ * Does a method's steps on the bench: the taught one, or one with a mistake in it. From the exercise's start settings,
+ * with the attempt's own seed, through the same sweeps and readings as everyone's.
+ * @param sweepWith the receiver; a proof may plant a fault in it
+ * @throws BenchError when a step can't be done
+ */
+export function runMethod(
+	drawn: DrawnExercise,
+	steps: readonly FilledStep[] = drawn.method,
+	sweepWith: SweepWith = prepareSweep
+): PlayedMethod {
+	const bench = new BenchSession(drawn.scene, drawn.profile, drawn.seed, drawn.brief.start, sweepWith);
+	const byName = new Map<string, TakenReading>();
+	const values: Record<string, number> = {};
+	const record: AttemptRecord = { log: bench.log, readings: bench.readings, answers: {} };
+	const evidence: Record<string, TakenReading> = {};
+	const played = steps.map((step): PlayedStep => {
+		switch (step.do) {
+			case 'set':
+				bench.set(step.settings);
+				return { step };
+			case 'sweep':
+				bench.sweep(step.sweeps);
+				return { step };
+			case 'read': {
+				const taken = bench.read(step.reading, step.trace);
+				byName.set(step.as, taken);
+				values[step.as] = taken.reading.value;
+				return { step, taken };
+			}
+			case 'answer': {
+				const value = step.value(values);
+				const taken = byName.get(step.reading);
+				record.answers[step.question] = { value, readingId: taken?.id };
+				if (taken) evidence[step.question] = taken;
+				return { step, value };
+			}
+		}
+	});
+	return { record, steps: played, evidence };
+}
