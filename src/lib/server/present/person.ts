@@ -1,0 +1,13 @@
+import type { PersonView } from '$lib/schemas/person';
+import { roleName, type Actor } from '../domain/role';
+import { roomsOf } from '../domain/rooms';
+
+/** Whoever is signed in, as their own pages show them. */
+export function presentPerson(actor: Actor, user: { displayName: string; email: string }): PersonView {
+	return {
+		displayName: user.displayName,
+		email: user.email,
+		roles: actor.roles.map(roleName),
+		rooms: roomsOf(actor).map(({ label, href }) => ({ label, href }))
+	};
+}

@@ -1,0 +1,65 @@
+import { isKnownDevice, rememberDevice } from '../../auth/known-devices';
+import { verifyPassword } from '../../auth/passwords';
+import { createSession, endSession } from '../../auth/sessions';
+import { giveBackTries, takeTries, type Counted } from '../../auth/sign-in-buckets';
+import { User } from '../../db/models/user';
+import { UserRole } from '../../db/models/user-role';
+import { inTransaction } from '../../db/transaction';
+import { addressBlock } from '../../domain/address-block';
+import { normaliseEmail } from '../../domain/email';
+import { homeOf } from '../../domain/rooms';
+import { ACCOUNT_LIMIT, ADDRESS_LIMIT, DEVICE_LIMIT } from '../../domain/sign-in-limit';
+import { DomainError } from '../../errors';
+import { actorOf } from '../../auth/actor';
+import { forgetExpired } from './forget-expired';
+
+export interface SignInRequest {
+	email: string;
+	password: string;
+	/** The network address that asks. */
+	address: string;
+	/** What the browser's device and session cookies hold, if anything. */
+	deviceToken: string | undefined;
+	sessionToken: string | undefined;
+}
+
+export interface SignInResult {
+	sessionToken: string;
+	expiresAt: Date;
+	deviceToken: string;
+	/** Path of the page on which this person starts. */
+	home: string;
+}
+
+/**
+ * Signs a person in with e-mail address and password, under a new session; the browser's old one ends.
+ * Throws DomainError: `too_many`, or `invalid` with the same words whether the address, the password or both are wrong.
+ */
+export async function signIn(request: SignInRequest, now: Date): Promise<SignInResult> {
+	const email = normaliseEmail(request.email);
+	const user = await User.findOne({ where: { email }, include: [{ model: UserRole, required: false }] });
+	const known = await isKnownDevice(request.deviceToken, user?.id);
+	const counted: Counted[] = [
+		{ name: `address ${addressBlock(request.address)}`, limit: ADDRESS_LIMIT },
+		known
+			? { name: `device ${request.deviceToken} of ${email}`, limit: DEVICE_LIMIT }
+			: { name: `account ${email}`, limit: ACCOUNT_LIMIT }
+	];
+	await takeTries(counted, now);
+
+	const right = await verifyPassword(user?.passwordHash, request.password);
+	if (!user || !right || user.disabledAt) {
+		throw new DomainError('invalid', 'This e-mail address and password don’t belong together.');
+	}
+
+	const result = await inTransaction(async (transaction) => {
+		await giveBackTries(counted, now, transaction);
+		if (request.sessionToken) await endSession(request.sessionToken, transaction);
+		const deviceToken = await rememberDevice(request.deviceToken, user.id, now, transaction);
+		const { token, expiresAt } = await createSession(user.id, transaction);
+		return { sessionToken: token, expiresAt, deviceToken };
+	});
+	await forgetExpired(now);
+	const roles = (user.userRoles ?? []).map(({ role }) => role);
+	return { ...result, home: homeOf(actorOf({ id: user.id, roles })) };
+}

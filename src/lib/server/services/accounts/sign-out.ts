@@ -1,0 +1,6 @@
+import { endSession } from '../../auth/sessions';
+
+/** Ends the session that this token belongs to. Not an error if it has ended already. */
+export async function signOut(sessionToken: string | undefined): Promise<void> {
+	if (sessionToken !== undefined) await endSession(sessionToken);
+}

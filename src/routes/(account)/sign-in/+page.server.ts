@@ -1,0 +1,45 @@
+import { fail, redirect } from '@sveltejs/kit';
+import { signInForm } from '$lib/schemas/sign-in';
+import {
+	readDeviceCookie,
+	readSessionCookie,
+	setDeviceCookie,
+	setSessionCookie
+} from '$lib/server/auth/cookies';
+import { parseWith } from '$lib/server/read-json';
+import { refusalOf } from '$lib/server/respond';
+import { destinationAfterSignIn, homeFor } from '$lib/server/services/accounts/destination';
+import { signIn } from '$lib/server/services/accounts/sign-in';
+import type { Actions, PageServerLoad } from './$types';
+
+export const load: PageServerLoad = ({ locals, url }) => {
+	const home = homeFor(locals.actor);
+	if (home) redirect(303, destinationAfterSignIn(url.searchParams.get('next'), home));
+};
+
+export const actions: Actions = {
+	default: async ({ cookies, getClientAddress, locals, request, setHeaders, url }) => {
+		const typed = Object.fromEntries(await request.formData());
+		const secure = locals.secureCookies;
+		let result;
+		try {
+			const form = parseWith(signInForm, typed);
+			result = await signIn(
+				{
+					...form,
+					address: getClientAddress(),
+					deviceToken: readDeviceCookie(cookies, secure),
+					sessionToken: readSessionCookie(cookies, secure)
+				},
+				new Date()
+			);
+		} catch (cause) {
+			const { status, message, issues, retryAfterS } = refusalOf(cause);
+			if (retryAfterS) setHeaders({ 'retry-after': String(retryAfterS) });
+			return fail(status, { message, issues, email: typeof typed.email === 'string' ? typed.email : '' });
+		}
+		setSessionCookie(cookies, secure, result.sessionToken, result.expiresAt);
+		setDeviceCookie(cookies, secure, result.deviceToken);
+		redirect(303, destinationAfterSignIn(url.searchParams.get('next'), result.home));
+	}
+};
