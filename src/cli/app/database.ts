@@ -55,11 +55,14 @@ export async function migrate(): Promise<string> {
 	return names.length === 0 ? 'up to date' : `${names.length} run, up to ${names.at(-1)}`;
 }
 
-/** Reads the courses of `content/` into the database; what hasn't changed stays as it is. */
+/** Publishes the courses of `content/`: a new edition of each one that has changed. */
 export async function importCourses(): Promise<string> {
 	const { importContent } = await import('$lib/server/services/courses/import-content');
-	await importContent();
-	return 'up to date with content/';
+	const courses = await importContent({ root: 'content', now: new Date() });
+	const published = courses
+		.filter(({ created }) => created)
+		.map(({ slug, edition }) => `${slug}, edition ${edition}`);
+	return published.length === 0 ? `${courses.length}, unchanged` : `published ${published.join('; ')}`;
 }
 
 /** Whether nobody is known here yet. */

@@ -4,6 +4,12 @@ import { Refusal } from './refusal.js';
 const closers: (() => unknown)[] = [];
 let ended: Promise<void> | undefined;
 
+export interface Outcome {
+	code: number;
+	/** Printed when all else has ended, so that nothing follows it. */
+	lastLine: string;
+}
+
 /** Registers what to do at the end; what was registered last is done first. */
 export function atEnd(closer: () => unknown): void {
 	closers.push(closer);
@@ -13,29 +19,31 @@ export function atEnd(closer: () => unknown): void {
  * Runs a command to its end: its exit code is what `work` returns. Ctrl-C, or a signal that asks to end, ends it with 0
  * (people end a server that way every day: it is no failure), or with `stoppedCode`.
  */
-export async function runCommand(work: () => Promise<number>, stoppedCode = 0): Promise<void> {
+export async function runCommand(work: () => Promise<number | Outcome>, stoppedCode = 0): Promise<void> {
 	for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
 		process.on(signal, () => {
 			if (!ended) console.log('\nEnding …');
 			void end(stoppedCode);
 		});
 	}
-	let code: number;
+	let code = 1;
+	let lastLine: string | undefined;
 	try {
-		code = await work();
+		const outcome = await work();
+		if (typeof outcome === 'number') code = outcome;
+		else ({ code, lastLine } = outcome);
 	} catch (error) {
 		if (ended) return; // What was under way fails when it is stopped.
 		console.error(error instanceof Refusal ? `\n${error.message}` : error);
-		code = 1;
 	}
-	await end(code);
+	await end(code, lastLine);
 }
 
-function end(code: number): Promise<void> {
-	return (ended ??= closeAll(code));
+function end(code: number, lastLine?: string): Promise<void> {
+	return (ended ??= closeAll(code, lastLine));
 }
 
-async function closeAll(code: number): Promise<void> {
+async function closeAll(code: number, lastLine?: string): Promise<void> {
 	let exitCode = code;
 	for (const closer of closers.reverse()) {
 		try {
@@ -45,5 +53,6 @@ async function closeAll(code: number): Promise<void> {
 			exitCode = 1;
 		}
 	}
+	if (lastLine !== undefined) console.log(lastLine);
 	process.exit(exitCode);
 }

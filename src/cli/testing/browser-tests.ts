@@ -1,0 +1,43 @@
+import { randomBytes } from 'node:crypto';
+import { chooseAddress } from '../app/address';
+import { ensureBuild } from '../app/build';
+import { importCourses, migrate, seedIfEmpty, useDatabase } from '../app/database';
+import { startBuilt } from '../app/server';
+import { requireProgram } from '../ground/debian-package.js';
+import { atEnd } from '../ground/ending';
+import { step } from '../ground/step.js';
+import { usePrivateServer } from '../mariadb/private-server';
+import { dropDatabase, dropDatabasesOfDeadRuns } from '../mariadb/schema';
+import { TEST_SERVER } from '../mariadb/servers';
+import type { Count } from './count';
+import { runPlaywright } from './reports';
+
+const BUILD_FOLDER = '.data/test/build';
+const FIRST_PORT = 4300;
+
+/** Builds the application, starts it on a database made for this run, and runs the browser tests against it. */
+export async function runBrowserTests(args: string[]): Promise<Count> {
+	const chromium = await step('Browser', () => ({ path: findChromium(), note: findChromium() }));
+	await step('Build', () => ensureBuild(BUILD_FOLDER));
+	await step('Database', openFreshDatabase);
+	await step('Migrations', migrate);
+	await step('Courses', importCourses);
+	await step('Demo data', seedIfEmpty);
+	const address = await chooseAddress({}, FIRST_PORT);
+	const server = await step('Server', () => startBuilt(BUILD_FOLDER, address));
+	const count = await runPlaywright(args, address.origin, chromium.path);
+	await server.stop();
+	return count;
+}
+
+const findChromium = (): string => process.env.CHROMIUM ?? requireProgram('chromium', 'chromium');
+
+async function openFreshDatabase(): Promise<string> {
+	const server = await usePrivateServer(TEST_SERVER.folder, TEST_SERVER.firstPort);
+	atEnd(() => server.release());
+	await dropDatabasesOfDeadRuns(server.urlOf('sweepwright_e2e'));
+	const databaseUrl = server.urlOf(`sweepwright_e2e_${process.pid}_${randomBytes(4).toString('hex')}`);
+	await useDatabase(databaseUrl);
+	atEnd(() => dropDatabase(databaseUrl));
+	return server.note;
+}

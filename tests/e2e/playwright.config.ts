@@ -1,0 +1,28 @@
+import { defineConfig, devices } from '@playwright/test';
+import { fileURLToPath } from 'node:url';
+
+const origin = process.env.E2E_ORIGIN;
+if (!origin)
+	throw new Error(
+		'E2E_ORIGIN is not set: run the browser tests with `npm run test:e2e`, which starts a server.'
+	);
+
+const inData = (name: string) => fileURLToPath(new URL(`../../.data/test/${name}`, import.meta.url));
+
+export default defineConfig({
+	testDir: '.',
+	outputDir: inData('browser'),
+	forbidOnly: true,
+	retries: 0,
+	workers: 2,
+	timeout: 60_000,
+	expect: { timeout: 10_000 },
+	reporter: [['list'], ['json']],
+	use: {
+		baseURL: origin,
+		screenshot: 'only-on-failure',
+		trace: 'retain-on-failure',
+		launchOptions: { executablePath: process.env.CHROMIUM ?? '/usr/bin/chromium' }
+	},
+	projects: [{ name: 'chromium', use: { ...devices['Desktop Chrome'] } }]
+});
