@@ -113,12 +113,13 @@ export class FilteredPower {
 		}
 		for (let i = first; i <= last; i++) {
 			const lowHz = fromHz + i * this.stepHz;
+			const highHz = fromHz + (i + 1) * this.stepHz;
 			const breaks = broken.get(i);
 			if (!breaks) {
-				cells[i] += part.powerMw(lowHz, lowHz + this.stepHz);
+				cells[i] += part.powerMw(lowHz, highHz);
 				continue;
 			}
-			const edges = [lowHz, ...breaks.sort((a, b) => a - b), lowHz + this.stepHz];
+			const edges = [lowHz, ...breaks.sort((a, b) => a - b), highHz];
 			for (let e = 1; e < edges.length; e++) this.addPiece(part, edges[e - 1], edges[e], i, power, fromHz);
 		}
 	}

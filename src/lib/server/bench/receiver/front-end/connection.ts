@@ -1,0 +1,18 @@
+import type { Scene } from '$lib/schemas/scene';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+import { dbToPowerRatio } from '$lib/units/decibel';
+import { tableDb } from '../table-db';
+
+/**
+ * Power gain, linear, from the reference plane to the connector against frequency: the scene's path and the pad.
+ * The pad is part of what is connected: what it takes off is put back on the screen only by a stated correction.
+ */
+export function connectionGain(scene: Scene, settings: ResolvedSettings): (frequencyHz: number) => number {
+	const { padDb } = settings.input;
+	const path = scene.path?.map(({ frequencyHz, lossDb }) => ({ frequencyHz, db: lossDb }));
+	if (!path || path.length === 1) {
+		const gain = dbToPowerRatio(-padDb - (path ? path[0].db : 0));
+		return () => gain;
+	}
+	return (frequencyHz) => dbToPowerRatio(-padDb - tableDb(path, frequencyHz));
+}
