@@ -1,0 +1,79 @@
+/**
+ * Laws of extremes and averages of |noise + line|² over a stretch of length `bt` (in 1/B), through a Gaussian filter:
+ * what a long bucket shows, without following it sample by sample. x and s are powers over the noise's mean; s is the line's.
+ * Crossing rate after Rice (Bell Syst. Tech. J. 24, 46, 1945): 1.5054·B·√x·e^{−(√x−√s)²}·I₀e(2√(xs)), with 1.5054 = √(π/(2 ln 2)).
+ * Monte Carlo of the noise-only law (mean dB over the noise at bt 4, 8, 16): 4.56, 5.56, 6.39; the law gives 4.44, 5.50, 6.37.
+ */
+import { IMPULSE_PER_RBW } from './resolution-filter';
+import { besselI0Scaled, riceCdf } from './rice';
+
+/** ln P(greatest < x). */
+export function logBelow(x: number, s: number, bt: number): number {
+	if (x <= 0) return -Infinity;
+	if (s === 0) {
+		const e = Math.expm1(x);
+		return Math.log(-Math.expm1(-x)) - (IMPULSE_PER_RBW * bt * Math.sqrt(x)) / e;
+	}
+	const below = riceCdf(x, s);
+	if (below <= 0) return -Infinity;
+	return Math.log(below) - (crossingRate(x, s) * bt) / below;
+}
+
+/** ln P(least > x). */
+export function logAbove(x: number, s: number, bt: number): number {
+	if (s === 0) return -x - IMPULSE_PER_RBW * bt * Math.sqrt(x);
+	const above = 1 - riceCdf(x, s);
+	if (above <= 0) return -Infinity;
+	return Math.log(above) - (crossingRate(x, s) * bt) / above;
+}
+
+/** Crossings of level x in one direction per 1/B. */
+function crossingRate(x: number, s: number): number {
+	const d = Math.sqrt(x) - Math.sqrt(s);
+	return IMPULSE_PER_RBW * Math.sqrt(x) * Math.exp(-d * d) * besselI0Scaled(2 * Math.sqrt(x * s));
+}
+
+/** Least power of noise alone over bt, from a unit exponential draw: x + 1.5054·bt·√x = E solved for x. */
+export function leastOfNoise(exponential: number, bt: number): number {
+	const a = IMPULSE_PER_RBW * bt;
+	const root = (2 * exponential) / (a + Math.sqrt(a * a + 4 * exponential));
+	return root * root;
+}
+
+/** Greatest power of noise alone over bt as a function of −ln P: tabulated, since every bucket of a sweep has the same length. */
+export class GreatestOfNoise {
+	private static readonly CELLS = 512;
+	/** ln x at equal steps of ln(−ln P) from −40 (rarest) to 4. */
+	private readonly table: Float64Array;
+
+	constructor(bt: number) {
+		let guess = Math.log(40);
+		this.table = Float64Array.from({ length: GreatestOfNoise.CELLS + 1 }, (_, i) => {
+			const target = -Math.exp(-40 + (44 * i) / GreatestOfNoise.CELLS);
+			guess = solveLog((x) => logBelow(x, 0, bt), target, guess);
+			return guess;
+		});
+	}
+
+	/** @param exponential −ln P: a unit exponential draw */
+	draw(exponential: number): number {
+		const at = ((Math.log(exponential) + 40) / 44) * GreatestOfNoise.CELLS;
+		const cell = Math.min(GreatestOfNoise.CELLS - 1, Math.max(0, Math.floor(at)));
+		const blend = Math.min(1, Math.max(0, at - cell));
+		return Math.exp(this.table[cell] + blend * (this.table[cell + 1] - this.table[cell]));
+	}
+}
+
+/** ln x at which a rising ln P(x) reaches `target`, by bracketing from a guess and bisection (40 halvings of at most 16 e-folds). */
+export function solveLog(logP: (x: number) => number, target: number, guess: number): number {
+	let low = guess;
+	let high = guess;
+	for (let step = 0.25; logP(Math.exp(low)) > target && low > -60; step *= 2) low -= step;
+	for (let step = 0.25; logP(Math.exp(high)) < target && high < 60; step *= 2) high += step;
+	for (let i = 0; i < 40 && high - low > 1e-4; i++) {
+		const middle = (low + high) / 2;
+		if (logP(Math.exp(middle)) < target) low = middle;
+		else high = middle;
+	}
+	return (low + high) / 2;
+}

@@ -1,0 +1,106 @@
+/** One long bucket as pieces of steady conditions and short windows followed sample by sample, and what a detector makes of them. */
+import type { Detector, Scale } from '$lib/schemas/settings';
+import { drawAverage, meanOnScale, varianceOnScale } from './average-laws';
+import { leastOfNoise, logAbove, logBelow, solveLog, type GreatestOfNoise } from './extreme-laws';
+import type { Random } from './random';
+import { toScale } from './video';
+
+/** A stretch of a bucket during which noise (v, mW) and line power (p, mW) stand still; share of the bucket's time. */
+export interface Piece {
+	share: number;
+	v: number;
+	p: number;
+}
+
+/** What a window followed sample by sample gave: the extremes of its power and its mean on the scale. */
+export interface Window {
+	share: number;
+	greatest: number;
+	least: number;
+	mean: number;
+}
+
+/** Average on the scale: the law's draw over the pieces, the windows as they were. */
+export function averageOf(pieces: Piece[], windows: Window[], bt: number, scale: Scale, random: Random): number {
+	let mean = 0;
+	let variance = 0;
+	let share = 0;
+	for (const piece of pieces) {
+		const w = piece.share;
+		if (w <= 0) continue;
+		mean += w * meanOnScale(piece.v, piece.p, scale);
+		variance += w * w * varianceOnScale(piece.v, piece.p, scale, Math.max(0.25, bt * w));
+		share += w;
+	}
+	let total = 0;
+	for (const window of windows) total += window.share * window.mean;
+	if (share <= 0) return total;
+	return total + share * drawAverage(random, mean / share, variance / (share * share), scale, bt * share);
+}
+
+/** Greatest (or least) power over the pieces, by their joint law; −1 where there are none. */
+export function extremeOf(
+	pieces: Piece[],
+	bt: number,
+	greatest: boolean,
+	table: GreatestOfNoise | undefined,
+	random: Random
+): number {
+	if (pieces.length === 0) return -1;
+	const draw = random.exponential();
+	const first = pieces[0];
+	if (pieces.length === 1 && first.p === 0) {
+		if (!greatest) return first.v * leastOfNoise(draw, bt * first.share);
+		if (table) return first.v * table.draw(draw);
+	}
+	const active = strongest(pieces, greatest);
+	if (greatest)
+		return Math.exp(
+			solveLog((x) => sum(active, (q) => logBelow(x / q.v, q.p / q.v, bt * q.share)), -draw, Math.log(active[0].v + active[0].p))
+		);
+	// P(least > x) falls with x: solve for its negative
+	return Math.exp(
+		solveLog((x) => -sum(active, (q) => logAbove(x / q.v, q.p / q.v, bt * q.share)), draw, Math.log(active[0].v * 1e-3))
+	);
+}
+
+const sum = (pieces: Piece[], f: (piece: Piece) => number): number => {
+	let total = 0;
+	for (const piece of pieces) total += f(piece);
+	return total;
+};
+
+/** Only pieces that could hold the extreme: within 20 dB of the strongest for peaks (all for minima), most likely first, eight at most. */
+function strongest(pieces: Piece[], greatest: boolean): Piece[] {
+	const level = (q: Piece): number => (greatest ? q.v * 8 + q.p : -(q.v + q.p));
+	const sorted = [...pieces].sort((a, b) => level(b) - level(a));
+	const kept = greatest ? sorted.filter((q) => q.v * 8 + q.p > 0.01 * (sorted[0].v * 8 + sorted[0].p)) : sorted;
+	if (kept.length <= 8) return kept;
+	// the dropped ones' time is given to the kept ones in proportion
+	const top = kept.slice(0, 8);
+	const scale = sum(kept, (q) => q.share) / sum(top, (q) => q.share);
+	return top.map((q) => ({ ...q, share: q.share * scale }));
+}
+
+/** A detector's value on the scale for bucket number b. Continuous noise turns within a long bucket, so rise-fall alternates. */
+export function detectLong(
+	b: number,
+	detector: Detector,
+	scale: Scale,
+	pieces: Piece[],
+	windows: Window[],
+	bt: number,
+	table: GreatestOfNoise | undefined,
+	random: Random
+): number {
+	if (detector === 'average') return averageOf(pieces, windows, bt, scale, random);
+	const greatest = detector === 'positive-peak' || (detector === 'rise-fall' && b % 2 === 0);
+	let power = extremeOf(pieces, bt, greatest, table, random);
+	for (const window of windows) {
+		const edge = greatest ? window.greatest : window.least;
+		if (power < 0 || (greatest ? edge > power : edge < power)) power = edge;
+	}
+	const value = Float64Array.of(power);
+	toScale(value, scale, 0, 1);
+	return value[0];
+}

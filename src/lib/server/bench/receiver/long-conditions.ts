@@ -1,0 +1,209 @@
+/** What stands at the filter during each long bucket of a row: steady noise and lines, and whatever is on for part of it. */
+import type { Scale } from '$lib/schemas/settings';
+import { addBurst } from './burst-response';
+import type { RowContext } from './contribution';
+import type { Frame } from './frame';
+import type { Incident, IncidentLine } from './incident';
+import { passing, reachHz } from './line-contribution';
+import { addLineAt, type PassingLine } from './line-response';
+import type { Piece, Window } from './long-bucket';
+import type { Random, Seed } from './random';
+import type { EdgeConditions } from './shared-edges';
+import { SteadyNoiseTable } from './steady-noise-table';
+import { TimedSources, touching, type Burst } from './timed-sources';
+import { WindowSampler } from './window-sampler';
+
+/** Windows followed in one bucket at most; the rest are taken to be like them. */
+const MOST_WINDOWS = 6;
+/** Instants at which beating lines are looked at in one bucket. */
+const BEAT_NODES = 24;
+
+export class LongBucketConditions {
+	private readonly noise: SteadyNoiseTable;
+	private readonly steady: IncidentLine[];
+	private readonly timed: TimedSources;
+	private readonly sampler: WindowSampler;
+	private passing: { line: PassingLine; fromS: number; toS: number }[] = [];
+	private burstCursor = { at: 0 };
+	private stretchCursor = { at: 0 };
+	private instantCursor = { at: 0 };
+	private readonly out = new Float64Array(2);
+	private readonly y = new Float64Array(1);
+	private readonly x = new Float64Array(1);
+
+	constructor(
+		private readonly frame: Frame,
+		incident: Incident,
+		private readonly scale: Scale,
+		seed: Seed
+	) {
+		const comesAndGoes = (t: IncidentLine['timing']): boolean => !!t && !!(t.gate || t.hop || t.pulse);
+		this.noise = new SteadyNoiseTable(frame, incident.noises.filter((n) => !n.timing));
+		this.steady = incident.lines.filter((l) => !comesAndGoes(l.timing));
+		this.timed = new TimedSources(
+			frame,
+			incident.lines.filter((l) => comesAndGoes(l.timing)),
+			incident.noises.filter((n) => n.timing),
+			seed
+		);
+		this.sampler = new WindowSampler(frame);
+	}
+
+	start(row: RowContext): void {
+		const { frame, noise } = this;
+		this.passing = this.steady.map((incident) => {
+			const line = passing(incident, frame, row.clockS);
+			const reach = reachHz(frame, line.re * line.re + line.im * line.im, noise.least, line.passingHzPerS);
+			const rate = line.passingHzPerS;
+			if (rate === 0) {
+				const within = Math.abs(line.offsetHz) <= reach;
+				return { line, fromS: within ? -Infinity : Infinity, toS: within ? Infinity : -Infinity };
+			}
+			const a = (line.offsetHz - reach) / rate;
+			const b = (line.offsetHz + reach) / rate;
+			return { line, fromS: Math.min(a, b), toS: Math.max(a, b) };
+		});
+		this.timed.start(row);
+		this.burstCursor = { at: 0 };
+		this.stretchCursor = { at: 0 };
+		this.instantCursor = { at: 0 };
+	}
+
+	/** Pieces and windows of bucket b; asked in rising order. */
+	bucket(b: number, random: Random): { pieces: Piece[]; windows: Window[] } {
+		const { frame } = this;
+		const fromS = b * frame.bucketS;
+		const toS = fromS + frame.bucketS;
+		const lines = this.passing.filter((p) => p.fromS < toS && p.toS > fromS).map((p) => p.line);
+		const margin = 2 / frame.rbwHz;
+		const bursts = touching(this.timed.bursts, this.burstCursor, fromS - margin, toS + margin);
+		const stretches = touching(this.timed.stretches, this.stretchCursor, fromS, toS);
+		if (lines.length === 0 && bursts.length === 0 && stretches.length === 0)
+			return { pieces: this.noise.pieces(b), windows: [] };
+		const windows = this.windows(b, bursts, random);
+		const windowShare = windows.reduce((sum, w) => sum + w.share, 0);
+		const long = bursts.filter((q) => !this.isShort(q));
+		const times = this.nodes(fromS, toS, lines.length + long.length, [...long, ...stretches], random);
+		const rest = Math.max(0, 1 - windowShare);
+		const pieces = times.map(({ t, share }) => {
+			this.out.fill(0);
+			for (const line of lines) addLineAt(frame, line, t, this.out);
+			for (const burst of long) if (t >= burst.startS && t < burst.stopS) addLineAt(frame, burst.line, t, this.out);
+			let v = this.noise.at(t);
+			for (const s of stretches) if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);
+			return { share: share * rest, v, p: this.out[0] * this.out[0] + this.out[1] * this.out[1] };
+		});
+		return { pieces, windows };
+	}
+
+	private isShort(burst: Burst): boolean {
+		return burst.stopS - burst.startS < 4 / this.frame.rbwHz;
+	}
+
+	/** Instants that stand for the bucket: every interval between edges has at least one; beating lines and wide buckets need more. */
+	private nodes(
+		fromS: number,
+		toS: number,
+		lines: number,
+		gates: { startS: number; stopS: number }[],
+		random: Random
+	): { t: number; share: number }[] {
+		const edges = gates.flatMap((g) => [g.startS, g.stopS]).filter((t) => t > fromS && t < toS);
+		const bounds = [fromS, ...edges.sort((a, b) => a - b), toS];
+		const span = toS - fromS;
+		const across = (8 * Math.abs(this.frame.sweepHzPerS) * span) / this.frame.rbwHz;
+		const wanted = Math.min(32, Math.max(lines > 1 ? BEAT_NODES : 1, Math.ceil(across)));
+		const list: { t: number; share: number }[] = [];
+		for (let i = 1; i < bounds.length; i++) {
+			const length = bounds[i] - bounds[i - 1];
+			if (length <= 0) continue;
+			const count = Math.max(1, Math.round((wanted * length) / span));
+			for (let j = 0; j < count; j++) {
+				const jitter = lines > 1 ? random.uniform() : 0.5;
+				list.push({ t: bounds[i - 1] + ((j + jitter) * length) / count, share: length / count / span });
+			}
+		}
+		return list;
+	}
+
+	/** Short bursts whole, and the edges of long ones, each over the 2/B either side in which the filter answers. */
+	private windows(b: number, bursts: Burst[], random: Random): Window[] {
+		const { frame, sampler } = this;
+		const fromS = b * frame.bucketS;
+		const toS = fromS + frame.bucketS;
+		const half = 2 / frame.rbwHz;
+		const spans: { startS: number; stopS: number }[] = [];
+		for (const burst of bursts) {
+			const middle = (burst.startS + burst.stopS) / 2;
+			if (this.isShort(burst)) {
+				if (middle >= fromS && middle < toS) spans.push({ startS: burst.startS - half, stopS: burst.stopS + half });
+			} else
+				for (const edge of [burst.startS, burst.stopS])
+					if (edge >= fromS && edge < toS) spans.push({ startS: edge - half, stopS: edge + half });
+		}
+		if (spans.length === 0) return [];
+		// neighbours closer than their reach share the time between them
+		for (let i = 1; i < spans.length; i++)
+			if (spans[i].startS < spans[i - 1].stopS) {
+				const between = (spans[i].startS + spans[i - 1].stopS) / 2;
+				spans[i].startS = spans[i - 1].stopS = between;
+			}
+		const step = Math.max(1, spans.length / MOST_WINDOWS);
+		const chosen = Array.from({ length: Math.min(spans.length, MOST_WINDOWS) }, (_, i) => spans[Math.floor(i * step)]);
+		const all = spans.reduce((sum, s) => sum + s.stopS - s.startS, 0);
+		const taken = chosen.reduce((sum, s) => sum + s.stopS - s.startS, 0);
+		const scale = Math.min(all, frame.bucketS) / taken / frame.bucketS;
+		return chosen.map(({ startS, stopS }) => {
+			const near = bursts.filter((q) => q.stopS > startS - half && q.startS < stopS + half);
+			const local = near.map((q) => ({
+				line: shifted(q.line, startS),
+				startS: q.startS - startS,
+				stopS: q.stopS - startS
+			}));
+			for (const p of this.passing)
+				if (p.fromS < stopS && p.toS > startS)
+					local.push({ line: shifted(p.line, startS), startS: -Infinity, stopS: Infinity });
+			const length = Math.min(stopS - startS, sampler.longestS);
+			const got = sampler.sample(length, this.noise.at((startS + stopS) / 2), local, this.scale, random);
+			return { ...got, share: (stopS - startS) * scale };
+		});
+	}
+
+	/** Conditions at the edge before bucket b. */
+	edge(b: number): EdgeConditions {
+		return this.instant(b * this.frame.bucketS);
+	}
+
+	/** The filter's answer t seconds into the sweep: amplitude of all lines, and the noise beside them. Asked in rising order of t. */
+	instant(t: number): EdgeConditions {
+		const { frame, out } = this;
+		out.fill(0);
+		for (const p of this.passing) if (p.fromS <= t && p.toS >= t) addLineAt(frame, p.line, t, out);
+		const half = 2 / frame.rbwHz;
+		for (const burst of touching(this.timed.bursts, this.instantCursor, t - half, t + half)) {
+			this.x[0] = this.y[0] = 0;
+			const local = { ...frame, lead: 0, total: 1, stepS: 1 / frame.rbwHz };
+			addBurst(local, shifted(burst.line, t), burst.startS - t, burst.stopS - t, 0, 1, this.x, this.y);
+			out[0] += this.x[0];
+			out[1] += this.y[0];
+		}
+		let v = this.noise.at(t);
+		for (const s of this.timed.stretches)
+			if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);
+		return { v, re: out[0], im: out[1] };
+	}
+}
+
+/** The same passage seen from a later start. */
+function shifted(line: PassingLine, byS: number): PassingLine {
+	const rate = line.passingHzPerS;
+	const psi = 2 * Math.PI * ((line.offsetHz * byS) % 1) - Math.PI * rate * byS * byS;
+	const cos = Math.cos(psi);
+	const sin = Math.sin(psi);
+	return {
+		re: line.re * cos - line.im * sin,
+		im: line.re * sin + line.im * cos,
+		offsetHz: line.offsetHz - rate * byS,
+		passingHzPerS: rate
+	};
+}

@@ -1,0 +1,75 @@
+/**
+ * A sweep whose buckets are long against 1/B: each is cut into pieces where nothing changes, drawn from the laws of extremes
+ * and averages, and short windows (edges of bursts, the bucket's own shared edges) that are followed sample by sample.
+ */
+import type { Detector, Scale } from '$lib/schemas/settings';
+import type { RowContext } from './contribution';
+import { GreatestOfNoise } from './extreme-laws';
+import type { Frame } from './frame';
+import type { Incident } from './incident';
+import { LongBucketConditions } from './long-conditions';
+import { detectLong } from './long-bucket';
+import type { Random, Seed } from './random';
+import { SharedEdges } from './shared-edges';
+import { toScale } from './video';
+
+export class LongSweep {
+	private readonly conditions: LongBucketConditions;
+	private readonly edges?: SharedEdges;
+	private readonly table?: GreatestOfNoise;
+	private readonly bt: number;
+
+	constructor(
+		private readonly frame: Frame,
+		private readonly detector: Detector,
+		private readonly scale: Scale,
+		incident: Incident,
+		seed: Seed
+	) {
+		this.bt = frame.rbwHz * frame.bucketS;
+		this.conditions = new LongBucketConditions(frame, incident, scale, seed);
+		if (detector === 'average' || detector === 'sample') return;
+		this.edges = new SharedEdges(frame);
+		// half of 1/B at either end is followed, the rest is drawn
+		this.table = new GreatestOfNoise(this.bt - 1);
+	}
+
+	row(context: RowContext, out: Float64Array): void {
+		const random = context.random('law');
+		this.conditions.start(context);
+		if (this.detector === 'sample') this.samples(random, out);
+		else if (this.edges) this.peaks(context, random, out);
+		else
+			for (let b = 0; b < this.frame.points; b++) {
+				const { pieces, windows } = this.conditions.bucket(b, random);
+				out[b] = detectLong(b, this.detector, this.scale, pieces, windows, this.bt, undefined, random);
+			}
+	}
+
+	/** Values at the points stand so far apart that their noise is independent. */
+	private samples(random: Random, out: Float64Array): void {
+		const { frame } = this;
+		for (let b = 0; b < frame.points; b++) {
+			const at = this.conditions.instant((b + 0.5) * frame.bucketS);
+			const a = Math.sqrt(at.v / 2);
+			const x = at.re + a * random.normal();
+			const y = at.im + a * random.normal();
+			out[b] = x * x + y * y;
+		}
+		toScale(out, this.scale, 0, frame.points);
+	}
+
+	private peaks(context: RowContext, random: Random, out: Float64Array): void {
+		const { frame, edges, conditions } = this;
+		edges!.draw(context.random('edges'), (b) => conditions.edge(b));
+		for (let b = 0; b < frame.points; b++) {
+			const { pieces, windows } = conditions.bucket(b, random);
+			const free = pieces.reduce((sum, q) => sum + q.share, 0);
+			const trim = free > 0 ? Math.max(0, free - 1 / this.bt) / free : 0;
+			for (const piece of pieces) piece.share *= trim;
+			windows.push(edges!.window(b));
+			const plain = pieces.length === 1 && pieces[0].p === 0 && windows.length === 1;
+			out[b] = detectLong(b, this.detector, this.scale, pieces, windows, this.bt, plain ? this.table : undefined, random);
+		}
+	}
+}

@@ -1,0 +1,87 @@
+/** A prepared sweep: everything of (scene, receiver, settings, seed) that does not change from row to row, and the rows it gives. */
+import type { CorrectionTable, ResolvedSettings } from '$lib/schemas/settings';
+import { makeEngine } from './engine';
+import type { Incident } from './incident';
+import { Random, type Seed } from './random';
+import type { ReceiverError } from './receiver-error';
+import { chirpFactor } from './resolution-filter';
+import { scaleToDbm } from './video';
+
+export interface SweepFlag {
+	kind: 'too-fast' | 'overload' | 'input-protection';
+	/** How much a single line reads low (too fast), or stands above the limit, dB. */
+	db?: number;
+}
+
+/** What one row needs beside the bench's settings: its number and the bench clock. */
+export interface SweepPlan {
+	readonly settings: ResolvedSettings;
+	readonly flags: SweepFlag[];
+	/** True when the input has protected itself: there are no rows until the set-up changes. */
+	readonly isProtected: boolean;
+	/** Detected levels in dBm, one per point, correction and the receiver's own error included. */
+	row(n: number, clockS: number): Float32Array;
+	/** Bench time row n takes, retrace included, s. */
+	durationS(n: number): number;
+}
+
+const RETRACE_S = 0.01;
+
+/** A sweep of what reaches the filter. */
+export function planSweep(
+	incident: Incident,
+	settings: ResolvedSettings,
+	error: ReceiverError,
+	seed: Seed
+): SweepPlan {
+	const isProtected = incident.protection !== undefined;
+	const engine = isProtected ? undefined : makeEngine(incident, settings, error.frequency, seed);
+	const shownDb = shownOffsets(settings, error);
+	const values = new Float64Array(settings.points);
+	return {
+		settings,
+		flags: sweepFlags(incident, settings),
+		isProtected,
+		row(n, clockS) {
+			if (!engine) throw new RangeError('the input has protected itself: no sweep can be made');
+			engine.row({ clockS, random: (stream) => new Random(seed, n, stream) }, values);
+			return Float32Array.from(values, (value, i) => scaleToDbm(value, settings.scale) + shownDb[i]);
+		},
+		durationS(n) {
+			const jitter = new Random(seed, n, 'retrace').uniform();
+			return (settings.sweepTimeS * settings.points) / (settings.points - 1) + RETRACE_S * (1 + jitter);
+		}
+	};
+}
+
+function sweepFlags(incident: Incident, settings: ResolvedSettings): SweepFlag[] {
+	const flags: SweepFlag[] = [];
+	if (settings.sweepTimeS < settings.autoSweepTimeS * (1 - 1e-9)) {
+		const k = chirpFactor(settings.rbwHz, settings.spanHz / settings.sweepTimeS);
+		flags.push({ kind: 'too-fast', db: 5 * Math.log10(1 + k * k) });
+	}
+	if (incident.overload) flags.push({ kind: 'overload' });
+	if (incident.protection)
+		flags.push({ kind: 'input-protection', db: incident.protection.connectorDbm - incident.protection.limitDbm });
+	return flags;
+}
+
+/** What is added to each point: the correction at the shown frequency, and the receiver's level error. */
+function shownOffsets(settings: ResolvedSettings, error: ReceiverError): Float64Array {
+	const step = settings.spanHz / (settings.points - 1);
+	return Float64Array.from({ length: settings.points }, (_, i) => {
+		const frequencyHz = settings.startHz + i * step;
+		return correctionAt(settings.correctionDb, frequencyHz) + error.levelDb(frequencyHz);
+	});
+}
+
+/** Correction in dB at a frequency: straight between the table's points, flat outside. */
+export function correctionAt(correction: number | CorrectionTable, frequencyHz: number): number {
+	if (typeof correction === 'number') return correction;
+	const after = correction.findIndex((p) => p.frequencyHz >= frequencyHz);
+	if (after === 0) return correction[0].db;
+	if (after < 0) return correction[correction.length - 1].db;
+	const a = correction[after - 1];
+	const b = correction[after];
+	return a.db + ((b.db - a.db) * (frequencyHz - a.frequencyHz)) / (b.frequencyHz - a.frequencyHz);
+}
