@@ -18,7 +18,12 @@ const keyed = (counted: Counted[]) =>
 		.sort((a, b) => a.id.compare(b.id));
 
 async function lockBucket(id: Buffer, now: Date, transaction: Transaction): Promise<SignInBucket> {
-	await SignInBucket.bulkCreate([{ id, level: 0, updatedAt: now }], { ignoreDuplicates: true, transaction });
+	// Sets nothing on a duplicate, but locks the row for writing; INSERT IGNORE would lock it for reading, and two
+	// that then both want to write stop each other.
+	await SignInBucket.bulkCreate([{ id, level: 0, updatedAt: now }], {
+		updateOnDuplicate: ['id'],
+		transaction
+	});
 	const bucket = await SignInBucket.findByPk(id, { lock: transaction.LOCK.UPDATE, transaction });
 	if (!bucket) throw new Error('A bucket just made is gone');
 	return bucket;
