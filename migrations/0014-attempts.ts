@@ -12,6 +12,7 @@ export const up: MigrationStep = ({ context }) =>
 			engine_version INT UNSIGNED NOT NULL,
 			next_row INT UNSIGNED NOT NULL DEFAULT 0,
 			clock_s DOUBLE NOT NULL DEFAULT 0,
+			row_end_s DOUBLE NOT NULL DEFAULT 0,
 			stream_token CHAR(32) CHARACTER SET ascii COLLATE ascii_bin NULL,
 			hints_revealed INT UNSIGNED NOT NULL DEFAULT 0,
 			protection_tripped BOOLEAN NOT NULL DEFAULT FALSE,

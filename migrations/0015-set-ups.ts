@@ -10,6 +10,7 @@ export const up: MigrationStep = ({ context }) =>
 			first_row INT UNSIGNED NOT NULL,
 			clock_s DOUBLE NOT NULL,
 			restart_row INT UNSIGNED NOT NULL,
+			end_row INT UNSIGNED NULL,
 			drawn_to INT UNSIGNED NULL,
 			tripped BOOLEAN NOT NULL DEFAULT FALSE,
 			logged_at DATETIME(3) NOT NULL,

@@ -23,8 +23,10 @@ export class Attempt extends Model<InferAttributes<Attempt>, InferCreationAttrib
 	declare engineVersion: number;
 	/** The first row that nobody has begun to sweep. */
 	declare nextRow: CreationOptional<number>;
-	/** Receiver time used, s. Short of the end of row nextRow − 1 while that one is being swept. */
+	/** Receiver time used, s. */
 	declare clockS: CreationOptional<number>;
+	/** Bench clock when row nextRow − 1 ends, s: beyond clockS while it is being swept. */
+	declare rowEndS: CreationOptional<number>;
 	/** Names the one stream that may sweep. */
 	declare streamToken: CreationOptional<string | null>;
 	declare hintsRevealed: CreationOptional<number>;
@@ -48,6 +50,7 @@ Attempt.init(
 		engineVersion: DataTypes.INTEGER.UNSIGNED,
 		nextRow: { type: DataTypes.INTEGER.UNSIGNED, defaultValue: 0 },
 		clockS: { type: DataTypes.DOUBLE, defaultValue: 0 },
+		rowEndS: { type: DataTypes.DOUBLE, defaultValue: 0 },
 		streamToken: { type: DataTypes.CHAR(32), allowNull: true },
 		hintsRevealed: { type: DataTypes.INTEGER.UNSIGNED, defaultValue: 0 },
 		protectionTripped: { type: DataTypes.BOOLEAN, defaultValue: false },

@@ -21,6 +21,8 @@ export class SetUp extends Model<InferAttributes<SetUp>, InferCreationAttributes
 	declare clockS: number;
 	/** Where holds and averages start: in this set-up, or in an earlier one that differs in traces and reference alone. */
 	declare restartRow: number;
+	/** One more than its last whole row, once another set-up has followed; null while it is the newest. */
+	declare endRow: CreationOptional<number | null>;
 	/** The last row that the page said it drew; null before the first. Only these are evidence. */
 	declare drawnTo: CreationOptional<number | null>;
 	/** The input protection tripped with it, so it was never swept. */
@@ -37,6 +39,7 @@ SetUp.init(
 		firstRow: DataTypes.INTEGER.UNSIGNED,
 		clockS: DataTypes.DOUBLE,
 		restartRow: DataTypes.INTEGER.UNSIGNED,
+		endRow: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true },
 		drawnTo: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true },
 		tripped: { type: DataTypes.BOOLEAN, defaultValue: false },
 		loggedAt: DataTypes.DATE(3)

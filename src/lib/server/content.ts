@@ -1,0 +1,138 @@
+/** Reads content/: courses as their authors write them. Whatever is broken stops it with file, line and field. */
+import { readdirSync, readFileSync } from 'node:fs';
+import { join, relative } from 'node:path';
+import { isMap, isNode, isSeq, LineCounter, parseDocument, type Document } from 'yaml';
+import type { z } from 'zod';
+import { courseFile, type CourseUnit } from '$lib/schemas/course-file';
+import { exercise, type Exercise } from '$lib/schemas/exercise';
+import { issuesOf, pathOf } from '$lib/server/bench/exercise/zod-issues';
+
+/** Something in content/ can't be published: "harbour/06-power/spread.yaml:12: questions[0].unit: …". */
+export class ContentError extends Error {
+	override name = 'ContentError';
+	constructor(
+		readonly file: string,
+		readonly line: number,
+		readonly field: string,
+		readonly reason: string
+	) {
+		super(`${file}:${line}: ${field ? `${field}: ` : ''}${reason}`);
+	}
+}
+
+/** An exercise as read, with the way back from a field to the line it stands on. */
+export interface ExerciseContent {
+	definition: Exercise;
+	/** @returns the error that names this exercise's file, and the line of `field` ("questions[0].unit") or of what holds it */
+	errorAt(field: string, reason: string): ContentError;
+}
+export interface UnitContent extends Omit<CourseUnit, 'exercises'> {
+	lessonMarkdown: string;
+	exercises: ExerciseContent[];
+}
+export interface CourseContent {
+	slug: string;
+	title: string;
+	summary: string;
+	units: UnitContent[];
+}
+
+/**
+ * Every course under `root`, in the order of their folders.
+ * @throws ContentError at the first fault
+ */
+export function readContent(root: string): CourseContent[] {
+	const courses = foldersIn(root).map((folder) => readCourse(root, folder));
+	const seen = new Set<string>();
+	for (const { definition, errorAt } of courses.flatMap((c) => c.units.flatMap((u) => u.exercises))) {
+		if (seen.has(definition.slug)) throw errorAt('slug', `another exercise is called ${definition.slug}`);
+		seen.add(definition.slug);
+	}
+	return courses;
+}
+
+function readCourse(root: string, folder: string): CourseContent {
+	const file = readYaml(root, join(folder, 'course.yaml'), courseFile);
+	const { slug, title, summary, units } = file.value;
+	if (slug !== folder) throw file.errorAt('slug', `must be the folder's name, ${folder}`);
+	const expected = units.map((unit) => `${String(unit.number).padStart(2, '0')}-${unit.slug}`);
+	const stray = foldersIn(join(root, folder)).find((name) => !expected.includes(name));
+	if (stray) throw file.errorAt('units', `the folder ${stray} is no unit of this course`);
+	return {
+		slug,
+		title,
+		summary,
+		units: units.map((unit, index) => readUnit(root, join(folder, expected[index]), unit))
+	};
+}
+
+function readUnit(root: string, folder: string, unit: CourseUnit): UnitContent {
+	const files = entriesIn(root, folder);
+	const expected = ['lesson.md', ...unit.exercises.map((slug) => `${slug}.yaml`)];
+	const missing = expected.find((name) => !files.includes(name));
+	if (missing) throw new ContentError(join(folder, missing), 1, '', 'is missing');
+	const stray = files.find((name) => !expected.includes(name));
+	if (stray) throw new ContentError(join(folder, stray), 1, '', 'is not named in course.yaml');
+	return {
+		...unit,
+		lessonMarkdown: readFileSync(join(root, folder, 'lesson.md'), 'utf8'),
+		exercises: unit.exercises.map((slug) => readExercise(root, join(folder, `${slug}.yaml`), slug))
+	};
+}
+
+function readExercise(root: string, path: string, slug: string): ExerciseContent {
+	const { value, errorAt } = readYaml(root, path, exercise);
+	if (value.slug !== slug) throw errorAt('slug', `must be the file's name, ${slug}`);
+	return { definition: value, errorAt };
+}
+
+function readYaml<S extends z.ZodType>(root: string, path: string, schema: S) {
+	const lines = new LineCounter();
+	const document = parseDocument(readText(root, path), { lineCounter: lines, uniqueKeys: true });
+	const [fault] = document.errors;
+	if (fault) throw new ContentError(path, lines.linePos(fault.pos[0]).line, '', fault.message.split('\n')[0]);
+	const errorAt = (field: string, reason: string) =>
+		new ContentError(path, lineOf(document, lines, pathOf(field)), field, reason);
+	const parsed = schema.safeParse(document.toJS());
+	if (parsed.success) return { value: parsed.data as z.output<S>, errorAt };
+	const [issue] = issuesOf(parsed.error);
+	throw errorAt(issue.field, issue.message);
+}
+
+/** The line of the deepest part of `path` that the document has; a key stands on the line of its name. */
+function lineOf(document: Document, lines: LineCounter, path: (string | number)[]): number {
+	let offset = 0;
+	let node: unknown = document.contents;
+	for (const step of path) {
+		const pair = isMap(node) ? node.items.find((item) => String(item.key) === String(step)) : undefined;
+		const place = pair ? pair.key : isSeq(node) ? node.items[Number(step)] : undefined;
+		if (!isNode(place) || !place.range) break;
+		offset = place.range[0];
+		node = pair ? pair.value : place;
+	}
+	return lines.linePos(offset).line;
+}
+
+function readText(root: string, path: string): string {
+	try {
+		return readFileSync(join(root, path), 'utf8');
+	} catch (cause) {
+		if ((cause as NodeJS.ErrnoException).code !== 'ENOENT') throw cause;
+		throw new ContentError(path, 1, '', 'is missing');
+	}
+}
+
+const foldersIn = (folder: string): string[] =>
+	readdirSync(folder, { withFileTypes: true })
+		.filter((entry) => entry.isDirectory())
+		.map((entry) => entry.name)
+		.sort();
+
+function entriesIn(root: string, folder: string): string[] {
+	try {
+		return readdirSync(join(root, folder)).sort();
+	} catch (cause) {
+		if ((cause as NodeJS.ErrnoException).code !== 'ENOENT') throw cause;
+		throw new ContentError(relative('.', folder), 1, '', 'the unit has no folder');
+	}
+}

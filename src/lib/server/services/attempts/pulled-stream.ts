@@ -1,0 +1,33 @@
+/**
+ * A byte stream that asks its source for more only when its reader does. When the reader leaves, `gone` aborts,
+ * and the source must come to its end.
+ * @param over called once, when the source has ended in whatever way
+ */
+export function pulledStream(
+	source: (gone: AbortSignal) => AsyncGenerator<Uint8Array>,
+	over: () => void
+): ReadableStream<Uint8Array> {
+	const reader = new AbortController();
+	const chunks = source(reader.signal);
+	return new ReadableStream<Uint8Array>(
+		{
+			async pull(controller) {
+				try {
+					const { done, value } = await chunks.next();
+					if (!done) return controller.enqueue(value);
+				} catch (cause) {
+					over();
+					throw cause;
+				}
+				over();
+				if (!reader.signal.aborted) controller.close();
+			},
+			async cancel() {
+				reader.abort();
+				await chunks.return(undefined);
+				over();
+			}
+		},
+		{ highWaterMark: 1 }
+	);
+}
