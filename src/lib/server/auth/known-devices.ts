@@ -1,5 +1,5 @@
 import type { Transaction } from 'sequelize';
-import { KnownDevice } from '../db/models/known-device';
+import { KnownDevice } from '$lib/server/db/models/known-device';
 import { createToken, hashToken } from './token';
 
 /** Whether the person `userId` has signed in before with the browser that holds this token. */

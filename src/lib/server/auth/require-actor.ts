@@ -1,6 +1,6 @@
 import { redirect } from '@sveltejs/kit';
-import type { Actor } from '../domain/role';
-import { DomainError } from '../errors';
+import type { Actor } from '$lib/server/domain/role';
+import { DomainError } from '$lib/server/errors';
 
 /** For pages and form actions: who asks, or a redirection to the sign-in page and back from there. */
 export function requireUser(event: { locals: App.Locals; url: URL }): Actor {

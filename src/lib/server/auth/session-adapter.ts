@@ -1,8 +1,8 @@
 import type { Adapter, DatabaseSession, DatabaseUser } from 'lucia';
 import { Op, type Transaction } from 'sequelize';
-import { Session } from '../db/models/session';
-import { User } from '../db/models/user';
-import { UserRole } from '../db/models/user-role';
+import { Session } from '$lib/server/db/models/session';
+import { User } from '$lib/server/db/models/user';
+import { UserRole } from '$lib/server/db/models/user-role';
 
 /** Lucia's ids are text, ours bytes: Lucia is given the hash in hexadecimal. */
 const bytesOf = (id: string): Buffer => Buffer.from(id, 'hex');

@@ -1,9 +1,9 @@
 import { createHash } from 'node:crypto';
 import type { Transaction } from 'sequelize';
-import { SignInBucket } from '../db/models/sign-in-bucket';
-import { inTransaction } from '../db/transaction';
-import { giveBackTry, takeTry, type Limit } from '../domain/sign-in-limit';
-import { DomainError } from '../errors';
+import { SignInBucket } from '$lib/server/db/models/sign-in-bucket';
+import { inTransaction } from '$lib/server/db/transaction';
+import { giveBackTry, takeTry, type Limit } from '$lib/server/domain/sign-in-limit';
+import { DomainError } from '$lib/server/errors';
 
 /** One thing whose tries are counted: `name` says which, such as “account a@b.example”. */
 export interface Counted {

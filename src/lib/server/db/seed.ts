@@ -1,5 +1,5 @@
-import { hashPassword } from '../auth/passwords';
-import { roleName, type Role } from '../domain/role';
+import { hashPassword } from '$lib/server/auth/passwords';
+import { roleName, type Role } from '$lib/server/domain/role';
 import { User } from './models/user';
 import { UserRole } from './models/user-role';
 import { inTransaction } from './transaction';

@@ -1,5 +1,5 @@
 import type { Handle } from '@sveltejs/kit';
-import { refusedOrigin } from '../domain/request-origin';
+import { refusedOrigin } from '$lib/server/domain/request-origin';
 import { refusalPage } from './refusal-page';
 
 /** Paths that other servers post to, and that check a signature instead. None yet. */

@@ -1,6 +1,6 @@
 import type { Handle } from '@sveltejs/kit';
-import { clearSessionCookie, readSessionCookie, setSessionCookie } from '../auth/cookies';
-import { identify } from '../services/accounts/identify';
+import { clearSessionCookie, readSessionCookie, setSessionCookie } from '$lib/server/auth/cookies';
+import { identify } from '$lib/server/services/accounts/identify';
 
 /** Finds out who is asking, from the session cookie, and decides nothing. */
 export const resolveSession: Handle = async ({ event, resolve }) => {

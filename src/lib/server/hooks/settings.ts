@@ -1,4 +1,4 @@
-import { parseEnv, type Env } from '../env';
+import { parseEnv, type Env } from '$lib/server/env';
 
 let settings: Env | undefined;
 

@@ -1,6 +1,6 @@
 import type { PersonView } from '$lib/schemas/person';
-import { roleName, type Actor } from '../domain/role';
-import { roomsOf } from '../domain/rooms';
+import { roleName, type Actor } from '$lib/server/domain/role';
+import { roomsOf } from '$lib/server/domain/rooms';
 
 /** Whoever is signed in, as their own pages show them. */
 export function presentPerson(actor: Actor, user: { displayName: string; email: string }): PersonView {

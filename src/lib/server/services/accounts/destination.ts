@@ -1,6 +1,6 @@
-import { localPath } from '../../domain/local-path';
-import type { Actor } from '../../domain/role';
-import { homeOf } from '../../domain/rooms';
+import { localPath } from '$lib/server/domain/local-path';
+import type { Actor } from '$lib/server/domain/role';
+import { homeOf } from '$lib/server/domain/rooms';
 
 /** Where a person goes after signing in: the path they had asked for, if it is one of ours, else their home. */
 export const destinationAfterSignIn = (next: string | null, home: string): string => localPath(next, home);

@@ -1,6 +1,6 @@
-import { may, type Action } from '../../domain/policy';
-import type { Actor } from '../../domain/role';
-import { DomainError } from '../../errors';
+import { may, type Action } from '$lib/server/domain/policy';
+import type { Actor } from '$lib/server/domain/role';
+import { DomainError } from '$lib/server/errors';
 
 /** Lets this person into a room of the site. Throws DomainError `forbidden` where the policy doesn't. */
 export function enterRoom(actor: Actor, enter: Extract<Action, `${string}.enter`>): void {

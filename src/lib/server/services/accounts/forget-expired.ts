@@ -1,7 +1,7 @@
 import { Op } from 'sequelize';
-import { deleteExpiredSessions } from '../../auth/sessions';
-import { KnownDevice } from '../../db/models/known-device';
-import { SignInBucket } from '../../db/models/sign-in-bucket';
+import { deleteExpiredSessions } from '$lib/server/auth/sessions';
+import { KnownDevice } from '$lib/server/db/models/known-device';
+import { SignInBucket } from '$lib/server/db/models/sign-in-bucket';
 
 const DAY_MS = 24 * 3600 * 1000;
 /** A full bucket has drained in minutes. */

@@ -1,8 +1,8 @@
 import type { PersonView } from '$lib/schemas/person';
-import { actorOf } from '../../auth/actor';
-import { validateSession } from '../../auth/sessions';
-import type { Actor } from '../../domain/role';
-import { presentPerson } from '../../present/person';
+import { actorOf } from '$lib/server/auth/actor';
+import { validateSession } from '$lib/server/auth/sessions';
+import type { Actor } from '$lib/server/domain/role';
+import { presentPerson } from '$lib/server/present/person';
 
 export interface Identified {
 	actor: Actor;

@@ -1,16 +1,16 @@
-import { isKnownDevice, rememberDevice } from '../../auth/known-devices';
-import { verifyPassword } from '../../auth/passwords';
-import { createSession, endSession } from '../../auth/sessions';
-import { giveBackTries, takeTries, type Counted } from '../../auth/sign-in-buckets';
-import { User } from '../../db/models/user';
-import { UserRole } from '../../db/models/user-role';
-import { inTransaction } from '../../db/transaction';
-import { addressBlock } from '../../domain/address-block';
-import { normaliseEmail } from '../../domain/email';
-import { homeOf } from '../../domain/rooms';
-import { ACCOUNT_LIMIT, ADDRESS_LIMIT, DEVICE_LIMIT } from '../../domain/sign-in-limit';
-import { DomainError } from '../../errors';
-import { actorOf } from '../../auth/actor';
+import { isKnownDevice, rememberDevice } from '$lib/server/auth/known-devices';
+import { verifyPassword } from '$lib/server/auth/passwords';
+import { createSession, endSession } from '$lib/server/auth/sessions';
+import { giveBackTries, takeTries, type Counted } from '$lib/server/auth/sign-in-buckets';
+import { User } from '$lib/server/db/models/user';
+import { UserRole } from '$lib/server/db/models/user-role';
+import { inTransaction } from '$lib/server/db/transaction';
+import { addressBlock } from '$lib/server/domain/address-block';
+import { normaliseEmail } from '$lib/server/domain/email';
+import { homeOf } from '$lib/server/domain/rooms';
+import { ACCOUNT_LIMIT, ADDRESS_LIMIT, DEVICE_LIMIT } from '$lib/server/domain/sign-in-limit';
+import { DomainError } from '$lib/server/errors';
+import { actorOf } from '$lib/server/auth/actor';
 import { forgetExpired } from './forget-expired';
 
 export interface SignInRequest {

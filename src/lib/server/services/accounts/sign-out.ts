@@ -1,4 +1,4 @@
-import { endSession } from '../../auth/sessions';
+import { endSession } from '$lib/server/auth/sessions';
 
 /** Ends the session that this token belongs to. Not an error if it has ended already. */
 export async function signOut(sessionToken: string | undefined): Promise<void> {
