@@ -4,6 +4,9 @@
  * Texts may hold {name} or {expression | digits}, over the values listed in `shown` and nothing else.
  */
 import { z } from 'zod';
+import { units } from '$lib/units/unit';
+import { quantity } from './quantity';
+import { readingRequest } from './reading';
 import { receiverProfile } from './receiver';
 import { device, emitter, lossTable } from './scene';
 import { settings } from './settings';
@@ -54,8 +57,8 @@ export const sceneTemplate = z.strictObject({
 });
 export const settingsTemplate = templateOf(settings);
 
-/** What is asked of the scene or read off a trace: kind and fields as the bench has them, checked when filled in. */
-const requestTemplate = z.looseObject({ kind: z.string().min(1).max(40) });
+const quantityTemplate = templateOf(quantity);
+const readingTemplate = templateOf(readingRequest);
 
 /** The sketch of what is connected, from source to receiver; `plane` marks where the answers hold. */
 export const chainPart = z.discriminatedUnion('part', [
@@ -65,7 +68,8 @@ export const chainPart = z.discriminatedUnion('part', [
 	z.strictObject({ part: z.literal('plane'), label: line })
 ]);
 
-export const answerUnits = ['dBm', 'dBm/Hz', 'dBc', 'dBc/Hz', 'dB', 'dBµV', 'Hz', 's', '%', '1'] as const;
+/** Units that answers are kept in; what people may type instead follows from the unit's dimension. */
+export const answerUnits = units;
 
 /** A mistake watched on a question: its kind, and the parameters that the kind asks for (checked by the bench by name). */
 const watchedMistake = z.looseObject({ kind: slug });
@@ -73,7 +77,7 @@ const watchedMistake = z.looseObject({ kind: slug });
 export const exerciseQuestion = z.strictObject({
 	id: slug,
 	text: line,
-	quantity: requestTemplate,
+	quantity: quantityTemplate,
 	unit: z.enum(answerUnits),
 	/** Half width of what counts as right: in the question's unit, or as a share of the true value. */
 	tolerance: z.union(
@@ -94,7 +98,7 @@ export const methodStep = z.discriminatedUnion('do', [
 	z.strictObject({ do: z.literal('sweep'), sweeps: z.int().min(1).max(1000), why }),
 	z.strictObject({
 		do: z.literal('read'),
-		reading: requestTemplate,
+		reading: readingTemplate,
 		trace: z.int().min(1).max(4).default(1),
 		as: valueName,
 		why

@@ -1,22 +1,17 @@
 /** An exercise with one seed's numbers in it. It holds the scene and the truths: it never leaves the server. */
 import type { ReadingRequest } from '$lib/measure/reading-request';
 import type { AnswerUnit, ChainPart, Exercise, WatchedMistake } from '$lib/schemas/exercise';
+import type { Quantity } from '$lib/schemas/quantity';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { LossTable, Scene } from '$lib/schemas/scene';
 import type { Settings } from '$lib/schemas/settings';
 import type { Seed } from '../receiver/random';
 import type { Scope } from './expression';
 
-/** What is asked of the scene, filled in: a truth's kind and its fields. */
-export interface FilledQuantity {
-	kind: string;
-	[field: string]: unknown;
-}
-
 export interface DrawnQuestion {
 	id: string;
 	text: string;
-	quantity: FilledQuantity;
+	quantity: Quantity;
 	unit: AnswerUnit;
 	digits: number;
 	/** True value at the reference plane, in `unit`. */

@@ -8,7 +8,7 @@ import type { z } from 'zod';
 import { profileNamed } from '../receiver/profiles';
 import type { Seed } from '../receiver/random';
 import { truth } from '../truth/truth';
-import type { Brief, DrawnExercise, DrawnQuestion, FilledQuantity, FilledStep } from './drawn-exercise';
+import type { Brief, DrawnExercise, DrawnQuestion, FilledStep } from './drawn-exercise';
 import { ExerciseError } from './exercise-error';
 import { parseExpression, type Scope } from './expression';
 import { fillTemplate } from './fill-template';
@@ -68,11 +68,11 @@ function fillQuestion(question: ExerciseQuestion, scene: Scene, scope: Scope, fi
 		]);
 	}
 	const { tolerance } = question;
-	const frequencyHz = quantityFrequencyHz(quantity as FilledQuantity);
+	const frequencyHz = quantityFrequencyHz(quantity);
 	return {
 		id: question.id,
 		text: fillText(question.text, scope, `${field}.text`),
-		quantity: quantity as FilledQuantity,
+		quantity: quantity,
 		unit,
 		digits: question.digits,
 		truth: value,

@@ -1,17 +1,17 @@
-import type { FilledQuantity } from './drawn-exercise';
-
-const ONE = ['centreHz', 'atHz', 'carrierHz', 'fundamentalHz', 'toHz'] as const;
+const ONE = ['centreHz', 'atHz', 'carrierHz', 'fundamentalHz', 'toHz'];
 const TWO = [
 	['startHz', 'stopHz'],
 	['lowerHz', 'upperHz']
-] as const;
+];
 
-/** Where in frequency a question asks: its centre, or the middle of its band; 0 when it asks over everything. */
-export function quantityFrequencyHz(quantity: FilledQuantity): number {
-	const single = ONE.find((key) => typeof quantity[key] === 'number');
-	if (single) return quantity[single] as number;
-	const pair = TWO.find(
-		([low, high]) => typeof quantity[low] === 'number' && typeof quantity[high] === 'number'
+/** Where in frequency a question (or reading) asks: its centre, or the middle of its band; 0 when it asks over everything. */
+export function quantityFrequencyHz(asked: { kind: string }): number {
+	const fields = asked as unknown as Record<string, unknown>;
+	const numberAt = (key: string) => (typeof fields[key] === 'number' ? fields[key] : undefined);
+	const single = ONE.map(numberAt).find((value) => value !== undefined);
+	if (single !== undefined) return single;
+	const pair = TWO.map((keys) => keys.map(numberAt)).find(
+		([low, high]) => low !== undefined && high !== undefined
 	);
-	return pair ? ((quantity[pair[0]] as number) + (quantity[pair[1]] as number)) / 2 : 0;
+	return pair ? (pair[0]! + pair[1]!) / 2 : 0;
 }

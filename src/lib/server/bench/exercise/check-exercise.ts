@@ -1,0 +1,192 @@
+import type { Exercise } from '$lib/schemas/exercise';
+import { bindMistake } from '../grading/watched-mistakes';
+import { isAbsoluteLevel } from '../grading/evidence';
+import { profileNamed } from '../receiver/profiles';
+import { BenchError } from '../bench-error';
+import type { ExerciseIssue } from './exercise-error';
+import { parseExpression } from './expression';
+import { eachExpression, fillTemplate } from './fill-template';
+import { namesInText } from './fill-text';
+
+const LEAST_PARAMETERS = 4;
+
+/** Runs `check`, turning a refusal into an issue. */
+function issuesOf(check: () => void): ExerciseIssue[] {
+	try {
+		check();
+		return [];
+	} catch (error) {
+		if (error instanceof BenchError) return [{ field: error.field, message: error.message }];
+		throw error;
+	}
+}
+
+/** What no schema can say: names that exist, answers that are given, texts that tell nothing hidden. */
+export function checkExercise(exercise: Exercise): ExerciseIssue[] {
+	return [
+		...checkParameters(exercise),
+		...checkNames(exercise),
+		...checkTexts(exercise),
+		...checkWhen(exercise),
+		...checkMethod(exercise),
+		...checkQuestions(exercise)
+	];
+}
+
+function checkParameters({ parameters, scene, derived }: Exercise): ExerciseIssue[] {
+	const issues: ExerciseIssue[] = [];
+	const count = Object.keys(parameters).length;
+	if (count < LEAST_PARAMETERS) {
+		issues.push({ field: 'parameters', message: `at least ${LEAST_PARAMETERS} are drawn; given ${count}` });
+	}
+	if (!scene.emitters.some((emitter) => 'when' in emitter)) {
+		const message = 'what is there must be drawn too: give an emitter (the signal or a neighbour) a when';
+		issues.push({ field: 'scene.emitters', message });
+	}
+	for (const name of Object.keys(derived)) {
+		if (name in parameters) issues.push({ field: `derived.${name}`, message: 'is a parameter already' });
+	}
+	return issues;
+}
+
+/** Every expression reads, and uses only names that have a value where it stands. */
+function checkNames(exercise: Exercise): ExerciseIssue[] {
+	const issues: ExerciseIssue[] = [];
+	const known = new Set(Object.keys(exercise.parameters));
+	const check = (
+		template: unknown,
+		field: string,
+		names: ReadonlySet<string>,
+		why = 'nothing has this name here'
+	) => {
+		eachExpression(template, field, (text, place) => {
+			issues.push(
+				...issuesOf(() => {
+					const stranger = parseExpression(text, place).names.find((name) => !names.has(name));
+					if (stranger) throw new BenchError(place, `${stranger}: ${why}`);
+				})
+			);
+		});
+	};
+	for (const [name, value] of Object.entries(exercise.derived)) {
+		check(value, `derived.${name}`, known);
+		known.add(name);
+	}
+	const shown = new Set(exercise.shown);
+	check(exercise.scene, 'scene', known);
+	check(exercise.start, 'start', shown, 'the learner sees this: list it in shown');
+	check(exercise.leads, 'leads', shown, 'the learner sees this: list it in shown');
+	check(exercise.questions, 'questions', known);
+	exercise.method.forEach((step, i) => {
+		check(step, `method[${i}]`, known);
+		if (step.do === 'read') known.add(step.as);
+	});
+	const drawn = new Set([...Object.keys(exercise.parameters), ...Object.keys(exercise.derived)]);
+	exercise.shown.forEach((name, i) => {
+		if (!drawn.has(name))
+			issues.push({ field: `shown[${i}]`, message: `${name} is neither drawn nor derived` });
+	});
+	return issues;
+}
+
+/** Texts may tell what is shown, and nothing else of the draw. */
+function checkTexts(exercise: Exercise): ExerciseIssue[] {
+	const texts: [string, string | undefined][] = [
+		['situation', exercise.situation],
+		['plane', exercise.plane],
+		...exercise.chain.flatMap((part, i): [string, string | undefined][] => [
+			[`chain[${i}].label`, part.label],
+			[`chain[${i}].branch`, 'branch' in part ? part.branch : undefined]
+		]),
+		...exercise.leads.map(({ label }, i): [string, string] => [`leads[${i}].label`, label]),
+		...exercise.cautions.map((text, i): [string, string] => [`cautions[${i}]`, text]),
+		...exercise.hints.map((text, i): [string, string] => [`hints[${i}]`, text]),
+		...exercise.questions.map(({ text }, i): [string, string] => [`questions[${i}].text`, text])
+	];
+	return texts.flatMap(([field, text]) =>
+		issuesOf(() => {
+			const stranger = namesInText(text ?? '', field).find((name) => !exercise.shown.includes(name));
+			if (stranger) throw new BenchError(field, `${stranger} is not listed in shown, so no text may tell it`);
+		})
+	);
+}
+
+function checkWhen({ scene, parameters }: Exercise): ExerciseIssue[] {
+	return scene.emitters.flatMap((emitter, i) =>
+		Object.entries((emitter as { when?: Record<string, unknown> }).when ?? {}).flatMap(([name, wanted]) => {
+			const field = `scene.emitters[${i}].when.${name}`;
+			const draw = parameters[name];
+			if (draw?.draw !== 'choice') return [{ field, message: 'names no parameter that is a choice' }];
+			const never = [wanted].flat().filter((value) => !draw.of.includes(value as string | number));
+			return never.map((value) => ({ field, message: `${String(value)} is never chosen` }));
+		})
+	);
+}
+
+function checkMethod({ method, questions }: Exercise): ExerciseIssue[] {
+	const issues: ExerciseIssue[] = [];
+	const taken = new Set<string>();
+	method.forEach((step, i) => {
+		if (step.do === 'read') {
+			if (taken.has(step.as))
+				issues.push({ field: `method[${i}].as`, message: `${step.as} was read before` });
+			taken.add(step.as);
+		}
+		if (step.do !== 'answer') return;
+		if (!questions.some(({ id }) => id === step.question)) {
+			issues.push({ field: `method[${i}].question`, message: `no question is called ${step.question}` });
+		}
+		if (!taken.has(step.reading)) {
+			issues.push({ field: `method[${i}].reading`, message: `nothing was read as ${step.reading} before` });
+		}
+	});
+	for (const { id } of questions) {
+		const answers = method.filter((step) => step.do === 'answer' && step.question === id).length;
+		if (answers !== 1)
+			issues.push({ field: 'method', message: `must answer ${id} once; it does ${answers} times` });
+	}
+	return issues;
+}
+
+function checkQuestions({ questions, receiver }: Exercise): ExerciseIssue[] {
+	const profile = typeof receiver === 'string' ? profileNamed(receiver) : receiver;
+	return questions.flatMap((question, i) => {
+		const field = `questions[${i}]`;
+		const issues: ExerciseIssue[] = [];
+		if (questions.findIndex(({ id }) => id === question.id) !== i) {
+			issues.push({ field: `${field}.id`, message: `${question.id} is asked twice` });
+		}
+		const { tolerance } = question;
+		if (
+			isAbsoluteLevel(question.unit) &&
+			'absolute' in tolerance &&
+			tolerance.absolute < profile.levelErrorDb
+		) {
+			const message = `must be at least the receiver’s level error, ${profile.levelErrorDb} dB, plus three spreads; given ${tolerance.absolute}`;
+			issues.push({ field: `${field}.tolerance.absolute`, message });
+		}
+		if (isAbsoluteLevel(question.unit) && 'relative' in tolerance) {
+			issues.push({ field: `${field}.tolerance`, message: 'a level’s tolerance is absolute, in dB' });
+		}
+		const seen = new Set<string>();
+		question.mistakes.forEach((mistake, j) => {
+			const place = `${field}.mistakes[${j}]`;
+			// Parameters given as expressions are checked when a draw fills them in; 1 stands for any of them here.
+			issues.push(...issuesOf(() => void bindMistake(plain(mistake, place) as typeof mistake, place)));
+			const key = JSON.stringify(mistake);
+			if (seen.has(key)) issues.push({ field: place, message: 'is watched twice' });
+			seen.add(key);
+		});
+		return issues;
+	});
+}
+
+/** A template with 1 in the place of every expression. */
+const plain = (template: unknown, field: string): unknown =>
+	fillTemplate(
+		JSON.parse(JSON.stringify(template), (_, value) =>
+			typeof value === 'string' && value.startsWith('=') ? 1 : (value as unknown)
+		),
+		{},
+		field
+	);

@@ -1,0 +1,93 @@
+import type { ReadingRequest } from '$lib/measure/reading-request';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+import type { AttemptRecord, GivenAnswer, TakenReading } from '../exercise/attempt-record';
+import type { DrawnExercise, DrawnQuestion } from '../exercise/drawn-exercise';
+import { quantityFrequencyHz } from '../exercise/quantity-frequency';
+import { resolveSettings } from '../receiver/resolve-settings';
+import { tableDb } from '../receiver/table-db';
+import type { SetUp } from './mistake';
+
+/** Readings by what they are of: one point, a band's power, a density, or a quantity of their own. */
+export type Family = 'point' | 'band' | 'density' | 'other';
+const FAMILIES: Partial<Record<ReadingRequest['kind'], Family>> = {
+	marker: 'point',
+	peak: 'point',
+	'next-peak': 'point',
+	minimum: 'point',
+	'band-power': 'band',
+	'channel-power': 'band',
+	'noise-density': 'density',
+	'power-density': 'density'
+};
+export const familyOf = (kind: string): Family => FAMILIES[kind as ReadingRequest['kind']] ?? 'other';
+
+/** A reading with all that the grader asks of it. */
+export interface Source extends TakenReading {
+	family: Family;
+	/** Which set-up of the log swept it, and how it stood. */
+	entry: number;
+	setUp: SetUp;
+	/** Correction that was set, at the frequency read, dB. */
+	appliedDb: number;
+	/** Its value brought to the reference plane: the lead added, the correction already applied not counted twice. */
+	planeValue: number;
+}
+
+export interface Evidence {
+	drawn: DrawnExercise;
+	question: DrawnQuestion;
+	answer: GivenAnswer | undefined;
+	attached: Source | undefined;
+	/** What the answer may rest on: the reading attached, else every reading taken. */
+	pool: Source[];
+	/** Every set-up that swept, newest first. */
+	setUps: SetUp[];
+}
+
+const LEVELS = ['dBm', 'dBm/Hz'];
+/** Whether a unit is an absolute level, which lead and correction shift. */
+export const isAbsoluteLevel = (unit: string): boolean => LEVELS.includes(unit);
+
+const correctionAt = (correctionDb: ResolvedSettings['correctionDb'], frequencyHz: number): number =>
+	typeof correctionDb === 'number' ? correctionDb : tableDb(correctionDb, frequencyHz);
+
+function sourceOf(
+	taken: TakenReading,
+	drawn: DrawnExercise,
+	question: DrawnQuestion,
+	record: AttemptRecord
+): Source {
+	const entry = record.log.findLastIndex(({ firstRow, sweeps }) => firstRow <= taken.rows.to && sweeps > 0);
+	const resolved = resolveSettings(record.log[entry].settings, drawn.profile);
+	const trace = resolved.traces[taken.trace - 1] ?? resolved.traces[0];
+	const readAtHz = quantityFrequencyHz(taken.request) || question.frequencyHz;
+	const appliedDb = correctionAt(resolved.correctionDb, readAtHz);
+	const shift = isAbsoluteLevel(taken.reading.unit) ? question.leadDb - appliedDb : 0;
+	return {
+		...taken,
+		family: familyOf(taken.request.kind),
+		entry,
+		setUp: { resolved, trace, sweeps: taken.rows.to - taken.rows.from + 1 },
+		appliedDb,
+		planeValue: taken.reading.value + shift
+	};
+}
+
+/** What there is to judge one question by. Readings must name rows that the log swept. */
+export function evidenceFor(drawn: DrawnExercise, question: DrawnQuestion, record: AttemptRecord): Evidence {
+	const answer = record.answers[question.id];
+	const sources = record.readings.map((taken) => sourceOf(taken, drawn, question, record));
+	const attached = sources.find((source) => source.id === answer?.readingId);
+	const swept = record.log.filter((entry) => entry.sweeps > 0).reverse();
+	return {
+		drawn,
+		question,
+		answer,
+		attached,
+		pool: attached ? [attached] : sources,
+		setUps: swept.map(({ settings, sweeps }) => {
+			const resolved = resolveSettings(settings, drawn.profile);
+			return { resolved, trace: resolved.traces[0], sweeps };
+		})
+	};
+}

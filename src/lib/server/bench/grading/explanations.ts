@@ -1,0 +1,104 @@
+import { drawReceiverError } from '../receiver/receiver-error';
+import { isAbsoluteLevel, type Evidence, type Source } from './evidence';
+import { MODEL_SPREAD_DB, type SetUp } from './mistake';
+import { supports } from './supports';
+import type { Watched } from './watched-mistakes';
+
+/** One way the answer may have come about: the mistakes it takes, and the number they give at the reference plane. */
+export interface Candidate {
+	watched: Watched[];
+	value: number;
+	spread: number;
+	source?: Source;
+	setUp?: SetUp;
+}
+
+/** A number copied off a reading differs from it by its rounding. */
+const copyingSpread = (digits: number): number => Math.hypot(0.1, 0.5 * 10 ** -digits);
+
+const shownBy = (source: Source, watched: readonly Watched[], evidence: Evidence): Watched[] =>
+	watched.filter(
+		({ mistake }) =>
+			mistake.stage === 'reading' &&
+			mistake.families.includes(source.family) &&
+			mistake.shows(source, evidence)
+	);
+
+/** What a reading gives, by the mistakes it shows: those that make the same number of it are made together. */
+export function fromSource(source: Source, watched: readonly Watched[], evidence: Evidence): Candidate[] {
+	const byValue = new Map<string, Candidate>();
+	for (const shown of shownBy(source, watched, evidence)) {
+		if (shown.mistake.stage !== 'reading') continue;
+		const value = shown.mistake.fromReading?.(source, evidence) ?? source.planeValue;
+		const known = byValue.get(value.toFixed(6));
+		if (known) known.watched.push(shown);
+		else {
+			const spread = copyingSpread(evidence.question.digits);
+			byValue.set(value.toFixed(6), { watched: [shown], value, spread, source, setUp: source.setUp });
+		}
+	}
+	return [...byValue.values()];
+}
+
+/** What theory gives for each set-up that swept, when no reading says what was done. */
+function fromTheory(watched: readonly Watched[], evidence: Evidence): Candidate[] {
+	const errorDb = receiverErrorDb(evidence);
+	return watched.flatMap((one) =>
+		evidence.setUps.flatMap((setUp): Candidate[] => {
+			if (one.mistake.stage !== 'reading') return [];
+			const predicted = one.mistake.predict(evidence, setUp);
+			if (!predicted) return [];
+			return [{ watched: [one], value: predicted.value + errorDb, spread: predicted.spread, setUp }];
+		})
+	);
+}
+
+/** This receiver's own level error where the question asks: in every level that was read with it. */
+export function receiverErrorDb({ drawn, question }: Evidence): number {
+	return isAbsoluteLevel(question.unit)
+		? drawReceiverError(drawn.profile, drawn.seed).levelDb(question.frequencyHz)
+		: 0;
+}
+
+/** Right readings, for slips to start from: those taken, else what this receiver would show. */
+function rightOnes(watched: readonly Watched[], evidence: Evidence): Candidate[] {
+	const spread = copyingSpread(evidence.question.digits);
+	const right = evidence.pool.filter(
+		(source) => supports(source, evidence.question) && shownBy(source, watched, evidence).length === 0
+	);
+	if (right.length > 0) {
+		return right.map((source) => ({
+			watched: [],
+			value: source.planeValue,
+			spread,
+			source,
+			setUp: source.setUp
+		}));
+	}
+	if (evidence.attached) return [];
+	const value = evidence.question.truth + receiverErrorDb(evidence);
+	return [{ watched: [], value, spread: MODEL_SPREAD_DB, setUp: evidence.setUps[0] }];
+}
+
+function slipped(from: readonly Candidate[], watched: readonly Watched[], evidence: Evidence): Candidate[] {
+	return from.flatMap((base) =>
+		watched.flatMap((slip): Candidate[] => {
+			if (slip.mistake.stage !== 'slip') return [];
+			const value = base.value + slip.mistake.change(evidence);
+			return [{ ...base, watched: [...base.watched, slip], value }];
+		})
+	);
+}
+
+/** Every way to a wrong number that the log doesn't rule out. Whoever took a reading read that, and nothing else. */
+export function explanations(watched: readonly Watched[], evidence: Evidence): Candidate[] {
+	const made =
+		evidence.pool.length > 0
+			? evidence.pool.flatMap((source) => fromSource(source, watched, evidence))
+			: fromTheory(watched, evidence);
+	return [
+		...made,
+		...slipped(rightOnes(watched, evidence), watched, evidence),
+		...slipped(made, watched, evidence)
+	];
+}

@@ -1,0 +1,109 @@
+/**
+ * A mistake: what someone making it would report, how to tell from the log whether it was made, how to say so,
+ * and how to make it on the bench. One file a kind in mistakes/, listed in mistakes/registry.ts.
+ */
+import type { z } from 'zod';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+import type { DrawnExercise, DrawnQuestion, FilledStep } from '../exercise/drawn-exercise';
+import { ExerciseError } from '../exercise/exercise-error';
+import { issuesOf } from '../exercise/zod-issues';
+import type { Family, Source } from './evidence';
+
+export interface Context {
+	drawn: DrawnExercise;
+	question: DrawnQuestion;
+}
+
+/** How the receiver stood for a reading: the trace it was taken from and the rows swept. */
+export interface SetUp {
+	resolved: ResolvedSettings;
+	trace: ResolvedSettings['traces'][number];
+	sweeps: number;
+}
+
+/** Least standard deviation of a prediction, dB: drifts of a reading that theory doesn't follow. */
+export const MODEL_SPREAD_DB = 0.1;
+
+/**
+ * The number that theory says the mistake gives at the reference plane, lead accounted for, and its standard deviation:
+ * with a receiver that has no level error of its own (all numbers of one attempt share that).
+ */
+export interface Prediction {
+	value: number;
+	spread: number;
+}
+
+/** What an explanation is made of: the learner's own numbers. */
+export interface Facts extends Context {
+	/** The reading the mistake was made with, when one was taken. */
+	source?: Source;
+	setUp?: SetUp;
+	/** What was answered. */
+	yours: number;
+	/** How much of the way from yours to the truth this mistake accounts for, in the question's unit. */
+	change: number;
+}
+
+export interface Explanation {
+	/** "A point is not a power" */
+	title: string;
+	text: string;
+	sum?: string;
+	note?: string;
+	/** Words at the ladder's step: "the lead, not added back". */
+	part: string;
+	/** What was wrong with which step of the log. */
+	bad: { at: 'set-up' | 'reading' | 'answer'; text: string };
+}
+
+interface Words {
+	/** On the number line: "one point". */
+	label: string;
+	/** After "You": "read one point of the hump". */
+	phrase: string;
+	explain(facts: Facts): Explanation;
+	/** The method with this mistake in it: settings, readings or arithmetic as someone making it would do them. */
+	make(steps: readonly FilledStep[], context: Context): FilledStep[];
+}
+
+/** Made with the receiver: the reading taken shows whether. */
+export interface ReadingMistake extends Words {
+	stage: 'reading';
+	/** Kinds of reading it can be made with; whoever took others didn't make it. */
+	families: readonly Family[];
+	shows(source: Source, context: Context): boolean;
+	/** What is reported from that reading, at the reference plane; absent: the reading itself. */
+	fromReading?(source: Source, context: Context): number;
+	/** Null when it can't be made with that set-up. */
+	predict(context: Context, setUp: SetUp): Prediction | null;
+}
+
+/** Made after a right reading, with correction or pencil: a fixed change of the number, in the question's unit. */
+export interface Slip extends Words {
+	stage: 'slip';
+	change(context: Context): number;
+}
+
+export type Mistake = ReadingMistake | Slip;
+
+export interface MistakeKind {
+	kind: string;
+	/** @throws ExerciseError naming the parameter at fault */
+	bind(fields: unknown, field: string): Mistake;
+}
+
+/** A kind of mistake from its parameters' schema and what it does with them. */
+export function defineMistake<P>(
+	kind: string,
+	parameters: z.ZodType<P>,
+	bound: (parameters: P) => Mistake
+): MistakeKind {
+	return {
+		kind,
+		bind(fields, field) {
+			const parsed = parameters.safeParse(fields);
+			if (!parsed.success) throw new ExerciseError(issuesOf(parsed.error, field));
+			return bound(parsed.data);
+		}
+	};
+}

@@ -1,0 +1,25 @@
+import { z } from 'zod';
+import { figure } from '../../exercise/figure';
+import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
+import { averagesDecibels, LOG_AVERAGE_DB } from '../noise-law';
+import { withSettings } from '../spoil';
+
+/** Powers added up from a trace averaged in decibels: 2.51 dB low on anything that behaves as noise. */
+export const logAverage = defineMistake('log-average', z.strictObject({}), () => ({
+	stage: 'reading',
+	label: 'averaged in dB',
+	phrase: 'averaged decibels',
+	families: ['band'],
+	shows: (source) => averagesDecibels(source.setUp),
+	predict: ({ question }, setUp) =>
+		averagesDecibels(setUp) ? { value: question.truth - LOG_AVERAGE_DB, spread: MODEL_SPREAD_DB } : null,
+	explain: ({ change }) => ({
+		title: 'The mean of decibels is not the mean power',
+		text: 'Your trace averaged decibels. Noise falls far below its mean more often than it rises far above, so the mean of its levels stands 2.51 dB under the level of its mean. Averages on power add up right.',
+		sum: '10 × 0.5772/2.3026 = 2.51 dB',
+		note: Math.abs(change - LOG_AVERAGE_DB) < 0.05 ? undefined : `yours: ${figure(change, 1)} dB`,
+		part: 'lost to averaging decibels',
+		bad: { at: 'set-up', text: 'Here: averages on decibels; set Averages to power' }
+	}),
+	make: (steps) => withSettings(steps, { scale: 'log' })
+}));

@@ -1,0 +1,57 @@
+import { powerRatioToDb } from '$lib/units/decibel';
+import { z } from 'zod';
+import { figure } from '../../exercise/figure';
+import { defineMistake } from '../mistake';
+import { shownPower } from '../noise-law';
+import { withSettings } from '../spoil';
+
+const WORDS = {
+	detector: {
+		label: 'peak detector',
+		phrase: 'let the detector pick peaks',
+		title: 'A peak detector reads noise high',
+		bad: 'Here: detector positive peak; take average'
+	},
+	hold: {
+		label: 'held maximum',
+		phrase: 'read a held maximum',
+		title: 'A held maximum is not a power',
+		bad: 'Here: the trace holds its maximum; take average'
+	}
+};
+
+/** A signal that looks like noise read through a positive-peak detector, or off a held maximum: the power of its crests. */
+export const peakOnNoise = defineMistake(
+	'peak-on-noise',
+	z.strictObject({ by: z.enum(['detector', 'hold']) }),
+	({ by }) => ({
+		stage: 'reading',
+		label: WORDS[by].label,
+		phrase: WORDS[by].phrase,
+		families: ['band', 'density'],
+		shows: ({ setUp }) =>
+			by === 'hold' ? setUp.trace.mode === 'max-hold' : setUp.resolved.detector === 'positive-peak',
+		predict({ question }, setUp) {
+			const value = question.truth + powerRatioToDb(shownPower(setUp));
+			return { value, spread: by === 'hold' ? 0.5 : 0.3 };
+		},
+		explain({ setUp, change }) {
+			const rows = setUp?.sweeps ?? 1;
+			const shownDb = setUp ? powerRatioToDb(shownPower(setUp)) : Math.abs(change);
+			const cause =
+				by === 'hold'
+					? `Each point of your trace is the highest of ${rows} sweeps`
+					: 'Each point of your trace is the highest level met in its bucket';
+			return {
+				title: WORDS[by].title,
+				text: `A modulated carrier like this one rises and falls like noise. ${cause}, so the power added up is that of the crests, not the mean.`,
+				sum: `crests over mean here: ${figure(shownDb, 1)} dB`,
+				note: Math.abs(shownDb + change) < 0.05 ? undefined : `yours: ${figure(Math.abs(change), 1)} dB`,
+				part: by === 'hold' ? 'crests kept by the hold' : 'crests picked by the detector',
+				bad: { at: 'set-up', text: WORDS[by].bad }
+			};
+		},
+		make: (steps) =>
+			withSettings(steps, by === 'hold' ? { traces: [{ mode: 'max-hold' }] } : { detector: 'positive-peak' })
+	})
+);

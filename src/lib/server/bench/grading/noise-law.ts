@@ -1,0 +1,71 @@
+/** How a receiver's detectors and holds make noise read, over its mean power. */
+import type { SetUp } from './mistake';
+import { normalIntegral } from '../signal/normal-integral';
+
+/** Noise and impulse bandwidths of the Gaussian resolution filter over its 3 dB width. */
+export const NOISE_BANDWIDTH = 1.064467;
+const IMPULSE_BANDWIDTH = 1.50538;
+/** Mean of a logarithm of exponential noise below the logarithm of its mean: 10·γ/ln 10, dB. */
+export const LOG_AVERAGE_DB = 2.50682;
+
+/** Whether decibels were averaged, by the detector, the video filter or over rows. */
+export const averagesDecibels = ({ resolved, trace, sweeps }: SetUp): boolean =>
+	resolved.scale === 'log' &&
+	(resolved.detector === 'average' ||
+		resolved.vbwHz < resolved.rbwHz ||
+		(trace.mode === 'average' && sweeps > 1));
+
+/** Resolution bandwidth times the time spent on one point. */
+const bucketOf = ({ resolved }: SetUp): number =>
+	(resolved.rbwHz * resolved.sweepTimeS) / (resolved.points - 1);
+
+/** Cumulative law of one point of one row, power over mean. */
+function rowLaw(setUp: SetUp): (x: number) => number {
+	const bucket = bucketOf(setUp);
+	if (setUp.resolved.detector === 'positive-peak') {
+		// bench.md §4: P(max < x) = (1 − e^−x)·exp(−1.5054·BΔt·√x/(e^x − 1)).
+		return (x) => -Math.expm1(-x) * Math.exp((-IMPULSE_BANDWIDTH * bucket * Math.sqrt(x)) / Math.expm1(x));
+	}
+	const degrees = setUp.resolved.detector === 'average' ? 1 + NOISE_BANDWIDTH * bucket : 1;
+	return meanLaw(degrees);
+}
+
+/** Cumulative law of the mean of `degrees` independent exponentials (Wilson & Hilferty, PNAS 17, 684, 1931). */
+function meanLaw(degrees: number): (x: number) => number {
+	if (degrees === 1) return (x) => -Math.expm1(-x);
+	return (x) => normalIntegral((Math.cbrt(x) - (1 - 1 / (9 * degrees))) * Math.sqrt(9 * degrees));
+}
+
+/** Mean of the greatest of `count` draws from a law on [0, ∞): ∫(1 − Fᶜ). */
+function meanOfGreatest(law: (x: number) => number, count: number): number {
+	const end = 30 + Math.log(count);
+	const step = 0.01;
+	let sum = 0.5;
+	for (let x = step; x < end; x += step) sum += 1 - law(x) ** count;
+	return sum * step;
+}
+
+const laws = new Map<string, number>();
+function cached(key: string, make: () => number): number {
+	const known = laws.get(key);
+	if (known !== undefined) return known;
+	const value = make();
+	laws.set(key, value);
+	return value;
+}
+
+/** Mean power that a set-up shows for noise of mean power 1: 1 unless it detects peaks or holds. */
+export function shownPower(setUp: SetUp): number {
+	const count = setUp.trace.mode === 'max-hold' ? Math.max(1, setUp.sweeps) : 1;
+	if (count === 1 && setUp.resolved.detector !== 'positive-peak') return 1;
+	const key = `shown ${setUp.resolved.detector} ${bucketOf(setUp).toPrecision(4)} ${count}`;
+	return cached(key, () => meanOfGreatest(rowLaw(setUp), count));
+}
+
+/** Standard deviation in dB of one point of an averaged trace of noise: 5.57 dB of a single sample, over √rows. */
+export function pointSpreadDb({ trace, sweeps, resolved }: SetUp): number {
+	const rows = trace.mode === 'average' ? Math.max(1, Math.min(trace.count, sweeps)) : 1;
+	const each =
+		resolved.detector === 'average' ? 1 + NOISE_BANDWIDTH * bucketOf({ trace, sweeps, resolved }) : 1;
+	return 5.57 / Math.sqrt(rows * each);
+}
