@@ -4,6 +4,7 @@ import { forgetRunning, noteRunning } from '../ground/running.js';
 import { step } from '../ground/step.js';
 import { type Address, chooseAddress } from './address';
 import { importCourses, migrate, openDatabase, seedIfEmpty } from './database';
+import { listDemoSignIns } from './demo-sign-ins';
 
 export interface Kind {
 	verb: 'start' | 'dev';
@@ -33,19 +34,9 @@ export function serve({ verb, firstPort, build, start }: Kind): Promise<void> {
 }
 
 async function welcome({ origin }: Address, isPrivate: boolean): Promise<string> {
+	const signIns = await listDemoSignIns();
 	const lines = ['', `Open ${origin}`, ''];
-	if (isPrivate) {
-		const { demoSignIns } = await import('$lib/server/db/seed');
-		lines.push(
-			'Demo sign-ins:',
-			...demoSignIns.map((one) => `  ${one.role.padEnd(14)} ${one.email.padEnd(34)} ${one.password}`),
-			''
-		);
-	} else {
-		lines.push(
-			'A database of your own gets no demo data by itself: npm run db:seed puts it into an empty one.',
-			''
-		);
-	}
+	if (signIns.length > 0) lines.push('Demo sign-ins:', ...signIns, '');
+	else if (!isPrivate) lines.push('For demo data in an empty database of your own: npm run db:seed', '');
 	return [...lines, 'Ctrl-C ends it.', ''].join('\n');
 }

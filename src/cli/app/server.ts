@@ -6,13 +6,19 @@ const READY_LIMIT_S = 60;
 
 /** Starts the production build in `folder` and waits until its front page answers. */
 export async function startBuilt(folder: string, { host, port, origin }: Address): Promise<Child> {
-	const server = startNode([folder], {
+	const env = {
 		NODE_ENV: 'production',
 		HOST: host,
 		PORT: String(port),
 		ORIGIN: origin,
 		// Streams of sweeps would hold up the end for half a minute.
 		SHUTDOWN_TIMEOUT: process.env.SHUTDOWN_TIMEOUT ?? '3'
+	};
+	const server = startNode([folder], env, ['inherit', 'pipe', 'inherit']);
+	server.process.stdout?.on('data', (chunk: Buffer) => {
+		// The one line that the adapter says by itself would fall into the middle of a step.
+		const said = chunk.toString().replace(/^Listening on .*\n/, '');
+		if (said !== '') process.stdout.write(said);
 	});
 	await untilReady(server, `http://${reachable(host)}:${port}/`);
 	return server;

@@ -27,4 +27,11 @@ export function createSequelize(databaseUrl: string | undefined): Sequelize {
 }
 
 /** The application's pool. Kept on globalThis: a module reloaded by the dev server must not open another. */
-export const sequelize = (globalThis.sweepwrightSequelize ??= createSequelize(process.env.DATABASE_URL));
+export const sequelize = (globalThis.sweepwrightSequelize ??= openPool());
+
+/** The server says when its last request is answered; open connections would keep the process alive after that. */
+function openPool(): Sequelize {
+	const pool = createSequelize(process.env.DATABASE_URL);
+	process.once('sveltekit:shutdown', () => void pool.close());
+	return pool;
+}
