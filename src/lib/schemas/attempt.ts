@@ -32,7 +32,7 @@ const typedAnswers = z
 export const draftsRequest = z.strictObject({ answers: typedAnswers });
 export const draftsResponse = z.strictObject({ savedAt: z.iso.datetime() });
 
-/** `POST /api/attempts/[id]/answers`: hands in and closes. Every question needs an answer. */
+/** `POST /api/attempts/[id]/answers`: hands in and closes. A question left out or left blank is unanswered. */
 export const answersRequest = z.strictObject({ answers: typedAnswers });
 export const findingResponse = z.strictObject({ finding });
 

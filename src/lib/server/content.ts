@@ -4,7 +4,9 @@ import { join, relative } from 'node:path';
 import { isMap, isNode, isSeq, LineCounter, parseDocument, type Document } from 'yaml';
 import type { z } from 'zod';
 import { courseFile, type CourseUnit } from '$lib/schemas/course-file';
-import { exercise, type Exercise } from '$lib/schemas/exercise';
+import type { Exercise } from '$lib/schemas/exercise';
+import { ExerciseError } from '$lib/server/bench/exercise/exercise-error';
+import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
 import { issuesOf, pathOf } from '$lib/server/bench/exercise/zod-issues';
 
 /** Something in content/ can't be published: "harbour/06-power/spread.yaml:12: questions[0].unit: …". */
@@ -20,15 +22,9 @@ export class ContentError extends Error {
 	}
 }
 
-/** An exercise as read, with the way back from a field to the line it stands on. */
-export interface ExerciseContent {
-	definition: Exercise;
-	/** @returns the error that names this exercise's file, and the line of `field` ("questions[0].unit") or of what holds it */
-	errorAt(field: string, reason: string): ContentError;
-}
 export interface UnitContent extends Omit<CourseUnit, 'exercises'> {
 	lessonMarkdown: string;
-	exercises: ExerciseContent[];
+	exercises: Exercise[];
 }
 export interface CourseContent {
 	slug: string;
@@ -44,9 +40,11 @@ export interface CourseContent {
 export function readContent(root: string): CourseContent[] {
 	const courses = foldersIn(root).map((folder) => readCourse(root, folder));
 	const seen = new Set<string>();
-	for (const { definition, errorAt } of courses.flatMap((c) => c.units.flatMap((u) => u.exercises))) {
-		if (seen.has(definition.slug)) throw errorAt('slug', `another exercise is called ${definition.slug}`);
-		seen.add(definition.slug);
+	for (const { slug: course, units } of courses) {
+		for (const { slug } of units.flatMap((unit) => unit.exercises)) {
+			if (seen.has(slug)) throw new ContentError(course, 1, 'slug', `two exercises are called ${slug}`);
+			seen.add(slug);
+		}
 	}
 	return courses;
 }
@@ -80,10 +78,16 @@ function readUnit(root: string, folder: string, unit: CourseUnit): UnitContent {
 	};
 }
 
-function readExercise(root: string, path: string, slug: string): ExerciseContent {
-	const { value, errorAt } = readYaml(root, path, exercise);
-	if (value.slug !== slug) throw errorAt('slug', `must be the file's name, ${slug}`);
-	return { definition: value, errorAt };
+function readExercise(root: string, path: string, slug: string): Exercise {
+	try {
+		const exercise = parseExerciseText(readText(root, path), path);
+		if (exercise.slug === slug) return exercise;
+	} catch (cause) {
+		if (!(cause instanceof ExerciseError)) throw cause;
+		const [{ field, message, line }] = cause.issues;
+		throw new ContentError(path, line ?? 1, field, message);
+	}
+	throw new ContentError(path, 1, 'slug', `must be the file's name, ${slug}`);
 }
 
 function readYaml<S extends z.ZodType>(root: string, path: string, schema: S) {

@@ -8,6 +8,7 @@ import { SetUp } from '$lib/server/db/models/set-up';
 import { inTransaction } from '$lib/server/db/transaction';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
+import { presentFlag } from '$lib/server/present/attempt';
 import { markDrawn } from './acknowledge-rows';
 import { firstUnfinishedRow, type BenchPosition } from './advance-bench';
 import { getAttempt, lockOpenAttempt } from './get-attempt';
@@ -50,7 +51,7 @@ export async function openSweeps(
 	const source = signalSource(seen, await exerciseOf(seen));
 	// Before the row is locked: preparing takes its time, and a refusal must leave no trace.
 	const bench = preparedBench(source, request.settings);
-	const flags = bench.plan.flags.map(({ kind, db }) => (kind === 'too-fast' ? { kind, db } : { kind }));
+	const flags = bench.plan.flags.map(presentFlag);
 	const tripped = bench.plan.isProtected;
 	return inTransaction(async (transaction) => {
 		const attempt = await lockOpenAttempt(actor, attemptId, transaction);

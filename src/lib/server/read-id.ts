@@ -1,0 +1,11 @@
+import { DomainError } from './errors';
+
+/**
+ * An id out of a URL: a whole number from 1.
+ * Throws DomainError `not_found` for anything else, as for an id that nothing has.
+ */
+export function readId(text: string): number {
+	const id = /^[1-9]\d{0,15}$/.test(text) ? Number(text) : NaN;
+	if (!Number.isSafeInteger(id)) throw new DomainError('not_found', 'There is no such thing.');
+	return id;
+}

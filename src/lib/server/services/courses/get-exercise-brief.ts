@@ -1,0 +1,29 @@
+import type { ExerciseBrief } from '$lib/schemas/course-view';
+import { profileNamed } from '$lib/server/bench/receiver/profiles';
+import { attemptsAtExercise } from '$lib/server/db/queries/attempts-at-exercise';
+import { findPublishedExercise } from '$lib/server/db/queries/find-exercise';
+import { may } from '$lib/server/domain/policy';
+import type { Actor } from '$lib/server/domain/role';
+import { DomainError } from '$lib/server/errors';
+import { presentReceiver } from '$lib/server/present/exercise';
+import { presentProgress } from '$lib/server/present/progress';
+
+/** What an exercise is, before it is started: nothing that a seed decides. @throws DomainError `not_found` */
+export async function getExerciseBrief(actor: Actor, slug: string): Promise<ExerciseBrief> {
+	if (!may(actor, 'learn.enter'))
+		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	const exercise = await findPublishedExercise(slug);
+	if (!exercise) throw new DomainError('not_found', 'There is no such exercise.');
+	const { unit, edition, definition } = exercise;
+	const { receiver } = definition;
+	return {
+		course: { slug: edition.course.slug, title: edition.title },
+		unit: { number: unit.number, slug: unit.slug, title: unit.title },
+		exercise: presentProgress(exercise, await attemptsAtExercise(actor.id, exercise)),
+		client: definition.client,
+		receiver: presentReceiver(typeof receiver === 'string' ? profileNamed(receiver) : receiver),
+		questions: definition.questions.length,
+		hints: definition.hints.length,
+		benchTimeS: definition.benchTimeS
+	};
+}
