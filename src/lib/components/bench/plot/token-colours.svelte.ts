@@ -1,0 +1,27 @@
+/** Colour tokens for a canvas: read from CSS, and read again when day turns to night. */
+import { createSubscriber } from 'svelte/reactivity';
+import type { TraceStyle } from './trace-style';
+
+/**
+ * @param element gives the element whose colours count; nothing before it is mounted
+ * @returns `of(token)`: the colour in force; reading it in an effect re-runs the effect when the scheme changes
+ */
+export function tokenColours(element: () => Element | undefined) {
+	const subscribe = createSubscriber((update) => {
+		const night = matchMedia('(prefers-color-scheme: dark)');
+		night.addEventListener('change', update);
+		const choice = new MutationObserver(update);
+		choice.observe(document.documentElement, { attributes: true });
+		return () => {
+			night.removeEventListener('change', update);
+			choice.disconnect();
+		};
+	});
+	return {
+		of(token: TraceStyle['token']): string {
+			subscribe();
+			const target = element();
+			return target ? getComputedStyle(target).getPropertyValue(`--${token}`).trim() || 'currentColor' : '';
+		}
+	};
+}

@@ -1,0 +1,114 @@
+/** What is typed as answers: kept on the server as it is typed, right or wrong, and handed in once. */
+import type { DraftsView, TypedAnswer } from '$lib/schemas/attempt';
+import type { QuestionView } from '$lib/schemas/exercise-view';
+import { Refusal, type BenchWire } from './bench-wire';
+
+/** How long the keys must rest before what was typed is kept, ms. */
+const restMs = 600;
+const retryMs = 5000;
+
+export class AnswerSheet {
+	answers = $state<Record<string, TypedAnswer>>({});
+	/** Why an answer was refused, by question. */
+	problems = $state.raw<Readonly<Record<string, string>>>({});
+	/** When the drafts were last kept, ISO. */
+	savedAt = $state<string | null>(null);
+	state = $state<'kept' | 'typing' | 'not-kept'>('kept');
+	handingIn = $state(false);
+	/** A refusal that belongs to no question. */
+	trouble = $state<string | undefined>();
+	readonly answered: number = $derived(
+		Object.values(this.answers).filter((answer) => answer.text.trim() !== '').length
+	);
+	readonly #wire: BenchWire;
+	readonly #questions: readonly QuestionView[];
+	#timer: ReturnType<typeof setTimeout> | undefined;
+
+	constructor(questions: readonly QuestionView[], drafts: DraftsView, wire: BenchWire) {
+		this.#wire = wire;
+		this.#questions = questions;
+		this.savedAt = drafts.savedAt;
+		for (const { id, unit } of questions) this.answers[id] = drafts.answers[id] ?? { text: '', unit };
+	}
+
+	type(id: string, text: string): void {
+		this.answers[id].text = text;
+		this.#touched(id);
+	}
+
+	chooseUnit(id: string, unit: string): void {
+		this.answers[id].unit = unit;
+		this.#touched(id);
+	}
+
+	attach(id: string, readingId: number | null): void {
+		this.answers[id].readingId = readingId;
+		this.#touched(id);
+	}
+
+	/** Names of the questions (by position, from 1) that a reading is attached to. */
+	attachedTo(readingId: number): number[] {
+		return this.#questions.flatMap(({ id }, i) => (this.answers[id].readingId === readingId ? [i + 1] : []));
+	}
+
+	/** Questions with nothing typed. */
+	get open(): string[] {
+		return this.#questions.filter(({ id }) => this.answers[id].text.trim() === '').map(({ id }) => id);
+	}
+
+	refuse(id: string, message: string): void {
+		this.problems = { ...this.problems, [id]: message };
+	}
+
+	/** Hands everything in. @returns true when it was taken; else `problems` and `trouble` say why not */
+	async handIn(): Promise<boolean> {
+		clearTimeout(this.#timer);
+		this.handingIn = true;
+		this.trouble = undefined;
+		try {
+			await this.#wire.handIn($state.snapshot(this.answers));
+			return true;
+		} catch (error) {
+			if (!(error instanceof Refusal)) {
+				this.trouble = 'The server could not be reached. Everything typed is still here; try again.';
+				return false;
+			}
+			this.#sort(error);
+			return false;
+		} finally {
+			this.handingIn = false;
+		}
+	}
+
+	/** Puts each issue at its question; what names none is told at the foot. */
+	#sort(refusal: Refusal): void {
+		const problems: Record<string, string> = {};
+		for (const { field, message } of refusal.issues) {
+			const question = this.#questions.find(({ id }) => field.split('.').includes(id));
+			if (question) problems[question.id] ??= message;
+		}
+		this.problems = problems;
+		if (Object.keys(problems).length === 0) this.trouble = refusal.message;
+	}
+
+	#touched(id: string): void {
+		this.state = 'typing';
+		this.problems = Object.fromEntries(Object.entries(this.problems).filter(([key]) => key !== id));
+		clearTimeout(this.#timer);
+		this.#timer = setTimeout(() => void this.#keep(), restMs);
+	}
+
+	async #keep(): Promise<void> {
+		try {
+			this.savedAt = await this.#wire.saveDrafts($state.snapshot(this.answers));
+			this.state = 'kept';
+		} catch (error) {
+			this.state = 'not-kept';
+			if (error instanceof Refusal && error.status < 500) {
+				this.trouble = error.message;
+				return;
+			}
+			this.#timer = setTimeout(() => void this.#keep(), retryMs);
+		}
+	}
+}

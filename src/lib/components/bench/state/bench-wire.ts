@@ -1,0 +1,40 @@
+/** What the bench asks of the server. The page gives the real thing; nothing in here fetches. */
+import type {
+	AttemptView,
+	HintResponse,
+	ReadingView,
+	TakeReadingRequest,
+	TypedAnswer
+} from '$lib/schemas/attempt';
+import type { Frame } from '$lib/schemas/frames';
+import type { SweepsRequest } from '$lib/schemas/sweep-stream';
+
+export interface Issue {
+	field: string;
+	message: string;
+}
+
+/** The server understood and said no; `issues` name the fields. */
+export class Refusal extends Error {
+	override name = 'Refusal';
+	constructor(
+		readonly status: number,
+		message: string,
+		readonly issues: readonly Issue[] = []
+	) {
+		super(message);
+	}
+}
+
+/** Every method rejects with Refusal for a no, with any other error when the server could not be reached. */
+export interface BenchWire {
+	sweeps(request: SweepsRequest, signal: AbortSignal): Promise<AsyncIterable<Frame[]>>;
+	/** Rows drawn before, both ends included, at once. */
+	rows(from: number, to: number): Promise<AsyncIterable<Frame[]>>;
+	acknowledge(row: number): Promise<void>;
+	takeReading(request: TakeReadingRequest): Promise<ReadingView>;
+	saveDrafts(answers: Record<string, TypedAnswer>): Promise<string>;
+	nextHint(): Promise<HintResponse>;
+	handIn(answers: Record<string, TypedAnswer>): Promise<void>;
+	reload(): Promise<AttemptView>;
+}

@@ -1,0 +1,205 @@
+/** Everything behind one bench page, tied together. */
+import { formatFrequency } from '$lib/units/format-quantity';
+import { isProblem } from '$lib/measure/reading';
+import { takeReading } from '$lib/measure/take-reading';
+import type { AttemptView } from '$lib/schemas/attempt';
+import type { ReadingRequest } from '$lib/schemas/reading';
+import { readingKind } from '../readings/reading-kinds';
+import type { ReadingRow } from '../readings/reading-row';
+import { shownReading } from '../shown-quantity';
+import { AnswerSheet } from './answer-sheet.svelte';
+import { Refusal, type BenchWire } from './bench-wire';
+import { MarkerList } from './marker-list.svelte';
+import { ReadingList } from './reading-list.svelte';
+import { SetupSheet } from './setup-sheet.svelte';
+import { SweepRun } from './sweep-run.svelte';
+import { TraceSet } from './trace-set.svelte';
+
+/** Where to put a marker: the highest point, or the next one to a side. */
+export type PeakStep = 'highest' | 'left' | 'right';
+
+export class Bench {
+	readonly traces = new TraceSet();
+	readonly markers = new MarkerList();
+	readonly run: SweepRun;
+	readonly sheet: SetupSheet;
+	readonly readings: ReadingList;
+	readonly answers: AnswerSheet;
+	readonly attempt: AttemptView;
+	hints = $state.raw<readonly string[]>([]);
+	/** What was just done on the person's behalf, in words. */
+	notice = $state<string | undefined>();
+	/** What the live region says; `count` makes the same words count as said again. */
+	said = $state.raw<{ words: string; count: number } | undefined>();
+	readonly wire: BenchWire;
+
+	constructor(attempt: AttemptView, wire: BenchWire) {
+		this.attempt = attempt;
+		this.wire = wire;
+		this.run = new SweepRun(attempt.bench, this.traces, wire);
+		this.sheet = new SetupSheet(this.run);
+		this.readings = new ReadingList({
+			wire,
+			run: this.run,
+			traces: this.traces,
+			markers: this.markers,
+			taken: attempt.readings
+		});
+		this.answers = new AnswerSheet(attempt.exercise.questions, attempt.drafts, wire);
+		this.hints = attempt.hints.revealed;
+	}
+
+	/** The ends of the axis: Hz, or s in span 0. */
+	get axis(): { kind: 'frequency' | 'time'; start: number; stop: number } {
+		const { startHz, stopHz, spanHz, sweepTimeS } = this.run.resolved;
+		return spanHz > 0
+			? { kind: 'frequency', start: startHz, stop: stopHz }
+			: { kind: 'time', start: 0, stop: sweepTimeS };
+	}
+
+	/** Shows what was drawn before and goes on sweeping, unless something stands in the way. */
+	async open(): Promise<void> {
+		await this.run.resume(this.attempt.bench);
+		if (!this.attempt.bench.protectionTripped) await this.start();
+	}
+
+	close(): void {
+		this.run.stop();
+	}
+
+	/** The level a trace shows at a place on the axis; undefined while it holds nothing there. */
+	levelAt(at: number, trace: number): number | undefined {
+		const drawn = this.traces.shown[trace - 1]?.drawnDbm;
+		if (!drawn || drawn.length < 2) return undefined;
+		const { start, stop } = this.axis;
+		const index = Math.round(((at - start) / (stop - start)) * (drawn.length - 1));
+		const level = drawn[index];
+		return level === undefined || Number.isNaN(level) ? undefined : level;
+	}
+
+	/** One point of the trace, in the axis' unit. */
+	get pointStep(): number {
+		const { start, stop } = this.axis;
+		return (stop - start) / (this.run.resolved.points - 1);
+	}
+
+	/** Puts a marker on the highest point, or on the next peak to a side of where it stands. */
+	toPeak(letter: string, step: PeakStep): void {
+		const marker = this.markers.find(letter);
+		const trace = marker && this.readings.traceOf(marker.trace);
+		if (!marker || !trace) return;
+		const request: ReadingRequest =
+			step === 'highest'
+				? { kind: 'peak' }
+				: { kind: 'next-peak', fromHz: marker.at, side: step === 'left' ? 'lower' : 'upper' };
+		const outcome = takeReading(trace, request);
+		if (isProblem(outcome)) {
+			this.notice = `${outcome.problem} ${outcome.needs}`;
+			return;
+		}
+		const place = placeOf(outcome.parts);
+		if (place !== undefined) this.markers.move(letter, place);
+	}
+
+	/** Adds a marker at a place, by default on the highest point, else in the middle. */
+	addMarker(at?: number): void {
+		const { start, stop } = this.axis;
+		const marker = this.markers.add(at ?? (start + stop) / 2);
+		if (!marker) this.notice = 'All eight markers are in use. Take one away first.';
+		else if (at === undefined) this.toPeak(marker.letter, 'highest');
+	}
+
+	/** Adds a marker that keeps to the highest point. */
+	followPeak(): void {
+		const { start, stop } = this.axis;
+		if (!this.markers.add((start + stop) / 2, { follows: 'peak' })) {
+			this.notice = 'All eight markers are in use. Take one away first.';
+		}
+		this.keepFollowing();
+	}
+
+	/** Puts the markers that follow something where it is now. */
+	keepFollowing(): void {
+		for (const marker of this.markers.list.filter(({ follows }) => follows)) {
+			const trace = this.readings.traceOf(marker.trace);
+			const outcome = trace && takeReading(trace, { kind: 'peak' });
+			const place = outcome && !isProblem(outcome) ? placeOf(outcome.parts) : undefined;
+			if (place !== undefined && place !== marker.at) this.markers.keepAt(marker.letter, place);
+		}
+	}
+
+	moveMarker(letter: string, at: number): void {
+		const { start, stop } = this.axis;
+		this.markers.move(letter, Math.min(stop, Math.max(start, at)));
+	}
+
+	/** Starts a reading. A reading of power puts detector and averages on power first, where the log shows it. */
+	async startReading(request: ReadingRequest, values: Record<string, number>): Promise<void> {
+		this.readings.follow(request, values);
+		const { detector, scale } = this.run.resolved;
+		if (!readingKind(request.kind)?.power || (detector === 'average' && scale === 'power')) return;
+		await this.sheet.setAll({ detector: 'average', scale: 'power' });
+		this.notice = 'Detector set to average and averages to power: a power reading adds power.';
+	}
+
+	toggle(): void {
+		if (this.run.running) this.run.stop();
+		else void this.start();
+	}
+
+	/** Sweeps on; a refusal is told at the field it belongs to. */
+	async start(resetProtection?: boolean): Promise<void> {
+		try {
+			await this.run.start(undefined, resetProtection);
+		} catch (error) {
+			this.run.stop();
+			if (!(error instanceof Refusal)) throw error;
+			this.notice = error.message;
+		}
+	}
+
+	/** Lets the selected marker be read out. */
+	say(): void {
+		const row = this.readings.markerRows.find(({ letter }) => letter === this.markers.selectedLetter);
+		if (row) this.said = { words: spoken(row), count: (this.said?.count ?? 0) + 1 };
+	}
+
+	/** The next attenuator step that takes 10 dB or more off; the last one if there is none. */
+	moreAttenuation(): Promise<void> {
+		const { attenuatorDb } = this.attempt.exercise.receiver;
+		const wanted = this.run.resolved.attenuationDb + 10;
+		const step = attenuatorDb.find((db) => db >= wanted) ?? Math.max(...attenuatorDb);
+		return this.sheet.setAll({ attenuationDb: step });
+	}
+
+	/** Puts the receiver back on after its input protection opened; it opens again if nothing was changed. */
+	resetProtection(): Promise<void> {
+		return this.start(true);
+	}
+
+	/** Takes a row's reading as evidence and rests an answer on it. @throws Refusal with the reason */
+	async attach(row: ReadingRow, questionId: string): Promise<void> {
+		const id = row.takenId ?? (await this.readings.take(row)).id;
+		this.answers.attach(questionId, id);
+	}
+
+	async nextHint(): Promise<void> {
+		const { hint } = await this.wire.nextHint();
+		this.hints = [...this.hints, hint];
+	}
+}
+
+function placeOf(parts: unknown): number | undefined {
+	if (typeof parts !== 'object' || parts === null) return undefined;
+	const { frequencyHz, timeS } = parts as { frequencyHz?: number; timeS?: number };
+	return frequencyHz ?? timeS;
+}
+
+/** A marker as it is read out: letter, place, level. */
+function spoken({ letter, words, atHz, outcome, relative }: ReadingRow): string {
+	const place = atHz === undefined ? '' : `${relative && atHz > 0 ? 'plus ' : ''}${formatFrequency(atHz)}, `;
+	if (!outcome) return `${words} ${letter}: nothing swept yet.`;
+	if ('problem' in outcome) return `${words} ${letter}: ${outcome.problem}`;
+	const { figure, unit } = shownReading(outcome.value, outcome.unit);
+	return `${words} ${letter}: ${place}${figure} ${unit}`.replaceAll('−', 'minus ');
+}

@@ -1,0 +1,162 @@
+/** The readings on the bench: those that follow the traces, and those the server has taken as evidence. */
+import type { Reading, ReadingProblem } from '$lib/measure/reading';
+import { takeReading } from '$lib/measure/take-reading';
+import type { Trace } from '$lib/measure/trace';
+import type { ReadingView } from '$lib/schemas/attempt';
+import type { ReadingRequest } from '$lib/schemas/reading';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+import { readingPlace, readingWords, takenFromWords } from '../readings/reading-words';
+import type { ReadingRow } from '../readings/reading-row';
+import type { BenchWire } from './bench-wire';
+import type { Marker, MarkerList } from './marker-list.svelte';
+import type { SweepRun } from './sweep-run.svelte';
+import type { ShownTrace, TraceSet } from './trace-set.svelte';
+
+interface Following {
+	id: number;
+	request: ReadingRequest;
+	trace: number;
+	/** Kind and values as the form had them, to open it again. */
+	values: Record<string, number>;
+}
+
+export class ReadingList {
+	/** Readings that are taken anew from every sweep. */
+	following = $state.raw<readonly Following[]>([]);
+	taken = $state.raw<readonly ReadingView[]>([]);
+	readonly #wire: BenchWire;
+	readonly #run: SweepRun;
+	readonly #traces: TraceSet;
+	readonly #markers: MarkerList;
+	#nextId = 1;
+
+	readonly markerRows = $derived.by(() => this.#markers.list.map((marker) => this.#markerRow(marker)));
+	readonly followingRows = $derived.by(() => this.following.map((entry) => this.#followingRow(entry)));
+	readonly takenRows = $derived.by(() => this.taken.map(takenRow));
+	readonly rows = $derived([...this.followingRows, ...this.markerRows, ...this.takenRows]);
+
+	constructor(parts: {
+		wire: BenchWire;
+		run: SweepRun;
+		traces: TraceSet;
+		markers: MarkerList;
+		taken: ReadingView[];
+	}) {
+		this.#wire = parts.wire;
+		this.#run = parts.run;
+		this.#traces = parts.traces;
+		this.#markers = parts.markers;
+		this.taken = parts.taken;
+	}
+
+	follow(request: ReadingRequest, values: Record<string, number>, trace = 1): void {
+		this.following = [...this.following, { id: this.#nextId++, request, trace, values }];
+	}
+
+	change(id: number, request: ReadingRequest, values: Record<string, number>): void {
+		this.following = this.following.map((entry) => (entry.id === id ? { ...entry, request, values } : entry));
+	}
+
+	remove(id: number): void {
+		this.following = this.following.filter((entry) => entry.id !== id);
+	}
+
+	/**
+	 * Has the server take a row's reading from the same sweeps: what comes back is evidence.
+	 * @throws Refusal with the reason why the sweeps don't support it
+	 */
+	async take(row: ReadingRow): Promise<ReadingView> {
+		const trace = this.#traces.shown[row.trace - 1];
+		await this.#run.settleAcknowledgement();
+		const reading = await this.#wire.takeReading({
+			rows: trace.rows,
+			trace: row.trace,
+			request: row.request
+		});
+		this.taken = [...this.taken, reading];
+		return reading;
+	}
+
+	/** A trace as `measure` takes it; undefined while it holds nothing. */
+	traceOf(number: number): Trace | undefined {
+		const shown = this.#traces.shown[number - 1];
+		return shown && shown.levelsDbm.length > 1 ? measurable(shown, this.#run.resolved) : undefined;
+	}
+
+	#read(request: ReadingRequest, trace: number): Reading | ReadingProblem | undefined {
+		const measured = this.traceOf(trace);
+		return measured && takeReading(measured, request);
+	}
+
+	#takenFrom(number: number): string {
+		const shown = this.#traces.shown[number - 1];
+		return shown && shown.levelsDbm.length > 0
+			? takenFromWords({ from: shown.rows.to, to: shown.rows.to }, number)
+			: '';
+	}
+
+	#followingRow({ id, request, trace }: Following): ReadingRow {
+		return {
+			key: `following-${id}`,
+			request,
+			trace,
+			words: readingWords(request),
+			atHz: readingPlace(request),
+			outcome: this.#read(request, trace),
+			takenFrom: this.#takenFrom(trace)
+		};
+	}
+
+	#markerRow(marker: Marker): ReadingRow {
+		const other = this.#markers.find(marker.from);
+		const request = markerRequest(marker, other, this.#run.resolved.spanHz === 0);
+		const common = {
+			key: `marker-${marker.letter}`,
+			letter: marker.letter,
+			request,
+			trace: marker.trace,
+			outcome: this.#read(request, marker.trace),
+			takenFrom: this.#takenFrom(marker.trace)
+		};
+		if (other)
+			return { ...common, words: `Marker, from ${other.letter}`, atHz: marker.at - other.at, relative: true };
+		return { ...common, words: marker.follows ? 'Highest point' : 'Marker', atHz: marker.at };
+	}
+}
+
+/** The request a marker stands for: its own level, the highest point it keeps to, or its distance from another. */
+function markerRequest(marker: Marker, other: Marker | undefined, overTime: boolean): ReadingRequest {
+	if (other) {
+		return overTime
+			? { kind: 'delta', fromS: other.at, toS: marker.at }
+			: { kind: 'delta', fromHz: other.at, toHz: marker.at };
+	}
+	if (marker.follows) return { kind: 'peak' };
+	return overTime ? { kind: 'marker', atS: marker.at } : { kind: 'marker', atHz: marker.at };
+}
+
+function measurable(shown: ShownTrace, resolved: ResolvedSettings): Trace {
+	const { startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb } = resolved;
+	return {
+		...{ startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb },
+		mode: shown.mode,
+		count: shown.rows.to - shown.rows.from + 1,
+		levelsDbm: shown.levelsDbm
+	};
+}
+
+function takenRow(reading: ReadingView): ReadingRow {
+	const { id, request, trace, kind, value, unit, spread, remarks } = reading;
+	const delta = request.kind === 'delta' && request.fromHz !== undefined && request.toHz !== undefined;
+	return {
+		key: `taken-${id}`,
+		takenId: id,
+		request,
+		trace,
+		words: readingWords(request),
+		atHz: delta ? request.toHz! - request.fromHz! : readingPlace(request),
+		relative: delta,
+		outcome: { kind, value, unit, spread, remarks } as ReadingRow['outcome'],
+		takenFrom: takenFromWords(reading.rows, trace)
+	};
+}

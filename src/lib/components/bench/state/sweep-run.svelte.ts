@@ -1,0 +1,240 @@
+/** Asks the receiver for sweeps, takes what comes, and tells the server what was drawn. */
+import type { BenchView } from '$lib/schemas/attempt';
+import type { Frame } from '$lib/schemas/frames';
+import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
+import { streamEnd, streamState, type ReceiverFlag, type StreamEndReason } from '$lib/schemas/sweep-stream';
+import { Refusal, type BenchWire } from './bench-wire';
+import type { TraceSet } from './trace-set.svelte';
+
+/** Resolves when the browser has painted; a hidden page does not paint, so its receiver waits. */
+const nextPaint = () => new Promise<void>((resolve) => requestAnimationFrame(() => resolve()));
+const pause = (ms: number) => new Promise<void>((resolve) => setTimeout(resolve, ms));
+/** Waits before asking again after a lost connection, ms. */
+const retryAfterMs = [300, 1000, 2000, 4000, 8000];
+/** Drawn rows are told to the server at most this often, ms. */
+const acknowledgeEveryMs = 1000;
+
+export class SweepRun {
+	/** Sweeps are wanted. */
+	running = $state(false);
+	/** The connection was lost and is being sought again. */
+	lost = $state(false);
+	/** Why the receiver stopped by itself. */
+	ended = $state<{ reason: StreamEndReason | 'refused'; message: string } | undefined>();
+	settings = $state.raw<Settings>({});
+	resolved = $state.raw<ResolvedSettings>() as ResolvedSettings;
+	flags = $state.raw<readonly ReceiverFlag[]>([]);
+	benchTimeUsedS = $state(0);
+	speedUp = $state(1);
+	/** A new set-up is on its way and nothing of it has come back yet. */
+	settling = $state(false);
+
+	readonly #wire: BenchWire;
+	readonly #traces: TraceSet;
+	#stream: AbortController | undefined;
+	#nextRow: number;
+	#drawnTo: number | undefined;
+	#acknowledgedTo: number | undefined;
+	#acknowledgedAtMs = 0;
+	#clock: { clockS: number; usedS: number };
+
+	constructor(bench: BenchView, traces: TraceSet, wire: BenchWire) {
+		this.#wire = wire;
+		this.#traces = traces;
+		this.settings = bench.settings;
+		this.resolved = bench.resolved;
+		this.flags = bench.flags;
+		this.benchTimeUsedS = bench.benchTimeUsedS;
+		this.#clock = { clockS: bench.clockS, usedS: bench.benchTimeUsedS };
+		this.#nextRow = bench.resumeFrom;
+		traces.restart(bench.restartRow);
+		traces.use(bench.resolved);
+	}
+
+	/** Shows again what was drawn before the page was left. */
+	async resume(bench: BenchView): Promise<void> {
+		if (bench.drawnTo === null || bench.drawnTo < bench.restartRow) return;
+		for await (const frames of await this.#wire.rows(bench.restartRow, bench.drawnTo)) {
+			for (const frame of frames) if (frame.type === 'piece') this.#traces.take(frame);
+		}
+		this.#traces.show();
+	}
+
+	/** Sweeps on with the set-up in force, `sweeps` times or until stopped. */
+	start(sweeps?: number, resetProtection?: boolean): Promise<void> {
+		this.running = sweeps === undefined;
+		return this.#ask(this.settings, sweeps, resetProtection);
+	}
+
+	stop(): void {
+		this.running = false;
+		this.lost = false;
+		this.#stream?.abort();
+		this.#acknowledge(true);
+	}
+
+	/**
+	 * Puts a new set-up in force: the sweep under way ends, the next one has it. While stopped, one sweep shows it.
+	 * @throws Refusal with the receiver's reason; the set-up before stays in force
+	 */
+	async change(settings: Settings): Promise<void> {
+		const before = this.settings;
+		const wasRunning = this.running;
+		this.settling = true;
+		try {
+			await this.#ask(settings, wasRunning ? undefined : 1);
+		} catch (error) {
+			this.settings = before;
+			if (wasRunning && error instanceof Refusal && error.status === 422) void this.start();
+			throw error;
+		} finally {
+			this.settling = false;
+		}
+	}
+
+	/** Tells the server what was drawn, now: evidence is about to be taken from it. */
+	async settleAcknowledgement(): Promise<void> {
+		if (this.#drawnTo === undefined || this.#drawnTo === this.#acknowledgedTo) return;
+		const row = this.#drawnTo;
+		await this.#wire.acknowledge(row);
+		this.#acknowledgedTo = row;
+	}
+
+	/** Resolves once the stream has begun; what follows comes in on its own. */
+	async #ask(settings: Settings, sweeps: number | undefined, resetProtection?: boolean): Promise<void> {
+		this.#stream?.abort();
+		const stream = new AbortController();
+		this.#stream = stream;
+		const request = {
+			settings,
+			from: this.#nextRow,
+			...(sweeps && { sweeps }),
+			...(resetProtection && { resetProtection })
+		};
+		let frames: AsyncIterable<Frame[]>;
+		try {
+			frames = await this.#wire.sweeps(request, stream.signal);
+		} catch (error) {
+			if (stream.signal.aborted) return;
+			if (error instanceof Refusal && error.status === 409) return this.#catchUp(settings, sweeps, error);
+			if (error instanceof Refusal) throw error;
+			this.settings = settings;
+			void this.#seek(settings, sweeps, stream.signal);
+			return;
+		}
+		this.settings = settings;
+		this.ended = undefined;
+		this.lost = false;
+		void this.#take(frames, sweeps, stream.signal);
+	}
+
+	async #take(
+		frames: AsyncIterable<Frame[]>,
+		sweeps: number | undefined,
+		signal: AbortSignal
+	): Promise<void> {
+		let left = sweeps;
+		try {
+			for await (const batch of frames) {
+				if (signal.aborted) return;
+				for (const frame of batch) {
+					const whole = this.#receive(frame);
+					if (whole !== undefined && left !== undefined) left -= 1;
+				}
+				this.#traces.show();
+				await nextPaint();
+				if (signal.aborted) return;
+				this.#drawnTo = this.#traces.lastRow ?? this.#drawnTo;
+				this.#acknowledge(false);
+				if (this.ended) {
+					this.#acknowledge(true);
+					return;
+				}
+			}
+		} catch (error) {
+			if (signal.aborted) return;
+			console.warn('The sweep stream broke off.', error);
+		}
+		if (!signal.aborted) void this.#seek(this.settings, left, signal);
+	}
+
+	#receive(frame: Frame): number | undefined {
+		if (frame.type === 'piece') {
+			this.#tellTime(frame.clockS);
+			const whole = this.#traces.take(frame);
+			if (whole !== undefined) this.#nextRow = whole + 1;
+			return whole;
+		}
+		if (frame.type === 'state') this.#begin(frame.json);
+		else this.#end(frame.json);
+		return undefined;
+	}
+
+	#begin(json: unknown): void {
+		const state = streamState.parse(json);
+		this.resolved = state.resolved;
+		this.flags = state.flags;
+		this.speedUp = state.speedUp;
+		this.#clock = { clockS: state.clockS, usedS: state.benchTimeUsedS };
+		this.benchTimeUsedS = state.benchTimeUsedS;
+		this.#nextRow = state.fromRow;
+		if (state.restartRow !== this.#traces.restartRow) this.#traces.restart(state.restartRow);
+		this.#traces.use(state.resolved);
+	}
+
+	#end(json: unknown): void {
+		const end = streamEnd.parse(json);
+		this.benchTimeUsedS = end.benchTimeUsedS;
+		if (end.reason === 'server-stopping') return;
+		this.ended = { reason: end.reason, message: end.message };
+		this.running = false;
+		if (end.reason === 'input-protection' && !this.flags.some((flag) => flag.kind === 'input-protection')) {
+			this.flags = [...this.flags, { kind: 'input-protection' }];
+		}
+	}
+
+	#tellTime(clockS: number): void {
+		this.benchTimeUsedS = Math.max(this.benchTimeUsedS, this.#clock.usedS + clockS - this.#clock.clockS);
+	}
+
+	/** Another tab or device has gone on: load where the bench stands, and go on from there. */
+	async #catchUp(settings: Settings, sweeps: number | undefined, refusal: Refusal): Promise<void> {
+		const { bench, state } = await this.#wire.reload();
+		if (state === 'closed' || bench.resumeFrom === this.#nextRow) throw refusal;
+		this.#nextRow = bench.resumeFrom;
+		return this.#ask(settings, sweeps);
+	}
+
+	/** Asks again, waiting longer each time, until it is answered or stopped. */
+	async #seek(settings: Settings, sweeps: number | undefined, signal: AbortSignal): Promise<void> {
+		if (sweeps === 0) return;
+		this.lost = true;
+		for (let tries = 0; !signal.aborted; tries++) {
+			await pause(retryAfterMs[Math.min(tries, retryAfterMs.length - 1)]);
+			if (signal.aborted) return;
+			try {
+				const frames = await this.#wire.sweeps(
+					{ settings, from: this.#nextRow, ...(sweeps && { sweeps }) },
+					signal
+				);
+				this.lost = false;
+				return void this.#take(frames, sweeps, signal);
+			} catch (error) {
+				if (error instanceof Refusal) {
+					this.running = false;
+					this.lost = false;
+					this.ended = { reason: 'refused', message: error.message };
+					return;
+				}
+			}
+		}
+	}
+
+	#acknowledge(now: boolean): void {
+		if (!now && performance.now() - this.#acknowledgedAtMs < acknowledgeEveryMs) return;
+		this.#acknowledgedAtMs = performance.now();
+		this.settleAcknowledgement().catch((error) =>
+			console.warn('Could not tell the server what was drawn.', error)
+		);
+	}
+}
