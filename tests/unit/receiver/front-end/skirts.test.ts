@@ -43,7 +43,7 @@ describe('phaseNoiseSkirt(points)', () => {
 
 describe('skirtPower(lines, rbwHz, floorMw)', () => {
 	const skirt = new FilteredSkirt(shape, 1e3);
-	const at = skirtPower([{ frequencyHz: 1e9, powerMw: 0.5, skirts: [skirt] }], 1e3, 1e-14);
+	const at = skirtPower([{ frequencyHz: 1e9, powerMw: 0.5, skirt }], 1e3, 1e-14)!;
 	it('is power from 3.5 B on, phase nearer', () => {
 		expect(at(1e9 + 3.49e3)).toBe(0);
 		expect(at(1e9 - 3.51e3)).toBeCloseTo(0.5 * skirt.at(3.51e3), 15);

@@ -65,7 +65,8 @@ export function arrivalOf(emitter: Emitter, index: number, rbwHz: number, seed: 
 	} else {
 		arrival.lines = kind.lines?.(emitter, phases) ?? [];
 	}
-	if ((behaviour === 'envelope' || behaviour === 'quasi-static') && isWaveform(emitter)) arrival.waveform = emitter;
+	if ((behaviour === 'envelope' || behaviour === 'quasi-static') && isWaveform(emitter))
+		arrival.waveform = emitter;
 	return { ...arrival, ...timingOf(emitter, index, rbwHz, phases, arrival.waveform !== undefined, seed) };
 }
 

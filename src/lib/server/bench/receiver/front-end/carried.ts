@@ -13,18 +13,22 @@ export interface CarriedLine extends Line {
 }
 
 export interface CarriedDensity {
-	/** As it left the reference plane; `gain` is what the chain has done to it since, a complex amplitude. */
+	/** Its spectrum as it is here, but for a connection that is not the same at all its frequencies. */
 	density: Density;
-	gain: { re: number; im: number };
-	/** Whose it is: its own spectrum, or what it grew. */
+	/** Power gain that each frequency still has to be multiplied by. */
+	gainAt(frequencyHz: number): number;
+	/** Whose spectrum it is; absent on one that grew. */
+	own?: Arrival;
+	/** What it is made of. */
 	arrivals: Arrival[];
-	isOwn: boolean;
 }
 
 export interface Carried {
 	lines: CarriedLine[];
 	densities: CarriedDensity[];
 }
+
+const unchanged = () => 1;
 
 /** Everything at the reference plane, before any device. */
 export function carriedFrom(arrivals: readonly Arrival[]): Carried {
@@ -34,8 +38,29 @@ export function carriedFrom(arrivals: readonly Arrival[]): Carried {
 		),
 		densities: arrivals.flatMap((arrival) =>
 			arrival.density
-				? [{ density: arrival.density, gain: { re: 1, im: 0 }, arrivals: [arrival], isOwn: true }]
+				? [{ density: arrival.density, gainAt: unchanged, own: arrival, arrivals: [arrival] }]
 				: []
 		)
 	};
+}
+
+/** Whether an emitter is there all the time, as far as the filter can tell. */
+export const isSteady = (arrival: Arrival): boolean => !arrival.timing && arrival.trains.length === 0;
+
+/**
+ * The emitter whose comings and goings something made of several follows: of those that come and go, the one least often on.
+ * (A product needs all of its parents on; two schedules at once are more than a timing can say.)
+ */
+export function pacemaker(arrivals: readonly Arrival[]): Arrival | undefined {
+	const coming = arrivals.filter((arrival) => !isSteady(arrival));
+	return coming.reduce<Arrival | undefined>(
+		(rarest, arrival) => (!rarest || onShare(arrival) < onShare(rarest) ? arrival : rarest),
+		undefined
+	);
+}
+
+function onShare({ timing, duty }: Arrival): number {
+	const gate = timing?.gate ? timing.gate.onS / (timing.gate.onS + timing.gate.offS) : 1;
+	const pulse = timing?.pulse ? timing.pulse.widthS / timing.pulse.periodS : 1;
+	return duty * gate * pulse;
 }

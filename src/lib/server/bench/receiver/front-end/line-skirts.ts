@@ -1,12 +1,11 @@
 /** What the phase-noise skirts of many lines add to the power through the filter. */
 import { SKIRT_FROM_RBW, type FilteredSkirt } from './filtered-skirt';
 
-/** A carrier whose skirt counts, and from how far. */
+/** A carrier with a skirt that rides on it. */
 export interface SkirtedLine {
 	frequencyHz: number;
 	powerMw: number;
-	/** Skirts that ride on it: its source's, the receiver's. */
-	skirts: readonly FilteredSkirt[];
+	skirt: FilteredSkirt;
 	/** Tuned distance from which the skirt is power, Hz: 3.5 B, or more about a modulated carrier. */
 	fromHz?: number;
 	/** Where that distance is counted from, when the line stands for part of a spectrum. */
@@ -17,26 +16,25 @@ export interface SkirtedLine {
 const NEGLIGIBLE = 1e-5;
 
 /**
- * Power of all the skirts through the filter, mW, against the tuned frequency.
+ * Power of all the skirts through the filter, mW, against the tuned frequency; null where none shows.
  * @param floorMw the least power the receiver shows: what matters is judged against it
  */
 export function skirtPower(
 	lines: readonly SkirtedLine[],
 	rbwHz: number,
 	floorMw: number
-): (frequencyHz: number) => number {
+): ((frequencyHz: number) => number) | null {
 	const nearestHz = SKIRT_FROM_RBW * rbwHz;
 	const counted = lines
-		.flatMap((line) =>
-			line.skirts.map((skirt) => ({
-				skirt,
-				frequencyHz: line.frequencyHz,
-				powerMw: line.powerMw,
-				fromHz: line.fromHz ?? nearestHz,
-				aboutHz: line.aboutHz ?? line.frequencyHz
-			}))
-		)
-		.filter(({ skirt, powerMw }) => powerMw * skirt.at(nearestHz) > NEGLIGIBLE * floorMw);
+		.filter(({ skirt, powerMw }) => powerMw * skirt.at(nearestHz) > NEGLIGIBLE * floorMw)
+		.map(({ frequencyHz, powerMw, skirt, fromHz = nearestHz, aboutHz = frequencyHz }) => ({
+			frequencyHz,
+			powerMw,
+			skirt,
+			fromHz,
+			aboutHz
+		}));
+	if (counted.length === 0) return null;
 	return (frequencyHz) => {
 		let sum = 0;
 		for (const line of counted) {

@@ -1,0 +1,45 @@
+import type { ReceiverProfile } from '$lib/schemas/receiver';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+import { FilteredSkirt } from './filtered-skirt';
+import { floorDensity } from './floor';
+import { phaseNoiseSkirt, type PhaseNoise } from './skirt-shape';
+
+/** Noise bandwidth of the Gaussian filter over B: √(π/(4 ln 2)) = 1.0644670. */
+export const NOISE_BANDWIDTH_PER_RBW = Math.sqrt(Math.PI / (4 * Math.LN2));
+
+/** How the receiver looks at what reaches it. */
+export interface View {
+	rbwHz: number;
+	startHz: number;
+	/** Distance between points, Hz. */
+	spacingHz: number;
+	/** The receiver's own noise through the filter, mW, against tuned frequency. */
+	floorMw(frequencyHz: number): number;
+	/** The least of it in the sweep. */
+	leastFloorMw: number;
+	/** The local oscillator's phase noise. */
+	receiver: PhaseNoise | null;
+	/** A skirt through the resolution filter, tabulated once. */
+	filteredSkirt(noise: PhaseNoise): FilteredSkirt;
+}
+
+export function viewOf(profile: ReceiverProfile, settings: ResolvedSettings): View {
+	const { rbwHz, startHz, stopHz, centreHz, spanHz, points } = settings;
+	const density = floorDensity(profile, settings);
+	const noiseBandwidthHz = NOISE_BANDWIDTH_PER_RBW * rbwHz;
+	const floorMw = (frequencyHz: number) => noiseBandwidthHz * density(frequencyHz);
+	const tables = new Map<PhaseNoise, FilteredSkirt>();
+	return {
+		rbwHz,
+		startHz,
+		spacingHz: spanHz / (points - 1),
+		floorMw,
+		leastFloorMw: Math.min(...[startHz, centreHz, stopHz].map(floorMw)),
+		receiver: profile.phaseNoise && phaseNoiseSkirt(profile.phaseNoise, 'receiver.phaseNoise'),
+		filteredSkirt(noise) {
+			const table = tables.get(noise) ?? new FilteredSkirt(noise, rbwHz);
+			tables.set(noise, table);
+			return table;
+		}
+	};
+}
