@@ -60,7 +60,7 @@ export const ROOMS: Room[] = [
 		mayImport: [...server('db', 'domain', 'errors.ts', 'env.ts'), ...lib('schemas')],
 		packages: ['*']
 	})),
-	{ path: 'src/lib/server/content.ts', mayImport: lib('schemas'), packages: ['*'] },
+	{ path: 'src/lib/server/content.ts', mayImport: [...lib('schemas'), ...server('bench')], packages: ['*'] },
 	{ path: 'src/lib/server/env.ts', mayImport: [], packages: ['zod'] },
 	{ path: 'src/lib/server/errors.ts', mayImport: lib('schemas'), packages: [] },
 	{
@@ -73,6 +73,7 @@ export const ROOMS: Room[] = [
 		mayImport: [...server('errors.ts'), ...lib('schemas')],
 		packages: ['*']
 	},
+	{ path: 'src/lib/server/read-id.ts', mayImport: server('errors.ts'), packages: [] },
 	{
 		path: 'src/lib/server/hooks',
 		mayImport: [
@@ -88,7 +89,7 @@ export const ROOMS: Room[] = [
 		path: 'src/routes',
 		mayImport: [
 			...lib('components', 'schemas'),
-			...server('services', 'auth', 'respond.ts', 'read-json.ts'),
+			...server('services', 'auth', 'respond.ts', 'read-json.ts', 'read-id.ts'),
 			'src/app.css'
 		],
 		packages: ['*']
