@@ -50,7 +50,7 @@ export class ChunkSweep {
 			bucketS: this.chunkS,
 			startHz: frame.startHz - frame.sweepHzPerS * this.lead * this.chunkS
 		};
-		this.conditions = new LongBucketConditions(chunkFrame, incident, scale, seed);
+		this.conditions = new LongBucketConditions({ ...chunkFrame, vbwHz: Infinity }, incident, scale, seed, false);
 		this.video = new Float64Array(chunks + 1);
 	}
 

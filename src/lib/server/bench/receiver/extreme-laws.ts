@@ -2,29 +2,27 @@
  * Laws of extremes and averages of |noise + line|² over a stretch of length `bt` (in 1/B), through a Gaussian filter:
  * what a long bucket shows, without following it sample by sample. x and s are powers over the noise's mean; s is the line's.
  * Crossing rate after Rice (Bell Syst. Tech. J. 24, 46, 1945): 1.5054·B·√x·e^{−(√x−√s)²}·I₀e(2√(xs)), with 1.5054 = √(π/(2 ln 2)).
- * Monte Carlo of the noise-only law (mean dB over the noise at bt 4, 8, 16): 4.56, 5.56, 6.39; the law gives 4.44, 5.50, 6.37.
+ * With its ends followed sample by sample a bucket of bt 8 shows 5.55 dB over the noise on average (Monte Carlo 5.55).
  */
 import { IMPULSE_PER_RBW } from './resolution-filter';
 import { besselI0Scaled, riceCdf } from './rice';
 
-/** ln P(greatest < x). */
+/**
+ * ln P(no crossing above x within bt): the ends of the stretch are followed elsewhere, so only crossings count.
+ * The rate is that of a process known to be below: divided by P(power < x).
+ */
 export function logBelow(x: number, s: number, bt: number): number {
 	if (x <= 0) return -Infinity;
-	if (s === 0) {
-		const e = Math.expm1(x);
-		return Math.log(-Math.expm1(-x)) - (IMPULSE_PER_RBW * bt * Math.sqrt(x)) / e;
-	}
+	if (s === 0) return (-IMPULSE_PER_RBW * bt * Math.sqrt(x)) / Math.expm1(x);
 	const below = riceCdf(x, s);
-	if (below <= 0) return -Infinity;
-	return Math.log(below) - (crossingRate(x, s) * bt) / below;
+	return below <= 0 ? -Infinity : -(crossingRate(x, s) * bt) / below;
 }
 
-/** ln P(least > x). */
+/** ln P(no crossing below x within bt). */
 export function logAbove(x: number, s: number, bt: number): number {
-	if (s === 0) return -x - IMPULSE_PER_RBW * bt * Math.sqrt(x);
+	if (s === 0) return -IMPULSE_PER_RBW * bt * Math.sqrt(x);
 	const above = 1 - riceCdf(x, s);
-	if (above <= 0) return -Infinity;
-	return Math.log(above) - (crossingRate(x, s) * bt) / above;
+	return above <= 0 ? -Infinity : -(crossingRate(x, s) * bt) / above;
 }
 
 /** Crossings of level x in one direction per 1/B. */
@@ -33,10 +31,9 @@ function crossingRate(x: number, s: number): number {
 	return IMPULSE_PER_RBW * Math.sqrt(x) * Math.exp(-d * d) * besselI0Scaled(2 * Math.sqrt(x * s));
 }
 
-/** Least power of noise alone over bt, from a unit exponential draw: x + 1.5054·bt·√x = E solved for x. */
+/** Least power of noise alone within bt, from a unit exponential draw: 1.5054·bt·√x = E. */
 export function leastOfNoise(exponential: number, bt: number): number {
-	const a = IMPULSE_PER_RBW * bt;
-	const root = (2 * exponential) / (a + Math.sqrt(a * a + 4 * exponential));
+	const root = exponential / (IMPULSE_PER_RBW * bt);
 	return root * root;
 }
 

@@ -22,7 +22,7 @@ export class GaussianProcess {
 	constructor(
 		widthHz: number,
 		stepS: number,
-		private readonly total: number
+		readonly total: number
 	) {
 		this.stride = Math.max(1, Math.floor(1 / (3.4 * widthHz * stepS)));
 		const coarseS = this.stride * stepS;

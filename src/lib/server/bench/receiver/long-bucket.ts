@@ -3,7 +3,8 @@ import type { Detector, Scale } from '$lib/schemas/settings';
 import { drawAverage, meanOnScale, varianceOnScale } from './average-laws';
 import { leastOfNoise, logAbove, logBelow, solveLog, type GreatestOfNoise } from './extreme-laws';
 import type { Random } from './random';
-import { toScale } from './video';
+import type { Smoothing } from './smoothing';
+import { powerOnScale } from './video';
 
 /** A stretch of a bucket during which noise (v, mW) and line power (p, mW) stand still; share of the bucket's time. */
 export interface Piece {
@@ -12,7 +13,7 @@ export interface Piece {
 	p: number;
 }
 
-/** What a window followed sample by sample gave: the extremes of its power and its mean on the scale. */
+/** What a window followed sample by sample gave: extremes and mean of its video on the scale. */
 export interface Window {
 	share: number;
 	greatest: number;
@@ -91,16 +92,31 @@ export function detectLong(
 	windows: Window[],
 	bt: number,
 	table: GreatestOfNoise | undefined,
+	smoothing: Smoothing | undefined,
 	random: Random
 ): number {
 	if (detector === 'average') return averageOf(pieces, windows, bt, scale, random);
 	const greatest = detector === 'positive-peak' || (detector === 'rise-fall' && b % 2 === 0);
-	let power = extremeOf(pieces, bt, greatest, table, random);
+	let value = extremeOnScale(pieces, bt, greatest, table, smoothing, scale, random);
 	for (const window of windows) {
 		const edge = greatest ? window.greatest : window.least;
-		if (power < 0 || (greatest ? edge > power : edge < power)) power = edge;
+		if (greatest ? edge > value : edge < value) value = edge;
 	}
-	const value = Float64Array.of(power);
-	toScale(value, scale, 0, 1);
-	return value[0];
+	return value;
+}
+
+/** The pieces' extreme on the scale, smoothed as the video filter would; ±Infinity where there are no pieces. */
+function extremeOnScale(
+	pieces: Piece[],
+	bt: number,
+	greatest: boolean,
+	table: GreatestOfNoise | undefined,
+	smoothing: Smoothing | undefined,
+	scale: Scale,
+	random: Random
+): number {
+	const power = extremeOf(pieces, bt, greatest, table, random);
+	if (power < 0) return greatest ? -Infinity : Infinity;
+	const value = powerOnScale(power, scale);
+	return smoothing ? smoothing.extreme(value, pieces, greatest) : value;
 }

@@ -11,7 +11,7 @@ import type { Random, Seed } from './random';
 import type { EdgeConditions } from './shared-edges';
 import { SteadyNoiseTable } from './steady-noise-table';
 import { TimedSources, touching, type Burst } from './timed-sources';
-import { WindowSampler } from './window-sampler';
+import { WindowSampler, type WindowBurst } from './window-sampler';
 
 /** Windows followed in one bucket at most; the rest are taken to be like them. */
 const MOST_WINDOWS = 6;
@@ -34,8 +34,10 @@ export class LongBucketConditions {
 	constructor(
 		private readonly frame: Frame,
 		incident: Incident,
-		private readonly scale: Scale,
-		seed: Seed
+		scale: Scale,
+		seed: Seed,
+		/** Whether the edges of long bursts are followed: they matter to peaks, and vanish in averages. */
+		private readonly followsEdges: boolean
 	) {
 		const comesAndGoes = (t: IncidentLine['timing']): boolean => !!t && !!(t.gate || t.hop || t.pulse);
 		this.noise = new SteadyNoiseTable(frame, incident.noises.filter((n) => !n.timing));
@@ -46,7 +48,7 @@ export class LongBucketConditions {
 			incident.noises.filter((n) => n.timing),
 			seed
 		);
-		this.sampler = new WindowSampler(frame);
+		this.sampler = new WindowSampler(frame, scale);
 	}
 
 	start(row: RowContext): void {
@@ -137,7 +139,7 @@ export class LongBucketConditions {
 			const middle = (burst.startS + burst.stopS) / 2;
 			if (this.isShort(burst)) {
 				if (middle >= fromS && middle < toS) spans.push({ startS: burst.startS - half, stopS: burst.stopS + half });
-			} else
+			} else if (this.followsEdges)
 				for (const edge of [burst.startS, burst.stopS])
 					if (edge >= fromS && edge < toS) spans.push({ startS: edge - half, stopS: edge + half });
 		}
@@ -154,19 +156,32 @@ export class LongBucketConditions {
 		const taken = chosen.reduce((sum, s) => sum + s.stopS - s.startS, 0);
 		const scale = Math.min(all, frame.bucketS) / taken / frame.bucketS;
 		return chosen.map(({ startS, stopS }) => {
-			const near = bursts.filter((q) => q.stopS > startS - half && q.startS < stopS + half);
-			const local = near.map((q) => ({
-				line: shifted(q.line, startS),
-				startS: q.startS - startS,
-				stopS: q.stopS - startS
-			}));
-			for (const p of this.passing)
-				if (p.fromS < stopS && p.toS > startS)
-					local.push({ line: shifted(p.line, startS), startS: -Infinity, stopS: Infinity });
 			const length = Math.min(stopS - startS, sampler.longestS);
-			const got = sampler.sample(length, this.noise.at((startS + stopS) / 2), local, this.scale, random);
+			const v = this.noise.at((startS + stopS) / 2);
+			const got = sampler.sample(length, v, this.local(bursts, startS, startS + length), random);
 			return { ...got, share: (stopS - startS) * scale };
 		});
+	}
+
+	/** Everything that is on between two instants, seen from the first. */
+	private local(bursts: Burst[], startS: number, stopS: number): WindowBurst[] {
+		const half = 2 / this.frame.rbwHz;
+		const list: WindowBurst[] = [];
+		for (const q of bursts)
+			if (q.stopS > startS - half && q.startS < stopS + half)
+				list.push({ line: shifted(q.line, startS), startS: q.startS - startS, stopS: q.stopS - startS });
+		for (const p of this.passing)
+			if (p.fromS < stopS && p.toS > startS)
+				list.push({ line: shifted(p.line, startS), startS: -Infinity, stopS: Infinity });
+		return list;
+	}
+
+	/** The filtered video t seconds into the sweep, its filter run in over `runInS`. Asked in rising order of t. */
+	filteredInstant(t: number, runInS: number, random: Random): number {
+		const half = 2 / this.frame.rbwHz;
+		const startS = t - Math.min(runInS + half, this.sampler.longestS);
+		const bursts = touching(this.timed.bursts, this.instantCursor, startS - half, t + half);
+		return this.sampler.last(t - startS, this.noise.at(t), this.local(bursts, startS, t), random);
 	}
 
 	/** Conditions at the edge before bucket b. */

@@ -11,13 +11,15 @@ import { LongBucketConditions } from './long-conditions';
 import { detectLong } from './long-bucket';
 import type { Random, Seed } from './random';
 import { SharedEdges } from './shared-edges';
-import { toScale } from './video';
+import { Smoothing } from './smoothing';
+import { filtersVideo, powerOnScale, videoRunInS } from './video';
 
 export class LongSweep {
 	private readonly conditions: LongBucketConditions;
 	private readonly edges?: SharedEdges;
 	private readonly table?: GreatestOfNoise;
 	private readonly bt: number;
+	private readonly smoothing?: Smoothing;
 
 	constructor(
 		private readonly frame: Frame,
@@ -27,9 +29,11 @@ export class LongSweep {
 		seed: Seed
 	) {
 		this.bt = frame.rbwHz * frame.bucketS;
-		this.conditions = new LongBucketConditions(frame, incident, scale, seed);
-		if (detector === 'average' || detector === 'sample') return;
-		this.edges = new SharedEdges(frame);
+		const peaks = detector !== 'average' && detector !== 'sample';
+		this.conditions = new LongBucketConditions(frame, incident, scale, seed, peaks);
+		if (filtersVideo(frame)) this.smoothing = new Smoothing(frame, scale);
+		if (!peaks) return;
+		this.edges = new SharedEdges(frame, scale);
 		// half of 1/B at either end is followed, the rest is drawn
 		this.table = new GreatestOfNoise(this.bt - 1);
 	}
@@ -42,21 +46,25 @@ export class LongSweep {
 		else
 			for (let b = 0; b < this.frame.points; b++) {
 				const { pieces, windows } = this.conditions.bucket(b, random);
-				out[b] = detectLong(b, this.detector, this.scale, pieces, windows, this.bt, undefined, random);
+				out[b] = detectLong(b, this.detector, this.scale, pieces, windows, this.bt, undefined, undefined, random);
 			}
 	}
 
 	/** Values at the points stand so far apart that their noise is independent. */
 	private samples(random: Random, out: Float64Array): void {
-		const { frame } = this;
+		const { frame, conditions } = this;
 		for (let b = 0; b < frame.points; b++) {
-			const at = this.conditions.instant((b + 0.5) * frame.bucketS);
+			const t = (b + 0.5) * frame.bucketS;
+			if (this.smoothing) {
+				out[b] = conditions.filteredInstant(t, videoRunInS(frame.vbwHz), random);
+				continue;
+			}
+			const at = conditions.instant(t);
 			const a = Math.sqrt(at.v / 2);
 			const x = at.re + a * random.normal();
 			const y = at.im + a * random.normal();
-			out[b] = x * x + y * y;
+			out[b] = powerOnScale(x * x + y * y, this.scale);
 		}
-		toScale(out, this.scale, 0, frame.points);
 	}
 
 	private peaks(context: RowContext, random: Random, out: Float64Array): void {
@@ -69,7 +77,7 @@ export class LongSweep {
 			for (const piece of pieces) piece.share *= trim;
 			windows.push(edges!.window(b));
 			const plain = pieces.length === 1 && pieces[0].p === 0 && windows.length === 1;
-			out[b] = detectLong(b, this.detector, this.scale, pieces, windows, this.bt, plain ? this.table : undefined, random);
+			out[b] = detectLong(b, this.detector, this.scale, pieces, windows, this.bt, plain ? this.table : undefined, this.smoothing, random);
 		}
 	}
 }

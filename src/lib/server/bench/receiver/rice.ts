@@ -45,18 +45,18 @@ export function besselI1Scaled(x: number): number {
 
 /**
  * P(power < x): the noncentral chi-square law of two degrees of freedom as a Poisson mixture of gammas;
- * for s above 60 the amplitude is normal to better than 10⁻³.
+ * for s above 20 the amplitude is normal to better than 3·10⁻³.
  */
 export function riceCdf(x: number, s: number): number {
 	if (x <= 0) return 0;
-	if (s > 60) return normalCdf((Math.sqrt(x) - Math.sqrt(s) - 1 / (4 * Math.sqrt(s))) * Math.SQRT2);
+	if (s > 20) return normalCdf((Math.sqrt(x) - Math.sqrt(s) - 1 / (4 * Math.sqrt(s))) * Math.SQRT2);
 	// terms e^{−s}s^j/j! · P(j+1, x), P(j+1, x) = 1 − e^{−x}Σ_{i≤j} x^i/i!
 	let poisson = Math.exp(-s);
 	let term = Math.exp(-x);
 	let tail = term;
 	let sum = poisson * (1 - tail);
 	let weight = poisson;
-	for (let j = 1; j < 400; j++) {
+	for (let j = 1; j < 120; j++) {
 		poisson *= s / j;
 		term *= x / j;
 		tail += term;

@@ -13,6 +13,12 @@ export function toScale(power: Float64Array, scale: Scale, from: number, to: num
 	else if (scale === 'voltage') for (let i = from; i < to; i++) power[i] = Math.sqrt(power[i]);
 }
 
+/** One power in mW on the scale. */
+export function powerOnScale(power: number, scale: Scale): number {
+	if (scale === 'power') return power;
+	return scale === 'log' ? Math.log(Math.max(power, LEAST_POWER_MW)) : Math.sqrt(power);
+}
+
 /** A value on the scale (ln p, p or √p) as a level in dBm. */
 export function scaleToDbm(value: number, scale: Scale): number {
 	if (scale === 'log') return value / LN10_10;

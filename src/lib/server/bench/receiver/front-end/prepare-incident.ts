@@ -2,7 +2,7 @@
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { Scene } from '$lib/schemas/scene';
 import type { ResolvedSettings } from '$lib/schemas/settings';
-import { milliwattsToDbm } from '$lib/units/decibel';
+import { dbToPowerRatio, milliwattsToDbm } from '$lib/units/decibel';
 import type { Incident } from '../incident';
 import { chirpFactor } from '../resolution-filter';
 import type { Seed } from '../random';
@@ -16,7 +16,7 @@ import { incidentLines } from './incident-lines';
 import { incidentNoises } from './incident-noises';
 import { connectorPowerMw, inputProtection, isOverload } from './input-level';
 import { ownLines } from './own-lines';
-import { passStage } from './stage';
+import { amplify, passStage } from './stage';
 import { viewOf } from './view';
 
 /** Products this far under k·T₀·B at the mixer are dropped, dB. */
@@ -60,7 +60,7 @@ export function prepareIncident(
 const mixerGainDb = (profile: ReceiverProfile, settings: ResolvedSettings): number =>
 	(settings.preamp && profile.preamp ? profile.preamp.gainDb : 0) - settings.attenuationDb;
 
-/** The scene behind device and mixer, referred to the connector: a stage between two gains is one whose intercepts move by the gain. */
+/** The scene behind device and mixer, referred back to the connector. */
 function distorted(
 	scene: Scene,
 	profile: ReceiverProfile,
@@ -68,20 +68,17 @@ function distorted(
 	gainAt: (frequencyHz: number) => number,
 	seed: Seed
 ): Carried {
-	const gainDb = mixerGainDb(profile, settings);
-	const floorDbm = milliwattsToDbm(THERMAL_MW_PER_HZ * settings.rbwHz) - PRODUCT_UNDER_NOISE_DB - gainDb;
-	const referred = (interceptDbm: number | null) => (interceptDbm === null ? null : interceptDbm - gainDb);
 	const emitted = carriedFrom(
 		scene.emitters.map((emitter, index) => arrivalOf(emitter, index, settings.rbwHz, seed))
 	);
+	const gainDb = mixerGainDb(profile, settings);
+	const floorDbm = milliwattsToDbm(THERMAL_MW_PER_HZ * settings.rbwHz) - PRODUCT_UNDER_NOISE_DB;
 	const behindDevice = scene.device
-		? passStage(emitted, { ...scene.device, floorDbm: floorDbm - DEVICE_MARGIN_DB })
+		? passStage(emitted, { ...scene.device, floorDbm: floorDbm - gainDb - DEVICE_MARGIN_DB })
 		: emitted;
-	return passStage(connect(behindDevice, gainAt), {
-		toiDbm: referred(profile.toiDbm),
-		shiDbm: referred(profile.shiDbm),
-		floorDbm
-	});
+	const atMixer = amplify(connect(behindDevice, gainAt), dbToPowerRatio(gainDb));
+	const behindMixer = passStage(atMixer, { toiDbm: profile.toiDbm, shiDbm: profile.shiDbm, floorDbm });
+	return amplify(behindMixer, dbToPowerRatio(-gainDb));
 }
 
 /** True frequencies that the sweep can see anything at, the receiver's reference error included. */

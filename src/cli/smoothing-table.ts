@@ -1,0 +1,59 @@
+/**
+ * Measures what a video filter between B/20 and 10 B leaves of the extremes of noise in long buckets, by the bench's own sampled sweep,
+ * and writes src/lib/server/bench/receiver/smoothing-table.ts. Run with: npx tsx --tsconfig src/cli/tsconfig.json src/cli/smoothing-table.ts
+ */
+import { writeFileSync } from 'node:fs';
+import type { Scale } from '$lib/schemas/settings';
+import { meanOnScale } from '$lib/server/bench/receiver/average-laws';
+import { makeFrame, samplesPerBucket } from '$lib/server/bench/receiver/frame';
+import type { Incident } from '$lib/server/bench/receiver/incident';
+import { sampledRunInS } from '$lib/server/bench/receiver/narrow-video';
+import { SteadyNoise } from '$lib/server/bench/receiver/noise-contribution';
+import { Random } from '$lib/server/bench/receiver/random';
+import { SampledSweep } from '$lib/server/bench/receiver/sampled-sweep';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+
+const RATIOS = [0.05, 0.1, 0.2, 0.5, 1, 2, 3, 5, 10];
+const BT = 16;
+const ROWS = 24;
+const POINTS = 401;
+const RBW = 1000;
+
+function meanExtreme(scale: Scale, ratio: number, detector: 'positive-peak' | 'negative-peak'): number {
+	const bucketS = BT / RBW;
+	const settings = { points: POINTS, rbwHz: RBW, vbwHz: ratio * RBW, sweepTimeS: bucketS * (POINTS - 1), startHz: 1e6, spanHz: 0 };
+	const runIn = ratio >= 1000 ? 0 : sampledRunInS(settings.vbwHz, RBW);
+	const frame = makeFrame(settings as ResolvedSettings, 0, samplesPerBucket(RBW, bucketS, true), runIn);
+	const noise: Incident['noises'][number] = { variance: () => 1 };
+	const sweep = new SampledSweep(frame, detector, scale, [new SteadyNoise(noise, frame, 'noise')]);
+	const out = new Float64Array(POINTS);
+	let sum = 0;
+	for (let n = 0; n < ROWS; n++) {
+		sweep.row({ clockS: 0, random: (stream) => new Random('smoothing', n, stream) }, out);
+		sum += out.reduce((a, b) => a + b, 0);
+	}
+	return sum / ROWS / POINTS;
+}
+
+const table = Object.fromEntries(
+	(['log', 'power', 'voltage'] as const).map((scale) => {
+		const mean = meanOnScale(1, 0, scale);
+		const shares = (detector: 'positive-peak' | 'negative-peak') => {
+			const plain = meanExtreme(scale, 1e6, detector) - mean;
+			return RATIOS.map((r) => [Math.log10(r), (meanExtreme(scale, r, detector) - mean) / plain].map((x) => +x.toFixed(4)));
+		};
+		return [scale, { greatest: shares('positive-peak'), least: shares('negative-peak') }];
+	})
+);
+const pairs = (list: number[][]) => `[\n${list.map((p) => `\t\t\t[${p.join(', ')}]`).join(',\n')}\n\t\t]`;
+const body = Object.entries(table)
+	.map(([scale, t]) => `\t${scale}: {\n\t\tgreatest: ${pairs(t.greatest)},\n\t\tleast: ${pairs(t.least)}\n\t}`)
+	.join(',\n');
+writeFileSync(
+	'src/lib/server/bench/receiver/smoothing-table.ts',
+	`/** Made by src/cli/smoothing-table.ts: [log₁₀(VBW/B), share of the unfiltered extreme's distance from the mean]. */
+import type { Scale } from '$lib/schemas/settings';
+
+type Shares = readonly (readonly [number, number])[];
+export const SMOOTHING_TABLE: Record<Scale, { greatest: Shares; least: Shares }> = {\n${body}\n};\n`
+);
