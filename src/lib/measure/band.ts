@@ -2,7 +2,7 @@
 import { powerRatioToDb } from '$lib/units/decibel';
 import { pointsOf, type Stretch, stretchOf, sumCells } from './cells';
 import { noiseShare } from './noise-share';
-import { noiseSpreadDb } from './noise-statistics';
+import { sumSpreadDb } from './noise-statistics';
 import { needsSpan, type NoNumber, outsideTrace } from './reader';
 import type { Remark } from './remark';
 import { integralRemarks, outsideRemark } from './remarks';
@@ -34,7 +34,7 @@ export function bandPower(
 	const share = noiseShare(trace, first, last);
 	return {
 		levelDbm: powerRatioToDb(powerMw),
-		spreadDb: share * noiseSpreadDb(trace, effectivePoints),
+		spreadDb: share * sumSpreadDb(trace, effectivePoints),
 		remarks: [...integralRemarks(trace, stopHz - startHz, share), ...(stretch.cut ? [outsideRemark()] : [])],
 		stretch
 	};

@@ -41,7 +41,7 @@ export const overlap = (stretch: Stretch, index: number): number =>
 export interface CellSum {
 	/** Σ p·Δ/noise bandwidth, mW. */
 	powerMw: number;
-	/** Points of equal power that would stray as much: (Σp)²/Σp². */
+	/** Points of equal power that would weigh as much: (Σp)²/Σp². */
 	effectivePoints: number;
 }
 

@@ -1,7 +1,7 @@
 /** Power added up along a stretch, and where a share of it is reached. */
 import { dbmToMilliwatts } from '$lib/units/decibel';
 import { overlap, pointsOf, type Stretch } from './cells';
-import { noiseSpreadDb } from './noise-statistics';
+import { sumSpreadDb } from './noise-statistics';
 import { frequencyAt, stepHz, type Trace } from './trace';
 
 export interface Cumulative {
@@ -54,7 +54,7 @@ function noiseSpreadHz(trace: Trace, { stretch, shares }: Cumulative, cell: numb
 			sum += shares[i];
 			squares += shares[i] * shares[i];
 		}
-		return squares > 0 ? noiseSpreadDb(trace, (sum * sum) / squares) / (10 / Math.LN10) : 0;
+		return squares > 0 ? sumSpreadDb(trace, (sum * sum) / squares) / (10 / Math.LN10) : 0;
 	};
 	const spread = share * (1 - share) * Math.hypot(relative(0, cell + 1), relative(cell, shares.length));
 	// The density over one resolution bandwidth, since a single cell is a matter of chance.

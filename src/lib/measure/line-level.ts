@@ -1,18 +1,23 @@
 /** How sure the level of one point or one line is. */
-import { noiseShare } from './noise-share';
+import { isNoiseLike, noiseShare } from './noise-share';
 import { independentLag, pointSpreadDb } from './noise-statistics';
 import { isZeroSpan, stepHz, type Trace } from './trace';
+
+/** How much of what stands around a point behaves as noise: over the width of the filter, and enough independent points to tell. */
+export function shareAround(trace: Trace, index: number): number {
+	const last = trace.levelsDbm.length - 1;
+	const acrossLine = isZeroSpan(trace) ? 0 : trace.rbwHz / stepHz(trace);
+	const reach = Math.ceil(Math.max(8 * independentLag(trace), Math.min(acrossLine, last)));
+	return noiseShare(trace, Math.max(0, index - reach), Math.min(last, index + reach));
+}
 
 /**
  * Deviation in dB of the level at a point: what noise adds there, and what a line between two points loses.
  * @param index the point
  */
 export function levelSpreadDb(trace: Trace, index: number): number {
-	const last = trace.levelsDbm.length - 1;
-	const acrossLine = isZeroSpan(trace) ? 0 : trace.rbwHz / stepHz(trace);
-	const reach = Math.ceil(Math.max(4 * independentLag(trace), Math.min(acrossLine, last)));
-	const share = noiseShare(trace, Math.max(0, index - reach), Math.min(last, index + reach));
-	return Math.hypot(share * pointSpreadDb(trace), share === 1 ? 0 : betweenPointsDb(trace));
+	const share = shareAround(trace, index);
+	return Math.hypot(share * pointSpreadDb(trace), isNoiseLike(share) ? 0 : betweenPointsDb(trace));
 }
 
 /**

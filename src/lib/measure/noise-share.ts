@@ -1,6 +1,6 @@
 /** How much of what a window shows behaves as noise: a carrier's level is sure where a noise-like signal's is a matter of chance. */
 import { dbmToMilliwatts } from '$lib/units/decibel';
-import { independentLag, pointSpreadDb } from './noise-statistics';
+import { independentLag, pointSpreadDb, SINGLE_VALUE_DB } from './noise-statistics';
 import type { Trace } from './trace';
 
 /**
@@ -25,10 +25,16 @@ export function noiseShare(trace: Trace, from: number, to: number): number {
 		roughness += (power * third) ** 2;
 		weight += power * power;
 	}
-	const share = roughness / (20 * pointSpreadDb(trace) ** 2 * weight);
+	const pointDb = pointSpreadDb(trace);
+	// Single values of noise stray downwards most, where their weight is least: that leaves a third of the variance.
+	const seen = 1 - 0.67 * (pointDb / SINGLE_VALUE_DB) ** 2;
+	const share = roughness / (20 * pointDb ** 2 * weight);
 	if (!(share <= 4)) return shareOverMedian(levels, from, to, topDbm);
-	return share > 0.5 ? 1 : Math.sqrt(share);
+	return share > 0.5 * seen ? 1 : Math.sqrt(share);
 }
+
+/** Whether a share is more noise than line. */
+export const isNoiseLike = (share: number): boolean => share > 0.5;
 
 /** Noise beside a line moves its level by √(2·noise/line) of what it moves by alone. */
 function shareOverMedian(levels: ArrayLike<number>, from: number, to: number, topDbm: number): number {

@@ -76,6 +76,13 @@ export function noiseSpreadDb(
 	return onePointDb / Math.sqrt(averagedRows(trace) * Math.min(points, apart));
 }
 
+/**
+ * Deviation in dB of a sum of the powers of points that show noise.
+ * @param effectivePoints (Σp)²/Σp² of what the trace shows: its own chance makes them look fewer, by 1 + 1/n for n values a point
+ */
+export const sumSpreadDb = (trace: Trace, effectivePoints: number): number =>
+	noiseSpreadDb(trace, effectivePoints * (1 + 1 / independentValues(trace, 1)));
+
 /** Deviation in dB of one point that shows noise. */
 export const pointSpreadDb = (trace: Trace): number => noiseSpreadDb(trace, 1);
 

@@ -1,6 +1,7 @@
 /** Remarks that several kinds of reading share. */
-import { noiseShare } from './noise-share';
-import { independentLag, isAveraged, isHeld, isSweptTooFast, sweepTimeS } from './noise-statistics';
+import { shareAround } from './line-level';
+import { isNoiseLike } from './noise-share';
+import { isAveraged, isHeld, isSweptTooFast, sweepTimeS } from './noise-statistics';
 import { type Remark, remark } from './remark';
 import { sweepLossDb } from './resolution-filter';
 import { isZeroSpan, spanHz, stepHz, type Trace } from './trace';
@@ -49,12 +50,10 @@ export function noiseRemarks(trace: Trace): Remark[] {
 }
 
 /** What stands in the way of a line's level at a point. */
-export function lineRemarks(trace: Trace, index: number): Remark[] {
-	const reach = Math.max(4 * independentLag(trace), 1);
-	const last = trace.levelsDbm.length - 1;
-	const share = noiseShare(trace, Math.max(0, index - reach), Math.min(last, index + reach));
-	return [...(share === 1 ? noiseRemarks(trace) : []), ...sparseLineRemarks(trace)];
-}
+export const lineRemarks = (trace: Trace, index: number): Remark[] => [
+	...(isNoiseLike(shareAround(trace, index)) ? noiseRemarks(trace) : []),
+	...sparseLineRemarks(trace)
+];
 
 /** Points farther apart than the filter is wide, with a detector that looks only at the points themselves. */
 export function sparseLineRemarks(trace: Trace): Remark[] {
@@ -80,8 +79,8 @@ export function integralRemarks(
 	share: number,
 	largestRbwShare = 0.05
 ): Remark[] {
-	const found = share === 1 ? noiseRemarks(trace) : [];
-	if (share === 1 && trace.scale !== 'power' && isAveraged(trace)) {
+	const found = isNoiseLike(share) ? noiseRemarks(trace) : [];
+	if (isNoiseLike(share) && trace.scale !== 'power' && isAveraged(trace)) {
 		const lowDb = trace.scale === 'log' ? '2.5' : '1.05';
 		found.push(
 			remark(

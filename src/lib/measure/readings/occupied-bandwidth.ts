@@ -10,8 +10,8 @@ import { isZeroSpan } from '../trace';
 
 /** Beyond this the filter adds more than 0.5 % to the width. */
 const LARGEST_RBW_SHARE = 0.03;
-/** Noise in the window over the power in it: −35 dB. */
-const LARGEST_NOISE_SHARE = 10 ** -3.5;
+/** Noise in the window over the power in it: −34 dB, so that 35 dB of signal over noise is still enough. */
+const LARGEST_NOISE_SHARE = 10 ** -3.4;
 
 export const occupiedBandwidth: Reader<'occupied-bandwidth'> = (trace, { centreHz, widthHz, percent }) => {
 	if (isZeroSpan(trace)) return needsSpan();

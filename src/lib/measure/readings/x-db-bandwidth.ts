@@ -1,7 +1,7 @@
 /** The width between the outermost points where the trace lies x dB under its highest. */
 import { highestPoint } from '../find-peaks';
 import { levelSpreadDb } from '../line-level';
-import { noiseShare } from '../noise-share';
+import { isNoiseLike, noiseShare } from '../noise-share';
 import { pointSpreadDb } from '../noise-statistics';
 import { needsSpan, noNumber, type Reader } from '../reader';
 import { type Remark, remark } from '../remark';
@@ -59,7 +59,7 @@ function slope(trace: Trace, index: number): number {
 }
 
 function widthRemarks(trace: Trace, widthHz: number, db: number, share: number): Remark[] {
-	const found = share === 1 ? noiseRemarks(trace) : [];
+	const found = isNoiseLike(share) ? noiseRemarks(trace) : [];
 	const ownHz = filterWidthHz(db, trace.rbwHz);
 	if (widthHz < 3 * ownHz) {
 		const percent = Math.min(100, (100 * ownHz) / widthHz).toFixed(0);
