@@ -1,15 +1,26 @@
 import { scaleDensity } from '$lib/server/bench/signal/scale-density';
 import type { Density } from '$lib/server/bench/signal/emitter-kind';
 import type { Carried, CarriedDensity, CarriedLine } from './carried';
+import type { Connection } from './connection';
 
 /** Pieces that a spectrum is taken in to find the mean gain over it. */
 const PIECES = 32;
 
-/** Everything behind a connection of power gain `gainAt`. */
-export function connect({ lines, densities }: Carried, gainAt: (frequencyHz: number) => number): Carried {
+/** Everything behind a connection. */
+export function connect(carried: Carried, connection: Connection): Carried {
+	if (connection.isFlat) return amplify(carried, connection.at(0));
 	return {
-		lines: lines.map((line) => connectLine(line, gainAt)),
-		densities: densities.map((carried) => connectDensity(carried, gainAt))
+		lines: carried.lines.map((line) => connectLine(line, connection.at)),
+		densities: carried.densities.map((density) => connectDensity(density, connection.at))
+	};
+}
+
+/** Everything at another level: power times `gain`. */
+export function amplify({ lines, densities }: Carried, gain: number): Carried {
+	const voltage = Math.sqrt(gain);
+	return {
+		lines: lines.map((line) => ({ ...line, re: line.re * voltage, im: line.im * voltage })),
+		densities: densities.map((one) => ({ ...one, density: scaleDensity(one.density, gain) }))
 	};
 }
 

@@ -3,16 +3,23 @@ import type { ResolvedSettings } from '$lib/schemas/settings';
 import { dbToPowerRatio } from '$lib/units/decibel';
 import { tableDb } from '../table-db';
 
+/** Power gain, linear, against frequency. */
+export interface Connection {
+	/** Whether it is the same everywhere. */
+	isFlat: boolean;
+	at(frequencyHz: number): number;
+}
+
 /**
  * Power gain, linear, from the reference plane to the connector against frequency: the scene's path and the pad.
  * The pad is part of what is connected: what it takes off is put back on the screen only by a stated correction.
  */
-export function connectionGain(scene: Scene, settings: ResolvedSettings): (frequencyHz: number) => number {
+export function connectionGain(scene: Scene, settings: ResolvedSettings): Connection {
 	const { padDb } = settings.input;
 	const path = scene.path?.map(({ frequencyHz, lossDb }) => ({ frequencyHz, db: lossDb }));
 	if (!path || path.length === 1) {
 		const gain = dbToPowerRatio(-padDb - (path ? path[0].db : 0));
-		return () => gain;
+		return { isFlat: true, at: () => gain };
 	}
-	return (frequencyHz) => dbToPowerRatio(-padDb - tableDb(path, frequencyHz));
+	return { isFlat: false, at: (frequencyHz) => dbToPowerRatio(-padDb - tableDb(path, frequencyHz)) };
 }

@@ -8,15 +8,15 @@ import { chirpFactor } from '../resolution-filter';
 import type { Seed } from '../random';
 import { arrivalOf } from './arrival';
 import { carriedFrom, type Carried } from './carried';
-import { connect } from './connect';
-import { connectionGain } from './connection';
+import { amplify, connect } from './connect';
+import { connectionGain, type Connection } from './connection';
 import { THERMAL_MW_PER_HZ } from './floor';
 import { incidentEnvelopes } from './incident-envelopes';
 import { incidentLines } from './incident-lines';
 import { incidentNoises } from './incident-noises';
 import { connectorPowerMw, inputProtection, isOverload } from './input-level';
 import { ownLines } from './own-lines';
-import { amplify, passStage } from './stage';
+import { passStage } from './stage';
 import { viewOf } from './view';
 
 /** Products this far under k·T₀·B at the mixer are dropped, dB. */
@@ -40,11 +40,11 @@ export function prepareIncident(
 ): Incident {
 	const connected: Scene = settings.input.connected ? scene : { emitters: [] };
 	const view = viewOf(profile, settings);
-	const gainAt = connectionGain(connected, settings);
-	const atMixer = distorted(connected, profile, settings, gainAt, seed);
+	const connection = connectionGain(connected, settings);
+	const atMixer = distorted(connected, profile, settings, connection, seed);
 	const own = ownLines(profile, settings, view.receiver, seed);
 	const { swept, arrived } = incidentLines(atMixer.lines, bandOf(profile, settings), view.receiver);
-	const connectorMw = connectorPowerMw(connected, gainAt);
+	const connectorMw = connectorPowerMw(connected, connection.at);
 	const mixerDbm = milliwattsToDbm(connectorMw) + mixerGainDb(profile, settings);
 	return {
 		lines: [...swept, ...own.map(({ line }) => line)],
@@ -65,7 +65,7 @@ function distorted(
 	scene: Scene,
 	profile: ReceiverProfile,
 	settings: ResolvedSettings,
-	gainAt: (frequencyHz: number) => number,
+	connection: Connection,
 	seed: Seed
 ): Carried {
 	const emitted = carriedFrom(
@@ -76,7 +76,7 @@ function distorted(
 	const behindDevice = scene.device
 		? passStage(emitted, { ...scene.device, floorDbm: floorDbm - gainDb - DEVICE_MARGIN_DB })
 		: emitted;
-	const atMixer = amplify(connect(behindDevice, gainAt), dbToPowerRatio(gainDb));
+	const atMixer = amplify(connect(behindDevice, connection), dbToPowerRatio(gainDb));
 	const behindMixer = passStage(atMixer, { toiDbm: profile.toiDbm, shiDbm: profile.shiDbm, floorDbm });
 	return amplify(behindMixer, dbToPowerRatio(-gainDb));
 }

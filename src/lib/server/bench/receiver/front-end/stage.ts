@@ -1,18 +1,8 @@
 /** A nonlinear stage on the way: the device, the mixer. */
 import type { Line } from '$lib/server/bench/signal/emitter-kind';
 import { distort, type NonlinearLimits } from '$lib/server/bench/signal/nonlinearity';
-import { scaleDensity } from '$lib/server/bench/signal/scale-density';
 import type { Arrival } from './arrival';
 import { isSteady, type Carried, type CarriedDensity, type CarriedLine, type Origin } from './carried';
-
-/** What is carried, at another level: all amplitudes times √gain. */
-export function amplify({ lines, densities }: Carried, gain: number): Carried {
-	const voltage = Math.sqrt(gain);
-	return {
-		lines: lines.map((line) => ({ ...line, re: line.re * voltage, im: line.im * voltage })),
-		densities: densities.map((one) => ({ ...one, density: scaleDensity(one.density, gain) }))
-	};
-}
 
 /**
  * What a stage makes of what is carried. Lines enter together, everything on at once. So do the densities that are always on;
