@@ -23,7 +23,7 @@ export interface StartedAttempt {
  * a try is never spent twice on one click. However many ask at once, no more than the tries allowed are ever started.
  * @throws DomainError `not_found` for an exercise that isn't published; `conflict` when the tries are used up
  */
-export function startAttempt(actor: Actor, exerciseSlug: string, now: Date): Promise<StartedAttempt> {
+export async function startAttempt(actor: Actor, exerciseSlug: string, now: Date): Promise<StartedAttempt> {
 	if (!may(actor, 'attempt.start', { ownerId: actor.id })) {
 		throw new DomainError('forbidden', 'Exercises are done by apprentices and instructors.');
 	}
