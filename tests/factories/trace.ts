@@ -100,7 +100,8 @@ export function buildNoise(
 	const clean = buildTrace({ sweepTimeS, ...rest }, (frequencyHz) =>
 		toDb(toMw(meanDbm) + toMw(extraDbm(frequencyHz)))
 	);
-	const bucket = () => Array.from({ length: BUCKET_VALUES }, () => -Math.log(1 - draw()));
+	const bucketValues = clean.detector === 'sample' ? 1 : BUCKET_VALUES;
+	const bucket = () => Array.from({ length: bucketValues }, () => -Math.log(1 - draw()));
 	const rows = Array.from({ length: rowCount }, () =>
 		Array.from(clean.levelsDbm, (levelDbm, i) => levelDbm + toDb(detect(clean.detector, bucket(), i)))
 	);

@@ -66,9 +66,11 @@ export function noiseSpreadDb(
 	points: number,
 	scale: TraceScale = isAveraged(trace) ? trace.scale : 'power'
 ): number {
-	const peaked = trace.detector === 'positive-peak' || trace.mode === 'max-hold';
-	const extreme = peaked || trace.detector === 'negative-peak' || trace.detector === 'rise-fall';
-	if (!extreme && trace.mode !== 'min-hold') return averageSpreadDb(scale, independentValues(trace, points));
+	// Rise-fall shows crests on every other point: they carry what power it shows.
+	const peaked =
+		trace.detector === 'positive-peak' || trace.detector === 'rise-fall' || trace.mode === 'max-hold';
+	const lowest = trace.detector === 'negative-peak' || trace.mode === 'min-hold';
+	if (!peaked && !lowest) return averageSpreadDb(scale, independentValues(trace, points));
 	const bucketValues = atLeastOne(VALUES_PER_RBW_SECOND.power * trace.rbwHz * pointTimeS(trace));
 	const heldRows = trace.mode === 'max-hold' ? rows(trace) : 1;
 	const onePointDb = peaked ? maximumSpreadDb(bucketValues * heldRows) : SINGLE_VALUE_DB;
