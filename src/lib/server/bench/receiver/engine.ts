@@ -7,10 +7,12 @@ import { bucketSeconds, makeFrame, samplesPerBucket, tunedHz, type Frame } from 
 import type { Incident } from './incident';
 import { LineContribution } from './line-contribution';
 import { LongSweep } from './long-sweep';
+import { MovingLine } from './moving-line';
 import { sampledRunInS } from './narrow-video';
 import { SteadyNoise, TimedNoise } from './noise-contribution';
 import type { Seed } from './random';
 import { SampledSweep } from './sampled-sweep';
+import { SkirtContribution } from './skirt-contribution';
 import { videoKind } from './video';
 
 /** Buckets longer than this (in 1/B) follow the laws. */
@@ -34,7 +36,8 @@ export function makeEngine(
 	const bt = rbwHz * bucketS;
 	const peaks = detector !== 'average' && detector !== 'sample';
 	const perBucket = samplesPerBucket(rbwHz, bucketS, peaks);
-	const needsWaveform = incident.envelopes.length > 0 && perBucket * points <= MOST_ENVELOPE_SAMPLES;
+	const needsWaveform =
+		incident.envelopes.some((e) => e.emitter.kind === 'digital' || e.emitter.kind === 'msk') && perBucket * points <= MOST_ENVELOPE_SAMPLES;
 	if (bt <= LONG_BUCKET || needsWaveform) {
 		const video = videoKind(vbwHz, rbwHz);
 		const frame = makeFrame(settings, frequencyError, perBucket, video === 'wide' ? 0 : sampledRunInS(vbwHz, rbwHz));
@@ -55,7 +58,16 @@ function contributions(incident: Incident, frame: Frame, seed: Seed): Contributi
 	return [
 		...noises,
 		...incident.lines.map((line) => new LineContribution(line, floorMw, seed)),
-		...incident.envelopes.map((envelope) => new EnvelopeContribution(envelope, frame, seed))
+		...incident.lines.flatMap((line, i) =>
+			line.skirt && !line.timing && SkirtContribution.matters(line, line.skirt, frame, floorMw)
+				? [new SkirtContribution(line, line.skirt, frame, `skirt/${i}`)]
+				: []
+		),
+		...incident.envelopes.map((envelope) =>
+			envelope.emitter.kind === 'digital' || envelope.emitter.kind === 'msk'
+				? new EnvelopeContribution(envelope, frame, seed)
+				: new MovingLine(envelope, frame, seed)
+		)
 	];
 }
 

@@ -61,16 +61,44 @@ export class GreatestOfNoise {
 	}
 }
 
-/** ln x at which a rising ln P(x) reaches `target`, by bracketing from a guess and bisection (40 halvings of at most 16 e-folds). */
+/** Answers nearer than this (in ln x) are the same: 0.004 dB. */
+const CLOSE = 1e-3;
+
+/**
+ * ln x at which a rising ln P(x) reaches `target`: secants on ln(−ln P), which is nearly straight there, inside a bracket
+ * that bisects whenever a secant would leave it.
+ */
 export function solveLog(logP: (x: number) => number, target: number, guess: number): number {
+	const miss = (y: number): number => Math.log(-logP(Math.exp(y)) / -target);
 	let low = guess;
+	let fLow = miss(low);
 	let high = guess;
-	for (let step = 0.25; logP(Math.exp(low)) > target && low > -60; step *= 2) low -= step;
-	for (let step = 0.25; logP(Math.exp(high)) < target && high < 60; step *= 2) high += step;
-	for (let i = 0; i < 40 && high - low > 1e-4; i++) {
-		const middle = (low + high) / 2;
-		if (logP(Math.exp(middle)) < target) low = middle;
-		else high = middle;
+	let fHigh = fLow;
+	// the miss falls as y rises: low keeps it above zero, high below
+	for (let step = 0.3; !(fLow > 0) && low > -80; step *= 2) {
+		high = low;
+		fHigh = fLow;
+		low -= step;
+		fLow = miss(low);
+	}
+	for (let step = 0.3; !(fHigh < 0) && high < 80; step *= 2) {
+		low = high;
+		fLow = fHigh;
+		high += step;
+		fHigh = miss(high);
+	}
+	for (let i = 0; i < 40 && high - low > CLOSE; i++) {
+		const secant = low + (fLow / (fLow - fHigh)) * (high - low);
+		const y = i % 3 < 2 && secant > low && secant < high ? secant : (low + high) / 2;
+		const f = miss(y);
+		if (Math.abs(f) < CLOSE) return y;
+		if (f > 0) {
+			low = y;
+			fLow = f;
+		} else {
+			high = y;
+			fHigh = f;
+		}
 	}
 	return (low + high) / 2;
 }

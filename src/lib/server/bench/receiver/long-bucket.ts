@@ -59,11 +59,18 @@ export function extremeOf(
 		return Math.exp(
 			solveLog((x) => sum(active, (q) => logBelow(x / q.v, q.p / q.v, bt * q.share)), -draw, Math.log(active[0].v + active[0].p))
 		);
-	// P(least > x) falls with x: solve for its negative
+	// −ln P(least > x) rises with x; its inverse is what the solver expects to fall
 	return Math.exp(
-		solveLog((x) => -sum(active, (q) => logAbove(x / q.v, q.p / q.v, bt * q.share)), draw, Math.log(active[0].v * 1e-3))
+		solveLog(
+			(x) => 1 / sum(active, (q) => logAbove(x / q.v, q.p / q.v, bt * q.share)),
+			-1 / draw,
+			Math.log(active[0].v * 1e-3)
+		)
 	);
 }
+
+/** Pieces whose joint law is solved. */
+const MOST_PIECES = 4;
 
 const sum = (pieces: Piece[], f: (piece: Piece) => number): number => {
 	let total = 0;
@@ -71,14 +78,14 @@ const sum = (pieces: Piece[], f: (piece: Piece) => number): number => {
 	return total;
 };
 
-/** Only pieces that could hold the extreme: within 20 dB of the strongest for peaks (all for minima), most likely first, eight at most. */
+/** Only pieces that could hold the extreme: within 20 dB of the strongest for peaks (all for minima), most likely first. */
 function strongest(pieces: Piece[], greatest: boolean): Piece[] {
 	const level = (q: Piece): number => (greatest ? q.v * 8 + q.p : -(q.v + q.p));
 	const sorted = [...pieces].sort((a, b) => level(b) - level(a));
 	const kept = greatest ? sorted.filter((q) => q.v * 8 + q.p > 0.01 * (sorted[0].v * 8 + sorted[0].p)) : sorted;
-	if (kept.length <= 8) return kept;
+	if (kept.length <= MOST_PIECES) return kept;
 	// the dropped ones' time is given to the kept ones in proportion
-	const top = kept.slice(0, 8);
+	const top = kept.slice(0, MOST_PIECES);
 	const scale = sum(kept, (q) => q.share) / sum(top, (q) => q.share);
 	return top.map((q) => ({ ...q, share: q.share * scale }));
 }

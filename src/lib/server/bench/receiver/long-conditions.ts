@@ -4,9 +4,11 @@ import { addBurst } from './burst-response';
 import type { RowContext } from './contribution';
 import type { Frame } from './frame';
 import type { Incident, IncidentLine } from './incident';
+import { InnerSkirts } from './inner-skirts';
 import { passing, reachHz } from './line-contribution';
 import { addLineAt, type PassingLine } from './line-response';
 import type { Piece, Window } from './long-bucket';
+import { ModulatedSources } from './modulated-sources';
 import type { Random, Seed } from './random';
 import type { EdgeConditions } from './shared-edges';
 import { SteadyNoiseTable } from './steady-noise-table';
@@ -23,6 +25,7 @@ export class LongBucketConditions {
 	private readonly steady: IncidentLine[];
 	private readonly timed: TimedSources;
 	private readonly sampler: WindowSampler;
+	private readonly modulated: ModulatedSources;
 	private passing: { line: PassingLine; fromS: number; toS: number }[] = [];
 	private burstCursor = { at: 0 };
 	private stretchCursor = { at: 0 };
@@ -40,8 +43,13 @@ export class LongBucketConditions {
 		private readonly followsEdges: boolean
 	) {
 		const comesAndGoes = (t: IncidentLine['timing']): boolean => !!t && !!(t.gate || t.hop || t.pulse);
-		this.noise = new SteadyNoiseTable(frame, incident.noises.filter((n) => !n.timing));
 		this.steady = incident.lines.filter((l) => !comesAndGoes(l.timing));
+		const inner = new InnerSkirts(frame, this.steady.filter((l) => !l.timing));
+		this.noise = new SteadyNoiseTable(frame, [
+			...incident.noises.filter((n) => !n.timing),
+			{ variance: (tunedHz) => inner.at(tunedHz) }
+		]);
+		this.modulated = new ModulatedSources(frame, incident.envelopes, seed);
 		this.timed = new TimedSources(
 			frame,
 			incident.lines.filter((l) => comesAndGoes(l.timing)),
@@ -66,6 +74,7 @@ export class LongBucketConditions {
 			return { line, fromS: Math.min(a, b), toS: Math.max(a, b) };
 		});
 		this.timed.start(row);
+		this.modulated.start(row.clockS);
 		this.burstCursor = { at: 0 };
 		this.stretchCursor = { at: 0 };
 		this.instantCursor = { at: 0 };
@@ -80,21 +89,37 @@ export class LongBucketConditions {
 		const margin = 2 / frame.rbwHz;
 		const bursts = touching(this.timed.bursts, this.burstCursor, fromS - margin, toS + margin);
 		const stretches = touching(this.timed.stretches, this.stretchCursor, fromS, toS);
-		if (lines.length === 0 && bursts.length === 0 && stretches.length === 0)
+		const modulated = this.modulated.within(fromS, toS);
+		if (lines.length === 0 && bursts.length === 0 && stretches.length === 0 && !modulated)
 			return { pieces: this.noise.pieces(b), windows: [] };
 		const windows = this.windows(b, bursts, random);
 		const windowShare = windows.reduce((sum, w) => sum + w.share, 0);
 		const long = bursts.filter((q) => !this.isShort(q));
-		const times = this.nodes(fromS, toS, lines.length + long.length, [...long, ...stretches], random);
+		const beating = lines.length + long.length + (modulated ? 2 : 0);
+		const times = this.nodes(fromS, toS, beating, [...long, ...stretches], random);
 		const rest = Math.max(0, 1 - windowShare);
-		const pieces = times.map(({ t, share }) => {
-			this.out.fill(0);
-			for (const line of lines) addLineAt(frame, line, t, this.out);
-			for (const burst of long) if (t >= burst.startS && t < burst.stopS) addLineAt(frame, burst.line, t, this.out);
+		const { out } = this;
+		const fixed = (t: number): number => {
+			out.fill(0);
+			for (const line of lines) addLineAt(frame, line, t, out);
+			for (const burst of long) if (t >= burst.startS && t < burst.stopS) addLineAt(frame, burst.line, t, out);
 			let v = this.noise.at(t);
-			for (const s of stretches) if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);
-			return { share: share * rest, v, p: this.out[0] * this.out[0] + this.out[1] * this.out[1] };
+			for (const s of stretches)
+				if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);
+			return v;
+		};
+		const pieces = times.map(({ t, share }) => {
+			const v = fixed(t);
+			if (modulated) this.modulated.addAt(t, out, random);
+			return { share: share * rest, v, p: out[0] * out[0] + out[1] * out[1] };
 		});
+		if (modulated && this.followsEdges)
+			for (const greatest of [true, false]) {
+				const { t } = times[Math.floor(random.uniform() * times.length)];
+				const v = fixed(t);
+				if (this.modulated.addExtremeAt(t, frame.bucketS, greatest, out, random))
+					pieces.push({ share: pieces[0].share / 4, v, p: out[0] * out[0] + out[1] * out[1] });
+			}
 		return { pieces, windows };
 	}
 
@@ -144,6 +169,7 @@ export class LongBucketConditions {
 					if (edge >= fromS && edge < toS) spans.push({ startS: edge - half, stopS: edge + half });
 		}
 		if (spans.length === 0) return [];
+		spans.sort((a, b) => a.startS - b.startS);
 		// neighbours closer than their reach share the time between them
 		for (let i = 1; i < spans.length; i++)
 			if (spans[i].startS < spans[i - 1].stopS) {
@@ -185,12 +211,12 @@ export class LongBucketConditions {
 	}
 
 	/** Conditions at the edge before bucket b. */
-	edge(b: number): EdgeConditions {
-		return this.instant(b * this.frame.bucketS);
+	edge(b: number, random: Random): EdgeConditions {
+		return this.instant(b * this.frame.bucketS, random);
 	}
 
 	/** The filter's answer t seconds into the sweep: amplitude of all lines, and the noise beside them. Asked in rising order of t. */
-	instant(t: number): EdgeConditions {
+	instant(t: number, random: Random): EdgeConditions {
 		const { frame, out } = this;
 		out.fill(0);
 		for (const p of this.passing) if (p.fromS <= t && p.toS >= t) addLineAt(frame, p.line, t, out);
@@ -202,6 +228,7 @@ export class LongBucketConditions {
 			out[0] += this.x[0];
 			out[1] += this.y[0];
 		}
+		this.modulated.addAt(t, out, random);
 		let v = this.noise.at(t);
 		for (const s of this.timed.stretches)
 			if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);

@@ -59,7 +59,7 @@ export class LongSweep {
 				out[b] = conditions.filteredInstant(t, videoRunInS(frame.vbwHz), random);
 				continue;
 			}
-			const at = conditions.instant(t);
+			const at = conditions.instant(t, random);
 			const a = Math.sqrt(at.v / 2);
 			const x = at.re + a * random.normal();
 			const y = at.im + a * random.normal();
@@ -69,7 +69,7 @@ export class LongSweep {
 
 	private peaks(context: RowContext, random: Random, out: Float64Array): void {
 		const { frame, edges, conditions } = this;
-		edges!.draw(context.random('edges'), (b) => conditions.edge(b));
+		edges!.draw(context.random('edges'), (b) => conditions.edge(b, random));
 		for (let b = 0; b < frame.points; b++) {
 			const { pieces, windows } = conditions.bucket(b, random);
 			const free = pieces.reduce((sum, q) => sum + q.share, 0);

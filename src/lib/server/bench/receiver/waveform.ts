@@ -39,7 +39,8 @@ export function digitalWaveform(emitter: EmitterOf<'digital'>, hash: SymbolHash)
 				const whole = Math.floor(u);
 				// table index of the pulse's value for symbol whole + j: (u − whole + halfSymbols − j)·perSymbol from its left end
 				const at = (u - whole + last) * perSymbol;
-				const cell = Math.floor(at);
+				// rounding must not carry the position past the pulse's end
+				const cell = Math.min(Math.floor(at), (last + 1) * perSymbol - 1);
 				const blend = at - cell;
 				let x = 0;
 				let y = 0;

@@ -4,6 +4,7 @@ import type { Arrival } from './arrival';
 import { pacemaker, type CarriedDensity } from './carried';
 import { densityShare } from './density-share';
 import { FilteredPower } from './filtered-power';
+import { SKIRT_FROM_RBW } from './filtered-skirt';
 import type { ArrivedLine } from './incident-lines';
 import { skirtPower } from './line-skirts';
 import { addDensity, emptyGroup, narrowWidthHz, type NoiseGroup } from './noise-group';
@@ -30,7 +31,12 @@ export function incidentNoises(
 	for (const { line, skirts, arrivals } of lines) {
 		const group = groupOf(arrivals);
 		for (const { noise, powerMw } of skirts)
-			group.skirted.push({ frequencyHz: line.frequencyHz, powerMw, skirt: view.filteredSkirt(noise) });
+			group.skirted.push({
+				frequencyHz: line.frequencyHz,
+				powerMw,
+				skirt: view.filteredSkirt(noise),
+				fromHz: SKIRT_FROM_RBW * view.rbwHz + strayHz(arrivals)
+			});
 	}
 	const noises = [...groups].flatMap(([owner, group]) => groupNoise(owner, group, view));
 	const narrow = [...groups].flatMap(([owner, group]) =>
@@ -38,6 +44,14 @@ export function incidentNoises(
 	);
 	return [...noises, ...narrow];
 }
+
+/** How far a carrier that moves by its own slow modulation strays, Hz; 0 for one that stands. */
+const strayHz = (arrivals: readonly Arrival[]): number =>
+	arrivals.reduce((most, { waveform }) => {
+		if (waveform?.kind === 'fm') return Math.max(most, waveform.deviationHz);
+		if (waveform?.kind === 'pm') return Math.max(most, waveform.deviationRad * waveform.modulatingHz);
+		return most;
+	}, 0);
 
 /** The emitter whose schedule the sweep follows; null for what is always on to the filter's eye. */
 function scheduled(arrivals: readonly Arrival[]): Arrival | null {

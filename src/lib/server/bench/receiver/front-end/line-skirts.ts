@@ -38,8 +38,10 @@ export function skirtPower(
 	return (frequencyHz) => {
 		let sum = 0;
 		for (const line of counted) {
-			if (Math.abs(frequencyHz - line.aboutHz) < line.fromHz) continue;
-			sum += line.powerMw * line.skirt.at(Math.abs(frequencyHz - line.frequencyHz));
+			const offsetHz = Math.abs(frequencyHz - line.frequencyHz);
+			if (Math.abs(frequencyHz - line.aboutHz) >= line.fromHz) sum += line.powerMw * line.skirt.at(offsetHz);
+			// a carrier that moves through the filter is elsewhere most of the time: its skirt stays, no nearer than 3.5 B
+			else if (line.fromHz > nearestHz) sum += line.powerMw * line.skirt.at(Math.max(nearestHz, offsetHz));
 		}
 		return sum;
 	};

@@ -1,0 +1,138 @@
+/**
+ * Phase noise close to its carrier: conjugate sidebands in quadrature with the line, so that inside the filter they turn its phase
+ * and leave its level. Followed within 3.5 B of the line; farther out the skirt is a density (the front end's business).
+ */
+import FFT from 'fft.js';
+import type { PhaseNoisePoint } from '$lib/schemas/scene';
+import { integratedPhaseNoise, phaseNoiseIntegral } from '../signal/phase-noise';
+import { reachIndexes, type Contribution, type RowContext } from './contribution';
+import type { Frame } from './frame';
+import { SKIRT_FROM_RBW } from './front-end/filtered-skirt';
+import type { IncidentLine } from './incident';
+import { passing } from './line-contribution';
+
+/** The impulse response is cut here, in 1/B. */
+const CUT_RBW = 1.15;
+/** The lattice carries what the filter sees from 3.5 B away without folding: 12 samples per 1/B. */
+const PER_RBW = 12;
+/** A skirt weaker than this against the noise beside it is left out. */
+const NEGLIGIBLE = 1e-3;
+
+export class SkirtContribution implements Contribution {
+	/** √carrier power over the line's amplitude: L is counted from the whole carrier. */
+	private readonly whole: number;
+	private readonly within: (offsetHz: number) => number;
+	private readonly fine: number;
+	private readonly stepS: number;
+	private readonly taps: Float64Array;
+	private readonly half: number;
+	private plan?: { from: number; to: number; count: number; fft: FFT; size: number; bins: Float64Array };
+
+	constructor(
+		private readonly line: IncidentLine,
+		skirts: PhaseNoisePoint[][],
+		frame: Frame,
+		private readonly stream: string
+	) {
+		const variance = skirts.reduce((sum, points) => sum + integratedPhaseNoise(points), 0);
+		// powers add; what stays in the line is exp(−σ²), the skirts hold the rest in the shape of L
+		this.whole = Math.exp(variance / 2);
+		const scale = variance > 0 ? -Math.expm1(-variance) / variance : 0;
+		const integrals = skirts.map((points) => phaseNoiseIntegral(points));
+		this.within = (f) => scale * integrals.reduce((sum, integral) => sum + integral(f), 0);
+		this.fine = Math.max(1, Math.ceil(PER_RBW * frame.rbwHz * frame.stepS));
+		this.stepS = frame.stepS / this.fine;
+		this.half = Math.ceil(CUT_RBW / frame.rbwHz / this.stepS);
+		const decay = (Math.PI * Math.PI) / frame.c;
+		const taps = Float64Array.from({ length: 2 * this.half + 1 }, (_, j) =>
+			Math.exp(-decay * ((j - this.half) * this.stepS) ** 2)
+		);
+		const sum = taps.reduce((a, b) => a + b, 0);
+		this.taps = taps.map((g) => g / sum);
+	}
+
+	/** Whether the skirt shows at all beside noise of this power through B. */
+	static matters(line: IncidentLine, skirts: PhaseNoisePoint[][], frame: Frame, floorMw: number): boolean {
+		const power = line.re * line.re + line.im * line.im;
+		const near = skirts.reduce((sum, points) => {
+			const within = phaseNoiseIntegral(points);
+			return sum + within(3.5 * frame.rbwHz) - within(frame.rbwHz);
+		}, 0);
+		return power * near > NEGLIGIBLE * floorMw;
+	}
+
+	addTo(row: RowContext, frame: Frame, re: Float64Array, im: Float64Array): void {
+		const line = passing(this.line, frame, row.clockS);
+		const { from, to } = reachIndexes(frame, line.offsetHz, line.passingHzPerS, SKIRT_FROM_RBW * frame.rbwHz);
+		if (to <= from) return;
+		const { count, fft, size, bins } = this.prepared(from, to);
+		const random = row.random(this.stream);
+		// φ(t): a real process whose bins hold the skirt's power between them (both sides), periodic in the transform
+		const spectrum: number[] = new Array<number>(2 * size).fill(0);
+		for (let k = 1; k < size / 2; k++) {
+			const a = bins[k];
+			if (a === 0) continue;
+			const x = a * random.normal();
+			const y = a * random.normal();
+			spectrum[2 * k] = x;
+			spectrum[2 * k + 1] = y;
+			spectrum[2 * (size - k)] = x;
+			spectrum[2 * (size - k) + 1] = -y;
+		}
+		const phase = fft.createComplexArray() as number[];
+		fft.inverseTransform(phase, spectrum);
+		const firstS = (from - frame.lead) * frame.stepS - this.half * this.stepS;
+		const x = new Float64Array(count);
+		const y = new Float64Array(count);
+		for (let i = 0; i < count; i++) {
+			const t = firstS + i * this.stepS;
+			const psi = 2 * Math.PI * ((line.offsetHz * t) % 1) - Math.PI * line.passingHzPerS * t * t;
+			const cos = Math.cos(psi);
+			const sin = Math.sin(psi);
+			// jφ·a·e^{jψ}; the inverse transform divides by its size
+			const turn = phase[2 * i] * size * this.whole;
+			x[i] = -turn * (line.re * sin + line.im * cos);
+			y[i] = turn * (line.re * cos - line.im * sin);
+		}
+		this.filter(from, to, x, y, re, im);
+	}
+
+	private prepared(from: number, to: number) {
+		const known = this.plan;
+		if (known && known.from === from && known.to === to) return known;
+		const count = (to - from - 1) * this.fine + 1 + 2 * this.half;
+		let size = 16;
+		while (size < count) size *= 2;
+		const bins = new Float64Array(size / 2);
+		const width = 1 / (size * this.stepS);
+		for (let k = 1; k < size / 2; k++) {
+			// each of the bin's two sides holds L's power; a cosine of amplitude A has A²/2 = 2 sides' power, x and y share it
+			const power = this.within((k + 0.5) * width) - this.within((k - 0.5) * width);
+			bins[k] = Math.sqrt(Math.max(0, power) / 2);
+		}
+		this.plan = { from, to, count, fft: new FFT(size), size, bins };
+		return this.plan;
+	}
+
+	private filter(
+		from: number,
+		to: number,
+		x: Float64Array,
+		y: Float64Array,
+		re: Float64Array,
+		im: Float64Array
+	): void {
+		const { taps, half, fine } = this;
+		for (let i = from, centre = half; i < to; i++, centre += fine) {
+			let sx = taps[half] * x[centre];
+			let sy = taps[half] * y[centre];
+			for (let j = 1; j <= half; j++) {
+				const g = taps[half + j];
+				sx += g * (x[centre - j] + x[centre + j]);
+				sy += g * (y[centre - j] + y[centre + j]);
+			}
+			re[i] += sx;
+			im[i] += sy;
+		}
+	}
+}
