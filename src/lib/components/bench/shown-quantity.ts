@@ -55,7 +55,7 @@ export function shownSetting(value: number, base: 'Hz' | 's' | 'dBm' | 'dB' | ''
 	if (base === 'Hz') return showFrequency(value);
 	if (base === 's') return showTime(Number(value.toPrecision(3)));
 	if (base === '') return { figure: String(value), unit: '' };
-	return { figure: formatFigure(value, base === 'dBm' && Number.isInteger(value) ? 0 : 1), unit: base };
+	return { figure: formatFigure(value, Number.isInteger(value) ? 0 : 1), unit: base };
 }
 
 /** Receiver time as people say it: 372 s is 6 min 12 s. */

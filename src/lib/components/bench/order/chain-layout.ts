@@ -19,8 +19,9 @@ export interface ChainLayout {
 }
 
 /** Width of a character of 12.5 px text, near enough to lay out by. */
-export const characterPx = 6.5;
-const wirePx = 18;
+export const characterPx = 6;
+/** Length of a straight wire between two parts: as much of this as there is room for. */
+const wirePx = { least: 8, most: 18 };
 const leastLeadPx = 46;
 const textPx = (text: string) => text.length * characterPx;
 
@@ -40,22 +41,22 @@ export function twoLines(label: string): string[] {
  */
 export function chainLayout(chain: readonly ChainPart[], width: number): ChainLayout {
 	const solid = chain.filter((part) => part.part !== 'plane');
-	const wires = Math.max(0, solid.length - 1) * wirePx;
-	const measure = (broken: boolean) =>
-		solid.map((part) => {
-			const lines = broken ? twoLines(part.label) : [part.label];
-			const words = Math.max(...lines.map(textPx));
-			return part.part === 'box' ? words + 12 : part.part === 'pad' ? 34 : Math.max(leastLeadPx, words);
-		});
-	const total = (widths: number[]) => widths.reduce((sum, w) => sum + w, wires);
-	const whole = measure(false);
-	const broken = total(whole) > width;
-	const widths = broken ? measure(true) : whole;
-	const spare = Math.max(0, width - total(widths));
-	const stretched = solid.filter((part) => part.part === 'lead').length;
-	const given = solid.map((part, i) => widths[i] + (part.part === 'lead' ? spare / stretched : 0));
-	const gapPx = wirePx + (stretched === 0 && solid.length > 1 ? spare / (solid.length - 1) : 0);
-	return place(chain, given, gapPx, broken, width);
+	const gaps = Math.max(1, solid.length - 1);
+	const sum = (widths: number[]) => widths.reduce((total, w) => total + w, 0);
+	const whole = solid.map((part) => partPx(part, [part.label]));
+	const broken = sum(whole) + gaps * wirePx.least > width;
+	const widths = broken ? solid.map((part) => partPx(part, twoLines(part.label))) : whole;
+	const gapPx = Math.min(wirePx.most, Math.max(wirePx.least, (width - sum(widths)) / gaps));
+	const spare = Math.max(0, width - sum(widths) - gaps * gapPx);
+	const leads = solid.filter((part) => part.part === 'lead').length;
+	const given = solid.map((part, i) => widths[i] + (part.part === 'lead' ? spare / leads : 0));
+	return place(chain, given, leads === 0 ? gapPx + spare / gaps : gapPx, broken, width);
+}
+
+function partPx({ part }: ChainPart, lines: string[]): number {
+	const words = Math.max(...lines.map(textPx));
+	if (part === 'pad') return Math.max(34, words);
+	return part === 'box' ? words + 12 : Math.max(leastLeadPx, words);
 }
 
 function place(
@@ -72,7 +73,7 @@ function place(
 	for (const part of chain) {
 		if (part.part === 'plane') {
 			const at = solid === 0 ? x : x - gapPx / 2;
-			const half = textPx(planeText) / 2;
+			const half = textPx(part.label) / 2;
 			parts.push({
 				part: 'plane',
 				x: at,
@@ -93,8 +94,6 @@ function place(
 	}
 	return { parts, wires };
 }
-
-export const planeText = 'answer for this plane';
 
 /** A branch's words stand where there is more room: before the box's middle, else after it. */
 function branchOf(label: string, boxMiddle: number): { label: string; x: number; end: 'start' | 'end' } {

@@ -17,4 +17,6 @@ export interface PlottedBand {
 	figure: string;
 	unit: string;
 	what: string;
+	/** What tells it from its like, shorter: "25 kHz". */
+	detail: string;
 }

@@ -1,0 +1,67 @@
+/** The bench's way to the server: one method an endpoint, refusals as Refusal, everything else as it failed. */
+import { Refusal, type BenchWire } from '$lib/components/bench/state/bench-wire';
+import {
+	attemptResponse,
+	draftsResponse,
+	hintResponse,
+	problemResponse,
+	readingResponse,
+	type AttemptView
+} from '$lib/schemas/attempt';
+import { FrameDecoder, type Frame } from '$lib/schemas/frames';
+
+/** @param attemptId whose endpoints are meant */
+export function attemptWire(attemptId: AttemptView['id']): BenchWire {
+	const base = `/api/attempts/${attemptId}`;
+	const send = (method: string, path: string, body: unknown, signal?: AbortSignal) =>
+		answered(
+			fetch(base + path, {
+				method,
+				headers: { 'content-type': 'application/json' },
+				body: JSON.stringify(body),
+				signal
+			})
+		);
+	return {
+		sweeps: async (request, signal) => framesOf(await send('POST', '/sweeps', request, signal)),
+		rows: async (from, to) => framesOf(await answered(fetch(`${base}/rows?from=${from}&to=${to}`))),
+		acknowledge: async (row) => {
+			await send('POST', '/acknowledgements', { row });
+		},
+		takeReading: async (request) =>
+			readingResponse.parse(await (await send('POST', '/readings', request)).json()).reading,
+		saveDrafts: async (answers) =>
+			draftsResponse.parse(await (await send('PUT', '/drafts', { answers })).json()).savedAt,
+		nextHint: async () => hintResponse.parse(await (await send('POST', '/hints', {})).json()),
+		handIn: async (answers) => {
+			await send('POST', '/answers', { answers });
+		},
+		reload: async () => attemptResponse.parse(await (await answered(fetch(base))).json()).attempt
+	};
+}
+
+/** The response when it is good. @throws Refusal with what the server said when it is not */
+async function answered(asked: Promise<Response>): Promise<Response> {
+	const response = await asked;
+	if (response.ok) return response;
+	const problem = problemResponse.safeParse(await response.json().catch(() => undefined));
+	const message = problem.success ? problem.data.message : `The server answered ${response.status}.`;
+	throw new Refusal(response.status, message, problem.success ? problem.data.issues : []);
+}
+
+/** The frames of a stream as they come, in the batches they come in. */
+async function* framesOf(response: Response): AsyncGenerator<Frame[]> {
+	if (!response.body) return;
+	const decoder = new FrameDecoder();
+	const reader = response.body.getReader();
+	try {
+		for (;;) {
+			const { done, value } = await reader.read();
+			if (done) return;
+			const frames = decoder.push(value);
+			if (frames.length > 0) yield frames;
+		}
+	} finally {
+		await reader.cancel().catch(() => undefined);
+	}
+}
