@@ -19,25 +19,40 @@ export const averagesDecibels = ({ resolved, trace, sweeps }: SetUp): boolean =>
 const bucketOf = ({ resolved }: SetUp): number =>
 	(resolved.rbwHz * resolved.sweepTimeS) / (resolved.points - 1);
 
-/** Cumulative law of one point of one row, power over mean. */
-function rowLaw(setUp: SetUp): (x: number) => number {
+type Law = (x: number) => number;
+
+/**
+ * Cumulative laws of one point of one row, power over mean; a trace's points take them in turn.
+ * Peaks within a bucket, bench.md §4: P(max < x) = (1 − e^−x)·exp(−1.5054·BΔt·√x/(e^x − 1)),
+ * P(min < x) = 1 − exp(−x − 1.5054·BΔt·√x).
+ */
+function rowLaws(setUp: SetUp): Law[] {
 	const bucket = bucketOf(setUp);
-	if (setUp.resolved.detector === 'positive-peak') {
-		// bench.md §4: P(max < x) = (1 − e^−x)·exp(−1.5054·BΔt·√x/(e^x − 1)).
-		return (x) => -Math.expm1(-x) * Math.exp((-IMPULSE_BANDWIDTH * bucket * Math.sqrt(x)) / Math.expm1(x));
+	const greatest: Law = (x) =>
+		-Math.expm1(-x) * Math.exp((-IMPULSE_BANDWIDTH * bucket * Math.sqrt(x)) / Math.expm1(x));
+	const least: Law = (x) => -Math.expm1(-x - IMPULSE_BANDWIDTH * bucket * Math.sqrt(x));
+	switch (setUp.resolved.detector) {
+		case 'positive-peak':
+			return [greatest];
+		case 'negative-peak':
+			return [least];
+		case 'rise-fall':
+			return [greatest, least];
+		case 'average':
+			return [meanLaw(1 + NOISE_BANDWIDTH * bucket)];
+		case 'sample':
+			return [meanLaw(1)];
 	}
-	const degrees = setUp.resolved.detector === 'average' ? 1 + NOISE_BANDWIDTH * bucket : 1;
-	return meanLaw(degrees);
 }
 
 /** Cumulative law of the mean of `degrees` independent exponentials (Wilson & Hilferty, PNAS 17, 684, 1931). */
-function meanLaw(degrees: number): (x: number) => number {
+function meanLaw(degrees: number): Law {
 	if (degrees === 1) return (x) => -Math.expm1(-x);
 	return (x) => normalIntegral((Math.cbrt(x) - (1 - 1 / (9 * degrees))) * Math.sqrt(9 * degrees));
 }
 
 /** Mean of the greatest of `count` draws from a law on [0, ∞): ∫(1 − Fᶜ). */
-function meanOfGreatest(law: (x: number) => number, count: number): number {
+function meanOfGreatest(law: Law, count: number): number {
 	const end = 30 + Math.log(count);
 	const step = 0.01;
 	let sum = 0.5;
@@ -57,15 +72,18 @@ function cached(key: string, make: () => number): number {
 /** Mean power that a set-up shows for noise of mean power 1: 1 unless it detects peaks or holds. */
 export function shownPower(setUp: SetUp): number {
 	const count = setUp.trace.mode === 'max-hold' ? Math.max(1, setUp.sweeps) : 1;
-	if (count === 1 && setUp.resolved.detector !== 'positive-peak') return 1;
-	const key = `shown ${setUp.resolved.detector} ${bucketOf(setUp).toPrecision(4)} ${count}`;
-	return cached(key, () => meanOfGreatest(rowLaw(setUp), count));
+	const { detector } = setUp.resolved;
+	if (count === 1 && (detector === 'average' || detector === 'sample')) return 1;
+	return cached(`${detector} ${bucketOf(setUp).toPrecision(4)} ${count}`, () => {
+		const powers = rowLaws(setUp).map((law) => meanOfGreatest(law, count));
+		return powers.reduce((sum, power) => sum + power, 0) / powers.length;
+	});
 }
 
-/** Standard deviation in dB of one point of an averaged trace of noise: 5.57 dB of a single sample, over √rows. */
+/** Standard deviation in dB of one point of an averaged trace of noise: 5.57 dB of a single level, 10/ln 10 dB of a mean power, over √rows. */
 export function pointSpreadDb({ trace, sweeps, resolved }: SetUp): number {
 	const rows = trace.mode === 'average' ? Math.max(1, Math.min(trace.count, sweeps)) : 1;
 	const each =
 		resolved.detector === 'average' ? 1 + NOISE_BANDWIDTH * bucketOf({ trace, sweeps, resolved }) : 1;
-	return 5.57 / Math.sqrt(rows * each);
+	return (resolved.scale === 'log' ? 5.57 : 4.34) / Math.sqrt(rows * each);
 }

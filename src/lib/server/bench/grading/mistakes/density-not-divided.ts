@@ -21,9 +21,9 @@ export const densityNotDivided = defineMistake(
 			value: channelDbm(context, context.question.frequencyHz, widthHz),
 			spread: MODEL_SPREAD_DB
 		}),
-		explain({ source, yours, change, ...context }) {
+		explain({ source, yours, drawn, question }) {
 			const used = (source && widthHzOf(source.request)) ?? widthHz;
-			const flatHz = flatWidthHz(context, used);
+			const flatHz = flatWidthHz({ drawn, question }, used);
 			const dividedDb = powerRatioToDb(flatHz);
 			return {
 				title: 'A density is a power per hertz',

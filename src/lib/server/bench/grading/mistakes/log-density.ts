@@ -9,7 +9,7 @@ import { withReading, withSettings } from '../spoil';
 
 const RBW_FOR_NOISE_DB = powerRatioToDb(NOISE_BANDWIDTH);
 /** Rows that bring one point of a log average to within 0.3 dB: as a careful person making this mistake would take. */
-const CAREFUL_ROWS = 250;
+const CAREFUL_ROWS = 160;
 
 /**
  * A density from a trace averaged in decibels: read over a band, low by 2.51 dB; or from a marker divided by the

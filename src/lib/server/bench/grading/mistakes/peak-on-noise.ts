@@ -1,7 +1,8 @@
 import { powerRatioToDb } from '$lib/units/decibel';
 import { z } from 'zod';
+import type { FilledStep } from '../../exercise/drawn-exercise';
 import { figure } from '../../exercise/figure';
-import { defineMistake } from '../mistake';
+import { defineMistake, type SetUp } from '../mistake';
 import { shownPower } from '../noise-law';
 import { withSettings } from '../spoil';
 
@@ -20,6 +21,15 @@ const WORDS = {
 	}
 };
 
+const picksCrests = ({ trace, resolved }: SetUp, by: keyof typeof WORDS): boolean =>
+	by === 'hold' ? trace.mode === 'max-hold' : resolved.detector === 'positive-peak';
+
+/** A hold with the detector left to itself, and let run for longer: it is still filling. */
+const held = (steps: readonly FilledStep[]): FilledStep[] =>
+	withSettings(steps, { traces: [{ mode: 'max-hold' }], detector: 'auto' }).map((step) =>
+		step.do === 'sweep' ? { ...step, sweeps: 2 * step.sweeps } : step
+	);
+
 /** A signal that looks like noise read through a positive-peak detector, or off a held maximum: the power of its crests. */
 export const peakOnNoise = defineMistake(
 	'peak-on-noise',
@@ -29,12 +39,14 @@ export const peakOnNoise = defineMistake(
 		label: WORDS[by].label,
 		phrase: WORDS[by].phrase,
 		families: ['band', 'density'],
-		shows: ({ setUp }) =>
-			by === 'hold' ? setUp.trace.mode === 'max-hold' : setUp.resolved.detector === 'positive-peak',
-		predict({ question }, setUp) {
-			const value = question.truth + powerRatioToDb(shownPower(setUp));
-			return { value, spread: by === 'hold' ? 0.5 : 0.3 };
-		},
+		shows: ({ setUp }) => picksCrests(setUp, by),
+		predict: ({ question }, setUp) =>
+			picksCrests(setUp, by)
+				? {
+						value: question.truth + powerRatioToDb(shownPower(setUp)),
+						spread: by === 'hold' ? 0.4 : 0.2
+					}
+				: null,
 		explain({ setUp, change }) {
 			const rows = setUp?.sweeps ?? 1;
 			const shownDb = setUp ? powerRatioToDb(shownPower(setUp)) : Math.abs(change);
@@ -51,7 +63,6 @@ export const peakOnNoise = defineMistake(
 				bad: { at: 'set-up', text: WORDS[by].bad }
 			};
 		},
-		make: (steps) =>
-			withSettings(steps, by === 'hold' ? { traces: [{ mode: 'max-hold' }] } : { detector: 'positive-peak' })
+		make: (steps) => (by === 'hold' ? held(steps) : withSettings(steps, { detector: 'positive-peak' }))
 	})
 );

@@ -26,8 +26,8 @@ export const wrongWidth = defineMistake(
 			const value = channelDbm(context, context.question.frequencyHz, widthHz);
 			return { value, spread: MODEL_SPREAD_DB };
 		},
-		explain({ source, change, ...context }) {
-			const { question } = context;
+		explain({ source, drawn, question }) {
+			const context = { drawn, question };
 			const asked = askedOf(context);
 			const used = (source && widthHzOf(source.request)) ?? widthHz;
 			const held = channelDbm(context, question.frequencyHz, used);

@@ -1,0 +1,35 @@
+import type { ProofRow, ProofTable } from '$lib/server/bench/proof/proof-table';
+
+const percent = (share: number): string => `${(100 * share).toFixed(1)} %`;
+const HEADS = ['question', 'done by', 'passes', 'named', 'mean error', 'scatter', 'edge', ''];
+
+const cells = (row: ProofRow): string[] => [
+	row.question,
+	row.mistake ?? 'taught method',
+	percent(row.passShare),
+	row.mistake === null ? 'faultless '.concat(percent(row.namedShare)) : percent(row.namedShare),
+	row.meanError.toFixed(2),
+	row.scatter.toFixed(2),
+	row.edgeError.toFixed(2),
+	row.failures.length > 0 ? 'FAILS' : 'ok'
+];
+
+/** A proof as a table of text: how often each way of doing it passes and is named, and what failed. */
+export function printProof(table: ProofTable): string {
+	const lines = [HEADS, ...table.rows.map(cells)];
+	const widths = HEADS.map((_, column) => Math.max(...lines.map((line) => line[column].length)));
+	const printed = lines.map((line) =>
+		line
+			.map((cell, column) => (column < 2 ? cell.padEnd(widths[column]) : cell.padStart(widths[column])))
+			.join('  ')
+			.trimEnd()
+	);
+	const last = table.fromSeed + table.seeds - 1;
+	return [
+		`${table.exercise}: seeds ${table.fromSeed} to ${last}, ${table.redraws} draws turned down`,
+		...printed,
+		`mistakes four spreads apart on ${percent(table.apartShare)} of the seeds`,
+		...table.failures.map((failure) => `FAILS ${failure}`),
+		''
+	].join('\n');
+}

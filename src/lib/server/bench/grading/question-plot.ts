@@ -1,0 +1,40 @@
+import type { FindingPlot } from '$lib/schemas/finding';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+import { formatFrequency } from '$lib/units/format-quantity';
+import type { SettingsLogEntry } from '../exercise/attempt-record';
+import { resolveSettings } from '../receiver/resolve-settings';
+import { quantityName } from './describe-reading';
+import type { Judgement } from './judge-question';
+import { placeHz } from './place';
+import { widthHzOf } from './read-width';
+import { signalLevels } from './signal-levels';
+
+/** What the plot beside a finding draws: the sweep read, the signal itself, the band asked for, the point read. */
+export function questionPlot({ evidence, source }: Judgement, log: readonly SettingsLogEntry[]): FindingPlot {
+	const { drawn, question } = evidence;
+	const last = log.findLast((entry) => entry.sweeps > 0);
+	const resolved = source?.setUp.resolved ?? (last && resolveSettings(last.settings, drawn.profile));
+	const rows = source?.rows ?? (last && { from: last.firstRow, to: last.firstRow + last.sweeps - 1 });
+	const width = widthHzOf(question.quantity);
+	const pointHz = source?.family === 'point' ? placeHz(source.reading) : undefined;
+	return {
+		band:
+			width === undefined
+				? null
+				: {
+						startHz: question.frequencyHz - width / 2,
+						stopHz: question.frequencyHz + width / 2,
+						value: question.truth,
+						unit: question.unit,
+						text: `true ${quantityName(question.quantity.kind)}, ${formatFrequency(width)}`
+					},
+		point: pointHz === undefined || !source ? null : { frequencyHz: pointHz, levelDbm: source.reading.value },
+		trace: rows && resolved ? drawnTrace(rows, resolved, source?.trace ?? 1) : null,
+		signal: resolved ? signalLevels(drawn.scene, resolved) : null
+	};
+}
+
+function drawnTrace(rows: { from: number; to: number }, resolved: ResolvedSettings, trace: number) {
+	const { mode, count } = resolved.traces[trace - 1];
+	return { fromRow: rows.from, toRow: rows.to, trace, mode, count, scale: resolved.scale };
+}

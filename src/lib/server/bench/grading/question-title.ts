@@ -1,0 +1,26 @@
+import { figure } from '../exercise/figure';
+import type { Judgement } from './judge-question';
+
+const joined = (phrases: readonly string[]): string =>
+	phrases.length < 2 ? phrases.join('') : `${phrases.slice(0, -1).join(', ')}, and ${phrases.at(-1)}`;
+
+/** The finding in one sentence: "You read one point of the hump, and left the lead out." */
+export function questionTitle({ verdict, matched, difference, evidence, remarks }: Judgement): string {
+	const { question } = evidence;
+	const phrases = joined(matched?.watched.map(({ mistake }) => mistake.phrase) ?? []);
+	switch (verdict) {
+		case 'unanswered':
+			return 'You gave no answer.';
+		case 'right':
+			return 'Right, and by a method that can support it.';
+		case 'right-but-method':
+			if (phrases) return `The number is right, but you ${phrases}.`;
+			return `The number is right, but its evidence is not. ${remarks.at(-1)?.text ?? ''}`.trim();
+		case 'wrong': {
+			if (phrases) return `You ${phrases}.`;
+			const off = figure(Math.abs(difference ?? 0), question.digits);
+			const unit = question.unit.startsWith('dB') ? 'dB' : question.unit;
+			return `Your number is ${off} ${unit} too ${(difference ?? 0) < 0 ? 'low' : 'high'}, and none of the usual mistakes gives it.`;
+		}
+	}
+}

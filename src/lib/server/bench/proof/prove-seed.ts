@@ -1,0 +1,120 @@
+import type { Exercise } from '$lib/schemas/exercise';
+import { BenchError } from '../bench-error';
+import type { AttemptRecord } from '../exercise/attempt-record';
+import type { SweepWith } from '../exercise/bench-session';
+import { drawExercise } from '../exercise/draw-exercise';
+import type { DrawnExercise, DrawnQuestion, FilledStep } from '../exercise/drawn-exercise';
+import { runMethod } from '../exercise/run-method';
+import { isAbsoluteLevel } from '../grading/evidence';
+import { judgeQuestion, type Judgement } from '../grading/judge-question';
+import { spreadsBetween } from '../grading/mistakes-apart';
+import { watchedMistakes, type Watched } from '../grading/watched-mistakes';
+import { memoSweeps } from './memo-sweeps';
+
+/** What one seed says of one way to answer one question. */
+export interface Outcome {
+	question: string;
+	/** A mistake's id; null for the taught method. */
+	mistake: string | null;
+	/** Answered − true, in the question's unit; null when it could not be done on the bench. */
+	error: number | null;
+	/** One standard deviation of the reading answered from. */
+	spread: number;
+	/** Within the tolerance. */
+	passes: boolean;
+	/** The finding named this mistake and no other; for the taught method, it found nothing wrong. */
+	named: boolean;
+	/** Why it could not be done. */
+	problem?: string;
+}
+
+export interface SeedProof {
+	seed: number;
+	redraws: number;
+	outcomes: Outcome[];
+	/** By question: spreads between the two mistakes' outcomes that lie nearest to each other. */
+	nearest: { question: string; spreads: number }[];
+	/** Tolerances that the receiver's level error and three spreads don't fit into. */
+	tooTight: { question: string; least: number }[];
+}
+
+/** How a learner may leave things: the reading attached, readings taken but none attached, or no reading at all. */
+const EVIDENCE: ((record: AttemptRecord, question: string) => AttemptRecord)[] = [
+	(record) => record,
+	(record, question) => ({ ...record, answers: { [question]: { value: record.answers[question].value } } }),
+	(record, question) => ({
+		...record,
+		readings: [],
+		answers: { [question]: { value: record.answers[question].value } }
+	})
+];
+
+interface Attempted {
+	judgement: Judgement;
+	error: number;
+	spread: number;
+}
+
+function attempt(
+	drawn: DrawnExercise,
+	question: DrawnQuestion,
+	steps: readonly FilledStep[],
+	sweepWith: SweepWith,
+	leave: (typeof EVIDENCE)[number]
+): Attempted | { problem: string } {
+	try {
+		const { record, evidence } = runMethod(drawn, steps, sweepWith);
+		const judgement = judgeQuestion(drawn, question, leave(record, question.id));
+		const error = record.answers[question.id].value - question.truth;
+		return { judgement, error, spread: evidence[question.id].reading.spread };
+	} catch (cause) {
+		if (cause instanceof BenchError) return { problem: `${cause.field}: ${cause.message}` };
+		throw cause;
+	}
+}
+
+function outcome(
+	question: DrawnQuestion,
+	watched: Watched | null,
+	tried: ReturnType<typeof attempt>
+): Outcome {
+	const base = { question: question.id, mistake: watched?.id ?? null };
+	if ('problem' in tried) {
+		return { ...base, error: null, spread: 0, passes: false, named: false, problem: tried.problem };
+	}
+	const { judgement, error, spread } = tried;
+	const found = judgement.matched?.watched.map(({ id }) => id) ?? [];
+	const named = watched ? found.length === 1 && found[0] === watched.id : judgement.verdict === 'right';
+	return { ...base, error, spread, passes: Math.abs(error) <= question.tolerance, named };
+}
+
+/** Does the taught method and makes every mistake, with one seed, on the bench. */
+export function proveSeed(exercise: Exercise, seed: number, sweepWith: SweepWith): SeedProof {
+	const drawn = drawExercise(exercise, seed);
+	const sweeps = memoSweeps(sweepWith);
+	const leave = EVIDENCE[seed % EVIDENCE.length];
+	const proof: SeedProof = { seed, redraws: drawn.redraws, outcomes: [], nearest: [], tooTight: [] };
+	for (const question of drawn.questions) {
+		const taught = outcome(question, null, attempt(drawn, question, drawn.method, sweeps, EVIDENCE[0]));
+		const made = watchedMistakes(question).map((watched) => {
+			const steps = watched.mistake.make(drawn.method, { drawn, question });
+			return outcome(question, watched, attempt(drawn, question, steps, sweeps, leave));
+		});
+		proof.outcomes.push(taught, ...made);
+		proof.nearest.push({ question: question.id, spreads: nearestSpreads(made) });
+		const least = drawn.profile.levelErrorDb + 3 * taught.spread;
+		if (isAbsoluteLevel(question.unit) && question.tolerance < least) {
+			proof.tooTight.push({ question: question.id, least });
+		}
+	}
+	return proof;
+}
+
+function nearestSpreads(outcomes: readonly Outcome[]): number {
+	const made = outcomes.flatMap(({ error, spread }) => (error === null ? [] : [{ value: error, spread }]));
+	let nearest = Infinity;
+	made.forEach((a, i) => {
+		for (const b of made.slice(i + 1)) nearest = Math.min(nearest, spreadsBetween(a, b));
+	});
+	return nearest;
+}
