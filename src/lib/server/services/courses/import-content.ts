@@ -57,7 +57,8 @@ async function importCourse(
 
 /** The course's row, made if need be and locked: whoever else imports this course waits here. */
 async function lockedCourse(slug: string, now: Date, transaction: Transaction): Promise<Course> {
-	await Course.bulkCreate([{ slug, createdAt: now }], { ignoreDuplicates: true, transaction });
+	// An update in place of INSERT IGNORE, which would take a lesser lock first and two processes into a deadlock.
+	await Course.bulkCreate([{ slug, createdAt: now }], { updateOnDuplicate: ['slug'], transaction });
 	const course = await Course.findOne({ where: { slug }, lock: transaction.LOCK.UPDATE, transaction });
 	if (!course) throw new Error(`The course ${slug} was made and is not there`);
 	return course;

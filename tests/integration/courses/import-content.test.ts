@@ -1,0 +1,172 @@
+import { cpSync, mkdirSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { stringify } from 'yaml';
+import { Course } from '$lib/server/db/models/course';
+import { Edition } from '$lib/server/db/models/edition';
+import { Exercise } from '$lib/server/db/models/exercise';
+import { Unit } from '$lib/server/db/models/unit';
+import { importContent } from '$lib/server/services/courses/import-content';
+import { exerciseDefinition } from '../../factories/exercise';
+
+const now = new Date('2026-03-02T09:00:00Z');
+let root: string;
+let slug: string;
+let made = 0;
+
+/** A course of one unit with one exercise, in a folder of its own. */
+beforeEach(() => {
+	root = mkdtempSync(join(tmpdir(), 'content-'));
+	made += 1;
+	slug = `harbour-${made}`;
+	mkdirSync(join(root, slug, '06-spread'), { recursive: true });
+	write('course.yaml', {
+		slug,
+		title: 'Harbour',
+		summary: 'From the quay.',
+		units: [{ number: 6, slug: 'spread', title: 'Spread', summary: 'Wide.', exercises: [`spread-${made}`] }]
+	});
+	writeFileSync(path('06-spread/lesson.md'), '# Why\n\nA **marker** reads one slice.\n');
+	write(`06-spread/spread-${made}.yaml`, exerciseDefinition({ slug: `spread-${made}` }));
+});
+afterEach(() => rmSync(root, { recursive: true }));
+
+const path = (name: string) => join(root, slug, name);
+const write = (name: string, data: unknown) => writeFileSync(path(name), stringify(data));
+const change = (name: string, from: string | RegExp, to: string) =>
+	writeFileSync(path(name), readFileSync(path(name), 'utf8').replace(from, to));
+const exerciseFile = () => `06-spread/spread-${made}.yaml`;
+const run = () => importContent({ root, now });
+const editions = async () => {
+	const course = await Course.findOne({ where: { slug } });
+	return course ? Edition.findAll({ where: { courseId: course.id }, order: ['number'] }) : [];
+};
+
+describe('importContent({root, now})', () => {
+	it('publishes the courses of this repository', async () => {
+		const imported = await importContent({ root: 'content', now });
+		expect(imported.length).toBeGreaterThan(0);
+		expect(imported.every(({ edition, created }) => edition === 1 && created)).toBe(true);
+	});
+
+	it('publishes a course with its units, lessons and exercises', async () => {
+		expect(await run()).toEqual([{ slug, edition: 1, created: true }]);
+		const [edition] = await editions();
+		expect(edition).toMatchObject({ number: 1, title: 'Harbour', summary: 'From the quay.', createdAt: now });
+		const [unit] = await Unit.findAll({ where: { editionId: edition.id } });
+		expect(unit).toMatchObject({ number: 6, slug: 'spread', title: 'Spread' });
+		expect(unit.lessonHtml).toContain('<strong>marker</strong>');
+		const [exercise] = await Exercise.findAll({ where: { editionId: edition.id } });
+		expect(exercise).toMatchObject({ unitId: unit.id, number: 1, slug: `spread-${made}`, tries: 3 });
+		expect(exercise.definition).toEqual(exerciseDefinition({ slug: `spread-${made}` }));
+		expect(exercise.situationHtml.trim()).toBe(
+			'<p>The lead loses <strong>{leadLossDb | 1} dB</strong>. Measure at the coupler’s port.</p>'
+		);
+	});
+
+	it('makes no edition when nothing has changed, however often and by however many it is run', async () => {
+		await Promise.all([run(), run(), run()]);
+		expect(await run()).toEqual([{ slug, edition: 1, created: false }]);
+		expect(await editions()).toHaveLength(1);
+	});
+
+	it.each([
+		['a lesson', '06-spread/lesson.md', 'slice', 'part'],
+		['an exercise', '', 'tries: 3', 'tries: 4'],
+		['the course', 'course.yaml', 'From the quay.', 'From the pier.']
+	])(
+		'makes a new edition when %s has changed, and leaves the old one as it was',
+		async (_, name, from, to) => {
+			await run();
+			const [before] = await editions();
+			const old = await Exercise.findAll({ where: { editionId: before.id } });
+			change(name || exerciseFile(), from, to);
+			expect(await run()).toEqual([{ slug, edition: 2, created: true }]);
+			const [first, second] = await editions();
+			expect(first.get()).toEqual(before.get());
+			expect(second.contentHash).not.toBe(first.contentHash);
+			const kept = await Exercise.findAll({ where: { editionId: before.id } });
+			expect(kept.map((row) => row.get())).toEqual(old.map((row) => row.get()));
+		}
+	);
+
+	const lineOf = (name: string, text: string) =>
+		readFileSync(path(name), 'utf8')
+			.split('\n')
+			.findIndex((line) => line.includes(text)) + 1;
+	const faults: [string, () => void, () => RegExp][] = [
+		[
+			'a key that nobody knows',
+			() => change(exerciseFile(), 'client:', 'klient: x\nclient:'),
+			() => new RegExp(`^${slug}/${exerciseFile()}:${lineOf(exerciseFile(), 'klient')}: klient: `)
+		],
+		[
+			'a value out of range',
+			() => change(exerciseFile(), 'tries: 3', 'tries: 0'),
+			() => new RegExp(`^${slug}/${exerciseFile()}:${lineOf(exerciseFile(), 'tries')}: tries: `)
+		],
+		[
+			'a name that is not drawn',
+			() => change(exerciseFile(), '=carrierDbm', '=karrierDbm'),
+			() => new RegExp(`^${slug}/${exerciseFile()}:${lineOf(exerciseFile(), '=karrierDbm')}: scene.+levelDbm`)
+		],
+		[
+			'what is no YAML',
+			() => change(exerciseFile(), 'title:', 'title: ]['),
+			() => new RegExp(`^${slug}/${exerciseFile()}:${lineOf(exerciseFile(), '][')}: `)
+		],
+		[
+			'a course without units',
+			() => write('course.yaml', { slug, title: 'x', summary: 'y', units: [] }),
+			() => new RegExp(`^${slug}/course.yaml:4: units: `)
+		],
+		[
+			'a course under another name',
+			() => change('course.yaml', `slug: ${slug}`, 'slug: elsewhere'),
+			() => new RegExp(`^${slug}/course.yaml:1: slug: `)
+		],
+		[
+			'a lesson that is missing',
+			() => rmSync(path('06-spread/lesson.md')),
+			() => /06-spread\/lesson.md:1: is missing/
+		],
+		[
+			'a file that no unit names',
+			() => cpSync(path(exerciseFile()), path('06-spread/stray.yaml')),
+			() => /06-spread\/stray.yaml:1: is not named in course.yaml/
+		],
+		[
+			'a folder that is no unit',
+			() => mkdirSync(path('07-nothing')),
+			() => /course.yaml:4: units: the folder 07-nothing/
+		]
+	];
+	it.each(faults)(
+		'stops at %s with file, line and field, and publishes nothing',
+		async (_, spoil, message) => {
+			spoil();
+			const stopped = run();
+			await expect(stopped).rejects.toMatchObject({ name: 'ContentError' });
+			await expect(stopped).rejects.toThrow(message());
+			expect(await editions()).toEqual([]);
+		}
+	);
+
+	it('lets no two exercises have one name', async () => {
+		cpSync(join(root, slug), join(root, `${slug}-b`), { recursive: true });
+		const file = join(root, `${slug}-b`, 'course.yaml');
+		writeFileSync(file, readFileSync(file, 'utf8').replace(`slug: ${slug}`, `slug: ${slug}-b`));
+		await expect(run()).rejects.toThrow(/two exercises are called/);
+		expect(await editions()).toEqual([]);
+	});
+
+	it('leaves the tables unchanged when it fails late', async () => {
+		Exercise.addHook('afterBulkCreate', 'fail late', () => {
+			throw new Error('late');
+		});
+		await expect(run()).rejects.toThrow('late');
+		Exercise.removeHook('afterBulkCreate', 'fail late');
+		expect(await editions()).toEqual([]);
+	});
+});
