@@ -4,6 +4,7 @@
  */
 import { z } from 'zod';
 import { answerUnits } from './exercise';
+import { scales, traceModes } from './settings';
 
 const unit = z.enum(answerUnits);
 const measured = z.strictObject({ value: z.number(), unit, digits: z.int() });
@@ -53,8 +54,17 @@ export const findingPlot = z.strictObject({
 		.strictObject({ startHz: z.number(), stopHz: z.number(), value: z.number(), unit, text: z.string() })
 		.nullable(),
 	point: z.strictObject({ frequencyHz: z.number(), levelDbm: z.number() }).nullable(),
-	/** Rows and trace (1…4) of the sweep to draw: that of the attached reading, else the last one. */
-	trace: z.strictObject({ fromRow: z.int(), toRow: z.int(), trace: z.int() }).nullable(),
+	/** The sweep to draw, that of the attached reading, else the last one: its rows, its trace (1…4), how they combine. */
+	trace: z
+		.strictObject({
+			fromRow: z.int(),
+			toRow: z.int(),
+			trace: z.int(),
+			mode: z.enum(traceModes),
+			count: z.int(),
+			scale: z.enum(scales)
+		})
+		.nullable(),
 	/** The signal itself at the reference plane, through the resolution bandwidth of that sweep, noise-free. */
 	signal: z
 		.strictObject({
