@@ -74,6 +74,7 @@ export const ROOMS: Room[] = [
 		packages: ['*']
 	},
 	{ path: 'src/lib/server/read-id.ts', mayImport: server('errors.ts'), packages: [] },
+	{ path: 'src/lib/server/read-form.ts', mayImport: server('errors.ts'), packages: [] },
 	{
 		path: 'src/lib/server/hooks',
 		mayImport: [
@@ -89,7 +90,7 @@ export const ROOMS: Room[] = [
 		path: 'src/routes',
 		mayImport: [
 			...lib('components', 'schemas'),
-			...server('services', 'auth', 'respond.ts', 'read-json.ts', 'read-id.ts'),
+			...server('services', 'auth', 'respond.ts', 'read-json.ts', 'read-form.ts', 'read-id.ts'),
 			'src/app.css'
 		],
 		packages: ['*']

@@ -3,10 +3,10 @@
  * y = X (g(0) + g(1)) + 1.34 X g(½), standard deviations 0.125 and 0.098, where X is the height of a shoulder.
  */
 export const SWEEP_WIDTH = 104;
-export const SWEEP_HEIGHT = 96;
+export const SWEEP_HEIGHT = 88;
 export const SWEEP_STROKE = 13.5;
 
-const SHOULDER_HEIGHT = 72;
+const SHOULDER_HEIGHT = 64;
 const STEPS = 48;
 
 const gaussian = (x: number, centre: number, deviation: number): number =>

@@ -6,6 +6,7 @@ import {
 	setDeviceCookie,
 	setSessionCookie
 } from '$lib/server/auth/cookies';
+import { readForm } from '$lib/server/read-form';
 import { parseWith } from '$lib/server/read-json';
 import { refusalOf } from '$lib/server/respond';
 import { destinationAfterSignIn, homeFor } from '$lib/server/services/accounts/destination';
@@ -19,10 +20,12 @@ export const load: PageServerLoad = ({ locals, url }) => {
 
 export const actions: Actions = {
 	default: async ({ cookies, getClientAddress, locals, request, setHeaders, url }) => {
-		const typed = Object.fromEntries(await request.formData());
 		const secure = locals.secureCookies;
+		let email = '';
 		let result;
 		try {
+			const typed = await readForm(request);
+			if (typeof typed.email === 'string') email = typed.email;
 			const form = parseWith(signInForm, typed);
 			result = await signIn(
 				{
@@ -36,7 +39,7 @@ export const actions: Actions = {
 		} catch (cause) {
 			const { status, message, issues, retryAfterS } = refusalOf(cause);
 			if (retryAfterS) setHeaders({ 'retry-after': String(retryAfterS) });
-			return fail(status, { message, issues, email: typeof typed.email === 'string' ? typed.email : '' });
+			return fail(status, { message, issues, email });
 		}
 		setSessionCookie(cookies, secure, result.sessionToken, result.expiresAt);
 		setDeviceCookie(cookies, secure, result.deviceToken);
