@@ -28,7 +28,11 @@ function namesDeclaredIn(source: ts.SourceFile): Set<string> {
 	);
 }
 
-const nodesOf = (node: ts.Node): ts.Node[] => [node, ...node.getChildren().flatMap(nodesOf)];
+function nodesOf(node: ts.Node): ts.Node[] {
+	const nodes = [node];
+	ts.forEachChild(node, (child) => void nodes.push(...nodesOf(child)));
+	return nodes;
+}
 
 function impurityOf(node: ts.Node, own: Set<string>): string | undefined {
 	if (ts.isNewExpression(node) && node.expression.getText() === 'Date' && !node.arguments?.length)

@@ -19,7 +19,7 @@ export const ROOMS: Room[] = [
 	{
 		path: 'src/lib/server/bench',
 		mayImport: lib('measure', 'schemas', 'units'),
-		packages: ['zod', 'fft.js', 'mathjs', 'seedrandom'],
+		packages: ['zod', 'yaml', 'fft.js', 'mathjs', 'bessel'],
 		isPure: true
 	},
 	{
