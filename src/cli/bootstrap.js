@@ -20,7 +20,7 @@ if (major < 20 || (major === 20 && minor < 19)) {
 	process.exit(1);
 }
 const script = fileURLToPath(new URL(`./${verb}.ts`, import.meta.url));
-if (!verb || !/^[a-z-]+$/.test(verb) || !existsSync(script)) {
+if (!verb || !/^[a-z0-9-]+$/.test(verb) || !existsSync(script)) {
 	console.error(`No such command: ${verb ?? '(none)'}`);
 	process.exit(2);
 }
