@@ -1,12 +1,13 @@
 import { describe, expect, it } from 'vitest';
-import { densitySkirt } from '$lib/server/bench/receiver/front-end/density-skirt';
 import { FilteredSkirt } from '$lib/server/bench/receiver/front-end/filtered-skirt';
-import { skirtPower } from '$lib/server/bench/receiver/front-end/line-skirts';
+import { SkirtField } from '$lib/server/bench/receiver/front-end/skirt-field';
+import { densitySources, lineSource, wholeSources } from '$lib/server/bench/receiver/front-end/skirt-source';
 import { phaseNoiseSkirt } from '$lib/server/bench/receiver/front-end/skirt-shape';
-import { field } from '$lib/server/bench/receiver/profiles';
+import { kindOf } from '$lib/server/bench/signal/kinds';
+import { field as fieldProfile } from '$lib/server/bench/receiver/profiles';
 
 const db = (ratio: number) => 10 * Math.log10(ratio);
-const shape = phaseNoiseSkirt(field.phaseNoise!);
+const shape = phaseNoiseSkirt(fieldProfile.phaseNoise!);
 /** ∫L(|u|)·|H(offset − u)|² du by a fine midpoint rule: the definition. */
 function filtered(offsetHz: number, rbwHz: number): number {
 	const c = (4 * Math.LN2) / rbwHz ** 2;
@@ -41,44 +42,69 @@ describe('phaseNoiseSkirt(points)', () => {
 		));
 });
 
-describe('skirtPower(lines, rbwHz, floorMw)', () => {
+describe('SkirtField.at(frequencyHz)', () => {
 	const skirt = new FilteredSkirt(shape, 1e3);
-	const at = skirtPower([{ frequencyHz: 1e9, powerMw: 0.5, skirt }], 1e3, 1e-14)!;
-	it('is power from 3.5 B on, phase nearer', () => {
-		expect(at(1e9 + 3.49e3)).toBe(0);
-		expect(at(1e9 - 3.51e3)).toBeCloseTo(0.5 * skirt.at(3.51e3), 15);
-	});
-});
+	const floorMw = 1e-14;
+	const noiseBandwidthHz = 1064.467;
+	const band = (startHz: number, stopHz: number) =>
+		kindOf({ kind: 'noise' as const, densityDbmPerHz: -10 * Math.log10(stopHz - startHz), startHz, stopHz })
+			.density!({ kind: 'noise', densityDbmPerHz: -10 * Math.log10(stopHz - startHz), startHz, stopHz });
+	const fieldOf = (startHz: number, stopHz: number) =>
+		SkirtField.of(
+			skirt,
+			densitySources(band(startHz, stopHz), 1, () => 1),
+			floorMw
+		)!;
 
-describe('densitySkirt(source, shape, finestHz)', () => {
-	const band = (startHz: number, stopHz: number) => ({
-		startHz,
-		stopHz,
-		breaksHz: [startHz, stopHz],
-		powerMw: (a: number, b: number) =>
-			Math.max(0, Math.min(b, stopHz) - Math.max(a, startHz)) / (stopHz - startHz)
+	it('of a line is power from 3.5 B on, phase nearer', () => {
+		const field = SkirtField.of(skirt, [lineSource(1e9, 0.5, 1e3)], floorMw)!;
+		expect(field.at(1e9 + 3.49e3)).toBe(0);
+		expect(field.at(1e9 - 3.51e3)).toBeCloseTo(0.5 * skirt.at(3.51e3), 15);
 	});
-	it('of a band far narrower than the distance is the skirt of a line of its power', () => {
-		const spread = densitySkirt(band(1e9 - 500, 1e9 + 500), shape, 100);
-		for (const offsetHz of [3e4, 2e5, 3e6])
-			expect(
-				Math.abs(db(spread.powerMw(1e9 + offsetHz, 1e9 + offsetHz + 1) / shape.densityPerHz(offsetHz)))
-			).toBeLessThan(0.05);
-	});
-	it('beside a flat band is the skirt integrated over the band', () => {
-		const spread = densitySkirt(band(1e9 - 1e6, 1e9 + 1e6), shape, 100);
-		for (const offsetHz of [300, 5e3, 7e4, 1e6]) {
-			const expected = (shape.powerWithin(offsetHz + 2e6) - shape.powerWithin(offsetHz)) / 2e6;
-			expect(
-				Math.abs(db(spread.powerMw(1e9 + 1e6 + offsetHz - 0.5, 1e9 + 1e6 + offsetHz + 0.5) / expected))
-			).toBeLessThan(0.05);
+	it('of a thousand lines is their sum within 0.05 dB', () => {
+		const lines = Array.from({ length: 1000 }, (_, i) => ({
+			frequencyHz: 1e9 + 5e3 * i,
+			powerMw: 1e-3 * (1 + Math.sin(i))
+		}));
+		const field = SkirtField.of(
+			skirt,
+			lines.map((l) => lineSource(l.frequencyHz, l.powerMw, 1e3)),
+			floorMw
+		)!;
+		for (let f = 0.99e9; f < 1.02e9; f += 71.3e3) {
+			const sum = lines.reduce(
+				(s, l) =>
+					s + (Math.abs(f - l.frequencyHz) < 3.5e3 ? 0 : l.powerMw * skirt.at(Math.abs(f - l.frequencyHz))),
+				0
+			);
+			expect(Math.abs(db(field.at(f) / sum)), `${f}`).toBeLessThan(0.05);
 		}
 	});
-	it('holds what the line share leaves over', () => {
-		const spread = densitySkirt(band(1e9 - 1e6, 1e9 + 1e6), shape, 100);
+	it('of a band far narrower than the distance is that of a line of its power', () => {
+		const field = fieldOf(1e9 - 500, 1e9 + 500);
+		for (const offsetHz of [3e4, 2e5, 3e6])
+			expect(Math.abs(db(field.at(1e9 + offsetHz) / skirt.at(offsetHz)))).toBeLessThan(0.05);
+	});
+	it('beside a flat band is the skirt integrated over the band', () => {
+		const field = fieldOf(1e9 - 1e6, 1e9 + 1e6);
+		for (const offsetHz of [5e3, 7e4, 1e6]) {
+			const expected = (shape.powerWithin(offsetHz + 2e6) - shape.powerWithin(offsetHz)) / 2e6;
+			expect(Math.abs(db(field.at(1e9 + 1e6 + offsetHz) / expected / noiseBandwidthHz))).toBeLessThan(0.05);
+		}
+	});
+	it('of a band holds what the line share leaves over', () => {
+		const field = fieldOf(1e9 - 1e6, 1e9 + 1e6);
 		let total = 0;
-		for (let offset = 5; offset < 3e7; offset *= 1.02)
-			total += 2 * spread.powerMw(1e9 + offset, 1e9 + offset * 1.02);
+		for (let offset = 500; offset < 9e7; offset *= 1.01)
+			total += (2 * field.at(1e9 + offset) * 0.01 * offset) / noiseBandwidthHz;
 		expect(total / (1 - shape.lineShare)).toBeCloseTo(1, 1);
 	});
+	it('of a signal followed as a whole is nothing near it, and that of a line of its power far away', () => {
+		const field = SkirtField.of(skirt, wholeSources(band(1e9 - 2e3, 1e9 + 2e3), 0.1, 1e3), floorMw)!;
+		expect(field.at(1e9 + 5.4e3)).toBe(0);
+		expect(field.at(1e9 + 5.6e3)).toBeGreaterThan(0);
+		expect(Math.abs(db(field.at(1.0002e9) / (0.1 * skirt.at(2e5))))).toBeLessThan(0.02);
+	});
+	it('is not made for skirts that nothing shows of', () =>
+		expect(SkirtField.of(skirt, [lineSource(1e9, 1e-14, 1e3)], floorMw)).toBeNull());
 });

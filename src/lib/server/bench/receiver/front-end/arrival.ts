@@ -20,16 +20,23 @@ export interface Arrival {
 	/** Place in the scene: names its chance. */
 	index: number;
 	emitter: Emitter;
-	/** Its lines while on; one at the carrier for what is followed as a waveform (`quasi-static`). */
+	/** Its lines while on; one, at the carrier, for a constant envelope. */
 	lines: Line[];
+	/**
+	 * Modulated by a tone in its phase only: the stages see a constant envelope and so one line, which breaks into the
+	 * modulation's lines (or moves, when they are too dense to resolve) behind them.
+	 */
+	angle?: EmitterOf<'fm' | 'pm'>;
 	/** Its density while on. */
 	density?: Density;
 	/** Made symbol by symbol, or as a moving line, by the sweep: then neither lines nor density are swept themselves. */
-	waveform?: EmitterOf<'digital' | 'msk' | 'am' | 'fm' | 'pm'>;
+	waveform?: EmitterOf<'digital' | 'msk' | 'fm' | 'pm'>;
 	/** Switching, hopping, drifting that the filter can follow. */
 	timing?: Timing;
 	/** Switching that it can't. */
 	trains: Train[];
+	/** Phase of its modulation at bench clock 0. */
+	modulationRad: number;
 	/** Share of the time that the trains leave on. */
 	duty: number;
 	phaseNoise?: PhaseNoise;
@@ -47,11 +54,12 @@ const phaseStream = (seed: Seed, index: number) => new Random(seed, -1, `phase/$
 const isFast = (periodS: number, rbwHz: number) => 1 / periodS >= rbwHz / 2;
 
 export function arrivalOf(emitter: Emitter, index: number, rbwHz: number, seed: Seed): Arrival {
-	const arrival: Arrival = { index, emitter, lines: [], trains: [], duty: 1 };
+	const phases = emitterPhases(seed, index);
+	const { modulationRad } = phases;
+	const arrival: Arrival = { index, emitter, lines: [], trains: [], duty: 1, modulationRad };
 	if (emitter.kind === 'dc') return arrival;
 	const kind = kindOf(emitter);
 	const behaviour = kind.behaviour(emitter, rbwHz);
-	const phases = emitterPhases(seed, index);
 	if (emitter.kind === 'noise') return { ...arrival, density: kind.density?.(emitter) };
 	if (emitter.kind === 'cw' && emitter.phaseNoise) {
 		arrival.phaseNoise = phaseNoiseSkirt(emitter.phaseNoise, `scene.emitters.${index}.phaseNoise`);
@@ -60,8 +68,9 @@ export function arrivalOf(emitter: Emitter, index: number, rbwHz: number, seed: 
 		arrival.lines = [lineOf(emitter.frequencyHz, kind.peakPowerMw(emitter), phases.carrierRad)];
 	} else if (behaviour === 'density' || behaviour === 'envelope') {
 		arrival.density = kind.density?.(emitter);
-	} else if (behaviour === 'quasi-static') {
+	} else if (emitter.kind === 'fm' || emitter.kind === 'pm') {
 		arrival.lines = [lineOf(emitter.frequencyHz, kind.meanPowerMw(emitter), phases.carrierRad)];
+		arrival.angle = emitter;
 	} else {
 		arrival.lines = kind.lines?.(emitter, phases) ?? [];
 	}
@@ -70,8 +79,8 @@ export function arrivalOf(emitter: Emitter, index: number, rbwHz: number, seed: 
 	return { ...arrival, ...timingOf(emitter, index, rbwHz, phases, arrival.waveform !== undefined, seed) };
 }
 
-const isWaveform = (emitter: Emitter): emitter is EmitterOf<'digital' | 'msk' | 'am' | 'fm' | 'pm'> =>
-	['digital', 'msk', 'am', 'fm', 'pm'].includes(emitter.kind);
+const isWaveform = (emitter: Emitter): emitter is EmitterOf<'digital' | 'msk' | 'fm' | 'pm'> =>
+	['digital', 'msk', 'fm', 'pm'].includes(emitter.kind);
 
 /** Splits an emitter's comings and goings into what the filter follows and what it resolves. */
 function timingOf(

@@ -1,4 +1,5 @@
 /** What travels along the chain from the reference plane to the resolution filter. */
+import type { Emitter } from '$lib/schemas/scene';
 import type { Density, Line } from '$lib/server/bench/signal/emitter-kind';
 import type { Arrival } from './arrival';
 
@@ -15,6 +16,8 @@ export interface CarriedLine extends Line {
 export interface CarriedDensity {
 	/** Its spectrum as it is here, but for a connection that is not the same at all its frequencies. */
 	density: Density;
+	/** Width of its finest detail between breaks, Hz; 0 where nothing is known of it. */
+	finestHz: number;
 	/** Power gain that each frequency still has to be multiplied by. */
 	gainAt(frequencyHz: number): number;
 	/** Whose spectrum it is; absent on one that grew. */
@@ -38,10 +41,27 @@ export function carriedFrom(arrivals: readonly Arrival[]): Carried {
 		),
 		densities: arrivals.flatMap((arrival) =>
 			arrival.density
-				? [{ density: arrival.density, gainAt: unchanged, own: arrival, arrivals: [arrival] }]
+				? [
+						{
+							density: arrival.density,
+							finestHz: finestDetailHz(arrival.emitter),
+							gainAt: unchanged,
+							own: arrival,
+							arrivals: [arrival]
+						}
+					]
 				: []
 		)
 	};
+}
+
+/** Width of the finest detail between the breaks of an emitter's density, Hz. */
+function finestDetailHz(emitter: Emitter): number {
+	if (emitter.kind === 'noise') return Infinity;
+	if (emitter.kind === 'digital') return emitter.rollOff * emitter.symbolRateHz;
+	if (emitter.kind === 'msk') return emitter.bitRateHz / 2;
+	if (emitter.kind === 'multicarrier') return emitter.spacingHz;
+	return 0;
 }
 
 /** Whether an emitter is there all the time, as far as the filter can tell. */

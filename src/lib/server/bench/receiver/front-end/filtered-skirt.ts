@@ -27,22 +27,26 @@ export class FilteredSkirt {
 	private readonly nearHz: number;
 	private readonly near: Float64Array;
 	private readonly far: Float64Array;
+	private readonly noiseBandwidthHz: number;
 	readonly endHz: number;
 
-	constructor(shape: SkirtShape, rbwHz: number) {
+	constructor(
+		private readonly shape: SkirtShape,
+		readonly rbwHz: number
+	) {
 		this.stepHz = rbwHz / STEPS_PER_RBW;
 		this.nearHz = NEAR_RBW * rbwHz;
 		this.endHz = shape.endHz + 4 * rbwHz;
 		this.near = nearTable(shape, this.stepHz, 2 * gaussianConstant(rbwHz));
 		const steps = Math.max(0, Math.ceil(Math.log(shape.endHz / this.nearHz) * STEPS_PER_E));
-		const noiseBandwidthHz = NOISE_PER_RBW * rbwHz;
+		this.noiseBandwidthHz = NOISE_PER_RBW * rbwHz;
 		this.far = Float64Array.from({ length: steps + 2 }, (_, i) => {
 			const offsetHz = Math.min(shape.endHz, this.nearHz * Math.exp(i / STEPS_PER_E));
-			return noiseBandwidthHz * shape.densityPerHz(offsetHz);
+			return this.noiseBandwidthHz * shape.densityPerHz(offsetHz);
 		});
 	}
 
-	/** Power through the filter tuned `offsetHz` ≥ 3.5 B from a carrier of power 1. */
+	/** Power through the filter tuned `offsetHz` ≥ 0 from a carrier of power 1. */
 	at(offsetHz: number): number {
 		if (offsetHz < this.nearHz) {
 			const place = offsetHz / this.stepHz;
@@ -54,6 +58,18 @@ export class FilteredSkirt {
 		const i = Math.floor(place);
 		if (i + 1 >= this.far.length) return 0;
 		return this.far[i] + (place - i) * (this.far[i + 1] - this.far[i]);
+	}
+
+	/**
+	 * Power through a filter narrow against a band (of power 1, flat) that begins `fromHz` above the tuned frequency and
+	 * ends `toHz` above it; either may be negative.
+	 */
+	ofBand(fromHz: number, toHz: number): number {
+		return (this.noiseBandwidthHz * (this.signedPower(toHz) - this.signedPower(fromHz))) / (toHz - fromHz);
+	}
+
+	private signedPower(offsetHz: number): number {
+		return offsetHz < 0 ? -this.shape.powerWithin(-offsetHz) : this.shape.powerWithin(offsetHz);
 	}
 }
 

@@ -1,12 +1,12 @@
-/** Lines as the filter meets them: switched trains resolved, comings and goings named, skirts attached. */
+/** Lines as the filter meets them: modulation and trains resolved, comings and goings named, skirts attached. */
 import type { PhaseNoisePoint } from '$lib/schemas/scene';
-import { combOfSwitchedLine } from '$lib/server/bench/signal/comb';
 import type { Band, Line } from '$lib/server/bench/signal/emitter-kind';
 import type { IncidentLine, Timing } from '../incident';
 import type { Arrival } from './arrival';
-import { pacemaker, type CarriedLine } from './carried';
+import type { CarriedLine } from './carried';
 import { timingOf } from './line-timing';
 import { isMoving } from './moving-line';
+import { resolveLine } from './resolve-line';
 import type { PhaseNoise } from './skirt-shape';
 
 /** A swept line with what its skirts hold. */
@@ -17,27 +17,6 @@ export interface ArrivedLine {
 	/** What it is made of. */
 	arrivals: Arrival[];
 }
-
-/** A train's lines are followed to this many repetition rates from their carrier. */
-const FARTHEST_LINE = 5000;
-
-/** The line, or the lines it breaks into when it is switched faster than the filter can follow. */
-function resolveTrains(line: Line, arrival: Arrival | undefined, band: Band | undefined): Line[] {
-	return (arrival?.trains ?? []).reduce<Line[]>(
-		(lines, train) =>
-			lines.flatMap((one) => {
-				const reachHz = FARTHEST_LINE / train.periodS;
-				const near = { startHz: one.frequencyHz - reachHz, stopHz: one.frequencyHz + reachHz };
-				return combOfSwitchedLine(one, train, band ? intersection(near, band) : near);
-			}),
-		[line]
-	);
-}
-
-const intersection = (a: Band, b: Band): Band => ({
-	startHz: Math.max(a.startHz, b.startHz),
-	stopHz: Math.min(a.stopHz, b.stopHz)
-});
 
 /**
  * Lines that the sweep will follow.
@@ -54,8 +33,8 @@ export function incidentLines(
 	for (const carried of lines) {
 		const timing = timingOf(carried);
 		const staysPut = timing?.hop === undefined && timing?.driftHzPerS === undefined;
-		const main = pacemaker(carried.origins.map(({ arrival }) => arrival));
-		for (const line of resolveTrains(carried, main, staysPut ? band : undefined)) {
+		// Lines out of sight still have skirts that reach in.
+		for (const line of resolveLine(carried, staysPut ? band : undefined)) {
 			const one = arrive(line, carried, timing, receiver);
 			arrived.push(one);
 			// One that moves by modulation is an envelope's business; its skirts are counted here all the same.

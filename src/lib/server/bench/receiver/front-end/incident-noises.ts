@@ -4,10 +4,10 @@ import type { Arrival } from './arrival';
 import { pacemaker, type CarriedDensity } from './carried';
 import { densityShare } from './density-share';
 import { FilteredPower } from './filtered-power';
-import { SKIRT_FROM_RBW } from './filtered-skirt';
 import type { ArrivedLine } from './incident-lines';
-import { skirtPower } from './line-skirts';
-import { addDensity, emptyGroup, narrowWidthHz, type NoiseGroup } from './noise-group';
+import { addDensity, addSkirts, emptyGroup, narrowWidthHz, type NoiseGroup } from './noise-group';
+import { SkirtField } from './skirt-field';
+import { lineSource } from './skirt-source';
 import { spectrumPart } from './spectrum-part';
 import type { View } from './view';
 
@@ -31,12 +31,7 @@ export function incidentNoises(
 	for (const { line, skirts, arrivals } of lines) {
 		const group = groupOf(arrivals);
 		for (const { noise, powerMw } of skirts)
-			group.skirted.push({
-				frequencyHz: line.frequencyHz,
-				powerMw,
-				skirt: view.filteredSkirt(noise),
-				fromHz: SKIRT_FROM_RBW * view.rbwHz + strayHz(arrivals)
-			});
+			addSkirts(group, noise, [lineSource(line.frequencyHz, powerMw, view.rbwHz)]);
 	}
 	const noises = [...groups].flatMap(([owner, group]) => groupNoise(owner, group, view));
 	const narrow = [...groups].flatMap(([owner, group]) =>
@@ -62,13 +57,19 @@ function scheduled(arrivals: readonly Arrival[]): Arrival | null {
 function groupNoise(owner: Arrival | null, group: NoiseGroup, view: View): IncidentNoise[] {
 	const { rbwHz, leastFloorMw, startHz, spacingHz, floorMw } = view;
 	const power = group.parts.length && new FilteredPower(group.parts, rbwHz, leastFloorMw, startHz, spacingHz);
-	const skirts = skirtPower(group.skirted, rbwHz, leastFloorMw);
-	if (owner && !power && !skirts) return [];
+	const skirts = [...group.skirted].flatMap(
+		([noise, sources]) => SkirtField.of(view.filteredSkirt(noise), sources, leastFloorMw) ?? []
+	);
+	if (owner && !power && skirts.length === 0) return [];
 	const floor = owner ? () => 0 : floorMw;
 	return [
 		{
-			variance: (frequencyHz) =>
-				floor(frequencyHz) + (power ? power.at(frequencyHz) : 0) + (skirts ? skirts(frequencyHz) : 0),
+			variance(frequencyHz) {
+				let sum = floor(frequencyHz);
+				if (power) sum += power.at(frequencyHz);
+				for (const field of skirts) sum += field.at(frequencyHz);
+				return sum;
+			},
 			...schedule(owner)
 		}
 	];
@@ -78,7 +79,11 @@ function groupNoise(owner: Arrival | null, group: NoiseGroup, view: View): Incid
 function narrowNoise(owner: Arrival | null, carried: CarriedDensity, view: View): IncidentNoise {
 	const { rbwHz, leastFloorMw, startHz, spacingHz, receiver } = view;
 	const share = densityShare(carried) * (receiver?.lineShare ?? 1);
-	const part = spectrumPart(carried.density, (frequencyHz) => share * carried.gainAt(frequencyHz));
+	const part = spectrumPart(
+		carried.density,
+		carried.finestHz,
+		(frequencyHz) => share * carried.gainAt(frequencyHz)
+	);
 	const power = new FilteredPower([part], rbwHz, leastFloorMw, startHz, spacingHz);
 	return {
 		variance: (frequencyHz) => power.at(frequencyHz),

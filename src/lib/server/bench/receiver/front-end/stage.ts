@@ -48,7 +48,7 @@ function bent(
 		for (const i of parents?.densities ?? [])
 			for (const arrival of entered[i].arrivals) arrivals.add(arrival);
 		for (const i of parents?.lines ?? []) for (const { arrival } of lines[i].origins) arrivals.add(arrival);
-		return { density, gainAt: () => 1, arrivals: [...arrivals] };
+		return { density, finestHz: 0, gainAt: () => 1, arrivals: [...arrivals] };
 	});
 	return [...same, ...passed, ...grown];
 }
