@@ -4,7 +4,7 @@ import { lineSpreadDb, noiseBetweenDbm } from './line-spectrum';
 import type { Harmonic } from './reading';
 import { needsSpan, noNumber, type NoNumber, outsideTrace } from './reader';
 import { type Remark, remark } from './remark';
-import { outsideRemark, sparseLineRemarks } from './remarks';
+import { outsideRemark, unresolvedLineRemarks } from './remarks';
 import { covers, isZeroSpan, stepHz, type Trace } from './trace';
 
 export interface HarmonicLines {
@@ -44,7 +44,7 @@ export function readHarmonics(trace: Trace, fundamentalHz: number, count: number
 		fundamentalSpreadDb: lineSpreadDb(trace, fundamental.levelDbm, noiseDbm),
 		harmonics,
 		remarks: [
-			...sparseLineRemarks(trace),
+			...unresolvedLineRemarks(trace),
 			...(buried.length > 0 ? [nearNoise] : []),
 			...(harmonics.length < count ? [outsideRemark()] : [])
 		]

@@ -18,7 +18,7 @@ export interface LineSpacing {
  */
 export function lineSpacing(lines: SpectralLine[], nearHz: number, toleranceHz: number): LineSpacing | null {
 	const gaps = lines.slice(1).map(({ frequencyHz }, i) => frequencyHz - lines[i].frequencyHz);
-	const candidates = [...gaps, ...gaps.map((gap) => gap / 2)].filter((gap) => gap > 0).sort((a, b) => b - a);
+	const candidates = gaps.filter((gap) => gap > 0).sort((a, b) => b - a);
 	for (const candidate of candidates) {
 		const fitted = fit(lines, candidate, toleranceHz);
 		if (fitted)

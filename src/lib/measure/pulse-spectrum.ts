@@ -11,7 +11,7 @@ import type { SpectralLine } from './find-line';
 import { sweepTimeS } from './noise-statistics';
 import { noNumber, outsideTrace, type Outcome } from './reader';
 import { type Remark, remark } from './remark';
-import { sparseLineRemarks } from './remarks';
+import { unresolvedLineRemarks } from './remarks';
 import { covers, frequencyAt, spanHz, stepHz, type Trace } from './trace';
 
 export function pulseSpectrum(trace: Trace, carrierHz: number): Outcome<'pulse'> {
@@ -35,7 +35,7 @@ export function pulseSpectrum(trace: Trace, carrierHz: number): Outcome<'pulse'>
 		value: fit.widthS,
 		unit: 's',
 		spread: fit.spreadS,
-		remarks: [...(shape === 'lines' ? sparseLineRemarks(trace) : []), ...pulseRemarks(fit, repetitionHz)],
+		remarks: [...(shape === 'lines' ? unresolvedLineRemarks(trace) : []), ...pulseRemarks(fit, repetitionHz)],
 		parts: { widthS: fit.widthS, repetitionHz }
 	};
 }

@@ -55,11 +55,13 @@ export const lineRemarks = (trace: Trace, index: number): Remark[] => [
 	...sparseLineRemarks(trace)
 ];
 
-/** Points farther apart than the filter is wide, with a detector that looks only at the points themselves. */
-export function sparseLineRemarks(trace: Trace): Remark[] {
+/**
+ * Points too far apart for a detector that looks only at the points themselves.
+ * @param largestStep over the resolution bandwidth: a quarter, where a line may stand 0.19 dB above the nearest point
+ */
+export function sparseLineRemarks(trace: Trace, largestStep = 1 / 4): Remark[] {
 	const looksBetween = trace.detector === 'positive-peak' || trace.detector === 'rise-fall';
-	// A quarter of B apart, a line may stand 0.19 dB above the nearest point.
-	if (isZeroSpan(trace) || looksBetween || stepHz(trace) <= trace.rbwHz / 4) return [];
+	if (isZeroSpan(trace) || looksBetween || stepHz(trace) <= trace.rbwHz * largestStep) return [];
 	return [
 		remark(
 			'too-few-points',
@@ -67,6 +69,9 @@ export function sparseLineRemarks(trace: Trace): Remark[] {
 		)
 	];
 }
+
+/** The same for readings that find the top of a line between the points, as they can up to half a resolution bandwidth apart. */
+export const unresolvedLineRemarks = (trace: Trace): Remark[] => sparseLineRemarks(trace, 1 / 2);
 
 /**
  * What an integral over a band of `widthHz` needs of the trace.

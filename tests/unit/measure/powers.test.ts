@@ -69,7 +69,7 @@ describe('channel-power {centreHz, widthHz}', () => {
 	});
 	it('has no number in span 0', () => expect(problemOf(zeroSpan, channel).needs).toBe('a span above 0'));
 
-	const noise = (setup: Partial<Trace> & { rows?: number }) =>
+	const noise = (setup: Partial<Trace> & { rows?: number; points?: number }) =>
 		buildNoise('remarks', { rbwHz: 10e3, ...setup }, -140);
 	it.each<[string, Trace, string[]]>([
 		['an average of power', noise({ scale: 'power', rows: 10 }), []],

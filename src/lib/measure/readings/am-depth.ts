@@ -5,7 +5,7 @@ import { lineSpreadDb } from '../line-spectrum';
 import { type ModulationLines, modulationLines } from '../modulation-lines';
 import { isNoNumber, noNumber, type Outcome, type Reader } from '../reader';
 import { type Remark, remark } from '../remark';
-import { sparseLineRemarks } from '../remarks';
+import { unresolvedLineRemarks } from '../remarks';
 import { isZeroSpan, type Trace } from '../trace';
 
 export const amDepth: Reader<'am-depth'> = (trace, { carrierHz }) => {
@@ -28,7 +28,7 @@ function depthFromLines(trace: Trace, lines: ModulationLines): Outcome<'am-depth
 		value,
 		unit: '%',
 		spread: value * (Math.LN10 / 20) * Math.hypot(sidebandDb, lineSpreadDb(trace, carrier.levelDbm)),
-		remarks: [...sparseLineRemarks(trace), ...depthRemarks(lines)],
+		remarks: [...unresolvedLineRemarks(trace), ...depthRemarks(lines)],
 		parts: { modulatingHz: lines.modulatingHz }
 	};
 }

@@ -6,7 +6,7 @@ import { lineSpreadDb } from '../line-spectrum';
 import { noiseDensityAt } from '../noise-density';
 import { isNoNumber, needsSpan, noNumber, type NoNumber, outsideTrace, type Reader } from '../reader';
 import type { Remark } from '../remark';
-import { once, sparseLineRemarks } from '../remarks';
+import { once, unresolvedLineRemarks } from '../remarks';
 import { NOISE_PER_RBW } from '../resolution-filter';
 import { covers, isZeroSpan, type Trace } from '../trace';
 
@@ -48,7 +48,7 @@ function carrierPower(
 		const line = findLine(trace, carrierHz, 2 * trace.rbwHz);
 		const spreadDb = lineSpreadDb(trace, line.levelDbm, shownNoiseDbm);
 		return withoutNoise(
-			{ levelDbm: line.levelDbm, spreadDb, remarks: sparseLineRemarks(trace) },
+			{ levelDbm: line.levelDbm, spreadDb, remarks: unresolvedLineRemarks(trace) },
 			shownNoiseDbm
 		);
 	}

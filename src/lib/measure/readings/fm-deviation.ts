@@ -9,7 +9,7 @@ import { type ModulationLines, modulationLines } from '../modulation-lines';
 import { independentValues } from '../noise-statistics';
 import { isNoNumber, type Reader } from '../reader';
 import { type Remark, remark } from '../remark';
-import { sparseLineRemarks } from '../remarks';
+import { unresolvedLineRemarks } from '../remarks';
 import type { Trace } from '../trace';
 
 export const fmDeviation: Reader<'fm-deviation'> = (trace, { carrierHz }) => {
@@ -21,7 +21,7 @@ export const fmDeviation: Reader<'fm-deviation'> = (trace, { carrierHz }) => {
 		value: fit.index * modulatingHz,
 		unit: 'Hz',
 		spread: Math.hypot(modulatingHz * indexSpread(trace, fit), fit.index * modulatingSpreadHz),
-		remarks: [...sparseLineRemarks(trace), ...fitRemarks(lines, fit)],
+		remarks: [...unresolvedLineRemarks(trace), ...fitRemarks(lines, fit)],
 		parts: { modulatingHz, index: fit.index }
 	};
 };

@@ -6,7 +6,7 @@ import { findLine, type SpectralLine } from '../find-line';
 import { lineSpreadDb, noiseBetweenDbm } from '../line-spectrum';
 import { needsSpan, noNumber, outsideTrace, type Reader } from '../reader';
 import { type Remark, remark } from '../remark';
-import { outsideRemark, sparseLineRemarks } from '../remarks';
+import { outsideRemark, unresolvedLineRemarks } from '../remarks';
 import { covers, isZeroSpan, stepHz, type Trace } from '../trace';
 
 export const intercept: Reader<'intercept'> = (trace, { lowerHz, upperHz }) => {
@@ -46,7 +46,7 @@ export const intercept: Reader<'intercept'> = (trace, { lowerHz, upperHz }) => {
 };
 
 function interceptRemarks(trace: Trace, spacingHz: number, found: { nearNoise: boolean }[]): Remark[] {
-	const remarks = sparseLineRemarks(trace);
+	const remarks = unresolvedLineRemarks(trace);
 	// Three B from a line the filter still lets −108 dB of it through, two B −48 dB.
 	if (spacingHz < 3 * trace.rbwHz) {
 		remarks.push(

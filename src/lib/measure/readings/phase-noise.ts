@@ -4,7 +4,7 @@ import { lineSpreadDb } from '../line-spectrum';
 import { noiseDensityAt } from '../noise-density';
 import { isNoNumber, needsSpan, outsideTrace, type Reader } from '../reader';
 import { remark } from '../remark';
-import { sparseLineRemarks } from '../remarks';
+import { unresolvedLineRemarks } from '../remarks';
 import { filterLossDb } from '../resolution-filter';
 import { covers, isZeroSpan, spanHz, stepHz } from '../trace';
 
@@ -29,7 +29,7 @@ export const phaseNoise: Reader<'phase-noise'> = (trace, { carrierHz, offsetHz }
 		remarks: [
 			...(skirtDbm > density.shownDbm - 15 ? [inSkirt] : []),
 			...density.remarks,
-			...sparseLineRemarks(trace)
+			...unresolvedLineRemarks(trace)
 		],
 		parts: { carrierDbm: carrier.levelDbm, carrierHz: carrier.frequencyHz }
 	};
