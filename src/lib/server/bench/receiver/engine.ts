@@ -18,7 +18,7 @@ import { videoKind } from './video';
 /** Buckets longer than this (in 1/B) follow the laws. */
 const LONG_BUCKET = 4;
 /** Rows that carry a modulated envelope are sampled up to this many samples. */
-const MOST_ENVELOPE_SAMPLES = 130_000;
+const MOST_ENVELOPE_SAMPLES = 30_000;
 
 export interface Engine {
 	/** One value per point on the scale. */

@@ -9,14 +9,22 @@ import type { IncidentEnvelope } from './incident';
 import { Random, type Seed } from './random';
 import { Schedule, type OnStretch } from './schedule';
 
-/** Values followed at each tuned frequency: more where only one is needed. */
-const FEW = 256;
-const MANY = 8192;
+/** Envelopes followed at each tuned frequency: more where only one is needed; samples to an envelope, and envelopes to a block. */
+const FEW = 96;
+const MANY = 800;
+const PER_ENVELOPE = 12;
+const BLOCK = 4;
 const REACH_RBW = 2.5;
 
+/** Powers seen at one tuned offset, mW: at instants, and the extremes of blocks (rising). */
+interface Seen {
+	instants: Float64Array;
+	greatest: Float64Array;
+	least: Float64Array;
+}
+
 export class EnvelopePool {
-	/** Power values seen at each tuned offset, rising; mW. */
-	private readonly sorted: Float64Array[] = [];
+	private readonly seen: Seen[] = [];
 	private readonly firstHz: number;
 	private readonly stepHz: number;
 	private readonly halfWidthHz: number;
@@ -34,33 +42,41 @@ export class EnvelopePool {
 		const { emitter, timing } = envelope;
 		const rateHz = emitter.kind === 'digital' ? emitter.symbolRateHz : emitter.kind === 'msk' ? emitter.bitRateHz : 0;
 		this.halfWidthHz = 1.5 * rateHz + REACH_RBW * frame.rbwHz;
-		this.ratePerS = 2 * Math.min(frame.rbwHz, rateHz);
+		this.ratePerS = Math.min(frame.rbwHz, rateHz);
 		if (timing && (timing.gate || timing.hop)) this.schedule = new Schedule(timing, seed);
 		const standing = frame.sweepHzPerS === 0 && !timing?.hop;
 		this.stepHz = standing ? Infinity : this.halfWidthHz / 12;
 		this.firstHz = standing ? frame.startHz - envelope.frequencyHz : -this.halfWidthHz;
 		const places = standing ? 1 : 25;
 		for (let p = 0; p < places; p++)
-			this.sorted.push(this.follow(this.firstHz + (p ? p * this.stepHz : 0), standing ? MANY : FEW, seed));
+			this.seen.push(this.follow(this.firstHz + (p ? p * this.stepHz : 0), standing ? MANY : FEW, seed));
 	}
 
-	/** Power of the filtered envelope at instants half an envelope apart, tuned `offsetHz` from the carrier. */
-	private follow(offsetHz: number, count: number, seed: Seed): Float64Array {
+	/** The filtered envelope, tuned `offsetHz` from the carrier, followed for so many envelopes. */
+	private follow(offsetHz: number, envelopes: number, seed: Seed): Seen {
+		const total = envelopes * PER_ENVELOPE;
 		const still: Frame = {
 			...this.frame,
 			startHz: this.envelope.frequencyHz + offsetHz,
 			sweepHzPerS: 0,
 			chirp: 0,
-			stepS: 1 / this.ratePerS,
+			stepS: 1 / (this.ratePerS * PER_ENVELOPE),
 			lead: 0,
-			total: count
+			total
 		};
 		const plain = { ...this.envelope, timing: undefined };
-		const re = new Float64Array(count);
-		const im = new Float64Array(count);
+		const re = new Float64Array(total);
+		const im = new Float64Array(total);
 		const row: RowContext = { clockS: 0, random: (stream) => new Random(seed, -1, stream) };
 		new EnvelopeContribution(plain, still, seed).addTo(row, still, re, im);
-		return re.map((x, i) => x * x + im[i] * im[i]).sort();
+		const instants = re.map((x, i) => x * x + im[i] * im[i]);
+		const length = BLOCK * PER_ENVELOPE;
+		const blocks = Array.from({ length: Math.floor(total / length) }, (_, b) =>
+			instants.subarray(b * length, (b + 1) * length)
+		);
+		const extremes = (pick: (a: number, b: number) => number) =>
+			Float64Array.from(blocks, (block) => block.reduce(pick)).sort();
+		return { instants, greatest: extremes(Math.max), least: extremes(Math.min) };
 	}
 
 	start(clockS: number): void {
@@ -71,28 +87,29 @@ export class EnvelopePool {
 
 	/** Power at a random instant near t seconds into the row; 0 while it is off or out of reach. */
 	power(t: number, random: Random): number {
-		const pool = this.poolAt(t);
-		return pool ? pool[Math.floor(random.uniform() * pool.length)] : 0;
+		const instants = this.seenAt(t)?.instants;
+		return instants ? instants[Math.floor(random.uniform() * instants.length)] : 0;
 	}
 
-	/** Greatest (or least) power over a stretch of lengthS about t. */
+	/** Greatest (or least) power over a stretch of lengthS about t: of as many blocks as it holds. */
 	extreme(t: number, lengthS: number, greatest: boolean, random: Random): number {
-		const pool = this.poolAt(t);
-		if (!pool) return 0;
-		const share = random.open() ** (1 / Math.max(1, lengthS * this.ratePerS));
-		const index = Math.floor((greatest ? share : 1 - share) * pool.length);
-		return pool[Math.min(pool.length - 1, index)];
+		const seen = this.seenAt(t);
+		if (!seen) return 0;
+		const share = random.open() ** (1 / Math.max(1, (lengthS * this.ratePerS) / BLOCK));
+		const list = greatest ? seen.greatest : seen.least;
+		const index = Math.floor((greatest ? share : 1 - share) * list.length);
+		return list[Math.min(list.length - 1, index)];
 	}
 
-	private poolAt(t: number): Float64Array | undefined {
+	private seenAt(t: number): Seen | undefined {
 		const { envelope, frame } = this;
 		const at = this.clockS + t;
 		const on = this.schedule ? this.stretches.find((s) => at >= s.startS && at < s.stopS) : undefined;
 		if (this.schedule && !on) return undefined;
 		const drift = (envelope.timing?.driftHzPerS ?? 0) * at;
 		const offset = frame.startHz + frame.sweepHzPerS * t - (on?.channelHz ?? envelope.frequencyHz) - drift;
-		if (this.stepHz === Infinity) return this.sorted[0];
+		if (this.stepHz === Infinity) return this.seen[0];
 		const place = Math.round((offset - this.firstHz) / this.stepHz);
-		return place >= 0 && place < this.sorted.length ? this.sorted[place] : undefined;
+		return place >= 0 && place < this.seen.length ? this.seen[place] : undefined;
 	}
 }

@@ -37,24 +37,27 @@ export function leastOfNoise(exponential: number, bt: number): number {
 	return root * root;
 }
 
-/** Greatest power of noise alone over bt as a function of −ln P: tabulated, since every bucket of a sweep has the same length. */
+/** Greatest power of noise alone over bt as a function of −ln P, tabulated. */
 export class GreatestOfNoise {
 	private static readonly CELLS = 512;
 	/** ln x at equal steps of ln(−ln P) from −40 (rarest) to 4. */
 	private readonly table: Float64Array;
 
-	constructor(bt: number) {
+	/** Length the table was made for, in 1/B. Crossings only: any other length is a draw scaled in proportion. */
+	private static readonly BT = 16;
+
+	constructor() {
 		let guess = Math.log(40);
 		this.table = Float64Array.from({ length: GreatestOfNoise.CELLS + 1 }, (_, i) => {
 			const target = -Math.exp(-40 + (44 * i) / GreatestOfNoise.CELLS);
-			guess = solveLog((x) => logBelow(x, 0, bt), target, guess);
+			guess = solveLog((x) => logBelow(x, 0, GreatestOfNoise.BT), target, guess);
 			return guess;
 		});
 	}
 
 	/** @param exponential −ln P: a unit exponential draw */
-	draw(exponential: number): number {
-		const at = ((Math.log(exponential) + 40) / 44) * GreatestOfNoise.CELLS;
+	draw(exponential: number, bt: number): number {
+		const at = ((Math.log((exponential * GreatestOfNoise.BT) / bt) + 40) / 44) * GreatestOfNoise.CELLS;
 		const cell = Math.min(GreatestOfNoise.CELLS - 1, Math.max(0, Math.floor(at)));
 		const blend = Math.min(1, Math.max(0, at - cell));
 		return Math.exp(this.table[cell] + blend * (this.table[cell + 1] - this.table[cell]));

@@ -44,7 +44,7 @@ export function extremeOf(
 	pieces: Piece[],
 	bt: number,
 	greatest: boolean,
-	table: GreatestOfNoise | undefined,
+	table: GreatestOfNoise,
 	random: Random
 ): number {
 	if (pieces.length === 0) return -1;
@@ -52,7 +52,7 @@ export function extremeOf(
 	const first = pieces[0];
 	if (pieces.length === 1 && first.p === 0) {
 		if (!greatest) return first.v * leastOfNoise(draw, bt * first.share);
-		if (table) return first.v * table.draw(draw);
+		return first.v * table.draw(draw, bt * first.share);
 	}
 	const active = strongest(pieces, greatest);
 	if (greatest)
@@ -90,19 +90,18 @@ function strongest(pieces: Piece[], greatest: boolean): Piece[] {
 	return top.map((q) => ({ ...q, share: q.share * scale }));
 }
 
-/** A detector's value on the scale for bucket number b. Continuous noise turns within a long bucket, so rise-fall alternates. */
-export function detectLong(
+/** A peak detector's value on the scale for bucket number b. Continuous noise turns within a long bucket, so rise-fall alternates. */
+export function peakOf(
 	b: number,
 	detector: Detector,
 	scale: Scale,
 	pieces: Piece[],
 	windows: Window[],
 	bt: number,
-	table: GreatestOfNoise | undefined,
+	table: GreatestOfNoise,
 	smoothing: Smoothing | undefined,
 	random: Random
 ): number {
-	if (detector === 'average') return averageOf(pieces, windows, bt, scale, random);
 	const greatest = detector === 'positive-peak' || (detector === 'rise-fall' && b % 2 === 0);
 	let value = extremeOnScale(pieces, bt, greatest, table, smoothing, scale, random);
 	for (const window of windows) {
@@ -117,7 +116,7 @@ function extremeOnScale(
 	pieces: Piece[],
 	bt: number,
 	greatest: boolean,
-	table: GreatestOfNoise | undefined,
+	table: GreatestOfNoise,
 	smoothing: Smoothing | undefined,
 	scale: Scale,
 	random: Random

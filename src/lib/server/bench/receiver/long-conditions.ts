@@ -93,11 +93,15 @@ export class LongBucketConditions {
 		if (lines.length === 0 && bursts.length === 0 && stretches.length === 0 && !modulated)
 			return { pieces: this.noise.pieces(b), windows: [] };
 		const windows = this.windows(b, bursts, random);
-		const windowShare = windows.reduce((sum, w) => sum + w.share, 0);
+		const rest = Math.max(0, 1 - windows.reduce((sum, w) => sum + w.share, 0));
 		const long = bursts.filter((q) => !this.isShort(q));
+		if (lines.length === 0 && long.length === 0 && stretches.length === 0 && !modulated) {
+			const pieces = this.noise.pieces(b);
+			for (const piece of pieces) piece.share *= rest;
+			return { pieces, windows };
+		}
 		const beating = lines.length + long.length + (modulated ? 2 : 0);
 		const times = this.nodes(fromS, toS, beating, [...long, ...stretches], random);
-		const rest = Math.max(0, 1 - windowShare);
 		const { out } = this;
 		const fixed = (t: number): number => {
 			out.fill(0);

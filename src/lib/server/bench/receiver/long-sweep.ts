@@ -8,7 +8,7 @@ import { GreatestOfNoise } from './extreme-laws';
 import type { Frame } from './frame';
 import type { Incident } from './incident';
 import { LongBucketConditions } from './long-conditions';
-import { detectLong } from './long-bucket';
+import { averageOf, peakOf } from './long-bucket';
 import type { Random, Seed } from './random';
 import { SharedEdges } from './shared-edges';
 import { Smoothing } from './smoothing';
@@ -17,7 +17,7 @@ import { filtersVideo, powerOnScale, videoRunInS } from './video';
 export class LongSweep {
 	private readonly conditions: LongBucketConditions;
 	private readonly edges?: SharedEdges;
-	private readonly table?: GreatestOfNoise;
+	private readonly table = new GreatestOfNoise();
 	private readonly bt: number;
 	private readonly smoothing?: Smoothing;
 
@@ -34,8 +34,6 @@ export class LongSweep {
 		if (filtersVideo(frame)) this.smoothing = new Smoothing(frame, scale);
 		if (!peaks) return;
 		this.edges = new SharedEdges(frame, scale);
-		// half of 1/B at either end is followed, the rest is drawn
-		this.table = new GreatestOfNoise(this.bt - 1);
 	}
 
 	row(context: RowContext, out: Float64Array): void {
@@ -46,7 +44,7 @@ export class LongSweep {
 		else
 			for (let b = 0; b < this.frame.points; b++) {
 				const { pieces, windows } = this.conditions.bucket(b, random);
-				out[b] = detectLong(b, this.detector, this.scale, pieces, windows, this.bt, undefined, undefined, random);
+				out[b] = averageOf(pieces, windows, this.bt, this.scale, random);
 			}
 	}
 
@@ -72,12 +70,12 @@ export class LongSweep {
 		edges!.draw(context.random('edges'), (b) => conditions.edge(b, random));
 		for (let b = 0; b < frame.points; b++) {
 			const { pieces, windows } = conditions.bucket(b, random);
+			// half of 1/B at either end is followed, the rest is drawn
 			const free = pieces.reduce((sum, q) => sum + q.share, 0);
 			const trim = free > 0 ? Math.max(0, free - 1 / this.bt) / free : 0;
 			for (const piece of pieces) piece.share *= trim;
 			windows.push(edges!.window(b));
-			const plain = pieces.length === 1 && pieces[0].p === 0 && windows.length === 1;
-			out[b] = detectLong(b, this.detector, this.scale, pieces, windows, this.bt, plain ? this.table : undefined, this.smoothing, random);
+			out[b] = peakOf(b, this.detector, this.scale, pieces, windows, this.bt, this.table, this.smoothing, random);
 		}
 	}
 }

@@ -18,6 +18,20 @@ const PER_RBW = 12;
 /** A skirt weaker than this against the noise beside it is left out. */
 const NEGLIGIBLE = 1e-3;
 
+/** What one stretch of samples needs, kept from row to row. */
+interface SkirtPlan {
+	from: number;
+	to: number;
+	count: number;
+	fft: FFT;
+	size: number;
+	bins: Float64Array;
+	spectrum: number[];
+	phase: number[];
+	x: Float64Array;
+	y: Float64Array;
+}
+
 export class SkirtContribution implements Contribution {
 	/** √carrier power over the line's amplitude: L is counted from the whole carrier. */
 	private readonly whole: number;
@@ -26,7 +40,7 @@ export class SkirtContribution implements Contribution {
 	private readonly stepS: number;
 	private readonly taps: Float64Array;
 	private readonly half: number;
-	private plan?: { from: number; to: number; count: number; fft: FFT; size: number; bins: Float64Array };
+	private plan?: SkirtPlan;
 
 	constructor(
 		private readonly line: IncidentLine,
@@ -65,25 +79,21 @@ export class SkirtContribution implements Contribution {
 		const line = passing(this.line, frame, row.clockS);
 		const { from, to } = reachIndexes(frame, line.offsetHz, line.passingHzPerS, SKIRT_FROM_RBW * frame.rbwHz);
 		if (to <= from) return;
-		const { count, fft, size, bins } = this.prepared(from, to);
+		const { count, fft, size, bins, spectrum, phase, x, y } = this.prepared(from, to);
 		const random = row.random(this.stream);
 		// φ(t): a real process whose bins hold the skirt's power between them (both sides), periodic in the transform
-		const spectrum: number[] = new Array<number>(2 * size).fill(0);
 		for (let k = 1; k < size / 2; k++) {
 			const a = bins[k];
 			if (a === 0) continue;
-			const x = a * random.normal();
-			const y = a * random.normal();
-			spectrum[2 * k] = x;
-			spectrum[2 * k + 1] = y;
-			spectrum[2 * (size - k)] = x;
-			spectrum[2 * (size - k) + 1] = -y;
+			const p = a * random.normal();
+			const q = a * random.normal();
+			spectrum[2 * k] = p;
+			spectrum[2 * k + 1] = q;
+			spectrum[2 * (size - k)] = p;
+			spectrum[2 * (size - k) + 1] = -q;
 		}
-		const phase = fft.createComplexArray() as number[];
 		fft.inverseTransform(phase, spectrum);
 		const firstS = (from - frame.lead) * frame.stepS - this.half * this.stepS;
-		const x = new Float64Array(count);
-		const y = new Float64Array(count);
 		for (let i = 0; i < count; i++) {
 			const t = firstS + i * this.stepS;
 			const psi = 2 * Math.PI * ((line.offsetHz * t) % 1) - Math.PI * line.passingHzPerS * t * t;
@@ -97,7 +107,7 @@ export class SkirtContribution implements Contribution {
 		this.filter(from, to, x, y, re, im);
 	}
 
-	private prepared(from: number, to: number) {
+	private prepared(from: number, to: number): SkirtPlan {
 		const known = this.plan;
 		if (known && known.from === from && known.to === to) return known;
 		const count = (to - from - 1) * this.fine + 1 + 2 * this.half;
@@ -110,7 +120,18 @@ export class SkirtContribution implements Contribution {
 			const power = this.within((k + 0.5) * width) - this.within((k - 0.5) * width);
 			bins[k] = Math.sqrt(Math.max(0, power) / 2);
 		}
-		this.plan = { from, to, count, fft: new FFT(size), size, bins };
+		this.plan = {
+			from,
+			to,
+			count,
+			fft: new FFT(size),
+			size,
+			bins,
+			spectrum: new Array<number>(2 * size).fill(0),
+			phase: new Array<number>(2 * size).fill(0),
+			x: new Float64Array(count),
+			y: new Float64Array(count)
+		};
 		return this.plan;
 	}
 
