@@ -236,14 +236,11 @@ describe('streamSweeps(actor, attemptId, request, now)', () => {
 		const { actor, attempt } = await createAttempt();
 		await sweep(actor, attempt.id, settings, { sweeps: 2 });
 		const before = await stored(attempt.id);
-		const failing = () => {
-			throw new Error('late');
-		};
-		Attempt.addHook('beforeUpdate', 'fail late', (changed) => {
-			if (changed.get('id') === attempt.id && changed.changed('streamToken')) failing();
+		Attempt.addHook('afterUpdate', 'fail late', (changed) => {
+			if ((changed as Attempt).streamToken !== before.streamToken) throw new Error('late');
 		});
 		await expect(open(actor, attempt.id, other, 2)).rejects.toThrow('late');
-		Attempt.removeHook('beforeUpdate', 'fail late');
+		Attempt.removeHook('afterUpdate', 'fail late');
 		expect(await logOf(attempt.id)).toMatchObject([{ number: 0, endRow: null, drawnTo: null }]);
 		expect((await stored(attempt.id)).get()).toEqual(before.get());
 	});

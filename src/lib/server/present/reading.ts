@@ -31,7 +31,7 @@ export const presentReading = (reading: ReadingRecord, setUpNumber: number): Rea
 	unit: reading.unit,
 	spread: reading.spread,
 	remarks: reading.remarks.map(({ code, text }) => ({ code, text })),
-	...(reading.parts == null ? {} : { parts: reading.parts }),
+	...((reading.parts ?? null) === null ? {} : { parts: reading.parts }),
 	setUp: setUpNumber,
 	takenAt: reading.takenAt.toISOString()
 });

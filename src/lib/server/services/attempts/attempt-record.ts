@@ -31,5 +31,5 @@ export function attemptRecord(
 
 /** The columns hold what `takeReading` gave; their types say no more than that each is a column. */
 function readingOf({ kind, value, unit, spread, remarks, parts }: Reading): ReadOff {
-	return { kind, value, unit, spread, remarks, ...(parts == null ? {} : { parts }) } as ReadOff;
+	return { kind, value, unit, spread, remarks, ...((parts ?? null) === null ? {} : { parts }) } as ReadOff;
 }

@@ -22,7 +22,7 @@ export async function refuseForeignParts(
 	const issues = Object.entries(answers).flatMap(([question, { readingId }]): Issue[] => {
 		if (!asked.has(question))
 			return [{ field: `answers.${question}`, message: 'this exercise asks no such question' }];
-		if (readingId == null || taken.has(readingId)) return [];
+		if (readingId === undefined || readingId === null || taken.has(readingId)) return [];
 		return [{ field: `answers.${question}.readingId`, message: 'no such reading was taken in this attempt' }];
 	});
 	if (issues.length > 0)

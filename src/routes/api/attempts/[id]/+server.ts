@@ -7,5 +7,5 @@ import type { RequestHandler } from './$types';
 export const GET: RequestHandler = ({ locals, params }) =>
 	respondJson(async () => {
 		const actor = requireActor(locals);
-		return { attempt: await getAttemptView(actor, readId(params.id)) };
+		return { attempt: await getAttemptView(actor, readId(params.id, 'attempt')) };
 	});

@@ -9,6 +9,6 @@ import type { RequestHandler } from './$types';
 export const POST: RequestHandler = ({ locals, params, request }) =>
 	respondJson(async () => {
 		const actor = requireActor(locals);
-		const attemptId = readId(params.id);
+		const attemptId = readId(params.id, 'attempt');
 		return acknowledgeRows(actor, attemptId, await readJson(request, acknowledgementRequest));
 	});

@@ -7,5 +7,5 @@ import type { RequestHandler } from './$types';
 export const GET: RequestHandler = ({ locals, params }) =>
 	respondJson(async () => {
 		const actor = requireActor(locals);
-		return getFinding(actor, readId(params.id));
+		return getFinding(actor, readId(params.id, 'attempt'));
 	});

@@ -7,5 +7,5 @@ import type { RequestHandler } from './$types';
 export const POST: RequestHandler = ({ locals, params }) =>
 	respondJson(async () => {
 		const actor = requireActor(locals);
-		return revealHint(actor, readId(params.id));
+		return revealHint(actor, readId(params.id, 'attempt'));
 	});

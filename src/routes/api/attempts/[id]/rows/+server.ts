@@ -9,7 +9,7 @@ import type { RequestHandler } from './$types';
 export const GET: RequestHandler = ({ locals, params, url }) =>
 	respondWith(async () => {
 		const actor = requireActor(locals);
-		const attemptId = readId(params.id);
+		const attemptId = readId(params.id, 'attempt');
 		const frames = await streamRows(
 			actor,
 			attemptId,

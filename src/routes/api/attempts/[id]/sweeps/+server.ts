@@ -9,7 +9,7 @@ import type { RequestHandler } from './$types';
 export const POST: RequestHandler = ({ locals, params, request }) =>
 	respondWith(async () => {
 		const actor = requireActor(locals);
-		const attemptId = readId(params.id);
+		const attemptId = readId(params.id, 'attempt');
 		const frames = await streamSweeps(actor, attemptId, await readJson(request, sweepsRequest), new Date());
 		return new Response(frames, {
 			// A proxy that gathered the rows first would make the bench stutter.
