@@ -28,15 +28,23 @@ export class FilteredSkirt {
 	private readonly near: Float64Array;
 	private readonly far: Float64Array;
 	private readonly noiseBandwidthHz: number;
+	/** Power from the carrier out on one side, from `withinFromHz` in steps of a factor. */
+	private readonly within: Float64Array;
+	private readonly withinFromHz: number;
 	readonly endHz: number;
 
 	constructor(
-		private readonly shape: SkirtShape,
+		shape: SkirtShape,
 		readonly rbwHz: number
 	) {
 		this.stepHz = rbwHz / STEPS_PER_RBW;
 		this.nearHz = NEAR_RBW * rbwHz;
 		this.endHz = shape.endHz + 4 * rbwHz;
+		this.withinFromHz = this.stepHz / STEPS_PER_RBW;
+		const toEnd = Math.max(1, Math.ceil(Math.log(shape.endHz / this.withinFromHz) * STEPS_PER_E));
+		this.within = Float64Array.from({ length: toEnd + 1 }, (_, i) =>
+			shape.powerWithin(Math.min(shape.endHz, this.withinFromHz * Math.exp(i / STEPS_PER_E)))
+		);
 		this.near = nearTable(shape, this.stepHz, 2 * gaussianConstant(rbwHz));
 		const steps = Math.max(0, Math.ceil(Math.log(shape.endHz / this.nearHz) * STEPS_PER_E));
 		this.noiseBandwidthHz = NOISE_PER_RBW * rbwHz;
@@ -69,7 +77,16 @@ export class FilteredSkirt {
 	}
 
 	private signedPower(offsetHz: number): number {
-		return offsetHz < 0 ? -this.shape.powerWithin(-offsetHz) : this.shape.powerWithin(offsetHz);
+		return offsetHz < 0 ? -this.powerWithin(-offsetHz) : this.powerWithin(offsetHz);
+	}
+
+	private powerWithin(offsetHz: number): number {
+		const { within } = this;
+		if (offsetHz <= this.withinFromHz) return (within[0] * offsetHz) / this.withinFromHz;
+		const place = Math.log(offsetHz / this.withinFromHz) * STEPS_PER_E;
+		const i = Math.floor(place);
+		if (i + 1 >= within.length) return within[within.length - 1];
+		return within[i] + (place - i) * (within[i + 1] - within[i]);
 	}
 }
 

@@ -47,12 +47,13 @@ export function floorDensity(
 ): (frequencyHz: number) => number {
 	const attenuator = lossStage(settings.attenuationDb);
 	const preamp = settings.preamp ? profile.preamp : null;
-	const preampGain = preamp ? dbToPowerRatio(preamp.gainDb) : 1;
+	const amplifier: Stage = { gain: preamp ? dbToPowerRatio(preamp.gainDb) : 1, noiseFactor: 1 };
+	const rest: Stage = { gain: 1, noiseFactor: 1 };
+	// One list for all frequencies: this is asked thousands of times for a sweep.
+	const stages = preamp ? [attenuator, amplifier, rest] : [attenuator, rest];
 	return (frequencyHz) => {
-		const stages = [attenuator];
-		if (preamp)
-			stages.push({ gain: preampGain, noiseFactor: noiseFactorAt(preamp.noiseFigureDb, frequencyHz) });
-		stages.push({ gain: 1, noiseFactor: noiseFactorAt(profile.noiseFigureDb, frequencyHz) });
+		if (preamp) amplifier.noiseFactor = noiseFactorAt(preamp.noiseFigureDb, frequencyHz);
+		rest.noiseFactor = noiseFactorAt(profile.noiseFigureDb, frequencyHz);
 		return THERMAL_MW_PER_HZ * cascadeNoiseFactor(stages);
 	};
 }

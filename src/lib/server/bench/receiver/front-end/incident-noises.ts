@@ -7,7 +7,7 @@ import { FilteredPower } from './filtered-power';
 import type { ArrivedLine } from './incident-lines';
 import { addDensity, addSkirts, emptyGroup, narrowWidthHz, type NoiseGroup } from './noise-group';
 import { SkirtField } from './skirt-field';
-import { lineSource } from './skirt-source';
+import { lineSource, movingLineSource } from './skirt-source';
 import { spectrumPart } from './spectrum-part';
 import type { View } from './view';
 
@@ -30,8 +30,9 @@ export function incidentNoises(
 	for (const density of densities) addDensity(groupOf(density.arrivals), density, view);
 	for (const { line, skirts, arrivals } of lines) {
 		const group = groupOf(arrivals);
+		const source = arrivals.some(({ waveform }) => waveform) ? movingLineSource : lineSource;
 		for (const { noise, powerMw } of skirts)
-			addSkirts(group, noise, [lineSource(line.frequencyHz, powerMw, view.rbwHz)]);
+			addSkirts(group, noise, [source(line.frequencyHz, powerMw, view.rbwHz)]);
 	}
 	const noises = [...groups].flatMap(([owner, group]) => groupNoise(owner, group, view));
 	const narrow = [...groups].flatMap(([owner, group]) =>
@@ -39,14 +40,6 @@ export function incidentNoises(
 	);
 	return [...noises, ...narrow];
 }
-
-/** How far a carrier that moves by its own slow modulation strays, Hz; 0 for one that stands. */
-const strayHz = (arrivals: readonly Arrival[]): number =>
-	arrivals.reduce((most, { waveform }) => {
-		if (waveform?.kind === 'fm') return Math.max(most, waveform.deviationHz);
-		if (waveform?.kind === 'pm') return Math.max(most, waveform.deviationRad * waveform.modulatingHz);
-		return most;
-	}, 0);
 
 /** The emitter whose schedule the sweep follows; null for what is always on to the filter's eye. */
 function scheduled(arrivals: readonly Arrival[]): Arrival | null {

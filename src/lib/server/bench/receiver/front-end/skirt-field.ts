@@ -16,9 +16,10 @@ interface Branch {
 	phaseFromHz: number;
 	phaseToHz: number;
 	middleHz: number;
+	leastHz: number;
 	powerMw: number;
-	left?: Branch;
-	right?: Branch;
+	left: Branch | null;
+	right: Branch | null;
 }
 
 /**
@@ -60,7 +61,7 @@ export class SkirtField {
 
 	private from(branch: Branch, frequencyHz: number): number {
 		const { skirt } = this;
-		const awayHz = Math.abs(frequencyHz - branch.middleHz);
+		const awayHz = Math.max(branch.leastHz, Math.abs(frequencyHz - branch.middleHz));
 		const isPhase = frequencyHz > branch.phaseFromHz && frequencyHz < branch.phaseToHz;
 		if (branch.left && branch.right) {
 			if (!isPhase && branch.stopHz - branch.startHz < FAR * awayHz) return branch.powerMw * skirt.at(awayHz);
@@ -74,11 +75,19 @@ export class SkirtField {
 	}
 }
 
+/** Leaves and inner branches are built alike, so that the engine sees one shape of object in the hot loop. */
 function grow(sources: SkirtSource[], from: number, to: number): Branch {
 	if (to - from === 1) {
-		const source = sources[from];
-		const { startHz, stopHz, powerMw, phaseFromHz = Infinity, phaseToHz = -Infinity } = source;
-		return { startHz, stopHz, powerMw, phaseFromHz, phaseToHz, middleHz: (startHz + stopHz) / 2 };
+		const {
+			startHz,
+			stopHz,
+			powerMw,
+			phaseFromHz = Infinity,
+			phaseToHz = -Infinity,
+			leastHz = 0
+		} = sources[from];
+		const middleHz = (startHz + stopHz) / 2;
+		return { startHz, stopHz, phaseFromHz, phaseToHz, middleHz, leastHz, powerMw, left: null, right: null };
 	}
 	const middle = (from + to) >> 1;
 	const left = grow(sources, from, middle);
@@ -90,6 +99,7 @@ function grow(sources: SkirtSource[], from: number, to: number): Branch {
 		phaseFromHz: Math.min(left.phaseFromHz, right.phaseFromHz),
 		phaseToHz: Math.max(left.phaseToHz, right.phaseToHz),
 		middleHz: (left.middleHz * left.powerMw + right.middleHz * right.powerMw) / powerMw,
+		leastHz: Math.max(left.leastHz, right.leastHz),
 		powerMw,
 		left,
 		right

@@ -11,6 +11,8 @@ export interface SkirtSource {
 	/** Tuned frequencies between which its skirt is phase, not power; absent on a band, whose own power is noise already. */
 	phaseFromHz?: number;
 	phaseToHz?: number;
+	/** Distance within which its skirt grows no further, Hz: a line that moves is seldom nearer. */
+	leastHz?: number;
 }
 
 /** Pieces between two breaks of a density. */
@@ -29,6 +31,14 @@ export const lineSource = (frequencyHz: number, powerMw: number, rbwHz: number):
 	powerMw,
 	phaseFromHz: frequencyHz - SKIRT_FROM_RBW * rbwHz,
 	phaseToHz: frequencyHz + SKIRT_FROM_RBW * rbwHz
+});
+
+/** A line that moves through the filter by its own slow modulation is elsewhere most of the time: its skirt stays, no nearer than 3.5 B. */
+export const movingLineSource = (frequencyHz: number, powerMw: number, rbwHz: number): SkirtSource => ({
+	startHz: frequencyHz,
+	stopHz: frequencyHz,
+	powerMw,
+	leastHz: SKIRT_FROM_RBW * rbwHz
 });
 
 /**
