@@ -7,7 +7,7 @@ import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async (event) => {
 	const actor = requireUser(event);
-	const attempt = await respond(() => getAttemptView(actor, readId(event.params.id)));
+	const attempt = await respond(() => getAttemptView(actor, readId(event.params.id, 'attempt')));
 	if (attempt.state === 'closed') redirect(303, `/learn/attempts/${attempt.id}/finding`);
 	return { attempt };
 };

@@ -8,7 +8,7 @@ import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async (event) => {
 	const actor = requireUser(event);
-	const attemptId = await respond(() => readId(event.params.id));
+	const attemptId = await respond(() => readId(event.params.id, 'attempt'));
 	const attempt = await respond(() => getAttemptView(actor, attemptId));
 	if (attempt.state === 'open') redirect(303, `/learn/attempts/${attempt.id}`);
 	const { finding } = await respond(() => getFinding(actor, attemptId));
