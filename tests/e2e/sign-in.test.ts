@@ -244,9 +244,9 @@ test('an unknown address gets the very response of a known one', async () => {
 });
 
 test('too many tries are answered with 429 and when to come back', async ({ page }) => {
-	const email = 'somebody.else@overwater.example';
+	const email = `somebody-${Date.now()}@overwater.example`;
 	const body = new URLSearchParams({ email, password: 'wrong' }).toString();
-	const headers = { origin: own, 'content-type': 'application/x-www-form-urlencoded' };
+	const headers = { origin: own, 'content-type': 'application/x-www-form-urlencoded', accept: 'text/html' };
 	const statuses: number[] = [];
 	let last;
 	for (let i = 0; i < 12; i += 1) {
