@@ -9,7 +9,7 @@ import type { Incident } from './incident';
 import { averageOf } from './long-bucket';
 import { LongBucketConditions } from './long-conditions';
 import type { Seed } from './random';
-import { onePole, videoRunInS } from './video';
+import { videoRunInS } from './video';
 
 /** Chunk length in 1/VBW: shorter for peaks, which are sought between chunks. */
 const CHUNK = 0.1;
@@ -28,6 +28,9 @@ export class ChunkSweep {
 	private readonly perBucket: number;
 	private readonly chunkS: number;
 	private readonly lead: number;
+	/** Share of the old state that a chunk keeps. */
+	private readonly keep: number;
+	/** Length in 1/B that a chunk's average is drawn for. */
 	private readonly bt: number;
 	private readonly conditions: LongBucketConditions;
 	private readonly video: Float64Array;
@@ -42,7 +45,10 @@ export class ChunkSweep {
 		this.perBucket = chunksPerBucket(frame, detector);
 		this.chunkS = frame.bucketS / this.perBucket;
 		this.lead = Math.ceil(videoRunInS(frame.vbwHz) / this.chunkS);
-		this.bt = frame.rbwHz * this.chunkS;
+		this.keep = Math.exp(-2 * Math.PI * frame.vbwHz * this.chunkS);
+		// a held input of variance v leaves v·(1−α)/(1+α) behind the pole; the true video leaves S₀·π·VBW, S₀ = v·(chunk)
+		const held = (Math.PI * frame.vbwHz * this.chunkS * (1 + this.keep)) / (1 - this.keep);
+		this.bt = (frame.rbwHz * this.chunkS) / held;
 		const chunks = this.lead + frame.points * this.perBucket;
 		const chunkFrame: Frame = {
 			...frame,
@@ -51,20 +57,21 @@ export class ChunkSweep {
 			startHz: frame.startHz - frame.sweepHzPerS * this.lead * this.chunkS
 		};
 		this.conditions = new LongBucketConditions({ ...chunkFrame, vbwHz: Infinity }, incident, scale, seed, false);
-		this.video = new Float64Array(chunks + 1);
+		this.video = new Float64Array(chunks);
 	}
 
 	row(context: RowContext, out: Float64Array): void {
 		const { frame, video, perBucket, lead, scale } = this;
 		const random = context.random('law');
 		this.conditions.start({ ...context, clockS: context.clockS - lead * this.chunkS });
-		const chunks = video.length - 1;
+		const chunks = video.length;
+		let state = 0;
 		for (let i = 0; i < chunks; i++) {
 			const { pieces, windows } = this.conditions.bucket(i, random);
-			video[i] = averageOf(pieces, windows, this.bt, scale, random);
+			const input = averageOf(pieces, windows, this.bt, scale, random);
+			state = i === 0 ? input : this.keep * state + (1 - this.keep) * input;
+			video[i] = state;
 		}
-		video[chunks] = video[chunks - 1];
-		onePole(video, frame.vbwHz, this.chunkS, chunks, video[0]);
 		for (let b = 0, start = lead; b < frame.points; b++, start += perBucket) out[b] = this.detect(b, start);
 	}
 
