@@ -17,16 +17,21 @@ export interface AngleModulation {
 	toneRad: number;
 }
 
-/** Order of the last line of phase deviation `indexRad` that may hold more than 1e-12 of the power. */
-const outermostOrder = (indexRad: number): number => Math.ceil(indexRad + 12 * Math.cbrt(indexRad) + 8);
+/** J_0 … J_N of the phase deviation, N the order of the last line that holds 1e-12 of the power or more. */
+function ordersOf(indexRad: number): Float64Array {
+	const values = besselJ(Math.ceil(indexRad + 12 * Math.cbrt(indexRad) + 8), indexRad);
+	let last = values.length - 1;
+	while (values[last] * values[last] < NEGLIGIBLE) last--;
+	return values.subarray(0, last + 1);
+}
 
 /**
  * Lines of exp(j·β·sin θ) = Σ J_n(β)·e^{jnθ} (Jacobi-Anger), J_{−n} = (−1)ⁿ·J_n, that hold more than 1e-12 of the power.
  * J_n(β) at n modulating frequencies from the carrier.
  */
 export function angleLines(signal: AngleModulation, band?: Band): Line[] {
-	const outermost = outermostOrder(signal.indexRad);
-	const j = besselJ(outermost, signal.indexRad);
+	const j = ordersOf(signal.indexRad);
+	const outermost = j.length - 1;
 	const root = Math.sqrt(signal.powerMw);
 	const lines: Line[] = [];
 	for (let n = -outermost; n <= outermost; n++) {
@@ -43,6 +48,6 @@ export function angleLines(signal: AngleModulation, band?: Band): Line[] {
 
 /** Lines, or quasi-static once more than 200 of them lie inside `rbwHz`. */
 export function angleBehaviour(modulatingHz: number, indexRad: number, rbwHz: number): Behaviour {
-	const inside = Math.min(2 * outermostOrder(indexRad) + 1, Math.floor(rbwHz / modulatingHz) + 1);
+	const inside = Math.min(2 * ordersOf(indexRad).length - 1, Math.floor(rbwHz / modulatingHz) + 1);
 	return inside > LINES_TO_RESOLVE ? 'quasi-static' : 'lines';
 }

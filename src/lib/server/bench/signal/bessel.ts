@@ -7,8 +7,11 @@
 export function besselJ(highestOrder: number, x: number): Float64Array {
 	if (!(x >= 0)) throw new RangeError(`x must be >= 0, got ${x}`);
 	const values = new Float64Array(highestOrder + 1);
-	if (x === 0) {
-		values[0] = 1;
+	// First terms of the series (A&S 9.1.10): the recurrence would overflow, and the rest is under 1e-25.
+	if (x < 1e-8) {
+		[1, x / 2, (x * x) / 8].forEach((value, n) => {
+			if (n <= highestOrder) values[n] = value;
+		});
 		return values;
 	}
 	const start = 2 * Math.ceil((Math.max(highestOrder, x) + 16 * Math.cbrt(x) + 24) / 2);
