@@ -14,13 +14,13 @@ export function findingWindow(
 	const least = marksDbm.length > 0 ? Math.min(...marksDbm) : Infinity;
 	for (const mark of marksDbm) highest = Math.max(highest, mark);
 	if (highest === -Infinity) highest = 0;
-	const topDbm = Math.ceil((highest + 8) / 10) * 10;
+	const topDbm = Math.ceil((highest + 8) / 10) * 10 || 0;
 	const sweepFoot = footOf(levelsDbm[0]);
 	const bottomDbm = Math.max(
 		topDbm - 120,
 		Math.min(topDbm - 60, Math.floor((Math.min(sweepFoot, least) - 6) / 10) * 10)
 	);
-	return { topDbm, bottomDbm, referenceDbm: Math.floor(topDbm / 20) * 20 };
+	return { topDbm, bottomDbm, referenceDbm: Math.floor(topDbm / 20) * 20 || 0 };
 }
 
 /** The level that nine tenths of a trace lie above. */
