@@ -265,6 +265,34 @@ describe('prepareIncident: what the filter makes of it', () => {
 		expect(dbm(powerOf(envelopes[0]))).toBeLessThan(-5.1);
 		expect(noises[0].variance(1.001e9)).toBeGreaterThan(1e4 * incident([]).noises[0].variance(1.001e9));
 	});
+	it('the far lobes of an MSK waveform are noise where the waveform is not followed, and only there', () => {
+		const msk: Emitter = { kind: 'msk', frequencyHz: 1e9, levelDbm: -10, bitRateHz: 1e6 };
+		const { envelopes, noises } = incident([msk]);
+		const floor = incident([]).noises[0];
+		expect(envelopes).toHaveLength(1);
+		expect(noises[0].variance(1.0017e9)).toBeCloseTo(floor.variance(1.0017e9), 22);
+		// S(f) = (16/π²)·[cos 2πf/(1 − 16f²)]²/R at 2 bit rates, where the cosine is 1.
+		const expected = 0.1 * (16 / Math.PI ** 2) * (1 / 63) ** 2 * 1e-6 * 106446.7;
+		expect(Math.abs(dbm(noises[0].variance(1.002e9) / expected))).toBeLessThan(0.5);
+	});
+	it('a phase modulation makes the lines of its Bessel functions, and of twice its deviation in its harmonic', () => {
+		const fm: Emitter = {
+			kind: 'fm',
+			frequencyHz: 1e9,
+			levelDbm: -10,
+			modulatingHz: 50e3,
+			deviationHz: 50e3
+		};
+		const settings = { startHz: 0.5e9, stopHz: 3e9, rbwHz: 10e3, sweepTimeS: 1000 };
+		const { lines } = incident([fm], { profile: { ...ideal, toiDbm: 40, shiDbm: 40 }, settings });
+		const at = (frequencyHz: number) =>
+			dbm(powerOf(lines.find((line) => Math.abs(line.frequencyHz - frequencyHz) < 1)!));
+		// J₀(1) = 0.765198, J₁(1) = 0.440051; J₀(2) = 0.223891, J₁(2) = 0.576725 (checks F3, computed).
+		expect(at(1e9)).toBeCloseTo(-10 + 20 * Math.log10(0.765198), 3);
+		expect(at(1e9 - 50e3)).toBeCloseTo(-10 + 20 * Math.log10(0.440051), 3);
+		expect(at(2e9)).toBeCloseTo(-60 + 20 * Math.log10(0.223891), 3);
+		expect(at(2e9 + 50e3)).toBeCloseTo(-60 + 20 * Math.log10(0.576725), 3);
+	});
 	it('a tone modulation too slow to resolve is a moving line, its harmonic moves twice as far', () => {
 		const fm: Emitter = { kind: 'fm', frequencyHz: 1e9, levelDbm: -10, modulatingHz: 50, deviationHz: 20e3 };
 		const { envelopes, lines } = incident([fm], {

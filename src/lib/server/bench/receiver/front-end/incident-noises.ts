@@ -3,7 +3,7 @@ import type { IncidentNoise } from '../incident';
 import type { Arrival } from './arrival';
 import { pacemaker, type CarriedDensity } from './carried';
 import { densityShare } from './density-share';
-import { FilteredPower } from './filtered-power';
+import { FilteredPower, type SpectrumPart } from './filtered-power';
 import type { ArrivedLine } from './incident-lines';
 import { addDensity, addSkirts, emptyGroup, narrowWidthHz, type NoiseGroup } from './noise-group';
 import { SkirtField } from './skirt-field';
@@ -49,11 +49,14 @@ function scheduled(arrivals: readonly Arrival[]): Arrival | null {
 
 function groupNoise(owner: Arrival | null, group: NoiseGroup, view: View): IncidentNoise[] {
 	const { rbwHz, leastFloorMw, startHz, spacingHz, floorMw } = view;
-	const power = group.parts.length && new FilteredPower(group.parts, rbwHz, leastFloorMw, startHz, spacingHz);
+	const filtered = (parts: SpectrumPart[]) =>
+		new FilteredPower(parts, rbwHz, leastFloorMw, startHz, spacingHz);
+	const power = group.parts.length > 0 ? filtered(group.parts) : null;
+	const fenced = group.fenced.map(({ part, fromHz, toHz }) => ({ power: filtered([part]), fromHz, toHz }));
 	const skirts = [...group.skirted].flatMap(
 		([noise, sources]) => SkirtField.of(view.filteredSkirt(noise), sources, leastFloorMw) ?? []
 	);
-	if (owner && !power && skirts.length === 0) return [];
+	if (owner && !power && skirts.length + fenced.length === 0) return [];
 	const floor = owner ? () => 0 : floorMw;
 	return [
 		{
@@ -61,6 +64,8 @@ function groupNoise(owner: Arrival | null, group: NoiseGroup, view: View): Incid
 				let sum = floor(frequencyHz);
 				if (power) sum += power.at(frequencyHz);
 				for (const field of skirts) sum += field.at(frequencyHz);
+				for (const { power: outside, fromHz, toHz } of fenced)
+					if (frequencyHz < fromHz || frequencyHz > toHz) sum += outside.at(frequencyHz);
 				return sum;
 			},
 			...schedule(owner)

@@ -15,9 +15,17 @@ export interface NoiseGroup {
 	skirted: Map<PhaseNoise, SkirtSource[]>;
 	/** Densities that fade at their own width. */
 	narrow: CarriedDensity[];
+	/** Spectra that count only while tuned outside a stretch: inside it, their waveform is followed. */
+	fenced: { part: SpectrumPart; fromHz: number; toHz: number }[];
 }
 
-export const emptyGroup = (): NoiseGroup => ({ parts: [], skirted: new Map(), narrow: [] });
+export const emptyGroup = (): NoiseGroup => ({ parts: [], skirted: new Map(), narrow: [], fenced: [] });
+
+/** An MSK waveform is followed to this many bit rates from its carrier, and as many B beyond. */
+const FOLLOWED_BITS = 1.5;
+const FOLLOWED_RBW = 2.5;
+/** Top of its spectrum beyond that against the middle, as a power ratio. */
+const FAR_LOBES = 1e-4;
 
 /** A spread spectrum this far under the floor at its top is left out, as a power ratio. */
 const NEGLIGIBLE = 1e-4;
@@ -40,9 +48,13 @@ export function addDensity(group: NoiseGroup, carried: CarriedDensity, view: Vie
 	const isNarrow = own !== undefined && density.stopHz - density.startHz < rbwHz / 2;
 	const isWhole = isNarrow || own?.waveform !== undefined;
 	if (isNarrow && !own.waveform) group.narrow.push(carried);
-	if (!isWhole) {
-		const gain = share * (receiver?.lineShare ?? 1);
-		group.parts.push(spectrumPart(density, finestHz, (frequencyHz) => gain * gainAt(frequencyHz)));
+	const gain = share * (receiver?.lineShare ?? 1);
+	const part = () => spectrumPart(density, finestHz, (frequencyHz) => gain * gainAt(frequencyHz));
+	if (!isWhole) group.parts.push(part());
+	if (own?.waveform?.kind === 'msk' && farLobesShow(density, own.waveform.bitRateHz, view)) {
+		const { frequencyHz, bitRateHz } = own.waveform;
+		const reachHz = FOLLOWED_BITS * bitRateHz + FOLLOWED_RBW * rbwHz;
+		group.fenced.push({ part: part(), fromHz: frequencyHz - reachHz, toHz: frequencyHz + reachHz });
 	}
 	// What grew is far enough under what it grew from for its skirts to vanish under that one's.
 	if (!own || !receiver || !skirtShows(density, receiver, view)) return;
@@ -53,6 +65,9 @@ export function addDensity(group: NoiseGroup, carried: CarriedDensity, view: Vie
 		isWhole ? wholeSources(density, powerMw, rbwHz) : densitySources(density, powerMw, gainAt)
 	);
 }
+
+const farLobesShow = (density: Density, bitRateHz: number, { leastFloorMw, rbwHz }: View): boolean =>
+	(FAR_LOBES * density.powerMw * NOISE_BANDWIDTH_PER_RBW * rbwHz) / bitRateHz > NEGLIGIBLE * leastFloorMw;
 
 function skirtShows(density: Density, receiver: PhaseNoise, { leastFloorMw, rbwHz }: View): boolean {
 	const top = density.powerMw * receiver.densityPerHz(0);
