@@ -1,0 +1,349 @@
+import { describe, expect, it } from 'vitest';
+import type { Quantity } from '$lib/schemas/quantity';
+import { quantity as quantitySchema } from '$lib/schemas/quantity';
+import type { Emitter, EmitterOf, Scene } from '$lib/schemas/scene';
+import { truth } from '$lib/server/bench/truth/truth';
+import { milliwattsToDbm } from '$lib/units/decibel';
+
+const cw = (frequencyHz: number, levelDbm: number, more: Partial<EmitterOf<'cw'>> = {}): Emitter => ({
+	kind: 'cw',
+	frequencyHz,
+	levelDbm,
+	...more
+});
+const noise = (densityDbmPerHz: number, startHz: number, stopHz: number): Emitter => ({
+	kind: 'noise',
+	densityDbmPerHz,
+	startHz,
+	stopHz
+});
+const qpsk: Emitter = {
+	kind: 'digital',
+	frequencyHz: 1e9,
+	levelDbm: -20,
+	symbolRateHz: 1e6,
+	rollOff: 0.22,
+	order: 4
+};
+const scene = (...emitters: Emitter[]): Scene => ({ emitters });
+/** Through the schema, as everything that asks goes. */
+const ask = (of: Scene, asked: Quantity) => truth(of, quantitySchema.parse(asked));
+const refusal = (of: Scene, asked: Quantity) => {
+	try {
+		ask(of, asked);
+	} catch (error) {
+		return (error as { field?: string }).field;
+	}
+	return undefined;
+};
+
+describe('truth(scene, marker | delta | peak | next-peak | count)', () => {
+	const three = scene(cw(100e6, -30), cw(101e6, -20), cw(103e6, -45));
+	it('is the level of the line that is meant', () => {
+		expect(ask(three, { kind: 'marker', atHz: 103e6 })).toEqual({
+			kind: 'marker',
+			value: expect.closeTo(-45, 12),
+			unit: 'dBm',
+			parts: { frequencyHz: 103e6 }
+		});
+		expect(ask(three, { kind: 'delta', fromHz: 101e6, toHz: 103e6 })).toMatchObject({
+			value: expect.closeTo(-25, 12),
+			unit: 'dB',
+			parts: { frequencyHz: 2e6 }
+		});
+		expect(ask(three, { kind: 'peak' })).toMatchObject({
+			value: expect.closeTo(-20, 12),
+			parts: { frequencyHz: 101e6 }
+		});
+		expect(ask(three, { kind: 'next-peak', fromHz: 101e6, side: 'upper' }).value).toBeCloseTo(-45, 12);
+		expect(ask(three, { kind: 'next-peak', fromHz: 101e6, side: 'lower' }).value).toBeCloseTo(-30, 12);
+		expect(ask(three, { kind: 'count', atHz: 100e6 })).toMatchObject({ value: 100e6, unit: 'Hz' });
+	});
+	it('adds the powers of lines on the same spot', () =>
+		expect(ask(scene(cw(1e8, -30), cw(1e8, -30)), { kind: 'marker', atHz: 1e8 }).value).toBeCloseTo(
+			-26.9897,
+			4
+		));
+	it('counts phase-noise skirts to the level of their carrier', () => {
+		const noisy = scene(cw(1e9, -10, { phaseNoise: [{ offsetHz: 1e4, dbcPerHz: -65 }] }));
+		expect(ask(noisy, { kind: 'marker', atHz: 1e9 }).value).toBeCloseTo(-10, 12);
+		expect(ask(noisy, { kind: 'channel-power', centreHz: 1e9, widthHz: 1e6 }).value).toBeCloseTo(-10, 9);
+	});
+	it('refuses where there is no line, by field', () => {
+		expect(refusal(three, { kind: 'marker', atHz: 102e6 })).toBe('atHz');
+		expect(refusal(three, { kind: 'delta', fromHz: 100e6, toHz: 102e6 })).toBe('toHz');
+		expect(refusal(scene(qpsk), { kind: 'peak' })).toBe('kind');
+		expect(refusal(three, { kind: 'next-peak', fromHz: 103e6, side: 'upper' })).toBe('side');
+	});
+	it('finds a drifting line where it is at that time; a count takes its mean over the gate', () => {
+		const drifting = scene(cw(1e9, -10, { drift: { hzPerS: 2e4 } }));
+		expect(ask(drifting, { kind: 'count', atHz: 1e9, atS: 3 }).value).toBe(1e9 + 6e4);
+		expect(ask(drifting, { kind: 'count', atHz: 1e9, atS: 3, gateS: 0.5 }).value).toBe(1e9 + 6.5e4);
+		expect(ask(drifting, { kind: 'marker', atHz: 1e9 + 6e4, atS: 3 }).value).toBeCloseTo(-10, 12);
+	});
+	it('sees a gated emitter on, a hopping one on the channel that is asked for', () => {
+		expect(
+			ask(scene(cw(1e9, -10, { gate: { onS: 1e-3, offS: 9e-3 } })), { kind: 'marker', atHz: 1e9 }).value
+		).toBeCloseTo(-10, 12);
+		const hopping = scene(cw(1e9, -10, { hop: { channelsHz: [1e9, 1.002e9, 1.004e9], dwellS: 0.1 } }));
+		expect(ask(hopping, { kind: 'marker', atHz: 1.004e9 }).value).toBeCloseTo(-10, 12);
+	});
+});
+
+describe('truth(scene, powers and densities)', () => {
+	const mixed = scene(cw(100e6, -40), noise(-110, 99e6, 101e6));
+	it('adds lines and densities inside the edges', () => {
+		expect(ask(mixed, { kind: 'band-power', startHz: 99.5e6, stopHz: 100.5e6 }).value).toBeCloseTo(
+			milliwattsToDbm(1e-4 + 1e-5),
+			9
+		);
+		expect(ask(mixed, { kind: 'channel-power', centreHz: 99.4e6, widthHz: 1e6 }).value).toBeCloseTo(
+			milliwattsToDbm(0.9e-5),
+			9
+		);
+		expect(ask(mixed, { kind: 'power-density', centreHz: 99.6e6, widthHz: 0.4e6 })).toMatchObject({
+			value: expect.closeTo(-110, 9),
+			unit: 'dBm/Hz'
+		});
+		expect(ask(mixed, { kind: 'noise-density', atHz: 99.2e6 }).value).toBeCloseTo(-110, 9);
+	});
+	it('takes the noise out of the carrier it is compared with', () =>
+		expect(
+			ask(mixed, { kind: 'carrier-to-noise', carrierHz: 100e6, widthHz: 10e3, noiseHz: 99.5e6 })
+		).toMatchObject({
+			value: expect.closeTo(30, 9),
+			unit: 'dB',
+			parts: { noiseDbm: expect.closeTo(-70, 9) }
+		}));
+	it('refuses an empty channel by field', () => {
+		expect(refusal(mixed, { kind: 'channel-power', centreHz: 200e6, widthHz: 1e6 })).toBe('centreHz');
+		expect(refusal(mixed, { kind: 'noise-density', atHz: 200e6 })).toBe('atHz');
+	});
+	it('counts only the emitters it is told to, and refuses one that is not there', () => {
+		expect(
+			ask(mixed, { kind: 'channel-power', centreHz: 100e6, widthHz: 4e6, emitters: [0] }).value
+		).toBeCloseTo(-40, 9);
+		expect(refusal(mixed, { kind: 'peak', emitters: [0, 2] })).toBe('emitters.1');
+	});
+	it('of a far skirt is right to 1e-6 where the distribution alone would cancel', () => {
+		const msk = scene({ kind: 'msk', frequencyHz: 1e9, levelDbm: 0, bitRateHz: 1e6 });
+		// Far out S = (16/π²)·cos²(2πf)/(16f²)²·(1 + …), from 50 to 60 bit rates: Simpson over the closed form.
+		let sum = 0;
+		const n = 20000;
+		for (let i = 0; i <= n; i++) {
+			const f = 50 + (10 * i) / n;
+			const value = (16 / Math.PI ** 2) * (Math.cos(2 * Math.PI * f) / (1 - 16 * f * f)) ** 2;
+			sum += (value * (i === 0 || i === n ? 1 : i % 2 ? 4 : 2) * (10 / n)) / 3;
+		}
+		const { value } = ask(msk, { kind: 'band-power', startHz: 1.05e9, stopHz: 1.06e9 });
+		expect(10 ** (value / 10) / sum).toBeCloseTo(1, 5);
+	});
+});
+
+describe('truth(scene, widths)', () => {
+	it('keeps to a window where one is stated', () => {
+		const two = scene(noise(-60, 100e6, 101e6), noise(-60, 110e6, 111e6));
+		expect(
+			ask(two, { kind: 'occupied-bandwidth', percent: 99, centreHz: 100.5e6, widthHz: 4e6 })
+		).toMatchObject({
+			value: expect.closeTo(0.99e6, 2),
+			parts: { lowerHz: expect.closeTo(100.005e6, 2), upperHz: expect.closeTo(100.995e6, 2) }
+		});
+		expect(ask(two, { kind: 'occupied-bandwidth', percent: 99 }).value).toBeCloseTo(10.98e6, 1);
+	});
+	it('of lines runs from line to line', () => {
+		const am = scene({ kind: 'am', frequencyHz: 1e6, levelDbm: 0, modulatingHz: 10e3, depth: 0.8 });
+		expect(ask(am, { kind: 'occupied-bandwidth', percent: 99 }).value).toBeCloseTo(20e3, 5);
+		expect(ask(am, { kind: 'occupied-bandwidth', percent: 50 }).value).toBeCloseTo(0, 5);
+	});
+	it('of a pulse train is that of its sinc², to a line', () => {
+		const pulsed = scene({ kind: 'pulsed', frequencyHz: 1e9, levelDbm: 0, widthS: 1e-6, periodS: 1e-3 });
+		expect(Math.abs(ask(pulsed, { kind: 'occupied-bandwidth', percent: 99 }).value - 20.5716e6)).toBeLessThan(
+			2e3
+		);
+		expect(ask(pulsed, { kind: 'x-db-bandwidth', db: 3.9224 }).value).toBeCloseTo(1e6, -4);
+		expect(ask(pulsed, { kind: 'channel-power', centreHz: 1e9, widthHz: 2e6 }).value).toBeCloseTo(
+			-30 + 10 * Math.log10(0.902823),
+			4
+		);
+	});
+	it('of a density is between its outermost crossings, sidelobes included', () => {
+		const subcarriers = scene({
+			kind: 'multicarrier',
+			frequencyHz: 1e9,
+			levelDbm: 0,
+			subcarriers: 2,
+			spacingHz: 1e6
+		});
+		const { parts } = ask(subcarriers, { kind: 'x-db-bandwidth', db: 20 });
+		const { upperHz } = parts as { upperHz: number };
+		const sinc2 = (x: number) => (Math.sin(Math.PI * x) / (Math.PI * x)) ** 2;
+		const density = (f: number) => sinc2(f - 1) + sinc2(f + 1);
+		let top = 0;
+		for (let f = 0.5; f < 1.5; f += 1e-4) if (Math.abs(f - 1) > 1e-9) top = Math.max(top, density(f));
+		let outermost = 0;
+		for (let f = 1.5; f < 40; f += 1e-4) if (density(f) >= top / 100) outermost = f;
+		expect((upperHz - 1e9) / 1e6).toBeCloseTo(outermost, 3);
+	});
+});
+
+describe('truth(scene, adjacent-channel)', () => {
+	it('gives both sides of every offset, and the worst as the value', () => {
+		const beside = scene(qpsk, noise(-100, 1.0045e9, 1.0055e9));
+		const { value, unit, parts } = ask(beside, {
+			kind: 'adjacent-channel',
+			centreHz: 1e9,
+			widthHz: 2e6,
+			offsets: [{ offsetHz: 5e6, widthHz: 2e6 }]
+		});
+		expect(value).toBeCloseTo(-20, 9);
+		expect(unit).toBe('dBc');
+		expect(parts).toEqual([
+			{ offsetHz: 5e6, side: 'lower', levelDbm: expect.closeTo(-220, 9), dbc: -200 },
+			{ offsetHz: 5e6, side: 'upper', levelDbm: expect.closeTo(-40, 9), dbc: expect.closeTo(-20, 9) }
+		]);
+	});
+	it('shows what the device grows, 2 dB more for every dB', () => {
+		const through = (levelDbm: number): Scene => ({
+			emitters: [{ ...qpsk, levelDbm } as Emitter],
+			device: { toiDbm: 20, shiDbm: null }
+		});
+		const leak = (levelDbm: number) =>
+			ask(through(levelDbm), {
+				kind: 'adjacent-channel',
+				centreHz: 1e9,
+				widthHz: 1.3e6,
+				offsets: [{ offsetHz: 1.3e6, widthHz: 1.1e6 }]
+			}).value;
+		expect(leak(-10) - leak(-20)).toBeCloseTo(20, 1);
+		expect(leak(-20)).toBeGreaterThan(-110);
+	});
+});
+
+describe('truth(scene, harmonics | thd | intercept)', () => {
+	const device = { toiDbm: 15, shiDbm: 45 };
+	it('are what the device makes, against the carrier as it leaves it', () => {
+		const of: Scene = { emitters: [cw(50e6, -20)], device };
+		const { value, parts } = ask(of, { kind: 'harmonics', fundamentalHz: 50e6, count: 3 });
+		const list = parts as { n: number; frequencyHz: number; levelDbm: number; dbc: number }[];
+		expect(list.map(({ n, frequencyHz }) => [n, frequencyHz])).toEqual([
+			[2, 100e6],
+			[3, 150e6],
+			[4, 200e6]
+		]);
+		expect(list[0].levelDbm).toBeCloseTo(-85, 9);
+		expect(list[1].levelDbm).toBeCloseTo(-99.5424, 4);
+		expect(list[2].dbc).toBe(-200);
+		expect(value).toBe(list[0].dbc);
+		expect(ask(of, { kind: 'thd', fundamentalHz: 50e6, count: 1 }).value).toBeCloseTo(
+			100 * 10 ** (value / 20),
+			9
+		);
+	});
+	it('the intercept is the device’s own; without one it is refused', () => {
+		const tones = [cw(100e6, -20), cw(101e6, -20)];
+		expect(
+			ask({ emitters: tones, device }, { kind: 'intercept', lowerHz: 100e6, upperHz: 101e6 })
+		).toMatchObject({
+			value: 15,
+			unit: 'dBm',
+			parts: { lowerDbm: 15, upperDbm: 15 }
+		});
+		expect(refusal({ emitters: tones }, { kind: 'intercept', lowerHz: 100e6, upperHz: 101e6 })).toBe('kind');
+	});
+});
+
+describe('truth(scene, modulation and time)', () => {
+	it('are what the emitter was given', () => {
+		const common = { frequencyHz: 1e8, levelDbm: -30, modulatingHz: 5e3 };
+		expect(
+			ask(scene({ kind: 'am', ...common, depth: 0.42 }), { kind: 'am-depth', carrierHz: 1e8 })
+		).toMatchObject({
+			value: expect.closeTo(42, 9),
+			unit: '%'
+		});
+		expect(
+			ask(scene({ kind: 'fm', ...common, deviationHz: 12e3 }), { kind: 'fm-deviation', carrierHz: 1e8 })
+		).toMatchObject({ value: 12e3, unit: 'Hz', parts: { modulatingHz: 5e3, index: 2.4 } });
+		expect(
+			ask(scene({ kind: 'pm', ...common, deviationRad: 2 }), { kind: 'fm-deviation', carrierHz: 1e8 }).value
+		).toBe(10e3);
+		const pulsed: Emitter = { kind: 'pulsed', frequencyHz: 1e9, levelDbm: 0, widthS: 2e-6, periodS: 1e-3 };
+		expect(ask(scene(pulsed), { kind: 'pulse', carrierHz: 1e9 })).toMatchObject({
+			value: 2e-6,
+			unit: 's',
+			parts: { widthS: 2e-6, repetitionHz: 1e3 }
+		});
+		expect(ask(scene(cw(1e9, 0, { gate: { onS: 0.2, offS: 0.3 } })), { kind: 'time' })).toMatchObject({
+			value: 0.2,
+			parts: { periodS: 0.5 }
+		});
+	});
+	it('the depth behind a device is that of the lines that leave it', () => {
+		const am: Emitter = { kind: 'am', frequencyHz: 1e8, levelDbm: 0, modulatingHz: 5e3, depth: 0.5 };
+		const { value } = ask(
+			{ emitters: [am], device: { toiDbm: 10, shiDbm: null } },
+			{ kind: 'am-depth', carrierHz: 1e8 }
+		);
+		// Small signals are gained by 1 − 3p, p the carrier over the intercept, where the carrier has 1 − p: depth falls.
+		expect(value).toBeLessThan(50);
+		expect(value).toBeGreaterThan(35);
+	});
+	it('phase noise is the table’s, either side; beyond its reach it is refused', () => {
+		const noisy = scene(
+			cw(1e9, -10, {
+				phaseNoise: [
+					{ offsetHz: 1e3, dbcPerHz: -90 },
+					{ offsetHz: 1e5, dbcPerHz: -130 }
+				]
+			})
+		);
+		expect(ask(noisy, { kind: 'phase-noise', carrierHz: 1e9, offsetHz: -1e4 })).toMatchObject({
+			value: expect.closeTo(-110, 9),
+			unit: 'dBc/Hz'
+		});
+		expect(refusal(noisy, { kind: 'phase-noise', carrierHz: 1e9, offsetHz: 2e6 })).toBe('offsetHz');
+		expect(refusal(scene(qpsk), { kind: 'phase-noise', carrierHz: 1e9, offsetHz: 1e4 })).toBe('carrierHz');
+	});
+});
+
+describe('truth(scene, mask)', () => {
+	const limits = [
+		{ startHz: 100e6, stopHz: 200e6, levelDbm: -50 },
+		{ startHz: 200e6, stopHz: 300e6, levelDbm: -36 }
+	];
+	it('finds the line with the least margin, whatever its level', () => {
+		const spurs = scene(cw(150e6, -52), cw(250e6, -40), cw(400e6, 0));
+		expect(ask(spurs, { kind: 'mask', limits })).toMatchObject({
+			value: expect.closeTo(2, 9),
+			unit: 'dB',
+			parts: { segment: 0, frequencyHz: 150e6, marginDb: expect.closeTo(2, 9) }
+		});
+	});
+	it('needs a reference bandwidth as soon as there is more than lines, then takes the worst window', () => {
+		const wide = scene({ ...qpsk, frequencyHz: 250e6, levelDbm: -20 } as Emitter);
+		expect(refusal(wide, { kind: 'mask', limits })).toBe('bandwidthHz');
+		const { value, parts } = ask(wide, { kind: 'mask', limits, bandwidthHz: 100e3 });
+		expect(value).toBeCloseTo(-36 + 20 + 10, 4);
+		expect((parts as { segment: number }).segment).toBe(1);
+	});
+	it('refuses an empty mask', () =>
+		expect(refusal(scene(cw(1e9, 0)), { kind: 'mask', limits })).toBe('limits'));
+});
+
+describe('quantity (schema)', () => {
+	it('refuses unknown keys by name, and kinds that don’t exist', () => {
+		const issues = (value: unknown) =>
+			quantitySchema
+				.safeParse(value)
+				.error?.issues.map((issue) => issue.message)
+				.join();
+		expect(issues({ kind: 'marker', atHz: 1e9, at: 3 })).toContain('"at"');
+		expect(issues({ kind: 'minimum' })).toBeDefined();
+		expect(issues({ kind: 'band-power', startHz: 2, stopHz: 1 })).toContain('stopHz must be greater');
+		expect(issues({ kind: 'occupied-bandwidth', percent: 99, centreHz: 1e9 })).toContain(
+			'centreHz and widthHz'
+		);
+		expect(issues({ kind: 'peak', emitters: [] })).toBeDefined();
+	});
+});
