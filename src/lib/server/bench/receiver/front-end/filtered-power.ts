@@ -32,6 +32,7 @@ const GAUSS: [number, number][] = [
 
 export class FilteredPower {
 	private readonly stepHz: number;
+	private readonly blockSize: number;
 	private readonly exponent: number;
 	private readonly kernel: Float64Array;
 	private readonly blocks = new Map<number, Float64Array | null>();
@@ -56,8 +57,6 @@ export class FilteredPower {
 			this.meanGain((i - REACH - 0.5) * this.stepHz, (i - REACH + 0.5) * this.stepHz)
 		);
 	}
-
-	private readonly blockSize: number;
 
 	/** Power through the filter tuned to `frequencyHz`, mW. */
 	at(frequencyHz: number): number {

@@ -1,4 +1,5 @@
 /** A phase-noise skirt through the resolution filter, tabulated once against the distance from its carrier. */
+import { NOISE_PER_RBW } from '$lib/measure/resolution-filter';
 import { gaussianConstant } from '../resolution-filter';
 
 /** Single-sideband phase noise of a carrier of power 1, the same on both sides. */
@@ -19,8 +20,6 @@ const REACH = 4 * STEPS_PER_RBW;
 const NEAR_RBW = 64;
 /** Steps of the far table in one factor e. */
 const STEPS_PER_E = 48;
-/** Noise bandwidth of the Gaussian filter over B: √(π/(4 ln 2)). */
-const NOISE_PER_RBW = Math.sqrt(Math.PI / (4 * Math.LN2));
 
 export class FilteredSkirt {
 	private readonly stepHz: number;

@@ -2,10 +2,11 @@
 import type { NoiseFigureTable, ReceiverProfile } from '$lib/schemas/receiver';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import { dbToPowerRatio } from '$lib/units/decibel';
+import { BOLTZMANN, STANDARD_KELVIN } from '$lib/units/thermal-noise';
 import { tableDb } from '../table-db';
 
-/** k·T₀ at 290 K in mW/Hz: k = 1.380649·10⁻²³ J/K exactly (SI Brochure, 9th ed., 2019). */
-export const THERMAL_MW_PER_HZ = 1.380649e-23 * 290 * 1e3;
+/** k·T₀ at 290 K, mW/Hz. */
+export const THERMAL_MW_PER_HZ = BOLTZMANN * STANDARD_KELVIN * 1e3;
 
 /** One stage of a chain: power gain and noise factor at 290 K, both linear. */
 export interface Stage {

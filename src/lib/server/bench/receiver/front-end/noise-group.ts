@@ -1,4 +1,5 @@
 /** What of the noise shares one coming and going. */
+import { NOISE_PER_RBW } from '$lib/measure/resolution-filter';
 import type { Density } from '$lib/server/bench/signal/emitter-kind';
 import { frequencyAtShare } from '$lib/server/bench/signal/regrowth-clusters';
 import type { CarriedDensity } from './carried';
@@ -7,7 +8,7 @@ import type { SpectrumPart } from './filtered-power';
 import type { PhaseNoise } from './skirt-shape';
 import { densitySources, wholeSources, type SkirtSource } from './skirt-source';
 import { spectrumPart } from './spectrum-part';
-import { NOISE_BANDWIDTH_PER_RBW, type View } from './view';
+import type { View } from './view';
 
 export interface NoiseGroup {
 	parts: SpectrumPart[];
@@ -67,9 +68,9 @@ export function addDensity(group: NoiseGroup, carried: CarriedDensity, view: Vie
 }
 
 const farLobesShow = (density: Density, bitRateHz: number, { leastFloorMw, rbwHz }: View): boolean =>
-	(FAR_LOBES * density.powerMw * NOISE_BANDWIDTH_PER_RBW * rbwHz) / bitRateHz > NEGLIGIBLE * leastFloorMw;
+	(FAR_LOBES * density.powerMw * NOISE_PER_RBW * rbwHz) / bitRateHz > NEGLIGIBLE * leastFloorMw;
 
 function skirtShows(density: Density, receiver: PhaseNoise, { leastFloorMw, rbwHz }: View): boolean {
 	const top = density.powerMw * receiver.densityPerHz(0);
-	return top * NOISE_BANDWIDTH_PER_RBW * rbwHz > NEGLIGIBLE * leastFloorMw;
+	return top * NOISE_PER_RBW * rbwHz > NEGLIGIBLE * leastFloorMw;
 }

@@ -1,11 +1,9 @@
 import type { ReceiverProfile } from '$lib/schemas/receiver';
+import { NOISE_PER_RBW } from '$lib/measure/resolution-filter';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import { FilteredSkirt } from './filtered-skirt';
 import { floorDensity } from './floor';
 import { phaseNoiseSkirt, type PhaseNoise } from './skirt-shape';
-
-/** Noise bandwidth of the Gaussian filter over B: √(π/(4 ln 2)) = 1.0644670. */
-export const NOISE_BANDWIDTH_PER_RBW = Math.sqrt(Math.PI / (4 * Math.LN2));
 
 /** How the receiver looks at what reaches it. */
 export interface View {
@@ -26,7 +24,7 @@ export interface View {
 export function viewOf(profile: ReceiverProfile, settings: ResolvedSettings): View {
 	const { rbwHz, startHz, stopHz, centreHz, spanHz, points } = settings;
 	const density = floorDensity(profile, settings);
-	const noiseBandwidthHz = NOISE_BANDWIDTH_PER_RBW * rbwHz;
+	const noiseBandwidthHz = NOISE_PER_RBW * rbwHz;
 	const floorMw = (frequencyHz: number) => noiseBandwidthHz * density(frequencyHz);
 	const tables = new Map<PhaseNoise, FilteredSkirt>();
 	return {
