@@ -3,12 +3,12 @@ import type { Detector, Scale, TraceMode } from '$lib/schemas/settings';
 
 export const detectorWords: Record<Detector, string> = {
 	'rise-fall': 'rise and fall',
-	'positive-peak': 'highest',
-	'negative-peak': 'lowest',
+	'positive-peak': 'peak',
+	'negative-peak': 'minimum',
 	sample: 'sample',
 	average: 'average'
 };
-export const scaleWords: Record<Scale, string> = { log: 'level', power: 'power', voltage: 'voltage' };
+export const scaleWords: Record<Scale, string> = { log: 'decibels', power: 'power', voltage: 'voltage' };
 export const modeWords: Record<TraceMode, string> = {
 	live: 'Live',
 	average: 'Average',
