@@ -136,7 +136,12 @@ describe('resolveSettings: refusals name the entry, the limit and the value', ()
 		['an automatic sweep beyond 2000 s', { ...here, rbwHz: 100 }, 'rbwHz', /rbwHz 100 .*10000 s.*2000 s/],
 		['the same for a narrow video filter', { ...here, rbwHz: 1e4, vbwHz: 1 }, 'rbwHz', /vbwHz 1 .*2000 s/],
 		['a hand-set sweep beyond 2000 s', { ...here, sweepTimeS: 2001 }, 'sweepTimeS', /2000 s; given 2001 s/],
-		['a hand-set sweep under 100 µs', { ...here, sweepTimeS: 9e-5 }, 'sweepTimeS', /0.0001 .*given 0.00009 s/],
+		[
+			'a hand-set sweep under 100 µs',
+			{ ...here, sweepTimeS: 9e-5 },
+			'sweepTimeS',
+			/0.0001 .*given 0.00009 s/
+		],
 		['attenuation that is no step', { ...here, attenuationDb: 7 }, 'attenuationDb', /0, 5, 10.*given 7 dB/],
 		['a reference no step can serve', { ...here, referenceDbm: 60 }, 'referenceDbm', /largest step is 50 dB/],
 		['a correction no step can serve', { ...here, correctionDb: -60 }, 'correctionDb', /-60 dB/]
