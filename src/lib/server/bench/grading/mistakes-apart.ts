@@ -6,7 +6,7 @@ import { watchedMistakes } from './watched-mistakes';
 /** How many spreads must lie between the outcomes of two mistakes. */
 export const SPREADS_APART = 4;
 /** A draw needs a little more, because what is made on the bench scatters about what theory says. */
-const DRAWN_APART = 5;
+const DRAWN_APART = 6;
 /** Distance between two numbers, in the standard deviation of their difference. */
 export const spreadsBetween = (a: Prediction, b: Prediction): number =>
 	Math.abs(a.value - b.value) / Math.hypot(a.spread, b.spread);

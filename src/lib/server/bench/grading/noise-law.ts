@@ -87,3 +87,10 @@ export function pointSpreadDb({ trace, sweeps, resolved }: SetUp): number {
 		resolved.detector === 'average' ? 1 + NOISE_BANDWIDTH * bucketOf({ trace, sweeps, resolved }) : 1;
 	return (resolved.scale === 'log' ? 5.57 : 4.34) / Math.sqrt(rows * each);
 }
+
+/** Standard deviation in dB of a band's power read off a trace of noise: that of the mean of all that was met in the band. */
+export function bandSpreadDb({ trace, sweeps, resolved }: SetUp, widthHz: number): number {
+	const rows = trace.mode === 'average' ? Math.max(1, Math.min(trace.count, sweeps)) : 1;
+	const dwellS = (resolved.sweepTimeS * widthHz) / resolved.spanHz;
+	return 4.34 / Math.sqrt(Math.max(1, rows * dwellS * NOISE_BANDWIDTH * resolved.rbwHz));
+}

@@ -44,7 +44,7 @@ export const peakOnNoise = defineMistake(
 			picksCrests(setUp, by)
 				? {
 						value: question.truth + powerRatioToDb(shownPower(setUp)),
-						spread: by === 'hold' ? 0.4 : 0.2
+						spread: by === 'hold' ? 0.35 : 0.2
 					}
 				: null,
 		explain({ setUp, change }) {

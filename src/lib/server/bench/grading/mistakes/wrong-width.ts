@@ -2,6 +2,7 @@ import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
 import { figure } from '../../exercise/figure';
 import { MODEL_SPREAD_DB, defineMistake, type Context } from '../mistake';
+import { bandSpreadDb } from '../noise-law';
 import { sameWidth, widthHzOf } from '../read-width';
 import { askedWidthHz, channelDbm } from '../scene-power';
 import { withReading } from '../spoil';
@@ -22,9 +23,10 @@ export const wrongWidth = defineMistake(
 			const asked = askedOf(context);
 			return width !== undefined && !sameWidth(width, asked) && width > asked === widthHz > asked;
 		},
-		predict(context) {
+		predict(context, setUp) {
 			const value = channelDbm(context, context.question.frequencyHz, widthHz);
-			return { value, spread: MODEL_SPREAD_DB };
+			const noisy = bandSpreadDb(setUp, Math.min(widthHz, askedOf(context)));
+			return { value, spread: Math.hypot(MODEL_SPREAD_DB, noisy) };
 		},
 		explain({ source, drawn, question }) {
 			const context = { drawn, question };
