@@ -99,7 +99,6 @@ describe('amplitude modulation (Fourier; C)', () => {
 		const trace = sidebands(-16.4782);
 		const power = readOff(trace, { kind: 'channel-power', centreHz: 100e6, widthHz: 40e3 });
 		expect(power.value).toBeCloseTo(-19.809, 2);
-		const width = readOff(trace, { kind: 'x-db-bandwidth', db: 26 }).value;
 		// The filter adds its own skirt: √(9.52/12.04)·B beyond each sideband's top; alone it is 2·√(26/12.04)·B wide.
 		expect(readOff(trace, { kind: 'x-db-bandwidth', db: 26 }).value).toBeCloseTo(20e3 + 1778, -1);
 		expect(readOff(sidebands(-32.04), { kind: 'x-db-bandwidth', db: 26 }).value).toBeCloseTo(2939, -1);

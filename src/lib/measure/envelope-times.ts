@@ -1,7 +1,6 @@
 /** What readings of times in span 0 share: whether there are any, how sure they are, and what spoils them. */
 import { type Envelope, median, onTimesS, periodsS } from './envelope';
-import { pointSpreadDb, pointTimeS, videoBandwidthHz } from './noise-statistics';
-import { noiseShare } from './noise-share';
+import { pointTimeS, videoBandwidthHz } from './noise-statistics';
 import { noNumber, type NoNumber } from './reader';
 import { type Remark, remark } from './remark';
 import { isZeroSpan, type Trace } from './trace';
@@ -18,14 +17,13 @@ export function envelopeProblem(trace: Trace, envelope: Envelope): NoNumber | nu
 }
 
 /**
- * One standard deviation of the median on time: each edge falls somewhere between two points, and noise moves it by the level's
- * deviation over the slope (from 10 to 90 % in the edge's own duration).
+ * One standard deviation of the median on time: each edge falls somewhere between two points, and scatter of the level moves it by
+ * scatter over slope (80 % of the step in the edge's own duration).
  */
 export function timeSpreadS(trace: Trace, envelope: Envelope): number {
 	const durations = envelope.edges.flatMap(({ durationS }) => durationS ?? []);
 	const edgeS = durations.length > 0 ? median(durations) : pointTimeS(trace);
-	const share = noiseShare(trace, 0, trace.levelsDbm.length - 1);
-	const noiseS = Math.min(edgeS, (edgeS / 0.8) * (share * pointSpreadDb(trace)) * (Math.LN10 / 20));
+	const noiseS = Math.min(edgeS, (edgeS / 0.8) * (envelope.scatter / (envelope.high - envelope.low)));
 	return Math.hypot(pointTimeS(trace) / Math.sqrt(12), noiseS) * Math.sqrt(2 / onTimesS(envelope).length);
 }
 

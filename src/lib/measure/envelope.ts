@@ -15,6 +15,8 @@ export interface Envelope {
 	/** Typical high and low voltage, √mW. */
 	high: number;
 	low: number;
+	/** Standard deviation of the high level, √mW, from the median distance to it. */
+	scatter: number;
 	edges: Edge[];
 }
 
@@ -30,9 +32,12 @@ export function envelopeOf(trace: Trace): Envelope {
 		bottom = Math.min(bottom, v);
 	}
 	const middle = (top + bottom) / 2;
-	const high = median(voltages.filter((v) => v >= middle));
+	const highs = voltages.filter((v) => v >= middle);
+	const high = median(highs);
+	// 1.4826 times the median distance is the deviation of a normal law; edges hardly count in it.
+	const scatter = 1.4826 * median(highs.map((v) => Math.abs(v - high)));
 	const low = median(voltages.filter((v) => v <= middle));
-	return { high, low, edges: findEdges(voltages, low, high, pointTimeS(trace)) };
+	return { high, low, scatter, edges: findEdges(voltages, low, high, pointTimeS(trace)) };
 }
 
 export function median(values: Float64Array | number[]): number {

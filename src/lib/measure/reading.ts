@@ -51,7 +51,7 @@ export interface PartsByKind {
 	'fm-deviation': { modulatingHz: number; index: number };
 	pulse: { widthS: number; repetitionHz?: number };
 	/** The value is the on time. */
-	time: { onS: number; riseS: number; fallS: number; periodS?: number };
+	time: { onS: number; riseS?: number; fallS?: number; periodS?: number };
 	/** `segment` counts from 0 in the order of the limits; a positive margin passes. */
 	mask: { segment: number; frequencyHz: number; marginDb: number };
 }

@@ -58,6 +58,8 @@ const anyTrace: fc.Arbitrary<Trace> = fc
 		levelsDbm: fc.oneof(
 			fc.array(fc.double({ min: -1000, max: 1000, noNaN: true }), { minLength: 2, maxLength: 60 }),
 			fc.array(fc.double({ min: -120, max: 20, noNaN: true }), { minLength: 2, maxLength: 200 }),
+			// Few different levels: bursts, ties, edges at the ends.
+			fc.array(fc.constantFrom(-90, -38, -27, -25, -21, -20.5, -20), { minLength: 2, maxLength: 40 }),
 			fc
 				.tuple(fc.integer({ min: 2, max: 101 }), fc.double({ min: -200, max: 50, noNaN: true }))
 				.map(([points, level]) => Array<number>(points).fill(level))

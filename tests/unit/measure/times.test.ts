@@ -35,6 +35,16 @@ describe('time', () => {
 			'rise and fall'
 		);
 	});
+	it('leaves out the rise when the trace begins within every one', () => {
+		const trace = buildTrace(
+			{ startHz: carrierHz, stopHz: carrierHz, sweepTimeS: 10e-3, rbwHz: 1e6 },
+			(timeS) => (timeS < 1e-3 ? dbOf(0.3) : timeS < 6e-3 ? 0 : -60)
+		);
+		const { value, parts } = readOff(trace, { kind: 'time' });
+		expect(value).toBeCloseTo(5e-3, 4);
+		expect(parts!.riseS).toBeUndefined();
+		expect(parts!.fallS).toBeLessThan(20e-6);
+	});
 	it('needs span 0', () =>
 		expect(
 			problemOf(

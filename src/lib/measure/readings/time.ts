@@ -9,8 +9,13 @@ export const time: Reader<'time'> = (trace) => {
 	if (problem) return problem;
 	const onS = median(onTimesS(envelope));
 	const periods = periodsS(envelope);
-	const durations = (rising: boolean) =>
-		envelope.edges.filter((e) => e.rising === rising).flatMap(({ durationS }) => durationS ?? []);
+	// The trace may begin or end within every edge of a kind: then it has no duration.
+	const duration = (rising: boolean): number | undefined => {
+		const whole = envelope.edges
+			.filter((e) => e.rising === rising)
+			.flatMap(({ durationS }) => durationS ?? []);
+		return whole.length > 0 ? median(whole) : undefined;
+	};
 	return {
 		value: onS,
 		unit: 's',
@@ -18,8 +23,8 @@ export const time: Reader<'time'> = (trace) => {
 		remarks: timeRemarks(trace, envelope, onS),
 		parts: {
 			onS,
-			riseS: median(durations(true)),
-			fallS: median(durations(false)),
+			riseS: duration(true),
+			fallS: duration(false),
 			periodS: periods.length > 0 ? median(periods) : undefined
 		}
 	};
