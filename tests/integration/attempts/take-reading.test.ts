@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import { describe, expect, it } from 'vitest';
 import { combineRows } from '$lib/measure/combine-rows';
 import { takeReading as readOff } from '$lib/measure/take-reading';
@@ -69,6 +70,30 @@ describe('takeReading(actor, attemptId, request, now)', () => {
 		expect(again.value).toBe(first.value);
 		expect(other.traceHash).not.toBe(first.traceHash);
 		expect(first.engineVersion).toBe((await Attempt.findByPk(attempt.id))?.engineVersion);
+	});
+
+	it('folds a long hold as it goes, to the same trace', async () => {
+		const { actor, attempt } = await createAttempt();
+		const swept = await sweep(actor, attempt.id, settings, { sweeps: 150 });
+		await acknowledgeRows(actor, attempt.id, { row: 149 });
+		const asked = { rows: { from: 0, to: 149 }, trace: 3, request: { kind: 'peak' as const } };
+		const { reading } = await takeReading(actor, attempt.id, asked, now);
+		const levelsDbm = combineRows([...swept.rows.values()], 'max-hold', 1, 'power');
+		expect(reading.count).toBe(150);
+		const [{ traceHash }] = await readingsOf(attempt.id);
+		expect(traceHash).toBe(createHash('sha256').update(new Uint8Array(levelsDbm.buffer)).digest('hex'));
+	});
+
+	it('refuses an average too great to be swept again, and says so', async () => {
+		const { actor, attempt } = await createAttempt();
+		const great = { ...settings, points: 10_001, traces: [{ mode: 'average' as const, count: 10_000 }] };
+		await sweep(actor, attempt.id, great, { sweeps: 1 });
+		await Attempt.update({ nextRow: 5000, clockS: 500, rowEndS: 500 }, { where: { id: attempt.id } });
+		await acknowledgeRows(actor, attempt.id, { row: 4000 });
+		const asked = { rows: { from: 0, to: 4000 }, trace: 1, request };
+		await expect(takeReading(actor, attempt.id, asked, now)).rejects.toMatchObject({
+			issues: [{ field: 'rows' }]
+		});
 	});
 
 	it('goes over set-ups that differ in traces alone, leaving out what nobody drew', async () => {

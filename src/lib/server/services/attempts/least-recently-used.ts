@@ -17,4 +17,8 @@ export class LeastRecentlyUsed<K, V> {
 		}
 		return value;
 	}
+
+	forget(key: K): void {
+		this.#entries.delete(key);
+	}
 }

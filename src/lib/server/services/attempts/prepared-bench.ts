@@ -9,6 +9,7 @@ import { prepareSweep } from '$lib/server/bench/receiver/sweep';
 import type { SweepPlan } from '$lib/server/bench/receiver/sweep-plan';
 import { DomainError } from '$lib/server/errors';
 import { LeastRecentlyUsed } from './least-recently-used';
+import { RowClock } from './row-clock';
 
 /** What names the signal of an attempt and nothing else. */
 export interface SignalSource {
@@ -20,6 +21,7 @@ export interface SignalSource {
 
 /** A set-up of an attempt, ready to sweep. */
 export interface PreparedBench {
+	seed: string;
 	drawn: DrawnExercise;
 	resolved: ResolvedSettings;
 	plan: SweepPlan;
@@ -28,6 +30,7 @@ export interface PreparedBench {
 // Only caches: any process makes any entry again from the attempt's seed. Keyed by the seed, which never repeats.
 const drawings = new LeastRecentlyUsed<string, DrawnExercise>(500);
 const plans = new LeastRecentlyUsed<string, SweepPlan>(64);
+const clocks = new LeastRecentlyUsed<string, RowClock>(64);
 
 /** The attempt's exercise with its own numbers in it: scene and truths included. */
 export const drawnFor = ({ seed, definition }: SignalSource): DrawnExercise =>
@@ -63,11 +66,19 @@ export function preparedBench(source: SignalSource, settings: Settings): Prepare
 	const key = `${source.seed} ${JSON.stringify(swept)}`;
 	try {
 		const plan = plans.get(key, () => prepareSweep(drawn.scene, drawn.profile, resolved, source.seed));
-		return { drawn, resolved, plan };
+		return { seed: source.seed, drawn, resolved, plan };
 	} catch (cause) {
 		throw refusalOf(cause);
 	}
 }
+
+/** When the rows of a set-up begin. @param plan of these settings */
+export const rowClockOf = (
+	seed: string,
+	plan: SweepPlan,
+	{ number, firstRow, clockS }: { number: number; firstRow: number; clockS: number }
+): RowClock =>
+	clocks.get(`${seed} ${number}`, () => new RowClock((row) => plan.durationS(row), firstRow, clockS));
 
 function refusalOf(cause: unknown): unknown {
 	if (!(cause instanceof BenchError)) return cause;

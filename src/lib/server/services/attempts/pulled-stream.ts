@@ -1,6 +1,7 @@
 /**
  * A byte stream that asks its source for more only when its reader does. When the reader leaves, `gone` aborts,
- * and the source must come to its end.
+ * and the source must come to its end. A source that throws is logged here, for the status has long been sent; its reader
+ * sees the stream break off.
  * @param over called once, when the source has ended in whatever way
  */
 export function pulledStream(
@@ -17,6 +18,10 @@ export function pulledStream(
 					if (!done) return controller.enqueue(value);
 				} catch (cause) {
 					over();
+					const text = cause instanceof Error ? (cause.stack ?? cause.message) : String(cause);
+					console.error(
+						JSON.stringify({ at: new Date().toISOString(), what: 'stream broke off', cause: text })
+					);
 					throw cause;
 				}
 				over();

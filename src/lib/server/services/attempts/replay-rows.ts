@@ -1,7 +1,6 @@
 import { setImmediate as yieldToOthers } from 'node:timers/promises';
 import type { DrawnRows } from './drawn-rows';
-import { preparedBench, type SignalSource } from './prepared-bench';
-import { RowClock } from './row-clock';
+import { preparedBench, rowClockOf, type SignalSource } from './prepared-bench';
 
 /** How long the replay keeps everybody else waiting at a time, ms. */
 const TURN_MS = 10;
@@ -14,7 +13,7 @@ export async function* replayRows(
 	let turnEnd = performance.now() + TURN_MS;
 	for (const { setUp, fromRow, toRow } of stretches) {
 		const { plan } = preparedBench(source, setUp.settings);
-		const rows = new RowClock((row) => plan.durationS(row), setUp.firstRow, setUp.clockS);
+		const rows = rowClockOf(source.seed, plan, setUp);
 		for (let row = fromRow; row <= toRow; row++) {
 			if (performance.now() > turnEnd) {
 				await yieldToOthers();

@@ -4,7 +4,8 @@ import { advanceBench, type BenchPosition } from './advance-bench';
 import type { OpenSweeps } from './open-sweeps';
 import { Pace } from './pace';
 import { reserveSweep } from './reserve-sweep';
-import { RowClock } from './row-clock';
+import { rowClockOf } from './prepared-bench';
+import type { RowClock } from './row-clock';
 import { rowPieces, type RowPiece } from './row-pieces';
 import { speedUpOf } from './speed-up';
 
@@ -39,7 +40,7 @@ export async function* sweepFrames(
 ): AsyncGenerator<Uint8Array<ArrayBuffer>> {
 	const { setUp, bench, fromRow } = opened;
 	const { plan, resolved } = bench;
-	const rows = new RowClock((row) => plan.durationS(row), setUp.firstRow, setUp.clockS);
+	const rows = rowClockOf(bench.seed, plan, setUp);
 	const speedUp = speedUpOf(resolved.sweepTimeS);
 	const untilRow = fromRow + sweeps;
 	const levelsOf = oneRow((row) => plan.row(row, rows.startS(row)));

@@ -1,6 +1,5 @@
 import { createHash } from 'node:crypto';
 import type { ReadingResponse, TakeReadingRequest } from '$lib/schemas/attempt';
-import { combineRows } from '$lib/measure/combine-rows';
 import { isProblem, type Reading as TakenReading } from '$lib/measure/reading';
 import { takeReading as readOff } from '$lib/measure/take-reading';
 import type { Trace } from '$lib/measure/trace';
@@ -14,12 +13,13 @@ import { presentReading } from '$lib/server/present/reading';
 import { countRows, drawnRows, lastRows, type DrawnRows } from './drawn-rows';
 import { getAttempt, lockOpenAttempt } from './get-attempt';
 import { resolvedFor } from './prepared-bench';
-import { replayRows } from './replay-rows';
+import { isReplayable, replayedTrace } from './replayed-trace';
 import { setUpLog, setUpOfRow } from './set-up-log';
 import { exerciseOf, signalSource } from './signal-source';
 
 /** A trace of more rows than this is not replayed: an average's greatest count. */
 const MOST_ROWS = 10_000;
+const TOO_MUCH = 'That is more sweeps than can be replayed. Hold or average fewer.';
 
 type Shown = ResolvedSettings['traces'][number];
 
@@ -42,10 +42,10 @@ export async function takeReading(
 	const resolved = resolvedFor(source, setUp.settings);
 	const shown = shownTrace(resolved, number);
 	const stretches = rowsOfTrace(log, rows, shown);
-	const levels: Float32Array[] = [];
-	for await (const { levelsDbm } of replayRows(source, stretches)) levels.push(levelsDbm);
-	const levelsDbm = combineRows(levels, shown.mode, shown.count, resolved.scale);
-	const reading = readOff(traceOf(resolved, shown, levels.length, levelsDbm), request);
+	if (!isReplayable(shown, stretches, resolved.points)) refuse('rows', TOO_MUCH);
+	const rowCount = countRows(stretches);
+	const levelsDbm = await replayedTrace(source, stretches, shown, resolved.scale);
+	const reading = readOff(traceOf(resolved, shown, rowCount, levelsDbm), request);
 	if (isProblem(reading)) refuse('request', `${reading.problem} ${reading.needs}`);
 	return inTransaction(async (transaction) => {
 		// Handed in meanwhile: then the reading comes too late.
@@ -59,7 +59,7 @@ export async function takeReading(
 				toRow: rows.to,
 				trace: number,
 				mode: shown.mode,
-				rowCount: levels.length,
+				rowCount,
 				request,
 				kind,
 				value,
@@ -109,9 +109,7 @@ function rowsOfTrace(log: SetUp[], rows: TakeReadingRequest['rows'], { mode, cou
 	const drawn = drawnRows(log, rows.from, rows.to);
 	const stretches =
 		mode === 'live' ? lastRows(drawn, 1) : mode === 'average' ? lastRows(drawn, count) : drawn;
-	if (countRows(stretches) > MOST_ROWS) {
-		refuse('rows', `A trace of more than ${MOST_ROWS} sweeps can’t be replayed. Start the hold again.`);
-	}
+	if (countRows(stretches) > MOST_ROWS) refuse('rows', TOO_MUCH);
 	return stretches;
 }
 
