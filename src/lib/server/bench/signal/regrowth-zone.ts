@@ -18,8 +18,9 @@ export interface ZoneTable {
 	values: Float64Array;
 }
 
-const OWN_POINTS = 16384;
-const CROSS_POINTS = 4096;
+/** Grid points: inside one cluster, twice that where it is many times as wide as its narrowest density, half across. */
+const POINTS = 8192;
+const MANY_TIMES = 20;
 /** Values this far under the top are rounding. */
 const ROUNDING = 1e-11;
 
@@ -34,7 +35,8 @@ const width = (cluster: Cluster): number => cluster.stopHz - cluster.startHz;
 export function zoneTable({ p, q, r }: Zone, lines: Line[], powerUnit: number): ZoneTable | null {
 	const spanHz = width(p) + width(q) + width(r);
 	if (!(spanHz > 0)) return null;
-	const points = p === q && q === r ? OWN_POINTS : CROSS_POINTS;
+	const own = p === q && q === r;
+	const points = !own ? POINTS / 2 : width(p) > MANY_TIMES * p.narrowestHz ? 2 * POINTS : POINTS;
 	const grid = { points, stepHz: spanHz / (0.95 * points) };
 	const gridded = new Map<Cluster, GriddedCluster>();
 	for (const cluster of new Set([p, q, r]))
@@ -47,10 +49,10 @@ export function zoneTable({ p, q, r }: Zone, lines: Line[], powerUnit: number): 
 	// What only multiplies a density by a constant is gain: pairs of one line with itself.
 	if (r === q) addScaled(product, -4 * gq.linePowerSquares, gp.density);
 	if (p === q && gp.lineSquares) addConjugated(product, -1, gp.lineSquares, gr.density);
-	const corrected = p === q && q === r ? p.densities.filter((core) => core.density.regrowth) : [];
+	const corrected = own ? p.densities.filter((core) => core.density.regrowth) : [];
 	for (const core of corrected) {
-		const own = gridDensity(core, gp.referenceBin, grid, powerUnit);
-		addProduct(product, -2, own, own, own);
+		const single = gridDensity(core, gp.referenceBin, grid, powerUnit);
+		addProduct(product, -2, single, single, single);
 	}
 	const spectrum = new Float64Array(2 * points);
 	transformOf(points).transform(spectrum, product);
