@@ -1,0 +1,44 @@
+import { describe, expect, it } from 'vitest';
+import { describeReading } from '$lib/server/bench/grading/describe-reading';
+import { describeSettings } from '$lib/server/bench/grading/describe-settings';
+
+const plain = (text: string) => text.replace(/[\u00a0\u2009]/g, ' ');
+
+describe('describeSettings(before, after)', () => {
+	it('says what is not ordinary in a first set-up', () =>
+		expect(
+			plain(describeSettings(undefined, { centreHz: 450e6, spanHz: 1e6, detector: 'positive-peak' }))
+		).toBe('Centre 450 MHz, span 1 MHz, detector positive peak'));
+
+	it('says only what changed', () =>
+		expect(
+			plain(
+				describeSettings(
+					{ centreHz: 450e6, spanHz: 1e6 },
+					{
+						centreHz: 450e6,
+						spanHz: 1e5,
+						rbwHz: 300,
+						correctionDb: 3.2,
+						scale: 'power',
+						traces: [{ mode: 'average', count: 64 }]
+					}
+				)
+			)
+		).toBe('Span 100 kHz, resolution 300 Hz, correction 3.2 dB, averages on power, trace 1 average of 64'));
+
+	it('says what went back to automatic', () =>
+		expect(plain(describeSettings({ rbwHz: 300, sweepTimeS: 2 }, {}))).toBe(
+			'Resolution auto, sweep time auto'
+		));
+
+	it('says when nothing changed', () => expect(describeSettings({}, {})).toBe('Swept again'));
+});
+
+describe('describeReading(request)', () => {
+	it.each([
+		[{ kind: 'channel-power', centreHz: 450e6, widthHz: 25e3 }, 'channel power, 25 kHz'],
+		[{ kind: 'peak' }, 'highest point'],
+		[{ kind: 'marker', atHz: 450.025e6 }, 'marker, at 450.025 MHz']
+	])('%o', (request, words) => expect(plain(describeReading(request))).toBe(words));
+});
