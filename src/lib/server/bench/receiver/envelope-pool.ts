@@ -75,7 +75,7 @@ export class EnvelopePool {
 			instants.subarray(b * length, (b + 1) * length)
 		);
 		const extremes = (pick: (a: number, b: number) => number) =>
-			Float64Array.from(blocks, (block) => block.reduce(pick)).sort();
+			Float64Array.from(blocks, (block) => block.reduce((a, b) => pick(a, b))).sort();
 		return { instants, greatest: extremes(Math.max), least: extremes(Math.min) };
 	}
 
@@ -89,6 +89,12 @@ export class EnvelopePool {
 	power(t: number, random: Random): number {
 		const instants = this.seenAt(t)?.instants;
 		return instants ? instants[Math.floor(random.uniform() * instants.length)] : 0;
+	}
+
+	/** The power it shows as often above as below, for places where an extreme must not be drawn twice. */
+	typical(t: number): number {
+		const seen = this.seenAt(t);
+		return seen ? Math.sqrt(seen.greatest[seen.greatest.length >> 1] * Math.max(1e-30, seen.least[seen.least.length >> 1])) : 0;
 	}
 
 	/** Greatest (or least) power over a stretch of lengthS about t: of as many blocks as it holds. */

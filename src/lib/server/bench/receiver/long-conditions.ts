@@ -112,19 +112,30 @@ export class LongBucketConditions {
 				if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);
 			return v;
 		};
+		if (modulated && this.followsEdges && this.modulated.hasWaveforms)
+			return { pieces: this.extremePieces(times, rest, fixed, random), windows };
 		const pieces = times.map(({ t, share }) => {
 			const v = fixed(t);
 			if (modulated) this.modulated.addAt(t, out, random);
 			return { share: share * rest, v, p: out[0] * out[0] + out[1] * out[1] };
 		});
-		if (modulated && this.followsEdges)
-			for (const greatest of [true, false]) {
-				const { t } = times[Math.floor(random.uniform() * times.length)];
-				const v = fixed(t);
-				if (this.modulated.addExtremeAt(t, frame.bucketS, greatest, out, random))
-					pieces.push({ share: pieces[0].share / 4, v, p: out[0] * out[0] + out[1] * out[1] });
-			}
 		return { pieces, windows };
+	}
+
+	/** A bucket full of waveforms, for a peak detector: one piece at their strongest, one at their weakest. */
+	private extremePieces(
+		times: { t: number }[],
+		rest: number,
+		fixed: (t: number) => number,
+		random: Random
+	): Piece[] {
+		const { out } = this;
+		return [true, false].map((greatest) => {
+			const { t } = times[Math.floor(random.uniform() * times.length)];
+			const v = fixed(t);
+			this.modulated.addExtremeAt(t, this.frame.bucketS, greatest, out, random);
+			return { share: rest / 2, v, p: out[0] * out[0] + out[1] * out[1] };
+		});
 	}
 
 	private isShort(burst: Burst): boolean {
@@ -216,11 +227,15 @@ export class LongBucketConditions {
 
 	/** Conditions at the edge before bucket b. */
 	edge(b: number, random: Random): EdgeConditions {
-		return this.instant(b * this.frame.bucketS, random);
+		return this.conditionsAt(b * this.frame.bucketS, random, false);
 	}
 
 	/** The filter's answer t seconds into the sweep: amplitude of all lines, and the noise beside them. Asked in rising order of t. */
 	instant(t: number, random: Random): EdgeConditions {
+		return this.conditionsAt(t, random, true);
+	}
+
+	private conditionsAt(t: number, random: Random, drawsWaveforms: boolean): EdgeConditions {
 		const { frame, out } = this;
 		out.fill(0);
 		for (const p of this.passing) if (p.fromS <= t && p.toS >= t) addLineAt(frame, p.line, t, out);
@@ -232,7 +247,8 @@ export class LongBucketConditions {
 			out[0] += this.x[0];
 			out[1] += this.y[0];
 		}
-		this.modulated.addAt(t, out, random);
+		if (drawsWaveforms) this.modulated.addAt(t, out, random);
+		else this.modulated.addTypicalAt(t, out, random);
 		let v = this.noise.at(t);
 		for (const s of this.timed.stretches)
 			if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);

@@ -38,12 +38,21 @@ export class ModulatedSources {
 		for (const pool of this.pools) addPower(pool.power(t, random), out, random);
 	}
 
-	/** The same at the instant of a stretch of lengthS when the waveforms are strongest (or weakest); false where there are none. */
-	addExtremeAt(t: number, lengthS: number, greatest: boolean, out: Float64Array, random: Random): boolean {
-		if (this.pools.length === 0) return false;
+	/** Whether there are waveforms, whose extremes over a bucket are drawn as such. */
+	get hasWaveforms(): boolean {
+		return this.pools.length > 0;
+	}
+
+	/** The same at the instant of a stretch of lengthS when the waveforms are strongest (or weakest). */
+	addExtremeAt(t: number, lengthS: number, greatest: boolean, out: Float64Array, random: Random): void {
 		for (const mover of this.movers) mover.addAt(t, out);
 		for (const pool of this.pools) addPower(pool.extreme(t, lengthS, greatest, random), out, random);
-		return true;
+	}
+
+	/** The same with waveforms at a middling power: where buckets meet, no extreme is to be found that the buckets don't draw. */
+	addTypicalAt(t: number, out: Float64Array, random: Random): void {
+		for (const mover of this.movers) mover.addAt(t, out);
+		for (const pool of this.pools) addPower(pool.typical(t), out, random);
 	}
 }
 
