@@ -9,10 +9,10 @@ const SPAN_HZ = 120e3;
 const REFERENCE_DBM = -20;
 const SEED = 'front page';
 
-/** Two telemetry carriers on neighbouring channels, and a third 40 dB under the first. */
-const OFFSETS_HZ = [-6.25e3, 6.25e3, 43.75e3];
+/** Two telemetry carriers on neighbouring channels, and a third 30 dB under the first. */
+const OFFSETS_HZ = [-6.25e3, 6.25e3, 31.25e3];
 const SCENE: Scene = {
-	emitters: [-32, -39, -72].map((levelDbm, i) => ({
+	emitters: [-32, -39, -62].map((levelDbm, i) => ({
 		kind: 'cw',
 		frequencyHz: CENTRE_HZ + OFFSETS_HZ[i],
 		levelDbm
