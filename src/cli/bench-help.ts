@@ -13,7 +13,8 @@ interface JsonSchema {
 	anyOf?: JsonSchema[];
 }
 
-const schemaOf = (schema: z.ZodType): JsonSchema => z.toJSONSchema(schema, { unrepresentable: 'any' }) as JsonSchema;
+const schemaOf = (schema: z.ZodType): JsonSchema =>
+	z.toJSONSchema(schema, { unrepresentable: 'any' }) as JsonSchema;
 
 /** "frequencyHz levelDbm phaseNoise?": required ones first. */
 function fieldsOf({ properties = {}, required = [] }: JsonSchema): string {

@@ -23,7 +23,8 @@ async function main([verb, file, ...rest]: string[]): Promise<number> {
 	}
 	if (verb === 'proof') return proof([file, ...rest].filter((word) => word !== undefined));
 	const run = verbs[verb];
-	if (!run) return refuse(`verb: no such verb "${verb}"; there are ${Object.keys(verbs).join(', ')}, proof, help`);
+	if (!run)
+		return refuse(`verb: no such verb "${verb}"; there are ${Object.keys(verbs).join(', ')}, proof, help`);
 	if (!file || rest.length > 0) return refuse('file: name one JSON file, or - for standard input');
 	try {
 		const output = run(readJson(file));
@@ -40,7 +41,10 @@ function readJson(file: string): unknown {
 	try {
 		text = readFileSync(file === '-' ? 0 : file, 'utf8');
 	} catch (error) {
-		throw new BenchError('file', `cannot be read (${(error as NodeJS.ErrnoException).code ?? 'error'}): ${file}`);
+		throw new BenchError(
+			'file',
+			`cannot be read (${(error as NodeJS.ErrnoException).code ?? 'error'}): ${file}`
+		);
 	}
 	try {
 		return JSON.parse(text);
@@ -49,7 +53,8 @@ function readJson(file: string): unknown {
 	}
 }
 
-const isProblem = (output: unknown): boolean => typeof output === 'object' && output !== null && 'problem' in output;
+const isProblem = (output: unknown): boolean =>
+	typeof output === 'object' && output !== null && 'problem' in output;
 const oneLine = (text: string): string => text.replace(/\s+/g, ' ');
 
 function refuse(line: string): number {

@@ -21,7 +21,14 @@ const RBW = 1000;
 
 function meanExtreme(scale: Scale, ratio: number, detector: 'positive-peak' | 'negative-peak'): number {
 	const bucketS = BT / RBW;
-	const settings = { points: POINTS, rbwHz: RBW, vbwHz: ratio * RBW, sweepTimeS: bucketS * (POINTS - 1), startHz: 1e6, spanHz: 0 };
+	const settings = {
+		points: POINTS,
+		rbwHz: RBW,
+		vbwHz: ratio * RBW,
+		sweepTimeS: bucketS * (POINTS - 1),
+		startHz: 1e6,
+		spanHz: 0
+	};
 	const runIn = ratio >= 1000 ? 0 : sampledRunInS(settings.vbwHz, RBW);
 	const frame = makeFrame(settings as ResolvedSettings, 0, samplesPerBucket(RBW, bucketS, true), runIn);
 	const noise: Incident['noises'][number] = { variance: () => 1 };
@@ -40,14 +47,18 @@ const table = Object.fromEntries(
 		const mean = meanOnScale(1, 0, scale);
 		const shares = (detector: 'positive-peak' | 'negative-peak') => {
 			const plain = meanExtreme(scale, 1e6, detector) - mean;
-			return RATIOS.map((r) => [Math.log10(r), (meanExtreme(scale, r, detector) - mean) / plain].map((x) => +x.toFixed(4)));
+			return RATIOS.map((r) =>
+				[Math.log10(r), (meanExtreme(scale, r, detector) - mean) / plain].map((x) => +x.toFixed(4))
+			);
 		};
 		return [scale, { greatest: shares('positive-peak'), least: shares('negative-peak') }];
 	})
 );
 const pairs = (list: number[][]) => `[\n${list.map((p) => `\t\t\t[${p.join(', ')}]`).join(',\n')}\n\t\t]`;
 const body = Object.entries(table)
-	.map(([scale, t]) => `\t${scale}: {\n\t\tgreatest: ${pairs(t.greatest)},\n\t\tleast: ${pairs(t.least)}\n\t}`)
+	.map(
+		([scale, t]) => `\t${scale}: {\n\t\tgreatest: ${pairs(t.greatest)},\n\t\tleast: ${pairs(t.least)}\n\t}`
+	)
 	.join(',\n');
 writeFileSync(
 	'src/lib/server/bench/receiver/smoothing-table.ts',

@@ -18,7 +18,14 @@ const load: Scene = {
 };
 const at: Settings = { centreHz: 1e9, spanHz: 20e6, detector: 'average', scale: 'log' };
 const one = (emitter: Scene['emitters'][number]): Scene => ({ emitters: [emitter] });
-const qpsk = one({ kind: 'digital', frequencyHz: 1e9, levelDbm: -30, symbolRateHz: 1e6, rollOff: 0.35, order: 4 });
+const qpsk = one({
+	kind: 'digital',
+	frequencyHz: 1e9,
+	levelDbm: -30,
+	symbolRateHz: 1e6,
+	rollOff: 0.35,
+	order: 4
+});
 
 export const speedScenes: { name: string; scene: Scene; settings: Settings }[] = [
 	{ name: 'load', scene: load, settings: at },
@@ -26,18 +33,50 @@ export const speedScenes: { name: string; scene: Scene; settings: Settings }[] =
 	{ name: 'load, positive-peak', scene: load, settings: { ...at, detector: 'positive-peak' } },
 	{ name: 'load, rise-fall', scene: load, settings: { ...at, detector: 'rise-fall' } },
 	{ name: 'load, negative-peak', scene: load, settings: { ...at, detector: 'negative-peak' } },
-	{ name: 'load, 51 MHz, positive-peak', scene: load, settings: { ...at, spanHz: 51e6, detector: 'positive-peak' } },
+	{
+		name: 'load, 51 MHz, positive-peak',
+		scene: load,
+		settings: { ...at, spanHz: 51e6, detector: 'positive-peak' }
+	},
 	{ name: 'load, 10001 points', scene: load, settings: { ...at, points: 10001 } },
-	{ name: 'load, 10001 points, positive-peak', scene: load, settings: { ...at, points: 10001, detector: 'positive-peak' } },
+	{
+		name: 'load, 10001 points, positive-peak',
+		scene: load,
+		settings: { ...at, points: 10001, detector: 'positive-peak' }
+	},
 	{ name: 'load, video B/10', scene: load, settings: { ...at, vbwHz: 20e3 } },
 	{ name: 'load, video B/100', scene: load, settings: { ...at, vbwHz: 2e3 } },
-	{ name: 'load, video B/100, positive-peak', scene: load, settings: { ...at, vbwHz: 2e3, detector: 'positive-peak' } },
-	{ name: 'load, long buckets (16/B), average', scene: load, settings: { ...at, rbwHz: 100e3, sweepTimeS: 0.16 } },
-	{ name: 'load, long buckets (16/B), positive-peak', scene: load, settings: { ...at, rbwHz: 100e3, sweepTimeS: 0.16, detector: 'positive-peak' } },
-	{ name: 'load, long buckets (1000/B), positive-peak', scene: load, settings: { ...at, rbwHz: 100e3, sweepTimeS: 10, detector: 'positive-peak' } },
+	{
+		name: 'load, video B/100, positive-peak',
+		scene: load,
+		settings: { ...at, vbwHz: 2e3, detector: 'positive-peak' }
+	},
+	{
+		name: 'load, long buckets (16/B), average',
+		scene: load,
+		settings: { ...at, rbwHz: 100e3, sweepTimeS: 0.16 }
+	},
+	{
+		name: 'load, long buckets (16/B), positive-peak',
+		scene: load,
+		settings: { ...at, rbwHz: 100e3, sweepTimeS: 0.16, detector: 'positive-peak' }
+	},
+	{
+		name: 'load, long buckets (1000/B), positive-peak',
+		scene: load,
+		settings: { ...at, rbwHz: 100e3, sweepTimeS: 10, detector: 'positive-peak' }
+	},
 	{ name: 'QPSK envelope swept', scene: qpsk, settings: { ...at, spanHz: 10e6, rbwHz: 300e3 } },
-	{ name: 'QPSK envelope, span 0', scene: qpsk, settings: { ...at, spanHz: 0, rbwHz: 1e6, sweepTimeS: 0.001 } },
-	{ name: 'QPSK envelope, span 0, 1 s', scene: qpsk, settings: { ...at, spanHz: 0, rbwHz: 1e6, sweepTimeS: 1, detector: 'positive-peak' } },
+	{
+		name: 'QPSK envelope, span 0',
+		scene: qpsk,
+		settings: { ...at, spanHz: 0, rbwHz: 1e6, sweepTimeS: 0.001 }
+	},
+	{
+		name: 'QPSK envelope, span 0, 1 s',
+		scene: qpsk,
+		settings: { ...at, spanHz: 0, rbwHz: 1e6, sweepTimeS: 1, detector: 'positive-peak' }
+	},
 	{
 		name: 'GMSK, span 0, 1001 points of 1.5/B',
 		scene: one({ kind: 'msk', frequencyHz: 1e9, levelDbm: -30, bitRateHz: 270e3, bt: 0.3 }),

@@ -15,7 +15,8 @@ const WARM_UP_S = 0.4;
 const MEASURE_S = 1.2;
 const PREPARES = 20;
 
-const quantile = (sorted: number[], q: number): number => sorted[Math.min(sorted.length - 1, Math.floor(q * sorted.length))];
+const quantile = (sorted: number[], q: number): number =>
+	sorted[Math.min(sorted.length - 1, Math.floor(q * sorted.length))];
 const rising = (values: number[]): number[] => [...values].sort((a, b) => a - b);
 
 function timePrepare(scene: Scene, settings: Settings): number[] {
@@ -39,9 +40,9 @@ function timeRows(scene: Scene, settings: Settings): { rows: number[]; pairsMs: 
 		plan.row(n, clockS);
 		clockS += plan.durationS(n++);
 	};
-	for (const until = performance.now() + WARM_UP_S * 1e3; performance.now() < until; ) next();
+	for (const until = performance.now() + WARM_UP_S * 1e3; performance.now() < until;) next();
 	const rows: number[] = [];
-	for (const until = performance.now() + MEASURE_S * 1e3; performance.now() < until || rows.length < 5; ) {
+	for (const until = performance.now() + MEASURE_S * 1e3; performance.now() < until || rows.length < 5;) {
 		const start = performance.now();
 		next();
 		rows.push(performance.now() - start);
@@ -65,7 +66,9 @@ function timePairs(count: number): number {
 
 const cell = (value: number): string => value.toFixed(value < 10 ? 2 : 1).padStart(7);
 
-console.log(`${cpus()[0].model}, Node.js ${process.version}, ${new Date().toISOString().slice(0, 10)}; one core, ms`);
+console.log(
+	`${cpus()[0].model}, Node.js ${process.version}, ${new Date().toISOString().slice(0, 10)}; one core, ms`
+);
 console.log(`${'scene'.padEnd(46)} prepare: median   p95   row: median   p95  rows/s   pairs alone`);
 for (const { name, scene, settings } of speedScenes) {
 	const { rows, pairsMs } = timeRows(scene, settings);

@@ -44,7 +44,13 @@ export interface Sweep {
 }
 
 export function sweep({ scene, emitters = [], receiver = ideal, settings, seed = 7, sweeps = 1 }: Sweep) {
-	return sweepCommand({ scene: scene ?? { emitters }, receiver, settings: { attenuationDb: 0, ...settings }, seed, sweeps });
+	return sweepCommand({
+		scene: scene ?? { emitters },
+		receiver,
+		settings: { attenuationDb: 0, ...settings },
+		seed,
+		sweeps
+	});
 }
 
 /** A reading off trace 1 of a sweep. */
@@ -52,12 +58,24 @@ export function read(given: Sweep, request: ReadingRequest) {
 	const result = sweep(given);
 	const { startHz, stopHz, rbwHz: rbw, vbwHz, sweepTimeS, detector, scale, traces } = result;
 	const [{ mode, levelsDbm }] = traces;
-	const trace = { startHz, stopHz, rbwHz: rbw, vbwHz, sweepTimeS, detector, scale, mode, count: given.sweeps ?? 1, levelsDbm };
+	const trace = {
+		startHz,
+		stopHz,
+		rbwHz: rbw,
+		vbwHz,
+		sweepTimeS,
+		detector,
+		scale,
+		mode,
+		count: given.sweeps ?? 1,
+		levelsDbm
+	};
 	const reading = takeReading(trace, request);
 	if (isProblem(reading)) throw new Error(`${reading.kind}: ${reading.problem}`);
 	return reading;
 }
 
-export const meanOf = (values: ArrayLike<number>): number => Array.from(values).reduce((a, b) => a + b, 0) / values.length;
+export const meanOf = (values: ArrayLike<number>): number =>
+	Array.from(values).reduce((a, b) => a + b, 0) / values.length;
 export const meanPowerDbm = (values: ArrayLike<number>): number =>
 	10 * Math.log10(meanOf(Array.from(values, (l) => 10 ** (l / 10))));

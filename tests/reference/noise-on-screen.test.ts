@@ -49,15 +49,22 @@ describe('averages of noise (C)', () => {
 		return Math.sqrt(meanOf(levels.map((l) => (l - mean) ** 2)));
 	};
 
-	it.each([10, 100])('a power average over %d independent values deviates by 4.343·√ψ₁(N) (C3: 1.4084, 0.43538 dB)', (n) => {
-		const trace = { traces: [{ mode: 'average' as const, count: n }] };
-		const result = sweep({ receiver: modelAnalyser, settings: { ...settings, scale: 'power', ...trace }, sweeps: n });
-		const levels = result.traces[0].levelsDbm;
-		const mean = meanOf(levels);
-		const deviation = Math.sqrt(meanOf(levels.map((l) => (l - mean) ** 2)));
-		const expected = n === 10 ? 1.4084 : 0.43538;
-		expect(Math.abs(deviation / expected - 1)).toBeLessThan(4 / Math.sqrt(2 * levels.length));
-	});
+	it.each([10, 100])(
+		'a power average over %d independent values deviates by 4.343·√ψ₁(N) (C3: 1.4084, 0.43538 dB)',
+		(n) => {
+			const trace = { traces: [{ mode: 'average' as const, count: n }] };
+			const result = sweep({
+				receiver: modelAnalyser,
+				settings: { ...settings, scale: 'power', ...trace },
+				sweeps: n
+			});
+			const levels = result.traces[0].levelsDbm;
+			const mean = meanOf(levels);
+			const deviation = Math.sqrt(meanOf(levels.map((l) => (l - mean) ** 2)));
+			const expected = n === 10 ? 1.4084 : 0.43538;
+			expect(Math.abs(deviation / expected - 1)).toBeLessThan(4 / Math.sqrt(2 * levels.length));
+		}
+	);
 
 	it('an average detector gathers 1.5054·B·T independent powers and 1.8459·B·T logarithms (C6)', () => {
 		const bt = 40; // B·T of one bucket
@@ -79,7 +86,15 @@ describe('rise times (C10, computed)', () => {
 		const gate = { onS: 0.5, offS: 0.5, startS: 0.001 };
 		const result = sweep({
 			emitters: [{ kind: 'cw', frequencyHz: 1e9, levelDbm: 0, gate }],
-			settings: { centreHz: 1e9, spanHz: 0, points: 2001, detector: 'sample', scale: 'voltage', sweepTimeS: 0.002, ...over }
+			settings: {
+				centreHz: 1e9,
+				spanHz: 0,
+				points: 2001,
+				detector: 'sample',
+				scale: 'voltage',
+				sweepTimeS: 0.002,
+				...over
+			}
 		});
 		const volts = result.levelsDbm[0].map((l) => 10 ** (l / 20));
 		const crossing = (level: number): number => {

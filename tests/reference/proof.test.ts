@@ -9,7 +9,7 @@ import { firstExercise } from '../factories/first-exercise';
 
 const MINUTES = 60_000;
 const SOUND_SEEDS = 40;
-const FAULT_SEEDS = 8;
+const FAULT_SEEDS = 10;
 const prove = (seeds: number, sweepWith?: SweepWith) =>
 	proveExercise(firstExercise, { seeds, fromSeed: 1, sweepWith });
 
@@ -30,6 +30,12 @@ const faults: [string, SweepWith, RegExp][] = [
 		(scene, profile, resolved, seed) =>
 			prepareSweep(scene, profile, { ...resolved, rbwHz: Math.SQRT2 * resolved.rbwHz }, seed),
 		/the taught method/
+	],
+	[
+		'a noise bandwidth taken for the filter’s width, 0.27 dB',
+		(scene, profile, resolved, seed) =>
+			prepareSweep(scene, profile, { ...resolved, rbwHz: resolved.rbwHz / 1.064467 }, seed),
+		/the taught method is off by -0\.2/
 	],
 	[
 		'an average detector that picks peaks',

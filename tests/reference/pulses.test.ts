@@ -16,8 +16,17 @@ describe('line mode: RBW far below the repetition rate', () => {
 		[1e-6, -60],
 		[10e-6, -40]
 	])('a pulse of %d s at 1 kHz shows its centre line at %d dB (J2)', (widthS, db) => {
-		const settings = { centreHz: 2.9e9, spanHz: 500, rbwHz: 30, vbwHz: 10e6, sweepTimeS: 5, detector: 'positive-peak' as const };
-		expect(Math.abs(peakOf(sweep({ emitters: pulsed(widthS, 1e-3), settings }).levelsDbm[0]) - db)).toBeLessThan(0.05);
+		const settings = {
+			centreHz: 2.9e9,
+			spanHz: 500,
+			rbwHz: 30,
+			vbwHz: 10e6,
+			sweepTimeS: 5,
+			detector: 'positive-peak' as const
+		};
+		expect(
+			Math.abs(peakOf(sweep({ emitters: pulsed(widthS, 1e-3), settings }).levelsDbm[0]) - db)
+		).toBeLessThan(0.05);
 	});
 
 	it('does not change with the resolution bandwidth, as long as it is a line', () => {
@@ -25,7 +34,14 @@ describe('line mode: RBW far below the repetition rate', () => {
 			peakOf(
 				sweep({
 					emitters: pulsed(1e-6, 1e-4),
-					settings: { centreHz: 2.9e9, spanHz: 5e3, rbwHz, vbwHz: 10e6, sweepTimeS: 2, detector: 'positive-peak' }
+					settings: {
+						centreHz: 2.9e9,
+						spanHz: 5e3,
+						rbwHz,
+						vbwHz: 10e6,
+						sweepTimeS: 2,
+						detector: 'positive-peak'
+					}
 				}).levelsDbm[0]
 			);
 		expect(Math.abs(at(300) - at(1000))).toBeLessThan(0.05);
@@ -38,8 +54,18 @@ describe('pulse mode: repetition rate far below RBW, RBW far below 1/width', () 
 		[2e-6, 30e3, -20.884],
 		[0.5e-6, 100e3, -22.468]
 	])('a pulse of %d s in %d Hz reads 20·lg(τ·1.5054·B) = %d dB (J3)', (widthS, rbwHz, db) => {
-		const settings = { centreHz: 2.9e9, spanHz: 0, rbwHz, vbwHz: 10e6, sweepTimeS: 1, points: 101, detector: 'positive-peak' as const };
-		expect(Math.abs(peakOf(sweep({ emitters: pulsed(widthS, 0.0123), settings }).levelsDbm[0]) - db)).toBeLessThan(0.1);
+		const settings = {
+			centreHz: 2.9e9,
+			spanHz: 0,
+			rbwHz,
+			vbwHz: 10e6,
+			sweepTimeS: 1,
+			points: 101,
+			detector: 'positive-peak' as const
+		};
+		expect(
+			Math.abs(peakOf(sweep({ emitters: pulsed(widthS, 0.0123), settings }).levelsDbm[0]) - db)
+		).toBeLessThan(0.1);
 	});
 
 	it('rises 20 dB for ten times the resolution bandwidth', () => {
@@ -47,7 +73,15 @@ describe('pulse mode: repetition rate far below RBW, RBW far below 1/width', () 
 			peakOf(
 				sweep({
 					emitters: pulsed(1e-6, 0.01),
-					settings: { centreHz: 2.9e9, spanHz: 0, rbwHz, vbwHz: 100e6, sweepTimeS: 1, points: 101, detector: 'positive-peak' }
+					settings: {
+						centreHz: 2.9e9,
+						spanHz: 0,
+						rbwHz,
+						vbwHz: 100e6,
+						sweepTimeS: 1,
+						points: 101,
+						detector: 'positive-peak'
+					}
 				}).levelsDbm[0]
 			);
 		expect(at(100e3) - at(10e3)).toBeCloseTo(20, 0);
@@ -57,7 +91,15 @@ describe('pulse mode: repetition rate far below RBW, RBW far below 1/width', () 
 describe('span 0 with RBW of at least 2/width (J5)', () => {
 	const row = sweep({
 		emitters: pulsed(10e-6, 100e-6),
-		settings: { centreHz: 2.9e9, spanHz: 0, rbwHz: 1e6, vbwHz: 100e6, sweepTimeS: 0.001, points: 10001, detector: 'sample' }
+		settings: {
+			centreHz: 2.9e9,
+			spanHz: 0,
+			rbwHz: 1e6,
+			vbwHz: 100e6,
+			sweepTimeS: 0.001,
+			points: 10001,
+			detector: 'sample'
+		}
 	}).levelsDbm[0];
 	const volts = row.map((l) => 10 ** (l / 20));
 	const rises = volts.flatMap((v, i) => (i > 0 && volts[i - 1] < 0.5 && v >= 0.5 ? [i] : []));

@@ -63,7 +63,12 @@ export function statistic(result: SweptRows, expected: Expectation): number {
 				})
 			);
 		case 'total-power':
-			return 10 * Math.log10(mean(rows.map((row) => row.reduce((sum, l) => sum + mw(l), 0) * step)) / expected.noiseBandwidthHz!);
+			return (
+				10 *
+				Math.log10(
+					mean(rows.map((row) => row.reduce((sum, l) => sum + mw(l), 0) * step)) / expected.noiseBandwidthHz!
+				)
+			);
 		default:
 			throw new Error(`unknown statistic ${expected.stat}`);
 	}

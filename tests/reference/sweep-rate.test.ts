@@ -44,7 +44,15 @@ describe('a line swept at r = S/(T·B²)', () => {
 	});
 
 	it('has no frequency shift: a Gaussian filter without delay peaks where the line is', () => {
-		const settings = { centreHz: 1e9, spanHz, rbwHz, vbwHz: 10e6, sweepTimeS: 0.002, points: 8001, detector: 'sample' as const };
+		const settings = {
+			centreHz: 1e9,
+			spanHz,
+			rbwHz,
+			vbwHz: 10e6,
+			sweepTimeS: 0.002,
+			points: 8001,
+			detector: 'sample' as const
+		};
 		const row = sweep({ emitters: [{ kind: 'cw', frequencyHz: 1e9, levelDbm: -20 }], settings }).levelsDbm[0];
 		expect(row.indexOf(Math.max(...row))).toBeCloseTo(4000, -1);
 	});

@@ -23,7 +23,9 @@ describe.each(vectors)('vector $name', ({ input, expect: expectations }) => {
 		const result = sweepCommand({ ...input, seed });
 		for (const expected of expectations) {
 			const where = `${expected.stat} ${expected.fromHz ?? ''} from ${expected.from}`;
-			expect(Math.abs(statistic(result, expected) - expected.value), where).toBeLessThanOrEqual(expected.tolerance);
+			expect(Math.abs(statistic(result, expected) - expected.value), where).toBeLessThanOrEqual(
+				expected.tolerance
+			);
 		}
 	});
 });

@@ -21,7 +21,11 @@ const bench = {
 export const sweepInput = z.strictObject({ ...bench, sweeps: z.int().min(1).max(100_000).default(1) });
 export const readInput = z.strictObject({ trace, reading: readingRequest });
 /** A frequency count is taken at the receiver, not off a trace: it needs the bench. */
-export const countInput = z.strictObject({ ...bench, sweeps: z.int().min(1).max(100_000).default(1), reading: countRequest });
+export const countInput = z.strictObject({
+	...bench,
+	sweeps: z.int().min(1).max(100_000).default(1),
+	reading: countRequest
+});
 export const truthInput = z.strictObject({ scene, quantity });
 
 export type SweepInput = z.infer<typeof sweepInput>;

@@ -14,12 +14,21 @@ const moments = (values: Float64Array) => {
 	const variance = central(2);
 	let lag = 0;
 	for (let i = 1; i < N; i++) lag += (values[i] - mean) * (values[i - 1] - mean);
-	return { mean, variance, skew: central(3) / variance ** 1.5, kurtosis: central(4) / variance ** 2 - 3, lag1: lag / N / variance };
+	return {
+		mean,
+		variance,
+		skew: central(3) / variance ** 1.5,
+		kurtosis: central(4) / variance ** 2 - 3,
+		lag1: lag / N / variance
+	};
 };
 /** Kolmogorov–Smirnov distance of the first 10 000 draws; 1 % point for n = 10 000 is 0.016259 (scipy kstwo, computed). */
 const kolmogorov = (values: Float64Array, cdf: (x: number) => number): number => {
 	const sorted = values.slice(0, 10_000).sort();
-	return sorted.reduce((d, x, i) => Math.max(d, Math.abs(cdf(x) - i / 1e4), Math.abs(cdf(x) - (i + 1) / 1e4)), 0);
+	return sorted.reduce(
+		(d, x, i) => Math.max(d, Math.abs(cdf(x) - i / 1e4), Math.abs(cdf(x) - (i + 1) / 1e4)),
+		0
+	);
 };
 
 describe('Random', () => {
@@ -69,7 +78,12 @@ describe('Random', () => {
 		const phase = re.map((x, i) => Math.atan2(im[i], x) / (2 * Math.PI) + 0.5);
 		expect(kolmogorov(power, (x) => 1 - Math.exp(-x))).toBeLessThan(0.016259);
 		expect(kolmogorov(phase, (x) => x)).toBeLessThan(0.016259);
-		expect(kolmogorov(draw((r) => r.exponential()), (x) => 1 - Math.exp(-x))).toBeLessThan(0.016259);
+		expect(
+			kolmogorov(
+				draw((r) => r.exponential()),
+				(x) => 1 - Math.exp(-x)
+			)
+		).toBeLessThan(0.016259);
 	});
 
 	it('spreads uniforms over 256 bins: chi-square between the 0.1 % and 99.9 % points (N6)', () => {

@@ -7,7 +7,8 @@ import { prepareSweep } from '../receiver/sweep';
 import { parseInput } from './parse-input';
 
 /** Levels to 10⁻⁴ dB: finer than any spread, and short to read. */
-const rounded = (levels: ArrayLike<number>): number[] => Array.from(levels, (level) => Math.round(level * 1e4) / 1e4);
+const rounded = (levels: ArrayLike<number>): number[] =>
+	Array.from(levels, (level) => Math.round(level * 1e4) / 1e4);
 
 export const profileOf = (receiver: SweepInput['receiver']): ReceiverProfile =>
 	typeof receiver === 'string' ? profileNamed(receiver) : receiver;

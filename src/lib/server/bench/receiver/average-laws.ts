@@ -34,7 +34,13 @@ export function varianceOnScale(v: number, p: number, scale: Scale, bt: number):
 }
 
 /** One average of the given mean and variance. Power and voltage are gamma; the log's skew is that of a gamma of 3.08·n values turned round. */
-export function drawAverage(random: Random, mean: number, variance: number, scale: Scale, bt: number): number {
+export function drawAverage(
+	random: Random,
+	mean: number,
+	variance: number,
+	scale: Scale,
+	bt: number
+): number {
 	if (variance <= 0) return mean;
 	if (scale === 'log') {
 		const a = 3.08 * LOG_PER_BT * bt;

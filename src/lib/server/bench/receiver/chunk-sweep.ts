@@ -56,7 +56,13 @@ export class ChunkSweep {
 			bucketS: this.chunkS,
 			startHz: frame.startHz - frame.sweepHzPerS * this.lead * this.chunkS
 		};
-		this.conditions = new LongBucketConditions({ ...chunkFrame, vbwHz: Infinity }, incident, scale, seed, false);
+		this.conditions = new LongBucketConditions(
+			{ ...chunkFrame, vbwHz: Infinity },
+			incident,
+			scale,
+			seed,
+			false
+		);
 		this.video = new Float64Array(chunks);
 	}
 

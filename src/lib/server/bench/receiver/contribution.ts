@@ -21,7 +21,8 @@ export function reachIndexes(
 	passingHzPerS: number,
 	reachHz: number
 ): { from: number; to: number } {
-	if (passingHzPerS === 0) return Math.abs(offsetHz) <= reachHz ? { from: 0, to: frame.total } : { from: 0, to: 0 };
+	if (passingHzPerS === 0)
+		return Math.abs(offsetHz) <= reachHz ? { from: 0, to: frame.total } : { from: 0, to: 0 };
 	const a = (offsetHz - reachHz) / passingHzPerS / frame.stepS + frame.lead;
 	const b = (offsetHz + reachHz) / passingHzPerS / frame.stepS + frame.lead;
 	const from = Math.max(0, Math.ceil(Math.min(a, b)));

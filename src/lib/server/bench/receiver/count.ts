@@ -59,7 +59,11 @@ export function countFrequency(
 	};
 	const incident = prepareIncident(scene, profile, tuned, seed);
 	if (incident.protection)
-		return { kind: 'count', problem: 'the input has protected itself', needs: 'less level at the connector, then a reset' };
+		return {
+			kind: 'count',
+			problem: 'the input has protected itself',
+			needs: 'less level at the connector, then a reset'
+		};
 	const tunedHz = request.atHz / (1 + error.frequency);
 	const lines = linesInside(incident, tuned, error.frequency, seed, clockS, request.gateS);
 	const noiseMw = noiseInside(incident, tunedHz, settings.rbwHz);
@@ -70,12 +74,24 @@ export function countFrequency(
 			problem: `no single line stands ${LEAST_SNR_DB} dB above its surroundings here`,
 			needs: 'a narrower resolution bandwidth, or another place'
 		};
-	const offsetHz = regress(main, lines, noiseMw, settings.rbwHz, request.gateS, new Random(seed, row, 'count'));
+	const offsetHz = regress(
+		main,
+		lines,
+		noiseMw,
+		settings.rbwHz,
+		request.gateS,
+		new Random(seed, row, 'count')
+	);
 	const snr = main.powerMw / noiseMw;
 	const beside = lines.reduce((sum, line) => sum + line.powerMw, 0) - main.powerMw;
 	const remarks =
 		beside > main.powerMw / 100
-			? [{ code: 'other-carrier-inside', text: 'Another carrier stands inside the resolution bandwidth: narrow it to count one alone.' }]
+			? [
+					{
+						code: 'other-carrier-inside',
+						text: 'Another carrier stands inside the resolution bandwidth: narrow it to count one alone.'
+					}
+				]
 			: [];
 	return {
 		kind: 'count',
@@ -128,7 +144,12 @@ function linesInside(
 function noiseInside(incident: Incident, tunedHz: number, rbwHz: number): number {
 	const noise = incident.noises.reduce((sum, n) => sum + n.variance(tunedHz), 0);
 	return incident.envelopes.reduce((sum, e) => {
-		const half = 'symbolRateHz' in e.emitter ? e.emitter.symbolRateHz : 'bitRateHz' in e.emitter ? e.emitter.bitRateHz : 0;
+		const half =
+			'symbolRateHz' in e.emitter
+				? e.emitter.symbolRateHz
+				: 'bitRateHz' in e.emitter
+					? e.emitter.bitRateHz
+					: 0;
 		return Math.abs(e.frequencyHz - tunedHz) < rbwHz + half ? sum + e.re * e.re + e.im * e.im : sum;
 	}, noise);
 }
@@ -159,9 +180,7 @@ function regress(
 		for (const line of lines) {
 			if (!line.isOn(t)) continue;
 			const beat =
-				line === main
-					? 0
-					: turns((line.offsetHz - main.offsetHz) * t) + line.phaseRad - main.phaseRad;
+				line === main ? 0 : turns((line.offsetHz - main.offsetHz) * t) + line.phaseRad - main.phaseRad;
 			const bend = Math.PI * line.driftHzPerS * t * t;
 			const a = Math.sqrt(line.powerMw / main.powerMw);
 			x += a * Math.cos(beat + bend);

@@ -38,7 +38,8 @@ export function detectPeaks(
 	const { points, perBucket: m, lead } = frame;
 	for (let b = 0, start = lead; b < points; b++, start += m) {
 		const greatest =
-			detector === 'positive-peak' || (detector === 'rise-fall' && (b % 2 === 0 || isMonotonic(video, start, m)));
+			detector === 'positive-peak' ||
+			(detector === 'rise-fall' && (b % 2 === 0 || isMonotonic(video, start, m)));
 		out[b] = greatest ? find.greatest(start, m) : find.least(start, m);
 	}
 }

@@ -37,10 +37,16 @@ export function makeEngine(
 	const peaks = detector !== 'average' && detector !== 'sample';
 	const perBucket = samplesPerBucket(rbwHz, bucketS, peaks);
 	const needsWaveform =
-		incident.envelopes.some((e) => e.emitter.kind === 'digital' || e.emitter.kind === 'msk') && perBucket * points <= MOST_ENVELOPE_SAMPLES;
+		incident.envelopes.some((e) => e.emitter.kind === 'digital' || e.emitter.kind === 'msk') &&
+		perBucket * points <= MOST_ENVELOPE_SAMPLES;
 	if (bt <= LONG_BUCKET || needsWaveform) {
 		const video = videoKind(vbwHz, rbwHz);
-		const frame = makeFrame(settings, frequencyError, perBucket, video === 'wide' ? 0 : sampledRunInS(vbwHz, rbwHz));
+		const frame = makeFrame(
+			settings,
+			frequencyError,
+			perBucket,
+			video === 'wide' ? 0 : sampledRunInS(vbwHz, rbwHz)
+		);
 		return new SampledSweep(frame, detector, scale, contributions(incident, frame, seed));
 	}
 	const frame = makeFrame(settings, frequencyError, 2, 0);
@@ -52,7 +58,9 @@ export function makeEngine(
 
 function contributions(incident: Incident, frame: Frame, seed: Seed): Contribution[] {
 	const noises = incident.noises.map((noise, i) =>
-		noise.timing ? new TimedNoise(noise, frame, seed, `noise/${i}`) : new SteadyNoise(noise, frame, `noise/${i}`)
+		noise.timing
+			? new TimedNoise(noise, frame, seed, `noise/${i}`)
+			: new SteadyNoise(noise, frame, `noise/${i}`)
 	);
 	const floorMw = leastVariance(incident, frame);
 	return [
@@ -77,6 +85,9 @@ function leastVariance(incident: Incident, frame: Frame): number {
 	let least = Infinity;
 	const step = Math.max(1, Math.floor(frame.total / 64));
 	for (let i = 0; i < frame.total; i += step)
-		least = Math.min(least, steady.reduce((sum, n) => sum + n.variance(tunedHz(frame, i)), 0));
+		least = Math.min(
+			least,
+			steady.reduce((sum, n) => sum + n.variance(tunedHz(frame, i)), 0)
+		);
 	return least;
 }

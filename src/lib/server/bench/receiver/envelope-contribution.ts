@@ -35,7 +35,9 @@ export class EnvelopeContribution implements Contribution {
 		const stepS = frame.stepS / this.fine;
 		this.half = Math.ceil(CUT_RBW / frame.rbwHz / stepS);
 		const decay = (Math.PI * Math.PI) / frame.c;
-		const taps = Float64Array.from({ length: 2 * this.half + 1 }, (_, j) => Math.exp(-decay * ((j - this.half) * stepS) ** 2));
+		const taps = Float64Array.from({ length: 2 * this.half + 1 }, (_, j) =>
+			Math.exp(-decay * ((j - this.half) * stepS) ** 2)
+		);
 		const sum = taps.reduce((a, b) => a + b, 0);
 		this.taps = taps.map((g) => g / sum);
 	}

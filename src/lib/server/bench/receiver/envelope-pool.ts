@@ -40,7 +40,8 @@ export class EnvelopePool {
 		seed: Seed
 	) {
 		const { emitter, timing } = envelope;
-		const rateHz = emitter.kind === 'digital' ? emitter.symbolRateHz : emitter.kind === 'msk' ? emitter.bitRateHz : 0;
+		const rateHz =
+			emitter.kind === 'digital' ? emitter.symbolRateHz : emitter.kind === 'msk' ? emitter.bitRateHz : 0;
 		this.halfWidthHz = 1.5 * rateHz + REACH_RBW * frame.rbwHz;
 		this.ratePerS = Math.min(frame.rbwHz, rateHz);
 		if (timing && (timing.gate || timing.hop)) this.schedule = new Schedule(timing, seed);
@@ -94,7 +95,11 @@ export class EnvelopePool {
 	/** The power it shows as often above as below, for places where an extreme must not be drawn twice. */
 	typical(t: number): number {
 		const seen = this.seenAt(t);
-		return seen ? Math.sqrt(seen.greatest[seen.greatest.length >> 1] * Math.max(1e-30, seen.least[seen.least.length >> 1])) : 0;
+		return seen
+			? Math.sqrt(
+					seen.greatest[seen.greatest.length >> 1] * Math.max(1e-30, seen.least[seen.least.length >> 1])
+				)
+			: 0;
 	}
 
 	/** Greatest (or least) power over a stretch of lengthS about t: of as many blocks as it holds. */

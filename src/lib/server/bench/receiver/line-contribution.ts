@@ -17,7 +17,10 @@ export function reachHz(frame: Frame, powerMw: number, floorMw: number, passingH
 	const ratio = (NEGLIGIBLE * floorMw) / powerMw;
 	if (ratio >= 1) return 0;
 	const chirp = (frame.c * passingHzPerS) / Math.PI;
-	return Math.min(lineReachHz(frame.c, chirp, ratio), FARTHEST_RBW * frame.rbwHz * Math.sqrt(1 + chirp * chirp));
+	return Math.min(
+		lineReachHz(frame.c, chirp, ratio),
+		FARTHEST_RBW * frame.rbwHz * Math.sqrt(1 + chirp * chirp)
+	);
 }
 
 /** The line as a sweep that starts at the row's clock meets it; phases are relative to the tuned start, common to all. */
@@ -69,8 +72,16 @@ export class LineContribution implements Contribution {
 			);
 	}
 
-	private addStretch(line: PassingLine, startS: number, stopS: number, frame: Frame, re: Float64Array, im: Float64Array) {
-		const reach = reachHz(frame, this.powerMw, this.floorMw, line.passingHzPerS) + spreadHz(startS, stopS, frame);
+	private addStretch(
+		line: PassingLine,
+		startS: number,
+		stopS: number,
+		frame: Frame,
+		re: Float64Array,
+		im: Float64Array
+	) {
+		const reach =
+			reachHz(frame, this.powerMw, this.floorMw, line.passingHzPerS) + spreadHz(startS, stopS, frame);
 		if (reach === 0) return;
 		const { from, to } = reachIndexes(frame, line.offsetHz, line.passingHzPerS, reach);
 		if (to <= from) return;

@@ -22,7 +22,13 @@ export interface Window {
 }
 
 /** Average on the scale: the law's draw over the pieces, the windows as they were. */
-export function averageOf(pieces: Piece[], windows: Window[], bt: number, scale: Scale, random: Random): number {
+export function averageOf(
+	pieces: Piece[],
+	windows: Window[],
+	bt: number,
+	scale: Scale,
+	random: Random
+): number {
 	let mean = 0;
 	let variance = 0;
 	let share = 0;
@@ -57,7 +63,11 @@ export function extremeOf(
 	const active = strongest(pieces, greatest);
 	if (greatest)
 		return Math.exp(
-			solveLog((x) => sum(active, (q) => logBelow(x / q.v, q.p / q.v, bt * q.share)), -draw, Math.log(active[0].v + active[0].p))
+			solveLog(
+				(x) => sum(active, (q) => logBelow(x / q.v, q.p / q.v, bt * q.share)),
+				-draw,
+				Math.log(active[0].v + active[0].p)
+			)
 		);
 	// −ln P(least > x) rises with x; its inverse is what the solver expects to fall
 	return Math.exp(
@@ -82,7 +92,9 @@ const sum = (pieces: Piece[], f: (piece: Piece) => number): number => {
 function strongest(pieces: Piece[], greatest: boolean): Piece[] {
 	const level = (q: Piece): number => (greatest ? q.v * 8 + q.p : -(q.v + q.p));
 	const sorted = [...pieces].sort((a, b) => level(b) - level(a));
-	const kept = greatest ? sorted.filter((q) => q.v * 8 + q.p > 0.01 * (sorted[0].v * 8 + sorted[0].p)) : sorted;
+	const kept = greatest
+		? sorted.filter((q) => q.v * 8 + q.p > 0.01 * (sorted[0].v * 8 + sorted[0].p))
+		: sorted;
 	if (kept.length <= MOST_PIECES) return kept;
 	// the dropped ones' time is given to the kept ones in proportion
 	const top = kept.slice(0, MOST_PIECES);

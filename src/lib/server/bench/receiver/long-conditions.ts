@@ -44,7 +44,10 @@ export class LongBucketConditions {
 	) {
 		const comesAndGoes = (t: IncidentLine['timing']): boolean => !!t && !!(t.gate || t.hop || t.pulse);
 		this.steady = incident.lines.filter((l) => !comesAndGoes(l.timing));
-		const inner = new InnerSkirts(frame, this.steady.filter((l) => !l.timing));
+		const inner = new InnerSkirts(
+			frame,
+			this.steady.filter((l) => !l.timing)
+		);
 		this.noise = new SteadyNoiseTable(frame, [
 			...incident.noises.filter((n) => !n.timing),
 			{ variance: (tunedHz) => inner.at(tunedHz) }
@@ -106,7 +109,8 @@ export class LongBucketConditions {
 		const fixed = (t: number): number => {
 			out.fill(0);
 			for (const line of lines) addLineAt(frame, line, t, out);
-			for (const burst of long) if (t >= burst.startS && t < burst.stopS) addLineAt(frame, burst.line, t, out);
+			for (const burst of long)
+				if (t >= burst.startS && t < burst.stopS) addLineAt(frame, burst.line, t, out);
 			let v = this.noise.at(t);
 			for (const s of stretches)
 				if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);
@@ -178,7 +182,8 @@ export class LongBucketConditions {
 		for (const burst of bursts) {
 			const middle = (burst.startS + burst.stopS) / 2;
 			if (this.isShort(burst)) {
-				if (middle >= fromS && middle < toS) spans.push({ startS: burst.startS - half, stopS: burst.stopS + half });
+				if (middle >= fromS && middle < toS)
+					spans.push({ startS: burst.startS - half, stopS: burst.stopS + half });
 			} else if (this.followsEdges)
 				for (const edge of [burst.startS, burst.stopS])
 					if (edge >= fromS && edge < toS) spans.push({ startS: edge - half, stopS: edge + half });
@@ -192,7 +197,10 @@ export class LongBucketConditions {
 				spans[i].startS = spans[i - 1].stopS = between;
 			}
 		const step = Math.max(1, spans.length / MOST_WINDOWS);
-		const chosen = Array.from({ length: Math.min(spans.length, MOST_WINDOWS) }, (_, i) => spans[Math.floor(i * step)]);
+		const chosen = Array.from(
+			{ length: Math.min(spans.length, MOST_WINDOWS) },
+			(_, i) => spans[Math.floor(i * step)]
+		);
 		const all = spans.reduce((sum, s) => sum + s.stopS - s.startS, 0);
 		const taken = chosen.reduce((sum, s) => sum + s.stopS - s.startS, 0);
 		const scale = Math.min(all, frame.bucketS) / taken / frame.bucketS;

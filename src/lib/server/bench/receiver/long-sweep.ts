@@ -75,7 +75,17 @@ export class LongSweep {
 			const trim = free > 0 ? Math.max(0, free - 1 / this.bt) / free : 0;
 			for (const piece of pieces) piece.share *= trim;
 			windows.push(edges!.window(b));
-			out[b] = peakOf(b, this.detector, this.scale, pieces, windows, this.bt, this.table, this.smoothing, random);
+			out[b] = peakOf(
+				b,
+				this.detector,
+				this.scale,
+				pieces,
+				windows,
+				this.bt,
+				this.table,
+				this.smoothing,
+				random
+			);
 		}
 	}
 }

@@ -5,7 +5,8 @@ import type { IncidentEnvelope } from './incident';
 import { MovingLine } from './moving-line';
 import type { Random, Seed } from './random';
 
-const isWaveform = ({ emitter }: IncidentEnvelope): boolean => emitter.kind === 'digital' || emitter.kind === 'msk';
+const isWaveform = ({ emitter }: IncidentEnvelope): boolean =>
+	emitter.kind === 'digital' || emitter.kind === 'msk';
 
 export class ModulatedSources {
 	private readonly movers: MovingLine[];

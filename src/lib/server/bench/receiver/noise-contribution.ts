@@ -49,7 +49,10 @@ export class TimedNoise implements Contribution {
 		const edgeS = 2 / frame.rbwHz;
 		this.amplitude.fill(0);
 		const driftHz = (this.noise.timing!.driftHzPerS ?? 0) * row.clockS;
-		const on = this.schedule.stretches(row.clockS + from - edgeS, row.clockS + (total - lead) * stepS + edgeS);
+		const on = this.schedule.stretches(
+			row.clockS + from - edgeS,
+			row.clockS + (total - lead) * stepS + edgeS
+		);
 		for (const stretch of on) {
 			const steady = this.channelAmplitude(frame, (stretch.channelHz ?? this.noise.centreHz ?? 0) + driftHz);
 			const a = stretch.startS - row.clockS;

@@ -22,6 +22,7 @@ export function drawReceiverError(profile: ReceiverProfile, seed: Seed): Receive
 	return {
 		frequency,
 		levelDb: (frequencyHz) =>
-			profile.levelErrorDb * (fixed + wave * Math.sin(2 * Math.PI * Math.log10(Math.max(frequencyHz, 1) / 1e6) + phase))
+			profile.levelErrorDb *
+			(fixed + wave * Math.sin(2 * Math.PI * Math.log10(Math.max(frequencyHz, 1) / 1e6) + phase))
 	};
 }

@@ -55,4 +55,3 @@ export class SampledSweep {
 		else detectPeaks(frame, detector, video, videoPeaks(video), out);
 	}
 }
-

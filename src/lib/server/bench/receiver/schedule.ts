@@ -82,7 +82,7 @@ function periodic(startS: number, onS: number, periodS: number, fromS: number, t
 /** Overlaps of two ordered lists. */
 function intersect(a: OnStretch[], b: OnStretch[]): OnStretch[] {
 	const list: OnStretch[] = [];
-	for (let i = 0, j = 0; i < a.length && j < b.length; ) {
+	for (let i = 0, j = 0; i < a.length && j < b.length;) {
 		const startS = Math.max(a[i].startS, b[j].startS);
 		const stopS = Math.min(a[i].stopS, b[j].stopS);
 		if (stopS > startS) list.push({ startS, stopS, channelHz: a[i].channelHz ?? b[j].channelHz });

@@ -62,7 +62,10 @@ function sweepFlags(incident: Incident, settings: ResolvedSettings): SweepFlag[]
 	}
 	if (incident.overload) flags.push({ kind: 'overload' });
 	if (incident.protection)
-		flags.push({ kind: 'input-protection', db: incident.protection.connectorDbm - incident.protection.limitDbm });
+		flags.push({
+			kind: 'input-protection',
+			db: incident.protection.connectorDbm - incident.protection.limitDbm
+		});
 	return flags;
 }
 

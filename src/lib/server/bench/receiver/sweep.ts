@@ -14,5 +14,10 @@ export function prepareSweep(
 	settings: ResolvedSettings,
 	seed: Seed
 ): SweepPlan {
-	return planSweep(prepareIncident(scene, profile, settings, seed), settings, drawReceiverError(profile, seed), seed);
+	return planSweep(
+		prepareIncident(scene, profile, settings, seed),
+		settings,
+		drawReceiverError(profile, seed),
+		seed
+	);
 }

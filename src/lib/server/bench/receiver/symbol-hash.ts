@@ -7,7 +7,9 @@ export class SymbolHash {
 	private readonly b: number;
 
 	constructor(seed: Seed, emitter: number) {
-		[this.a, this.b] = hash128(`${ENGINE_VERSION}|${typeof seed === 'number' ? 'n' : 's'}${seed}|symbols/${emitter}`);
+		[this.a, this.b] = hash128(
+			`${ENGINE_VERSION}|${typeof seed === 'number' ? 'n' : 's'}${seed}|symbols/${emitter}`
+		);
 	}
 
 	/** 32 random bits for symbol number k (a whole number up to 2⁵³). Two rounds of the murmur finaliser over key and number. */

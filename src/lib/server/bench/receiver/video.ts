@@ -9,7 +9,8 @@ export const LEAST_POWER_MW = 1e-40;
 /** Power in mW of each sample put on the scale: ln p, p or √p. In place. */
 export function toScale(power: Float64Array, scale: Scale, from: number, to: number): void {
 	if (scale === 'log')
-		for (let i = from; i < to; i++) power[i] = Math.log(power[i] > LEAST_POWER_MW ? power[i] : LEAST_POWER_MW);
+		for (let i = from; i < to; i++)
+			power[i] = Math.log(power[i] > LEAST_POWER_MW ? power[i] : LEAST_POWER_MW);
 	else if (scale === 'voltage') for (let i = from; i < to; i++) power[i] = Math.sqrt(power[i]);
 }
 
@@ -37,7 +38,13 @@ export const videoRunInS = (vbwHz: number): number => 6 / (2 * Math.PI * vbwHz);
 /**
  * One-pole low-pass with −3 dB at vbwHz, exact for a video that is straight between samples. In place; the state starts at `start`.
  */
-export function onePole(video: Float64Array, vbwHz: number, stepS: number, total: number, start: number): void {
+export function onePole(
+	video: Float64Array,
+	vbwHz: number,
+	stepS: number,
+	total: number,
+	start: number
+): void {
 	const tau = 1 / (2 * Math.PI * vbwHz);
 	const keep = Math.exp(-stepS / tau);
 	const blend = ((1 - keep) * tau) / stepS;
