@@ -1,7 +1,6 @@
 /** A trace as it crosses the wire: what the command line's `read` takes. */
 import { z } from 'zod';
 import { finite, frequency, positive } from './number';
-import { readingRequest } from './reading';
 import { correctionTable, detectors, scales, traceModes } from './settings';
 
 export const trace = z
@@ -23,7 +22,4 @@ export const trace = z
 		path: ['stopHz']
 	});
 
-export const readCommand = z.strictObject({ trace, reading: readingRequest });
-
 export type TraceInput = z.infer<typeof trace>;
-export type ReadCommand = z.infer<typeof readCommand>;

@@ -1,8 +1,11 @@
 import fc from 'fast-check';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { besselOrders } from '$lib/measure/bessel';
 import { buildLines, buildNoise, buildTrace, overSeeds } from '../../factories/trace';
 import { codesOf, problemOf, readOff } from '../../factories/reading';
+
+// Many seeds: seconds on a busy machine.
+vi.setConfig({ testTimeout: 30_000 });
 
 const carrierHz = 100e6;
 const dbOf = (ratio: number) => 20 * Math.log10(Math.max(1e-12, Math.abs(ratio)));

@@ -1,9 +1,12 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { averageSpreadDb, independentLag, isAveraged, noiseSpreadDb } from '$lib/measure/noise-statistics';
 import { noiseShare } from '$lib/measure/noise-share';
 import type { Trace } from '$lib/measure/trace';
 import { buildLines, buildNoise, buildTrace, overSeeds } from '../../factories/trace';
 import { readOff } from '../../factories/reading';
+
+// Many seeds: seconds on a busy machine.
+vi.setConfig({ testTimeout: 30_000 });
 
 const settings: Partial<Trace>[] = [
 	{ detector: 'sample', scale: 'log' },

@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import type { Trace } from '$lib/measure/trace';
 import {
 	buildDensity,
@@ -10,6 +10,9 @@ import {
 	raisedCosineDensity
 } from '../../factories/trace';
 import { codesOf, problemOf, readOff } from '../../factories/reading';
+
+// Many seeds: seconds on a busy machine.
+vi.setConfig({ testTimeout: 30_000 });
 
 const channel = { kind: 'channel-power', centreHz: 100e6, widthHz: 0.4e6 } as const;
 const zeroSpan = buildTrace({ startHz: 100e6, stopHz: 100e6, sweepTimeS: 1e-3 }, () => -50);

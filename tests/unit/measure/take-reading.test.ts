@@ -1,10 +1,13 @@
 import fc from 'fast-check';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { readers } from '$lib/measure/readers';
 import type { ReadingRequest } from '$lib/measure/reading-request';
 import { takeReading } from '$lib/measure/take-reading';
 import type { Trace } from '$lib/measure/trace';
 import { buildNoise, buildTrace } from '../../factories/trace';
+
+// Many seeds: seconds on a busy machine.
+vi.setConfig({ testTimeout: 30_000 });
 
 const requests: ReadingRequest[] = [
 	{ kind: 'marker', atHz: 100e6 },
