@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { nextInSeries, nextOf, stepValue } from '$lib/components/bench/setup/step-value';
+import { nextInSeries, nextOf, stepProblem, stepValue } from '$lib/components/bench/setup/step-value';
 import type { ReceiverView } from '$lib/schemas/exercise-view';
 import { resolved } from './resolved-settings';
 
@@ -33,5 +33,16 @@ describe('stepValue(field, resolved, receiver, up, fine)', () => {
 	it('moves the reference by 10 dB, finely by one', () => {
 		expect(stepValue('referenceDbm', resolved, receiver, false)).toBe(-10);
 		expect(stepValue('referenceDbm', resolved, receiver, false, true)).toBe(-1);
+	});
+});
+
+describe('stepProblem(value, steps, write)', () => {
+	const say = (value: number) => stepProblem(value, [100, 300, 1000], (step) => `${step} Hz`);
+	it('is nothing for a step', () => expect(say(300)).toBeUndefined());
+	it('names the two steps a value lies between', () =>
+		expect(say(200)).toBe('This receiver has 100 Hz and 300 Hz, nothing between.'));
+	it('names the end a value lies beyond', () => {
+		expect(say(10)).toBe('The least this receiver has is 100 Hz.');
+		expect(say(3000)).toBe('The most this receiver has is 1000 Hz.');
 	});
 });

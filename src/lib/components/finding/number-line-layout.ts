@@ -24,6 +24,9 @@ export interface NumberLineLayout {
 
 const characterPx = 6.4;
 const sidePx = 14;
+/** The learner's own, the true one and the mistake made are set bolder, and so wider. */
+const labelPx = ({ label, role, matched }: Mark) =>
+	label.length * (role === 'mistake' && !matched ? characterPx : characterPx * 1.1);
 
 /**
  * Lays marks out over `width` px. The learner's number and the truth stand in the row next above the axis; mistakes
@@ -42,7 +45,7 @@ export function numberLineLayout(marks: readonly Mark[], width: number): NumberL
 	for (const row of [-2, -1, 1, 2] as const) {
 		const members = placed.filter((mark) => mark.row === row);
 		const middles = spreadLabels(
-			members.map((mark) => ({ at: mark.x, size: mark.label.length * characterPx })),
+			members.map((mark) => ({ at: mark.x, size: labelPx(mark) })),
 			{ from: 0, to: width },
 			10
 		);

@@ -3,8 +3,8 @@ import type { Detector, Scale, TraceMode } from '$lib/schemas/settings';
 
 export const detectorWords: Record<Detector, string> = {
 	'rise-fall': 'rise and fall',
-	'positive-peak': 'peak',
-	'negative-peak': 'minimum',
+	'positive-peak': 'positive peak',
+	'negative-peak': 'negative peak',
 	sample: 'sample',
 	average: 'average'
 };

@@ -72,3 +72,17 @@ export function stepValue(
 		}
 	}
 }
+
+/** Why a value is none of the receiver's steps: the two it lies between, or the end it lies beyond. Undefined for a step. */
+export function stepProblem(
+	value: number,
+	steps: readonly number[],
+	write: (step: number) => string
+): string | undefined {
+	if (steps.includes(value)) return undefined;
+	const below = steps.filter((step) => step < value);
+	const above = steps.filter((step) => step > value);
+	if (below.length === 0) return `The least this receiver has is ${write(Math.min(...above))}.`;
+	if (above.length === 0) return `The most this receiver has is ${write(Math.max(...below))}.`;
+	return `This receiver has ${write(Math.max(...below))} and ${write(Math.min(...above))}, nothing between.`;
+}

@@ -183,6 +183,19 @@ export class Bench {
 		this.answers.attach(questionId, id);
 	}
 
+	/**
+	 * Hands the answers in, with the receiver at rest, so that everything drawn is told first. A refusal sets it going again.
+	 * @returns true when they were taken
+	 */
+	async handIn(): Promise<boolean> {
+		const running = this.run.running;
+		this.run.stop();
+		await this.run.settleAcknowledgement().catch(() => undefined);
+		const taken = await this.answers.handIn();
+		if (!taken && running) await this.start();
+		return taken;
+	}
+
 	async nextHint(): Promise<void> {
 		const { hint } = await this.wire.nextHint();
 		this.hints = [...this.hints, hint];
