@@ -1,7 +1,7 @@
 import type { ProofRow, ProofTable } from '$lib/server/bench/proof/proof-table';
 
 const percent = (share: number): string => `${(100 * share).toFixed(1)} %`;
-const HEADS = ['question', 'done by', 'passes', 'named', 'mean error', 'scatter', 'edge', ''];
+const HEADS = ['question', 'done by', 'passes', 'named', 'mean error', 'bias', 'scatter', 'edge', ''];
 
 const cells = (row: ProofRow): string[] => [
 	row.question,
@@ -9,6 +9,7 @@ const cells = (row: ProofRow): string[] => [
 	percent(row.passShare),
 	row.mistake === null ? 'faultless '.concat(percent(row.namedShare)) : percent(row.namedShare),
 	row.meanError.toFixed(2),
+	row.mistake === null ? row.bias.toFixed(2) : '',
 	row.scatter.toFixed(2),
 	row.edgeError.toFixed(2),
 	row.failures.length > 0 ? 'FAILS' : 'ok'

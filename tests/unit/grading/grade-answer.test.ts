@@ -224,6 +224,11 @@ describe('gradeAnswer on everything else', () => {
 		]);
 	});
 
+	it('takes no reading of rows that nobody swept for evidence', () => {
+		const [finding] = grade({ ...taught.record, log: [] }).questions;
+		expect(finding.remarks.map(({ code }) => code)).toEqual(['no-evidence']);
+	});
+
 	it('judges an attempt in which nothing was swept', () => {
 		const finding = grade({ log: [], readings: [], answers: { [power.id]: { value: -50 } } });
 		expect(finding.questions[0].verdict).toBe('wrong');

@@ -42,6 +42,7 @@ describe('proofTable(exercise, fromSeed, proofs, tolerances)', () => {
 		question: 'q',
 		mistake: null,
 		error,
+		bias: error,
 		spread: 0.1,
 		passes: Math.abs(error) <= 1,
 		named: true

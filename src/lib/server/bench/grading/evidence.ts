@@ -56,14 +56,16 @@ function sourceOf(
 	drawn: DrawnExercise,
 	question: DrawnQuestion,
 	record: AttemptRecord
-): Source {
+): Source[] {
 	const entry = record.log.findLastIndex(({ firstRow, sweeps }) => firstRow <= taken.rows.to && sweeps > 0);
+	// Rows that no set-up swept are nobody's evidence.
+	if (entry < 0) return [];
 	const resolved = resolveSettings(record.log[entry].settings, drawn.profile);
 	const trace = resolved.traces[taken.trace - 1] ?? resolved.traces[0];
 	const readAtHz = quantityFrequencyHz(taken.request) || question.frequencyHz;
 	const appliedDb = correctionAt(resolved.correctionDb, readAtHz);
 	const shift = isAbsoluteLevel(taken.reading.unit) ? question.leadDb - appliedDb : 0;
-	return {
+	const source: Source = {
 		...taken,
 		family: familyOf(taken.request.kind),
 		entry,
@@ -71,12 +73,13 @@ function sourceOf(
 		appliedDb,
 		planeValue: taken.reading.value + shift
 	};
+	return [source];
 }
 
-/** What there is to judge one question by. Readings must name rows that the log swept. */
+/** What there is to judge one question by, from what the log and the readings say. */
 export function evidenceFor(drawn: DrawnExercise, question: DrawnQuestion, record: AttemptRecord): Evidence {
 	const answer = record.answers[question.id];
-	const sources = record.readings.map((taken) => sourceOf(taken, drawn, question, record));
+	const sources = record.readings.flatMap((taken) => sourceOf(taken, drawn, question, record));
 	const attached = sources.find((source) => source.id === answer?.readingId);
 	const swept = record.log.filter((entry) => entry.sweeps > 0).reverse();
 	return {

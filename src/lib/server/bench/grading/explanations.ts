@@ -1,6 +1,6 @@
-import { drawReceiverError } from '../receiver/receiver-error';
-import { isAbsoluteLevel, type Evidence, type Source } from './evidence';
+import type { Evidence, Source } from './evidence';
 import { MODEL_SPREAD_DB, type SetUp } from './mistake';
+import { receiverErrorDb } from './receiver-error-db';
 import { supports } from './supports';
 import type { Watched } from './watched-mistakes';
 
@@ -51,13 +51,6 @@ function fromTheory(watched: readonly Watched[], evidence: Evidence): Candidate[
 			return [{ watched: [one], value: predicted.value + errorDb, spread: predicted.spread, setUp }];
 		})
 	);
-}
-
-/** This receiver's own level error where the question asks: in every level that was read with it. */
-export function receiverErrorDb({ drawn, question }: Evidence): number {
-	return isAbsoluteLevel(question.unit)
-		? drawReceiverError(drawn.profile, drawn.seed).levelDb(question.frequencyHz)
-		: 0;
 }
 
 /** Right readings, for slips to start from: those taken, else what this receiver would show. */

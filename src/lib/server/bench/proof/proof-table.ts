@@ -15,6 +15,8 @@ export const LIMITS = {
 /** Bias allowed to the taught method: a tenth of its tolerance, beyond what chance explains at four standard errors. */
 const BIAS_SHARE = 0.1;
 const STANDARD_ERRORS = 4;
+/** With fewer seeds than this, nothing is said of bias. */
+const BIAS_SEEDS = 8;
 
 export interface ProofRow {
 	question: string;
@@ -26,6 +28,8 @@ export interface ProofRow {
 	/** Named as the mistake made; for the taught method, found faultless. */
 	namedShare: number;
 	meanError: number;
+	/** Mean of what of the error is not the receiver's own. */
+	bias: number;
 	/** Standard deviation of the error over the seeds. */
 	scatter: number;
 	/** Greatest distance from the truth, for the taught method; least, for a mistake. */
@@ -47,14 +51,20 @@ export interface ProofTable {
 
 const percent = (share: number): string => `${(100 * share).toFixed(1)} %`;
 
+const mean = (values: readonly number[]): number =>
+	values.reduce((sum, value) => sum + value, 0) / Math.max(1, values.length);
+function deviation(values: readonly number[]): number {
+	const middle = mean(values);
+	return Math.sqrt(
+		values.reduce((sum, value) => sum + (value - middle) ** 2, 0) / Math.max(1, values.length - 1)
+	);
+}
+
 function rowOf(outcomes: readonly Outcome[], tolerance: number): ProofRow {
 	const [{ question, mistake }] = outcomes;
 	const errors = outcomes.flatMap(({ error }) => (error === null ? [] : [error]));
+	const biases = outcomes.filter(({ error }) => error !== null).map(({ bias }) => bias);
 	const share = (is: (outcome: Outcome) => boolean) => outcomes.filter(is).length / outcomes.length;
-	const meanError = errors.reduce((sum, error) => sum + error, 0) / Math.max(1, errors.length);
-	const scatter = Math.sqrt(
-		errors.reduce((sum, error) => sum + (error - meanError) ** 2, 0) / Math.max(1, errors.length - 1)
-	);
 	const sizes = errors.map(Math.abs);
 	const row: ProofRow = {
 		question,
@@ -62,23 +72,33 @@ function rowOf(outcomes: readonly Outcome[], tolerance: number): ProofRow {
 		done: errors.length,
 		passShare: share(({ passes }) => passes),
 		namedShare: share(({ named }) => named),
-		meanError,
-		scatter,
+		meanError: mean(errors),
+		bias: mean(biases),
+		scatter: deviation(errors),
 		edgeError: sizes.length === 0 ? 0 : mistake === null ? Math.max(...sizes) : Math.min(...sizes),
 		failures: []
 	};
-	row.failures = mistake === null ? taughtFailures(row, tolerance) : mistakeFailures(row, outcomes);
+	row.failures = mistake === null ? taughtFailures(row, outcomes, tolerance) : mistakeFailures(row, outcomes);
 	return row;
 }
 
-function taughtFailures({ passShare, meanError, scatter, done }: ProofRow, tolerance: number): string[] {
+function taughtFailures(
+	{ passShare, bias, done }: ProofRow,
+	outcomes: readonly Outcome[],
+	tolerance: number
+): string[] {
 	const failures: string[] = [];
 	if (passShare < LIMITS.taughtPasses) {
 		failures.push(`passes on ${percent(passShare)}, at least ${percent(LIMITS.taughtPasses)} asked`);
 	}
+	const made = outcomes.filter(({ error }) => error !== null);
+	const scatter = Math.max(
+		deviation(made.map((outcome) => outcome.bias)),
+		mean(made.map(({ spread }) => spread))
+	);
 	const allowed = BIAS_SHARE * tolerance + (STANDARD_ERRORS * scatter) / Math.sqrt(Math.max(1, done));
-	if (Math.abs(meanError) > allowed) {
-		failures.push(`is off by ${meanError.toFixed(2)} on average, at most ${allowed.toFixed(2)} allowed`);
+	if (done >= BIAS_SEEDS && Math.abs(bias) > allowed) {
+		failures.push(`is off by ${bias.toFixed(2)} on average, at most ${allowed.toFixed(2)} allowed`);
 	}
 	return failures;
 }

@@ -8,6 +8,7 @@ import { runMethod } from '../exercise/run-method';
 import { isAbsoluteLevel } from '../grading/evidence';
 import { judgeQuestion, type Judgement } from '../grading/judge-question';
 import { spreadsBetween } from '../grading/mistakes-apart';
+import { receiverErrorDb } from '../grading/receiver-error-db';
 import { watchedMistakes, type Watched } from '../grading/watched-mistakes';
 import { memoSweeps } from './memo-sweeps';
 
@@ -18,6 +19,8 @@ export interface Outcome {
 	mistake: string | null;
 	/** Answered − true, in the question's unit; null when it could not be done on the bench. */
 	error: number | null;
+	/** What of the error is not this receiver's own: over the seeds, nothing should be left of it. */
+	bias: number;
 	/** One standard deviation of the reading answered from. */
 	spread: number;
 	/** Within the tolerance. */
@@ -52,6 +55,7 @@ const EVIDENCE: ((record: AttemptRecord, question: string) => AttemptRecord)[] =
 interface Attempted {
 	judgement: Judgement;
 	error: number;
+	bias: number;
 	spread: number;
 }
 
@@ -66,7 +70,8 @@ function attempt(
 		const { record, evidence } = runMethod(drawn, steps, sweepWith);
 		const judgement = judgeQuestion(drawn, question, leave(record, question.id));
 		const error = record.answers[question.id].value - question.truth;
-		return { judgement, error, spread: evidence[question.id].reading.spread };
+		const bias = error - receiverErrorDb({ drawn, question });
+		return { judgement, error, bias, spread: evidence[question.id].reading.spread };
 	} catch (cause) {
 		if (cause instanceof BenchError) return { problem: `${cause.field}: ${cause.message}` };
 		throw cause;
@@ -80,12 +85,12 @@ function outcome(
 ): Outcome {
 	const base = { question: question.id, mistake: watched?.id ?? null };
 	if ('problem' in tried) {
-		return { ...base, error: null, spread: 0, passes: false, named: false, problem: tried.problem };
+		return { ...base, error: null, bias: 0, spread: 0, passes: false, named: false, problem: tried.problem };
 	}
-	const { judgement, error, spread } = tried;
+	const { judgement, error, bias, spread } = tried;
 	const found = judgement.matched?.watched.map(({ id }) => id) ?? [];
 	const named = watched ? found.length === 1 && found[0] === watched.id : judgement.verdict === 'right';
-	return { ...base, error, spread, passes: Math.abs(error) <= question.tolerance, named };
+	return { ...base, error, bias, spread, passes: Math.abs(error) <= question.tolerance, named };
 }
 
 /** Does the taught method and makes every mistake, with one seed, on the bench. */

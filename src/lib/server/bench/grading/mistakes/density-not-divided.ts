@@ -1,7 +1,7 @@
 import { powerRatioToDb } from '$lib/units/decibel';
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
-import { figure } from '../../exercise/figure';
+import { figure } from '$lib/server/bench/exercise/figure';
 import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
 import { widthHzOf } from '../read-width';
 import { channelDbm, flatWidthHz } from '../scene-power';

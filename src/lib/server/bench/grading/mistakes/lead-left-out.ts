@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { figure, shortFigure } from '../../exercise/figure';
+import { figure, shortFigure } from '$lib/server/bench/exercise/figure';
 import { defineMistake } from '../mistake';
 import { correctsOnBench, withSettings, withSum } from '../spoil';
 

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { figure } from '../../exercise/figure';
+import { figure } from '$lib/server/bench/exercise/figure';
 import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
 import { averagesDecibels, LOG_AVERAGE_DB } from '../noise-law';
 import { withSettings } from '../spoil';

@@ -1,6 +1,6 @@
 import { powerRatioToDb } from '$lib/units/decibel';
 import { z } from 'zod';
-import { figure, shortFigure } from '../../exercise/figure';
+import { figure, shortFigure } from '$lib/server/bench/exercise/figure';
 import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
 import { averagesDecibels, bandSpreadDb, LOG_AVERAGE_DB, NOISE_BANDWIDTH } from '../noise-law';
 import { askedWidthHz } from '../scene-power';

@@ -1,8 +1,8 @@
 import { powerRatioToDb } from '$lib/units/decibel';
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
-import { figure, shortFigure } from '../../exercise/figure';
-import { quantityFrequencyHz } from '../../exercise/quantity-frequency';
+import { figure, shortFigure } from '$lib/server/bench/exercise/figure';
+import { quantityFrequencyHz } from '$lib/server/bench/exercise/quantity-frequency';
 import { MODEL_SPREAD_DB, defineMistake, type Context } from '../mistake';
 import { averagesDecibels, LOG_AVERAGE_DB, NOISE_BANDWIDTH, pointSpreadDb } from '../noise-law';
 import { placeHz } from '../place';

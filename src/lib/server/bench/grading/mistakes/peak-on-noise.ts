@@ -1,7 +1,7 @@
 import { powerRatioToDb } from '$lib/units/decibel';
 import { z } from 'zod';
-import type { FilledStep } from '../../exercise/drawn-exercise';
-import { figure } from '../../exercise/figure';
+import type { FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
+import { figure } from '$lib/server/bench/exercise/figure';
 import { defineMistake, type SetUp } from '../mistake';
 import { shownPower } from '../noise-law';
 import { withSettings } from '../spoil';

@@ -1,6 +1,6 @@
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
-import { figure } from '../../exercise/figure';
+import { figure } from '$lib/server/bench/exercise/figure';
 import { MODEL_SPREAD_DB, defineMistake, type Context } from '../mistake';
 import { bandSpreadDb } from '../noise-law';
 import { sameWidth, widthHzOf } from '../read-width';
