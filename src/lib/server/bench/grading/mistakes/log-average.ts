@@ -13,11 +13,14 @@ export const logAverage = defineMistake('log-average', z.strictObject({}), () =>
 	shows: (source) => averagesDecibels(source.setUp),
 	predict: ({ question }, setUp) =>
 		averagesDecibels(setUp) ? { value: question.truth - LOG_AVERAGE_DB, spread: MODEL_SPREAD_DB } : null,
-	explain: ({ change }) => ({
+	explain: ({ change, yours, question }) => ({
 		title: 'The mean of decibels is not the mean power',
 		text: 'Your trace averaged decibels. Noise falls far below its mean more often than it rises far above, so the mean of its levels stands 2.51 dB under the level of its mean. Averages on power add up right.',
-		sum: '10 × 0.5772/2.3026 = 2.51 dB',
-		note: Math.abs(change - LOG_AVERAGE_DB) < 0.05 ? undefined : `yours: ${figure(change, 1)} dB`,
+		sum: `${figure(yours, question.digits)} + 2.51 = ${figure(yours + LOG_AVERAGE_DB, question.digits)} ${question.unit}`,
+		note:
+			Math.abs(change - LOG_AVERAGE_DB) < 0.05
+				? undefined
+				: `with noise and the receiver’s own error, ${figure(change, 1)} dB`,
 		part: 'lost to averaging decibels',
 		bad: { at: 'set-up', text: 'Here: averages on decibels; set Averages to power' }
 	}),

@@ -27,7 +27,7 @@ export const logDensity = defineMistake('log-density', z.strictObject({}), () =>
 					spread: Math.hypot(MODEL_SPREAD_DB, bandSpreadDb(setUp, askedWidthHz(context.question) ?? 0))
 				}
 			: null,
-	explain({ setUp, source, change, drawn }) {
+	explain({ setUp, source, change, yours, drawn, question }) {
 		const rbwHz = setUp?.resolved.rbwHz ?? drawn.profile.rbwHz[0];
 		const byMarker = source?.family === 'point';
 		const lowDb = byMarker ? LOG_AVERAGE_DB - RBW_FOR_NOISE_DB : LOG_AVERAGE_DB;
@@ -35,8 +35,11 @@ export const logDensity = defineMistake('log-density', z.strictObject({}), () =>
 		return {
 			title: 'The mean of decibels is not the mean power',
 			text: `Your trace averaged decibels, and the mean of noise in decibels stands 2.51 dB under its mean power. ${byMarker ? bandwidth : 'Averages on power read right.'}`,
-			sum: byMarker ? `2.51 − 0.27 = ${figure(lowDb, 2)} dB low` : '10 × 0.5772/2.3026 = 2.51 dB',
-			note: Math.abs(change - lowDb) < 0.05 ? undefined : `yours: ${figure(change, 1)} dB`,
+			sum: `${figure(yours, question.digits)} + 2.51${byMarker ? ' − 0.27' : ''} = ${figure(yours + lowDb, question.digits)} ${question.unit}`,
+			note:
+				Math.abs(change - lowDb) < 0.05
+					? undefined
+					: `with noise and the receiver’s own error, ${figure(change, 1)} dB`,
 			part: 'lost to averaging decibels',
 			bad: { at: 'set-up', text: 'Here: averages on decibels; set Averages to power' }
 		};

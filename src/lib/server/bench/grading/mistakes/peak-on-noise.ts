@@ -47,7 +47,7 @@ export const peakOnNoise = defineMistake(
 						spread: by === 'hold' ? 0.35 : 0.2
 					}
 				: null,
-		explain({ setUp, change }) {
+		explain({ setUp, change, yours, question }) {
 			const rows = setUp?.sweeps ?? 1;
 			const shownDb = setUp ? powerRatioToDb(shownPower(setUp)) : Math.abs(change);
 			const cause =
@@ -57,8 +57,11 @@ export const peakOnNoise = defineMistake(
 			return {
 				title: WORDS[by].title,
 				text: `A modulated carrier like this one rises and falls like noise. ${cause}, so the power added up is that of the crests, not the mean.`,
-				sum: `crests over mean here: ${figure(shownDb, 1)} dB`,
-				note: Math.abs(shownDb + change) < 0.05 ? undefined : `yours: ${figure(Math.abs(change), 1)} dB`,
+				sum: `${figure(yours, question.digits)} − ${figure(shownDb, 1)} = ${figure(yours - shownDb, question.digits)} ${question.unit}`,
+				note:
+					Math.abs(shownDb + change) < 0.05
+						? undefined
+						: `crests stand ${figure(shownDb, 1)} dB over the mean; with the receiver’s own error, ${figure(Math.abs(change), 1)} dB`,
 				part: by === 'hold' ? 'crests kept by the hold' : 'crests picked by the detector',
 				bad: { at: 'set-up', text: WORDS[by].bad }
 			};
