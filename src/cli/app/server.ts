@@ -15,13 +15,28 @@ export async function startBuilt(folder: string, { host, port, origin }: Address
 		SHUTDOWN_TIMEOUT: process.env.SHUTDOWN_TIMEOUT ?? '3'
 	};
 	const server = startNode([folder], env, ['inherit', 'pipe', 'inherit']);
-	server.process.stdout?.on('data', (chunk: Buffer) => {
-		// The one line that the adapter says by itself would fall into the middle of a step.
-		const said = chunk.toString().replace(/^Listening on .*\n/, '');
-		if (said !== '') process.stdout.write(said);
-	});
+	await untilListening(server);
 	await untilReady(server, `http://${reachable(host)}:${port}/`);
 	return server;
+}
+
+/**
+ * Waits until the server says itself that it listens: an answer alone might be another's, on the same port.
+ * Passes on all else that it says.
+ */
+function untilListening(server: Child): Promise<void> {
+	return new Promise((resolve, reject) => {
+		server.process.stdout?.on('data', (chunk: Buffer) => {
+			const said = chunk.toString();
+			const rest = said.replace(/^Listening on .*\n/m, '');
+			if (rest !== said) resolve();
+			if (rest !== '') process.stdout.write(rest);
+		});
+		server.ended.then(
+			(code) => reject(new Error(`The server ended with ${code} before it listened`)),
+			reject
+		);
+	});
 }
 
 /** Waits for an answer of any kind but a server's error. */

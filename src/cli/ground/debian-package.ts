@@ -32,6 +32,7 @@ function install(debianPackage: string): void {
 	const root = process.getuid?.() === 0;
 	const sudo = root ? undefined : findProgram('sudo');
 	if (!apt || (!root && !sudo)) throw byHand;
+	process.stderr.write(`installing Debian's ${debianPackage} … `);
 	const asRoot = (args: string[]) => {
 		const line = ['env', 'DEBIAN_FRONTEND=noninteractive', apt, ...args];
 		const [command, ...rest] = sudo ? [sudo, '-n', ...line] : line;

@@ -9,6 +9,7 @@ import { type Memory, type Place, recall, remember } from './place';
 const HOST = '127.0.0.1';
 const PACKAGE = 'mariadb-server';
 const START_LIMIT_S = 60; // After a crash it replays its log first.
+const PORT_TRIES = 10;
 const STOP_LIMIT_S = 60;
 
 /** Whether a server answers at this place. */
@@ -34,39 +35,55 @@ export function install({ data, user }: Place): void {
 	renameSync(unfinished, data);
 }
 
-/** Starts the server in a process group of its own (Ctrl-C at the terminal must not reach it) and waits until it answers. */
+/** Starts the server and waits until it answers; on the port it had last time, or the next one that it can have. */
 export async function start(place: Place, firstPort: number): Promise<Memory> {
-	const memory = remember(place, await freePort(recall(place)?.port ?? firstPort, HOST));
+	let port = recall(place)?.port ?? firstPort;
+	for (let tries = 0; tries < PORT_TRIES; tries++, port++) {
+		port = await freePort(port, HOST);
+		const memory = remember(place, port);
+		if (await startOn(place, memory)) {
+			allowApplication(place, memory);
+			return memory;
+		}
+		// Somebody took the port between the look and the start: on to the next.
+	}
+	throw new Error(`mariadbd found no port for itself:\n${logOf(place)}`);
+}
+
+/** False if the port was taken meanwhile. */
+async function startOn(place: Place, { port }: Memory): Promise<boolean> {
 	rmSync(place.errorLog, { force: true });
-	const daemon = spawn(
-		requireProgram('mariadbd', PACKAGE),
-		[
-			'--no-defaults', // Must be the first, or /etc/mysql is read.
-			`--user=${place.user}`,
-			`--datadir=${place.data}`,
-			`--socket=${place.socket}`,
-			`--pid-file=${place.pidFile}`,
-			`--log-error=${place.errorLog}`,
-			`--bind-address=${HOST}`,
-			`--port=${memory.port}`,
-			'--skip-name-resolve',
-			'--character-set-server=utf8mb4',
-			'--collation-server=utf8mb4_unicode_ci',
-			'--default-time-zone=+00:00',
-			'--sql-mode=STRICT_ALL_TABLES,ERROR_FOR_DIVISION_BY_ZERO,NO_ENGINE_SUBSTITUTION',
-			'--max-connections=200',
-			'--innodb-buffer-pool-size=128M',
-			'--innodb-flush-log-at-trx-commit=1'
-		],
-		{ detached: true, stdio: 'ignore' }
-	);
-	daemon.unref();
-	await until(START_LIMIT_S, () => {
-		if (daemon.exitCode !== null) throw new Error(`mariadbd ended with ${daemon.exitCode}:\n${logOf(place)}`);
-		return answers(place);
+	// In a process group of its own: Ctrl-C at the terminal must not reach it.
+	const daemon = spawn(requireProgram('mariadbd', PACKAGE), serverOptions(place, port), {
+		detached: true,
+		stdio: 'ignore'
 	});
-	allowApplication(place, memory);
-	return memory;
+	daemon.unref();
+	await until(START_LIMIT_S, () => daemon.exitCode !== null || answers(place));
+	if (daemon.exitCode === null) return true;
+	if (logOf(place).includes('Bind on TCP/IP port')) return false;
+	throw new Error(`mariadbd ended with ${daemon.exitCode}:\n${logOf(place)}`);
+}
+
+function serverOptions(place: Place, port: number): string[] {
+	return [
+		'--no-defaults', // Must be the first, or /etc/mysql is read.
+		`--user=${place.user}`,
+		`--datadir=${place.data}`,
+		`--socket=${place.socket}`,
+		`--pid-file=${place.pidFile}`,
+		`--log-error=${place.errorLog}`,
+		`--bind-address=${HOST}`,
+		`--port=${port}`,
+		'--skip-name-resolve',
+		'--character-set-server=utf8mb4',
+		'--collation-server=utf8mb4_unicode_ci',
+		'--default-time-zone=+00:00',
+		'--sql-mode=STRICT_ALL_TABLES,ERROR_FOR_DIVISION_BY_ZERO,NO_ENGINE_SUBSTITUTION',
+		'--max-connections=200',
+		'--innodb-buffer-pool-size=128M',
+		'--innodb-flush-log-at-trx-commit=1'
+	];
 }
 
 /** Stops the server cleanly and waits until it is gone. */

@@ -1,11 +1,11 @@
 import { randomBytes } from 'node:crypto';
-import { chooseAddress } from '../app/address';
 import { ensureBuild } from '../app/build';
 import { importCourses, migrate, seedIfEmpty, useDatabase } from '../app/database';
 import { startBuilt } from '../app/server';
 import { requireProgram } from '../ground/debian-package.js';
 import { atEnd } from '../ground/ending';
 import { step } from '../ground/step.js';
+import { anyFreePort } from '../mariadb/free-port';
 import { usePrivateServer } from '../mariadb/private-server';
 import { dropDatabase, dropDatabasesOfDeadRuns } from '../mariadb/schema';
 import { TEST_SERVER } from '../mariadb/servers';
@@ -13,7 +13,7 @@ import type { Count } from './count';
 import { runPlaywright } from './reports';
 
 const BUILD_FOLDER = '.data/test/build';
-const FIRST_PORT = 4300;
+const HOST = '127.0.0.1';
 
 /** Builds the application, starts it on a database made for this run, and runs the browser tests against it. */
 export async function runBrowserTests(args: string[]): Promise<Count> {
@@ -23,7 +23,8 @@ export async function runBrowserTests(args: string[]): Promise<Count> {
 	await step('Migrations', migrate);
 	await step('Courses', importCourses);
 	await step('Demo data', seedIfEmpty);
-	const address = await chooseAddress({}, FIRST_PORT);
+	const port = await anyFreePort(HOST);
+	const address = { host: HOST, port, origin: `http://${HOST}:${port}` };
 	const server = await step('Server', () => startBuilt(BUILD_FOLDER, address));
 	const count = await runPlaywright(args, address.origin, chromium.path);
 	await server.stop();

@@ -49,7 +49,14 @@ async function ask(server: PrivateServer, statement: string): Promise<Record<str
 	}
 }
 
-describe('usePrivateServer(folder, firstPort)', () => {
+describe('usePrivateServer(folder, firstPort)', { timeout: 60_000 }, () => {
+	it('finds ports for two servers that start at the same moment', async () => {
+		const neighbours = ['one', 'two'].map((name) => usePrivateServer(join(base, name), firstPort));
+		const servers = await Promise.all(neighbours);
+		inUse.push(...servers);
+		expect(portOf(servers[0])).not.toBe(portOf(servers[1]));
+	});
+
 	it('serves several users and ends with the last of them', async () => {
 		const [first, second] = [await take(), await take()];
 		expect(portOf(first)).toBe(firstPort);
