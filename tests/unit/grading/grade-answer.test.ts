@@ -160,6 +160,19 @@ describe('gradeAnswer on the lead', () => {
 		expect(named(answering(uncorrected, value - lead, readingId))).toEqual(['lead-wrong-sign']));
 });
 
+describe('the lead added twice', () => {
+	const question = { ...power, mistakes: [{ kind: 'lead-twice' }] };
+	const [twice] = watchedMistakes(question);
+
+	it('is named when Correction holds the loss and it is added by hand once more', () => {
+		const record = runMethod(drawn, twice.mistake.make(drawn.method, { drawn, question })).record;
+		expect(record.answers[power.id].value - taught.record.answers[power.id].value).toBeCloseTo(lead, 9);
+		expect(judgeQuestion(drawn, question, record).matched?.watched.map(({ id }) => id)).toEqual([
+			'lead-twice'
+		]);
+	});
+});
+
 describe('gradeAnswer on density', () => {
 	it('names a marker on an average of decibels, divided by the resolution bandwidth', () => {
 		const careful = withSettings(drawn.method, {
