@@ -12,6 +12,7 @@ import { sampledRunInS } from './narrow-video';
 import { SteadyNoise, TimedNoise } from './noise-contribution';
 import type { Seed } from './random';
 import { SampledSweep } from './sampled-sweep';
+import { SETTLED, SettledVideoSweep } from './settled-video-sweep';
 import { SkirtContribution } from './skirt-contribution';
 import { videoKind } from './video';
 
@@ -52,7 +53,9 @@ export function makeEngine(
 	const frame = makeFrame(settings, frequencyError, 2, 0);
 	const averagesAnyway = detector === 'average' && vbwHz * bucketS >= 4;
 	if (videoKind(vbwHz, rbwHz) === 'narrow' && !averagesAnyway)
-		return new ChunkSweep(frame, detector, scale, incident, seed);
+		return vbwHz * bucketS >= SETTLED
+			? new SettledVideoSweep(frame, detector, scale, incident, seed)
+			: new ChunkSweep(frame, detector, scale, incident, seed);
 	return new LongSweep(frame, detector, scale, incident, seed);
 }
 
