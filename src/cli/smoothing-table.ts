@@ -7,7 +7,6 @@ import type { Scale } from '$lib/schemas/settings';
 import { meanOnScale } from '$lib/server/bench/receiver/average-laws';
 import { makeFrame, samplesPerBucket } from '$lib/server/bench/receiver/frame';
 import type { Incident } from '$lib/server/bench/receiver/incident';
-import { sampledRunInS } from '$lib/server/bench/receiver/narrow-video';
 import { SteadyNoise } from '$lib/server/bench/receiver/noise-contribution';
 import { Random } from '$lib/server/bench/receiver/random';
 import { SampledSweep } from '$lib/server/bench/receiver/sampled-sweep';
@@ -29,8 +28,7 @@ function meanExtreme(scale: Scale, ratio: number, detector: 'positive-peak' | 'n
 		startHz: 1e6,
 		spanHz: 0
 	};
-	const runIn = ratio >= 1000 ? 0 : sampledRunInS(settings.vbwHz, RBW);
-	const frame = makeFrame(settings as ResolvedSettings, 0, samplesPerBucket(RBW, bucketS, true), runIn);
+	const frame = makeFrame(settings as ResolvedSettings, 0, samplesPerBucket(RBW, bucketS, true));
 	const noise: Incident['noises'][number] = { variance: () => 1 };
 	const sweep = new SampledSweep(frame, detector, scale, [new SteadyNoise(noise, frame, 'noise')]);
 	const out = new Float64Array(POINTS);

@@ -13,7 +13,7 @@ import { videoRunInS } from './video';
 
 /** Chunk length in 1/VBW: shorter for peaks, which are sought between chunks. */
 const CHUNK = 0.1;
-const PEAK_CHUNK = 0.02;
+const PEAK_CHUNK = 0.04;
 
 /** Chunks to a bucket: odd, so that one stands at the point itself. */
 export function chunksPerBucket(frame: Frame, detector: Detector): number {

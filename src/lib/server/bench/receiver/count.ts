@@ -119,7 +119,7 @@ function linesInside(
 	clockS: number,
 	gateS: number
 ): CountedLine[] {
-	const frame = makeFrame(settings, frequencyError, 2, 0);
+	const frame = makeFrame(settings, frequencyError, 2);
 	return incident.lines.flatMap((line) => {
 		const t = line.timing;
 		const comesAndGoes = t && (t.gate || t.hop || t.pulse);

@@ -8,7 +8,7 @@ import type { Incident } from './incident';
 import { LineContribution } from './line-contribution';
 import { LongSweep } from './long-sweep';
 import { MovingLine } from './moving-line';
-import { sampledRunInS } from './narrow-video';
+import { RunIn, runInFrame } from './run-in';
 import { SteadyNoise, TimedNoise } from './noise-contribution';
 import type { Seed } from './random';
 import { SampledSweep } from './sampled-sweep';
@@ -41,16 +41,15 @@ export function makeEngine(
 		incident.envelopes.some((e) => e.emitter.kind === 'digital' || e.emitter.kind === 'msk') &&
 		perBucket * points <= MOST_ENVELOPE_SAMPLES;
 	if (bt <= LONG_BUCKET || needsWaveform) {
-		const video = videoKind(vbwHz, rbwHz);
-		const frame = makeFrame(
-			settings,
-			frequencyError,
-			perBucket,
-			video === 'wide' ? 0 : sampledRunInS(vbwHz, rbwHz)
-		);
-		return new SampledSweep(frame, detector, scale, contributions(incident, frame, seed));
+		const frame = makeFrame(settings, frequencyError, perBucket);
+		const before = runInFrame(frame);
+		const runIn =
+			videoKind(vbwHz, rbwHz) === 'wide'
+				? undefined
+				: new RunIn(before, scale, contributions(incident, before, seed));
+		return new SampledSweep(frame, detector, scale, contributions(incident, frame, seed), runIn);
 	}
-	const frame = makeFrame(settings, frequencyError, 2, 0);
+	const frame = makeFrame(settings, frequencyError, 2);
 	const averagesAnyway = detector === 'average' && vbwHz * bucketS >= 4;
 	if (videoKind(vbwHz, rbwHz) === 'narrow' && !averagesAnyway)
 		return vbwHz * bucketS >= SETTLED

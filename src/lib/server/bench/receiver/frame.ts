@@ -21,7 +21,7 @@ export interface Frame {
 	bucketS: number;
 	stepS: number;
 	perBucket: number;
-	/** Samples kept before n = 0 (filters' run-in) and after the last bucket (interpolation). */
+	/** Samples kept before n = 0 and after the last bucket, for interpolation. */
 	lead: number;
 	trail: number;
 	/** All samples: lead + points·perBucket + 1 + trail. */
@@ -38,19 +38,13 @@ export const bucketSeconds = (settings: ResolvedSettings): number =>
 
 /**
  * @param frequencyError the receiver's reference error ε: it shows true·(1+ε), so it is tuned to shown/(1+ε)
- * @param leadS run-in wanted before the first bucket, s
  */
-export function makeFrame(
-	settings: ResolvedSettings,
-	frequencyError: number,
-	perBucket: number,
-	leadS: number
-): Frame {
+export function makeFrame(settings: ResolvedSettings, frequencyError: number, perBucket: number): Frame {
 	const bucketS = bucketSeconds(settings);
 	const stepS = bucketS / perBucket;
 	const spanHz = settings.spanHz / (1 + frequencyError);
 	const sweepHzPerS = spanHz / settings.sweepTimeS;
-	const lead = 2 + Math.ceil(leadS / stepS);
+	const lead = 2;
 	const trail = 2;
 	return {
 		points: settings.points,

@@ -28,7 +28,7 @@ export class GaussianProcess {
 		const coarseS = this.stride * stepS;
 		this.reach = Math.ceil(1 / (widthHz * coarseS));
 		const decay = (Math.PI * Math.PI * widthHz * widthHz) / (2 * Math.LN2);
-		this.taps = Array.from({ length: this.stride }, (_, phase) => {
+		this.taps = Array.from({ length: Math.min(this.stride, total) }, (_, phase) => {
 			const taps = Float64Array.from({ length: 2 * this.reach + 1 }, (__, j) => {
 				const t = (j - this.reach) * coarseS - phase * stepS;
 				return Math.exp(-decay * t * t);
@@ -49,7 +49,7 @@ export class GaussianProcess {
 		const width = 2 * this.reach + 1;
 		const wr = this.re;
 		const wi = this.im;
-		for (let phase = 0; phase < stride; phase++) {
+		for (let phase = 0; phase < this.taps.length; phase++) {
 			const taps = this.taps[phase];
 			for (let i = phase, base = 0; i < total; i += stride, base++) {
 				let x = 0;

@@ -158,7 +158,13 @@ export class LongBucketConditions {
 		const bounds = [fromS, ...edges.sort((a, b) => a - b), toS];
 		const span = toS - fromS;
 		const across = (8 * Math.abs(this.frame.sweepHzPerS) * span) / this.frame.rbwHz;
-		const wanted = Math.min(32, Math.max(lines > 1 ? BEAT_NODES : 1, Math.ceil(across)));
+		const wanted = Math.min(
+			32,
+			Math.max(
+				lines > 1 ? Math.min(BEAT_NODES, Math.max(4, Math.ceil(span * this.frame.rbwHz))) : 1,
+				Math.ceil(across)
+			)
+		);
 		const list: { t: number; share: number }[] = [];
 		for (let i = 1; i < bounds.length; i++) {
 			const length = bounds[i] - bounds[i - 1];

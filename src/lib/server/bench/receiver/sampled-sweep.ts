@@ -3,8 +3,8 @@ import type { Detector, Scale } from '$lib/schemas/settings';
 import type { Contribution, RowContext } from './contribution';
 import { detectAverage, detectPeaks, detectSample } from './detect';
 import type { Frame } from './frame';
-import { startOfVideo } from './narrow-video';
 import { envelopePeaks, videoPeaks } from './peak-finders';
+import type { RunIn } from './run-in';
 import { filtersVideo, onePole, toScale } from './video';
 
 export class SampledSweep {
@@ -16,7 +16,9 @@ export class SampledSweep {
 		private readonly frame: Frame,
 		private readonly detector: Detector,
 		private readonly scale: Scale,
-		private readonly contributions: Contribution[]
+		private readonly contributions: Contribution[],
+		/** Where the video filter's state comes from, if it filters. */
+		private readonly runIn?: RunIn
 	) {
 		this.re = new Float64Array(frame.total);
 		this.im = new Float64Array(frame.total);
@@ -30,10 +32,10 @@ export class SampledSweep {
 		im.fill(0);
 		for (const contribution of this.contributions) contribution.addTo(context, frame, re, im);
 		for (let i = 0; i < frame.total; i++) video[i] = re[i] * re[i] + im[i] * im[i];
-		this.detect(out);
+		this.detect(context, out);
 	}
 
-	private detect(out: Float64Array): void {
+	private detect(context: RowContext, out: Float64Array): void {
 		const { frame, detector, scale, video } = this;
 		const filtered = filtersVideo(frame);
 		if (!filtered && detector !== 'average' && detector !== 'sample') {
@@ -49,7 +51,8 @@ export class SampledSweep {
 			return;
 		}
 		toScale(video, scale, 0, frame.total);
-		if (filtered) onePole(video, frame.vbwHz, frame.stepS, frame.total, startOfVideo(frame, video));
+		if (filtered)
+			onePole(video, frame.vbwHz, frame.stepS, frame.total, this.runIn?.state(context) ?? video[0]);
 		if (detector === 'average') detectAverage(frame, video, out);
 		else if (detector === 'sample') detectSample(frame, video, out);
 		else detectPeaks(frame, detector, video, videoPeaks(video), out);

@@ -13,7 +13,7 @@ import { normalQuantile } from './normal-quantile';
 import type { Random, Seed } from './random';
 
 /** Buckets at least this long (in 1/VBW) are settled. */
-export const SETTLED = 3;
+export const SETTLED = 1.5;
 /** Independent values of one-pole noise in 1/VBW, as a peak detector meets them (this bench's chunked sweep, measured at 3/VBW). */
 const INDEPENDENT_PER_VBW = 11;
 
