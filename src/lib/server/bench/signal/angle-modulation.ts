@@ -5,6 +5,12 @@ import type { Band, Behaviour, Line } from './emitter-kind';
 
 /** More lines than this inside the filter, and the signal is a line whose frequency moves slowly. */
 const LINES_TO_RESOLVE = 200;
+/**
+ * A spectrum of more lines than this is followed as a moving line as soon as the filter's memory holds less than a twentieth
+ * of the tone's period: its momentary frequency and rate then say all (and thousands of lines would keep a learner waiting).
+ */
+const MOST_LINES = 600;
+const SLOW_TONE = 1 / 20;
 
 export interface AngleModulation {
 	frequencyHz: number;
@@ -46,8 +52,10 @@ export function angleLines(signal: AngleModulation, band?: Band): Line[] {
 	return lines;
 }
 
-/** Lines, or quasi-static once more than 200 of them lie inside `rbwHz`. */
+/** Lines, or quasi-static once more than 200 of them lie inside `rbwHz`, or very many about a filter much wider than the tone. */
 export function angleBehaviour(modulatingHz: number, indexRad: number, rbwHz: number): Behaviour {
-	const inside = Math.min(2 * ordersOf(indexRad).length - 1, Math.floor(rbwHz / modulatingHz) + 1);
-	return inside > LINES_TO_RESOLVE ? 'quasi-static' : 'lines';
+	const lines = 2 * ordersOf(indexRad).length - 1;
+	const inside = Math.min(lines, Math.floor(rbwHz / modulatingHz) + 1);
+	if (inside > LINES_TO_RESOLVE) return 'quasi-static';
+	return lines > MOST_LINES && modulatingHz <= SLOW_TONE * rbwHz ? 'quasi-static' : 'lines';
 }
