@@ -33,14 +33,17 @@ export interface VitestReport {
 	testResults: { status: string; assertionResults: { status: string }[] }[];
 }
 
+/** A test that was found and never ended (its process died) has failed, though its file is called passed. */
 export function countVitest(report: VitestReport): Count {
-	const filesBroken = report.testResults.filter(
-		({ status, assertionResults }) =>
-			status === 'failed' && !assertionResults.some((assertion) => assertion.status === 'failed')
+	const has = (file: VitestReport['testResults'][number], status: string) =>
+		file.assertionResults.some((assertion) => assertion.status === status);
+	const broken = report.testResults.filter((file) => file.status === 'failed' && !has(file, 'failed'));
+	const cutOff = report.testResults.flatMap(({ assertionResults }) =>
+		assertionResults.filter(({ status }) => status === 'pending')
 	);
 	return {
 		passed: report.numPassedTests,
-		failed: report.numFailedTests + filesBroken.length,
+		failed: report.numFailedTests + broken.length + cutOff.length,
 		skipped: report.numPendingTests + report.numTodoTests
 	};
 }

@@ -36,6 +36,10 @@ describe('countVitest(report)', () => {
 		expect(countVitest(report)).toEqual({ passed: 1, failed: 1, skipped: 2 });
 	});
 
+	it('counts the tests that a dying process left unfinished', () => {
+		expect(countVitest(vitest(1, 0, testFile('passed', 'passed', 'pending', 'pending'))).failed).toBe(2);
+	});
+
 	it('counts a file whose hook fails after its tests passed', () => {
 		expect(countVitest(vitest(1, 0, testFile('failed', 'passed'))).failed).toBe(1);
 	});
