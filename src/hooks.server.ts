@@ -4,7 +4,13 @@ import { chooseScheme } from '$lib/server/hooks/choose-scheme';
 import { reportError } from '$lib/server/hooks/report-error';
 import { resolveSession } from '$lib/server/hooks/resolve-session';
 import { secureHeaders } from '$lib/server/hooks/secure-headers';
+import { endStreams } from '$lib/server/services/attempts/open-streams';
 
 export const handle = sequence(secureHeaders, checkOrigin, resolveSession, chooseScheme);
 
 export const handleError = reportError;
+
+/** A stopping process ends its sweep streams first: open ones would hold the server up until its time is over. */
+export const init = (): void => {
+	for (const signal of ['SIGTERM', 'SIGINT'] as const) process.once(signal, endStreams);
+};

@@ -9,6 +9,7 @@ import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 import { BenchError } from '../bench-error';
 import type { Seed } from '../receiver/random';
 import { resolveSettings } from '../receiver/resolve-settings';
+import { restartsTraces } from '../receiver/restarts-traces';
 import type { SettingsLogEntry, TakenReading } from './attempt-record';
 import { patchSettings } from './patch-settings';
 
@@ -24,9 +25,6 @@ export type SweepWith = (
 	resolved: ResolvedSettings,
 	seed: Seed
 ) => Sweeper;
-
-/** Holds and averages go on over a change of these; over any other they start again. */
-const heldOver = ({ traces: _, referenceDbm: __, ...rest }: ResolvedSettings): string => JSON.stringify(rest);
 
 /** One person at one bench: settings typed, sweeps drawn, readings taken, with the log that an attempt stores. */
 export class BenchSession {
@@ -53,7 +51,7 @@ export class BenchSession {
 	set(changes: Settings): void {
 		this.settings = patchSettings(this.settings, changes);
 		const resolved = resolveSettings(this.settings, this.profile);
-		if (heldOver(resolved) !== heldOver(this.resolved)) this.rows = [];
+		if (restartsTraces(this.resolved, resolved)) this.rows = [];
 		this.resolved = resolved;
 	}
 

@@ -1,12 +1,11 @@
+import { unhurriedSweepTimeS } from '$lib/measure/resolution-filter';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 import { BenchError } from '../bench-error';
 import { resolveAttenuation } from './resolve-attenuation';
 import { resolveFrequencies } from './resolve-frequencies';
 
-/** The fastest sweep, and the fastest that automatic coupling chooses. */
 export const MIN_SWEEP_TIME_S = 1e-4;
-const MIN_AUTO_SWEEP_TIME_S = 1e-3;
 export const MAX_SWEEP_TIME_S = 2000;
 export const MAX_VBW_HZ = 1e9;
 /** Rows an average covers when no count is stated. */
@@ -80,7 +79,7 @@ export function resolveSettings(settings: Settings, profile: ReceiverProfile): R
 	}
 	const rbwHz = resolveRbwHz(settings, profile, spanHz);
 	const vbwHz = resolveVbwHz(settings, rbwHz);
-	const autoSweepTimeS = Math.max(MIN_AUTO_SWEEP_TIME_S, (5 * spanHz) / (rbwHz * Math.min(rbwHz, vbwHz)));
+	const autoSweepTimeS = unhurriedSweepTimeS(spanHz, rbwHz, vbwHz);
 	const automatic = (value: number | string | undefined) => value === undefined || value === 'auto';
 	const detector = settings.detector ?? 'auto';
 	return {

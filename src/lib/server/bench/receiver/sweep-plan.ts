@@ -1,10 +1,11 @@
 /** A prepared sweep: everything of (scene, receiver, settings, seed) that does not change from row to row, and the rows it gives. */
+import { sweepLossDb } from '$lib/measure/resolution-filter';
 import type { CorrectionTable, ResolvedSettings } from '$lib/schemas/settings';
 import { makeEngine } from './engine';
 import type { Incident } from './incident';
 import { Random, type Seed } from './random';
 import type { ReceiverError } from './receiver-error';
-import { chirpFactor } from './resolution-filter';
+import { tableDb } from './table-db';
 import { scaleToDbm } from './video';
 
 export interface SweepFlag {
@@ -57,8 +58,8 @@ export function planSweep(
 function sweepFlags(incident: Incident, settings: ResolvedSettings): SweepFlag[] {
 	const flags: SweepFlag[] = [];
 	if (settings.sweepTimeS < settings.autoSweepTimeS * (1 - 1e-9)) {
-		const k = chirpFactor(settings.rbwHz, settings.spanHz / settings.sweepTimeS);
-		flags.push({ kind: 'too-fast', db: 5 * Math.log10(1 + k * k) });
+		const sweepHzPerS = settings.spanHz / settings.sweepTimeS;
+		flags.push({ kind: 'too-fast', db: sweepLossDb(sweepHzPerS, settings.rbwHz) });
 	}
 	if (incident.overload) flags.push({ kind: 'overload' });
 	if (incident.protection)
@@ -79,12 +80,5 @@ function shownOffsets(settings: ResolvedSettings, error: ReceiverError): Float64
 }
 
 /** Correction in dB at a frequency: straight between the table's points, flat outside. */
-export function correctionAt(correction: number | CorrectionTable, frequencyHz: number): number {
-	if (typeof correction === 'number') return correction;
-	const after = correction.findIndex((p) => p.frequencyHz >= frequencyHz);
-	if (after === 0) return correction[0].db;
-	if (after < 0) return correction[correction.length - 1].db;
-	const a = correction[after - 1];
-	const b = correction[after];
-	return a.db + ((b.db - a.db) * (frequencyHz - a.frequencyHz)) / (b.frequencyHz - a.frequencyHz);
-}
+export const correctionAt = (correction: number | CorrectionTable, frequencyHz: number): number =>
+	typeof correction === 'number' ? correction : tableDb(correction, frequencyHz);

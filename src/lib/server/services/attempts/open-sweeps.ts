@@ -1,3 +1,4 @@
+import { restartsTraces } from '$lib/server/bench/receiver/restarts-traces';
 import { randomBytes } from 'node:crypto';
 import { isDeepStrictEqual } from 'node:util';
 import type { Transaction } from 'sequelize';
@@ -13,7 +14,6 @@ import { markDrawn } from './acknowledge-rows';
 import { firstUnfinishedRow, type BenchPosition } from './advance-bench';
 import { getAttempt, lockOpenAttempt } from './get-attempt';
 import { preparedBench, resolvedFor, type PreparedBench, type SignalSource } from './prepared-bench';
-import { restartsTraces } from './restarts-traces';
 import { latestSetUp } from './set-up-log';
 import { exerciseOf, signalSource } from './signal-source';
 
