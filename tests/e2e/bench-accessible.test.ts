@@ -11,7 +11,7 @@ import {
 	startReading
 } from './bench-page';
 
-test.setTimeout(150_000);
+test.setTimeout(300_000);
 test.use({ viewport: { width: 1440, height: 900 } });
 
 test('every page of an exercise is without violations of accessibility or of the content policy', async ({

@@ -51,7 +51,7 @@ async function tabTo(page: Page, target: Locator, most = 90): Promise<void> {
 }
 
 test('an exercise can be done on the keyboard alone', async ({ page }) => {
-	await signIn(page, 'ailsa.tyson@northmoor.example');
+	await signIn(page, 'owen.mell@tarnvale.example');
 	await page.goto('/learn');
 	await tabTo(page, page.getByRole('link', { name: /Channel power of a telemetry carrier/ }));
 	await page.keyboard.press('Enter');

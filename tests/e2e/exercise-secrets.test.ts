@@ -68,7 +68,7 @@ async function seedOf(attemptId: string): Promise<string> {
 }
 
 test('neither seed nor scene nor truths reach the browser before the attempt closes', async ({ page }) => {
-	test.setTimeout(120_000);
+	test.setTimeout(180_000);
 	const { bodies, settled } = await record(page);
 	await signIn(page, 'bridget.hale@tarnvale.example');
 	await openBench(page);
@@ -82,6 +82,7 @@ test('neither seed nor scene nor truths reach the browser before the attempt clo
 	await expect(page.getByText(/^Kept \d\d:\d\d/)).toBeVisible();
 	const attemptId = /attempts\/(\d+)/.exec(page.url())![1];
 	await page.reload();
+	await expect(answerField(page, 2)).toHaveValue('-60');
 	await page.getByRole('button', { name: 'Stop' }).click();
 	await settled();
 	const before = [...bodies];

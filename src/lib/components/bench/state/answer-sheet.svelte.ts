@@ -98,9 +98,16 @@ export class AnswerSheet {
 		this.#timer = setTimeout(() => void this.#keep(), restMs);
 	}
 
-	async #keep(): Promise<void> {
+	/** Keeps at once what waits to be kept: the page is going. */
+	flush(): void {
+		if (this.state === 'kept') return;
+		clearTimeout(this.#timer);
+		void this.#keep(true);
+	}
+
+	async #keep(leaving = false): Promise<void> {
 		try {
-			this.savedAt = await this.#wire.saveDrafts($state.snapshot(this.answers));
+			this.savedAt = await this.#wire.saveDrafts($state.snapshot(this.answers), leaving);
 			this.state = 'kept';
 		} catch (error) {
 			this.state = 'not-kept';

@@ -33,7 +33,8 @@ export interface BenchWire {
 	rows(from: number, to: number): Promise<AsyncIterable<Frame[]>>;
 	acknowledge(row: number): Promise<void>;
 	takeReading(request: TakeReadingRequest): Promise<ReadingView>;
-	saveDrafts(answers: Record<string, TypedAnswer>): Promise<string>;
+	/** @param leaving the page is going, and the request must outlive it */
+	saveDrafts(answers: Record<string, TypedAnswer>, leaving?: boolean): Promise<string>;
 	nextHint(): Promise<HintResponse>;
 	handIn(answers: Record<string, TypedAnswer>): Promise<void>;
 	reload(): Promise<AttemptView>;

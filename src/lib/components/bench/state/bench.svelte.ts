@@ -64,6 +64,7 @@ export class Bench {
 	}
 
 	close(): void {
+		this.answers.flush();
 		this.run.stop();
 	}
 

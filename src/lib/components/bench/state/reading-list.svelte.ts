@@ -67,7 +67,7 @@ export class ReadingList {
 	 */
 	async take(row: ReadingRow): Promise<ReadingView> {
 		const trace = this.#traces.shown[row.trace - 1];
-		await this.#run.settleAcknowledgement();
+		await this.#run.settleAcknowledgement(trace.rows.to);
 		const reading = await this.#wire.takeReading({
 			rows: trace.rows,
 			trace: row.trace,

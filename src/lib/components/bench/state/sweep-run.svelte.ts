@@ -92,12 +92,19 @@ export class SweepRun {
 		}
 	}
 
-	/** Tells the server what was drawn, now: evidence is about to be taken from it. */
-	async settleAcknowledgement(): Promise<void> {
-		if (this.#drawnTo === undefined || this.#drawnTo === this.#acknowledgedTo) return;
-		const row = this.#drawnTo;
-		await this.#wire.acknowledge(row);
-		this.#acknowledgedTo = row;
+	/**
+	 * Tells the server what was drawn, now: evidence is about to be taken from it.
+	 * @param row waits until this row, which stands in a trace already, has been painted too
+	 */
+	async settleAcknowledgement(row?: number): Promise<void> {
+		if (row !== undefined && row > (this.#drawnTo ?? -1)) {
+			await nextPaint();
+			this.#drawnTo = Math.max(row, this.#drawnTo ?? 0);
+		}
+		const drawnTo = this.#drawnTo;
+		if (drawnTo === undefined || drawnTo === this.#acknowledgedTo) return;
+		await this.#wire.acknowledge(drawnTo);
+		this.#acknowledgedTo = drawnTo;
 	}
 
 	/** Resolves once the stream has begun; what follows comes in on its own. */
@@ -142,9 +149,10 @@ export class SweepRun {
 					if (whole !== undefined && left !== undefined) left -= 1;
 				}
 				this.#traces.show();
+				const shownTo = this.#traces.lastRow;
 				await nextPaint();
+				this.#drawnTo = shownTo ?? this.#drawnTo;
 				if (signal.aborted) return;
-				this.#drawnTo = this.#traces.lastRow ?? this.#drawnTo;
 				this.#acknowledge(false);
 				if (this.ended) {
 					this.#acknowledge(true);

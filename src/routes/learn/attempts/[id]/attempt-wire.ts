@@ -13,25 +13,32 @@ import { FrameDecoder, type Frame } from '$lib/schemas/frames';
 /** @param attemptId whose endpoints are meant */
 export function attemptWire(attemptId: AttemptView['id']): BenchWire {
 	const base = `/api/attempts/${attemptId}`;
-	const send = (method: string, path: string, body: unknown, signal?: AbortSignal) =>
+	const send = (
+		method: string,
+		path: string,
+		body: unknown,
+		more: Pick<RequestInit, 'signal' | 'keepalive'> = {}
+	) =>
 		answered(
 			fetch(base + path, {
 				method,
 				headers: { 'content-type': 'application/json' },
 				body: JSON.stringify(body),
-				signal
+				...more
 			})
 		);
 	return {
-		sweeps: async (request, signal) => framesOf(await send('POST', '/sweeps', request, signal)),
+		sweeps: async (request, signal) => framesOf(await send('POST', '/sweeps', request, { signal })),
 		rows: async (from, to) => framesOf(await answered(fetch(`${base}/rows?from=${from}&to=${to}`))),
 		acknowledge: async (row) => {
 			await send('POST', '/acknowledgements', { row });
 		},
 		takeReading: async (request) =>
 			readingResponse.parse(await (await send('POST', '/readings', request)).json()).reading,
-		saveDrafts: async (answers) =>
-			draftsResponse.parse(await (await send('PUT', '/drafts', { answers })).json()).savedAt,
+		saveDrafts: async (answers, leaving) => {
+			const response = await send('PUT', '/drafts', { answers }, { keepalive: leaving });
+			return draftsResponse.parse(await response.json()).savedAt;
+		},
 		nextHint: async () => hintResponse.parse(await (await send('POST', '/hints', {})).json()),
 		handIn: async (answers) => {
 			await send('POST', '/answers', { answers });
