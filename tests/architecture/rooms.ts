@@ -83,7 +83,8 @@ export const ROOMS: Room[] = [
 		],
 		packages: ['*']
 	},
-	{ path: 'src/hooks.server.ts', mayImport: server('hooks', 'env.ts'), packages: ['*'] },
+	{ path: 'src/hooks.server.ts', mayImport: server('hooks', 'services', 'env.ts'), packages: ['*'] },
+	{ path: 'src/hooks.client.ts', mayImport: lib('schemas'), packages: ['*'] },
 	{ path: 'src/app.d.ts', mayImport: [...server('auth', 'domain'), ...lib('schemas')], packages: ['*'] },
 	{ path: 'src/params', mayImport: lib('schemas'), packages: ['*'] },
 	{
@@ -110,6 +111,7 @@ export const OWNED_PACKAGES: Record<string, string[]> = {
 	umzug: server('db'),
 	lucia: server('auth'),
 	'@sveltejs/kit': [
+		'src/hooks.client.ts',
 		'src/routes',
 		'src/params',
 		'src/hooks.server.ts',
