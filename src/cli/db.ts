@@ -11,6 +11,7 @@ import {
 } from './app/database';
 import { runCommand } from './ground/ending';
 import { Refusal } from './ground/refusal.js';
+import { describeRunning, findRunning } from './ground/running.js';
 import { step } from './ground/step.js';
 import { dropDatabase } from './mariadb/schema';
 
@@ -31,6 +32,8 @@ const actions: Record<string, (isPrivate: boolean) => Promise<void>> = {
 	reset: async (isPrivate) => {
 		if (!isPrivate)
 			throw new Refusal('Only the private database can be thrown away; DATABASE_URL names another.');
+		const running = findRunning('start') ?? findRunning('dev');
+		if (running) throw new Refusal(`${describeRunning(running)} End it first.`);
 		await step('Reset', dropPrivate);
 		await actions.seed(isPrivate);
 	}
