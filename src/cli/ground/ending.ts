@@ -26,6 +26,8 @@ export async function runCommand(work: () => Promise<number | Outcome>, stoppedC
 			void end(stoppedCode);
 		});
 	}
+	// Nobody reads any more (a closed terminal, a pipe to head): what was begun must be ended all the same.
+	for (const stream of [process.stdout, process.stderr]) stream.on('error', () => void end(1));
 	let code = 1;
 	let lastLine: string | undefined;
 	try {
