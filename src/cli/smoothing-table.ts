@@ -5,21 +5,29 @@
 import { writeFileSync } from 'node:fs';
 import type { Scale } from '$lib/schemas/settings';
 import { meanOnScale } from '$lib/server/bench/receiver/average-laws';
+import { GreatestOfNoise, leastOfNoise } from '$lib/server/bench/receiver/extreme-laws';
 import { makeFrame, samplesPerBucket } from '$lib/server/bench/receiver/frame';
 import type { Incident } from '$lib/server/bench/receiver/incident';
 import { SteadyNoise } from '$lib/server/bench/receiver/noise-contribution';
 import { Random } from '$lib/server/bench/receiver/random';
 import { SampledSweep } from '$lib/server/bench/receiver/sampled-sweep';
+import { powerOnScale } from '$lib/server/bench/receiver/video';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 
 const RATIOS = [0.05, 0.1, 0.2, 0.5, 1, 2, 3, 5, 10];
-const BT = 16;
+/** Lengths of a bucket, in 1/B. */
+const LENGTHS = [4, 16, 64];
 const ROWS = 24;
 const POINTS = 401;
 const RBW = 1000;
 
-function meanExtreme(scale: Scale, ratio: number, detector: 'positive-peak' | 'negative-peak'): number {
-	const bucketS = BT / RBW;
+function meanExtreme(
+	scale: Scale,
+	ratio: number,
+	bt: number,
+	detector: 'positive-peak' | 'negative-peak'
+): number {
+	const bucketS = bt / RBW;
 	const settings = {
 		points: POINTS,
 		rbwHz: RBW,
@@ -40,29 +48,47 @@ function meanExtreme(scale: Scale, ratio: number, detector: 'positive-peak' | 'n
 	return sum / ROWS / POINTS;
 }
 
+/** Mean extreme on the scale that the law of unfiltered noise gives over a bucket. */
+function lawExtreme(scale: Scale, bt: number, detector: 'positive-peak' | 'negative-peak'): number {
+	const law = new GreatestOfNoise();
+	const draws = 20_000;
+	let sum = 0;
+	for (let i = 0; i < draws; i++) {
+		const exponential = -Math.log((i + 0.5) / draws);
+		const power = detector === 'positive-peak' ? law.draw(exponential, bt) : leastOfNoise(exponential, bt);
+		sum += powerOnScale(power, scale);
+	}
+	return sum / draws;
+}
+
 const table = Object.fromEntries(
 	(['log', 'power', 'voltage'] as const).map((scale) => {
 		const mean = meanOnScale(1, 0, scale);
-		const shares = (detector: 'positive-peak' | 'negative-peak') => {
-			const plain = meanExtreme(scale, 1e6, detector) - mean;
-			return RATIOS.map((r) =>
-				[Math.log10(r), (meanExtreme(scale, r, detector) - mean) / plain].map((x) => +x.toFixed(4))
+		const shares = (detector: 'positive-peak' | 'negative-peak') =>
+			RATIOS.map((r) =>
+				[
+					Math.log10(r),
+					...LENGTHS.map(
+						(bt) => (meanExtreme(scale, r, bt, detector) - mean) / (lawExtreme(scale, bt, detector) - mean)
+					)
+				].map((x) => +x.toFixed(4))
 			);
-		};
 		return [scale, { greatest: shares('positive-peak'), least: shares('negative-peak') }];
 	})
 );
-const pairs = (list: number[][]) => `[\n${list.map((p) => `\t\t\t[${p.join(', ')}]`).join(',\n')}\n\t\t]`;
+const rows = (list: number[][]) => `[\n${list.map((p) => `\t\t\t[${p.join(', ')}]`).join(',\n')}\n\t\t]`;
 const body = Object.entries(table)
-	.map(
-		([scale, t]) => `\t${scale}: {\n\t\tgreatest: ${pairs(t.greatest)},\n\t\tleast: ${pairs(t.least)}\n\t}`
-	)
+	.map(([scale, t]) => `\t${scale}: {\n\t\tgreatest: ${rows(t.greatest)},\n\t\tleast: ${rows(t.least)}\n\t}`)
 	.join(',\n');
 writeFileSync(
 	'src/lib/server/bench/receiver/smoothing-table.ts',
-	`/** Made by src/cli/smoothing-table.ts: [log₁₀(VBW/B), share of the unfiltered extreme's distance from the mean]. */
+	`/**
+ * Made by src/cli/smoothing-table.ts: log₁₀(VBW/B), then, for buckets of ${LENGTHS.join(', ')} (in 1/B), the filtered extreme's distance
+ * from the mean as a share of the unfiltered law's.
+ */
 import type { Scale } from '$lib/schemas/settings';
 
-type Shares = readonly (readonly [number, number])[];
-export const SMOOTHING_TABLE: Record<Scale, { greatest: Shares; least: Shares }> = {\n${body}\n};\n`
+export const SMOOTHING_LENGTHS = [${LENGTHS.join(', ')}] as const;
+export type SmoothingRow = readonly [number, number, number, number];
+export const SMOOTHING_TABLE: Record<Scale, { greatest: readonly SmoothingRow[]; least: readonly SmoothingRow[] }> = {\n${body}\n};\n`
 );

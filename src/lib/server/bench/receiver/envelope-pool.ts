@@ -61,7 +61,8 @@ export class EnvelopePool {
 			startHz: this.envelope.frequencyHz + offsetHz,
 			sweepHzPerS: 0,
 			chirp: 0,
-			stepS: 1 / (this.ratePerS * PER_ENVELOPE),
+			// off the symbols' own beat: else every instant would fall at one of a few places in the symbol
+			stepS: 1 / (this.ratePerS * (PER_ENVELOPE + 0.381966)),
 			lead: 0,
 			total
 		};

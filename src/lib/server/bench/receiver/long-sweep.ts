@@ -32,15 +32,14 @@ export class LongSweep {
 		const peaks = detector !== 'average' && detector !== 'sample';
 		this.conditions = new LongBucketConditions(frame, incident, scale, seed, peaks);
 		if (filtersVideo(frame)) this.smoothing = new Smoothing(frame, scale);
-		if (!peaks) return;
-		this.edges = new SharedEdges(frame, scale);
+		if (peaks && !this.smoothing) this.edges = new SharedEdges(frame, scale);
 	}
 
 	row(context: RowContext, out: Float64Array): void {
 		const random = context.random('law');
 		this.conditions.start(context);
 		if (this.detector === 'sample') this.samples(random, out);
-		else if (this.edges) this.peaks(context, random, out);
+		else if (this.detector !== 'average') this.peaks(context, random, out);
 		else
 			for (let b = 0; b < this.frame.points; b++) {
 				const { pieces, windows } = this.conditions.bucket(b, random);
@@ -66,26 +65,18 @@ export class LongSweep {
 	}
 
 	private peaks(context: RowContext, random: Random, out: Float64Array): void {
-		const { frame, edges, conditions } = this;
-		edges!.draw(context.random('edges'), (b) => conditions.edge(b, random));
+		const { frame, edges, conditions, detector, scale, bt, table, smoothing } = this;
+		edges?.draw(context.random('edges'), (b) => conditions.edge(b, random));
 		for (let b = 0; b < frame.points; b++) {
 			const { pieces, windows } = conditions.bucket(b, random);
-			// half of 1/B at either end is followed, the rest is drawn
-			const free = pieces.reduce((sum, q) => sum + q.share, 0);
-			const trim = free > 0 ? Math.max(0, free - 1 / this.bt) / free : 0;
-			for (const piece of pieces) piece.share *= trim;
-			windows.push(edges!.window(b));
-			out[b] = peakOf(
-				b,
-				this.detector,
-				this.scale,
-				pieces,
-				windows,
-				this.bt,
-				this.table,
-				this.smoothing,
-				random
-			);
+			if (edges) {
+				// half of 1/B at either end is followed, the rest is drawn
+				const free = pieces.reduce((sum, q) => sum + q.share, 0);
+				const trim = free > 0 ? Math.max(0, free - 1 / bt) / free : 0;
+				for (const piece of pieces) piece.share *= trim;
+				windows.push(edges.window(b));
+			}
+			out[b] = peakOf(b, detector, scale, pieces, windows, bt, table, smoothing, random);
 		}
 	}
 }

@@ -4,9 +4,9 @@ import type { Frame } from './frame';
 import { GaussianProcess } from './gaussian-process';
 import type { Window } from './long-bucket';
 import type { PeakFinder } from './detect';
-import { envelopePeaks, videoPeaks } from './peak-finders';
+import { envelopePeaks } from './peak-finders';
 import type { Random } from './random';
-import { filtersVideo, onePole, powerOnScale, toScale } from './video';
+import { powerOnScale } from './video';
 
 /** Samples of one edge (8 per 1/B, ends included), and lattice steps from one edge to the next: far enough to be independent. */
 const EDGE = 9;
@@ -28,26 +28,19 @@ export class SharedEdges {
 	private readonly video: Float64Array;
 	private readonly amplitude: Float64Array;
 	private readonly find: PeakFinder;
-	private readonly filtered: boolean;
 
-	constructor(
-		private readonly frame: Frame,
-		private readonly scale: Scale
-	) {
+	constructor(frame: Frame, scale: Scale) {
 		this.total = (frame.points + 1) * APART + 4;
 		this.process = new GaussianProcess(frame.rbwHz, 1 / (8 * frame.rbwHz), this.total);
 		this.re = new Float64Array(this.total);
 		this.im = new Float64Array(this.total);
 		this.video = new Float64Array(this.total);
 		this.amplitude = new Float64Array(this.total);
-		this.filtered = filtersVideo(frame);
-		this.find = this.filtered
-			? videoPeaks(this.video)
-			: envelopePeaks(this.re, this.im, this.video, (power) => powerOnScale(power, scale));
+		this.find = envelopePeaks(this.re, this.im, this.video, (power) => powerOnScale(power, scale));
 	}
 
 	draw(random: Random, at: (edge: number) => EdgeConditions): void {
-		const { re, im, video, amplitude, frame } = this;
+		const { re, im, video, amplitude } = this;
 		for (let e = 0, i = 2; i + APART <= this.total; e++, i += APART) {
 			const { v, re: x, im: y } = at(e);
 			amplitude.fill(Math.sqrt(v / 2), i - 2, i + APART - 2);
@@ -56,9 +49,6 @@ export class SharedEdges {
 		}
 		this.process.addTo(random, amplitude, re, im);
 		for (let i = 0; i < this.total; i++) video[i] = re[i] * re[i] + im[i] * im[i];
-		if (!this.filtered) return;
-		toScale(video, this.scale, 0, this.total);
-		onePole(video, frame.vbwHz, 1 / (8 * frame.rbwHz), this.total, video[0]);
 	}
 
 	/** Extremes, on the scale, of the two half edges of bucket b: its start's later half and its end's earlier half. */

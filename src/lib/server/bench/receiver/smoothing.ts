@@ -3,11 +3,11 @@ import type { Scale } from '$lib/schemas/settings';
 import { meanOnScale } from './average-laws';
 import type { Frame } from './frame';
 import type { Piece } from './long-bucket';
-import { SMOOTHING_TABLE } from './smoothing-table';
+import { SMOOTHING_LENGTHS, SMOOTHING_TABLE, type SmoothingRow } from './smoothing-table';
 
 /**
- * The filtered extreme stands closer to the mean: by a share that was measured, by this bench's own sampled sweep, for each scale
- * and ratio VBW/B (src/cli/smoothing-table.ts makes the table). Shares are of the distance from the mean on the scale.
+ * The filtered extreme stands closer to the mean: by a share that was measured, by this bench's own sampled sweep, for each scale,
+ * ratio VBW/B and length of bucket (src/cli/smoothing-table.ts makes the table). Shares are of the distance from the mean on the scale.
  */
 export class Smoothing {
 	private readonly greatest: number;
@@ -18,9 +18,10 @@ export class Smoothing {
 		private readonly scale: Scale
 	) {
 		const table = SMOOTHING_TABLE[scale];
-		const at = Math.log10(frame.vbwHz / frame.rbwHz);
-		this.greatest = between(table.greatest, at);
-		this.least = between(table.least, at);
+		const ratio = Math.log10(frame.vbwHz / frame.rbwHz);
+		const bt = frame.rbwHz * frame.bucketS;
+		this.greatest = shareOf(table.greatest, ratio, bt);
+		this.least = shareOf(table.least, ratio, bt);
 	}
 
 	/** @param value the unfiltered extreme on the scale */
@@ -36,8 +37,20 @@ export class Smoothing {
 	}
 }
 
-/** Straight between the table's ratios, flat outside. */
-function between(points: readonly (readonly [number, number])[], at: number): number {
+/** Straight between the table's ratios, and over the logarithm of the length; flat outside. */
+function shareOf(rows: readonly SmoothingRow[], ratio: number, bt: number): number {
+	const lengths = SMOOTHING_LENGTHS.map((length, i) => [
+		Math.log(length),
+		between(
+			rows.map((row) => [row[0], row[i + 1]]),
+			ratio
+		)
+	]);
+	return between(lengths, Math.log(bt));
+}
+
+/** Straight between points [x, y], flat outside. */
+function between(points: number[][], at: number): number {
 	if (at <= points[0][0]) return points[0][1];
 	for (let i = 1; i < points.length; i++) {
 		const [x1, y1] = points[i];
