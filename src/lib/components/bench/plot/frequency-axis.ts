@@ -30,8 +30,8 @@ const minorsFor: Record<number, number> = { 1: 10, 2: 4, 5: 5 };
 /** Width of one character of a 12 px monospaced axis figure, and the least gap between figures, px. */
 const characterPx = 7.3;
 const gapPx = 14;
-/** Long ticks stand at least this far apart where there is room, px. */
-const leastStepPx = 110;
+/** Long ticks stand at least this far apart: closer on a narrow plot, which would have none else, px. */
+const leastStepPx = (widthPx: number) => (widthPx < 500 ? 72 : 110);
 
 /** The 1-2-5 step nearest above `least`. */
 export function niceStep(least: number): { step: number; leading: 1 | 2 | 5 } {
@@ -57,7 +57,7 @@ export function frequencyAxis(
 	const { unit, hz } = units.find((u) => largest >= u.hz) ?? units[units.length - 1];
 	if (!(span > 0)) return { unit, ticks: [] };
 	const widthPx = rightPx - leftPx;
-	const { step, leading } = niceStep((span * leastStepPx) / widthPx);
+	const { step, leading } = niceStep((span * leastStepPx(widthPx)) / widthPx);
 	const decimals = Math.max(0, Math.ceil(-Math.log10(step / hz) - 1e-9));
 	const minors = minorsFor[leading];
 	const minorStep = step / minors;

@@ -67,6 +67,7 @@ export class AnswerSheet {
 		this.trouble = undefined;
 		try {
 			await this.#wire.handIn($state.snapshot(this.answers));
+			this.state = 'kept';
 			return true;
 		} catch (error) {
 			if (!(error instanceof Refusal)) {
