@@ -31,7 +31,7 @@ const minorsFor: Record<number, number> = { 1: 10, 2: 4, 5: 5 };
 const characterPx = 7.3;
 const gapPx = 14;
 /** Long ticks stand at least this far apart: closer on a narrow plot, which would have none else, px. */
-const leastStepPx = (widthPx: number) => (widthPx < 500 ? 72 : 110);
+const leastStepPx = (widthPx: number) => (widthPx < 500 ? 60 : 110);
 
 /** The 1-2-5 step nearest above `least`. */
 export function niceStep(least: number): { step: number; leading: 1 | 2 | 5 } {

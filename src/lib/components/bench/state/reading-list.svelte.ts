@@ -66,7 +66,7 @@ export class ReadingList {
 	 * @throws Refusal with the reason why the sweeps don't support it
 	 */
 	async take(row: ReadingRow): Promise<ReadingView> {
-		const trace = this.#traces.shown[row.trace - 1];
+		const trace = this.#traces.read[row.trace - 1];
 		await this.#run.settleAcknowledgement(trace.rows.to);
 		const reading = await this.#wire.takeReading({
 			rows: trace.rows,
@@ -79,7 +79,7 @@ export class ReadingList {
 
 	/** A trace as `measure` takes it; undefined while it holds nothing. */
 	traceOf(number: number): Trace | undefined {
-		const shown = this.#traces.shown[number - 1];
+		const shown = this.#traces.read[number - 1];
 		return shown && shown.levelsDbm.length > 1 ? measurable(shown, this.#run.resolved) : undefined;
 	}
 
@@ -89,7 +89,7 @@ export class ReadingList {
 	}
 
 	#takenFrom(number: number): string {
-		const shown = this.#traces.shown[number - 1];
+		const shown = this.#traces.read[number - 1];
 		return shown && shown.levelsDbm.length > 0
 			? takenFromWords({ from: shown.rows.to, to: shown.rows.to }, number)
 			: '';

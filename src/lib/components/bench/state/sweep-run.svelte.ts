@@ -58,6 +58,7 @@ export class SweepRun {
 			for (const frame of frames) if (frame.type === 'piece') this.#traces.take(frame);
 		}
 		this.#traces.show();
+		this.#traces.settle();
 	}
 
 	/** Sweeps on with the set-up in force, `sweeps` times or until stopped. */
@@ -70,6 +71,7 @@ export class SweepRun {
 		this.running = false;
 		this.lost = false;
 		this.#stream?.abort();
+		this.#traces.settle();
 		this.#acknowledge(true);
 	}
 
@@ -155,6 +157,7 @@ export class SweepRun {
 				if (signal.aborted) return;
 				this.#acknowledge(false);
 				if (this.ended) {
+					this.#traces.settle();
 					this.#acknowledge(true);
 					return;
 				}

@@ -20,8 +20,13 @@ export interface ShownTrace extends TraceSetUp {
 /** Points kept since the restart, so that a trace turned to hold or average starts from all its rows. */
 const keptPoints = 12_000_000;
 
+/** Figures change at most this often, ms. */
+const readEveryMs = 200;
+
 export class TraceSet {
 	shown = $state.raw<readonly ShownTrace[]>([]);
+	/** What readings are taken from: the traces as they stood a moment ago at most, so that figures can be read. */
+	read = $state.raw<readonly ShownTrace[]>([]);
 	/** Last whole row in the traces; undefined before the first. */
 	lastRow = $state<number | undefined>();
 	/** Where holds and averages start. */
@@ -33,6 +38,7 @@ export class TraceSet {
 	#setUps: readonly TraceSetUp[] = [];
 	#scale: ResolvedSettings['scale'] = 'log';
 	#rows: { row: number; levelsDbm: Float32Array }[] = [];
+	#readAtMs = -Infinity;
 	#piece: Float32Array | undefined;
 	#sweptPoints = 0;
 	#held: Partial<Record<TraceSetUp['mode'], ArrayLike<number>>> = {};
@@ -75,6 +81,13 @@ export class TraceSet {
 		this.lastRow = this.#rows.at(-1)?.row;
 		this.progress = this.#piece && this.#sweptPoints / this.#piece.length;
 		this.shown = this.#setUps.map((setUp, i) => this.#kept[i] ?? this.#finished(setUp));
+		if (this.rowCount <= 1 || performance.now() - this.#readAtMs >= readEveryMs) this.settle();
+	}
+
+	/** Lets readings see the traces as they stand now. */
+	settle(): void {
+		this.read = this.shown;
+		this.#readAtMs = performance.now();
 	}
 
 	#add(row: number, levelsDbm: Float32Array): void {
