@@ -23,8 +23,13 @@ export function addBurst(
 	const { stepS, lead } = frame;
 	const edgeS = 2 / frame.rbwHz;
 	const indexAt = (s: number): number => Math.min(to, Math.max(from, Math.ceil(s / stepS) + lead));
-	if ((stopS - startS) * frame.rbwHz < IMPULSE_LIKE) {
-		addImpulse(frame, line, startS, stopS, indexAt(startS - edgeS), indexAt(stopS + edgeS), re, im);
+	const parts = Math.ceil(((stopS - startS) * frame.rbwHz) / IMPULSE_LIKE);
+	if (parts <= MOST_IMPULSES) {
+		const first = indexAt(startS - edgeS);
+		const last = indexAt(stopS + edgeS);
+		const part = (stopS - startS) / parts;
+		for (let i = 0; i < parts; i++)
+			addImpulse(frame, line, startS + i * part, startS + (i + 1) * part, first, last, re, im);
 		return;
 	}
 	if (stopS - startS <= 2 * edgeS) {
@@ -40,8 +45,9 @@ export function addBurst(
 	addEdges(frame, line, -Infinity, stopS, c, d, re, im);
 }
 
-/** A burst shorter than this (in 1/B) meets the filter as an impulse: the answer's own shape, to 10⁻⁴ of its peak. */
-const IMPULSE_LIKE = 0.02;
+/** A burst shorter than this (in 1/B) meets the filter as an impulse: the answer's own shape, to 2·10⁻³ of its peak; a few of them make a longer one. */
+const IMPULSE_LIKE = 0.05;
+const MOST_IMPULSES = 4;
 
 /** y = a·e^{jψ(m)}·τ·sinc(δτ)·h(t − m), with m the burst's middle, τ its length and h = √(π/c)·exp(−π²t²/c). */
 function addImpulse(

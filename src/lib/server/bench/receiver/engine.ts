@@ -14,6 +14,7 @@ import type { Seed } from './random';
 import { SampledSweep } from './sampled-sweep';
 import { SETTLED, SettledVideoSweep } from './settled-video-sweep';
 import { SkirtContribution } from './skirt-contribution';
+import { skirtShows } from './skirt-shows';
 import { videoKind } from './video';
 
 /** Buckets longer than this (in 1/B) follow the laws. */
@@ -69,7 +70,7 @@ function contributions(incident: Incident, frame: Frame, seed: Seed): Contributi
 		...noises,
 		...incident.lines.map((line) => new LineContribution(line, floorMw, seed)),
 		...incident.lines.flatMap((line, i) =>
-			line.skirt && !line.timing && SkirtContribution.matters(line, line.skirt, frame, floorMw)
+			line.skirt && !line.timing && skirtShows(line, line.skirt, incident.lines, frame, floorMw)
 				? [new SkirtContribution(line, line.skirt, frame, `skirt/${i}`)]
 				: []
 		),

@@ -87,6 +87,14 @@ export class EnvelopePool {
 			this.stretches = this.schedule.stretches(clockS, clockS + this.frame.points * this.frame.bucketS);
 	}
 
+	/** Whether the filter, tuned there, can see anything of it. */
+	reaches(tunedHz: number): boolean {
+		const { timing, frequencyHz } = this.envelope;
+		if (timing?.hop) return true;
+		const drift = (timing?.driftHzPerS ?? 0) * this.clockS;
+		return Math.abs(tunedHz - frequencyHz - drift) < this.halfWidthHz;
+	}
+
 	/** Power at a random instant near t seconds into the row; 0 while it is off or out of reach. */
 	power(t: number, random: Random): number {
 		const instants = this.seenAt(t)?.instants;

@@ -17,6 +17,8 @@ import { WindowSampler, type WindowBurst } from './window-sampler';
 
 /** Windows followed in one bucket at most; the rest are taken to be like them. */
 const MOST_WINDOWS = 6;
+/** Amplitude of an edge's splatter at δ from its line, times δ/B: the tail of the error function, 1/(2√(2π·ln 2)). */
+const SPLATTER = 0.24;
 /** Instants at which beating lines are looked at in one bucket. */
 const BEAT_NODES = 24;
 
@@ -90,7 +92,10 @@ export class LongBucketConditions {
 		const toS = fromS + frame.bucketS;
 		const lines = this.passing.filter((p) => p.fromS < toS && p.toS > fromS).map((p) => p.line);
 		const margin = 2 / frame.rbwHz;
-		const bursts = touching(this.timed.bursts, this.burstCursor, fromS - margin, toS + margin);
+		const middleS = (fromS + toS) / 2;
+		const bursts = touching(this.timed.bursts, this.burstCursor, fromS - margin, toS + margin).filter((q) =>
+			this.shows(q, middleS)
+		);
 		const stretches = touching(this.timed.stretches, this.stretchCursor, fromS, toS);
 		const modulated = this.modulated.within(fromS, toS);
 		if (lines.length === 0 && bursts.length === 0 && stretches.length === 0 && !modulated)
@@ -140,6 +145,16 @@ export class LongBucketConditions {
 			this.modulated.addExtremeAt(t, this.frame.bucketS, greatest, out, random);
 			return { share: rest / 2, v, p: out[0] * out[0] + out[1] * out[1] };
 		});
+	}
+
+	/** Whether a burst, or the splatter of its edges (0.24·B/δ of its amplitude at δ from it), stands out of the noise. */
+	private shows({ line }: Burst, t: number): boolean {
+		const { frame } = this;
+		const across = Math.abs(line.passingHzPerS) * frame.bucketS;
+		const away = Math.max(0, Math.abs(line.offsetHz - line.passingHzPerS * t) - across / 2);
+		const power = line.re * line.re + line.im * line.im;
+		if (away <= reachHz(frame, power, this.noise.least, line.passingHzPerS)) return true;
+		return this.followsEdges && power * ((SPLATTER * frame.rbwHz) / away) ** 2 > 0.05 * this.noise.least;
 	}
 
 	private isShort(burst: Burst): boolean {

@@ -30,7 +30,7 @@ export class ModulatedSources {
 		const { frame, movers, pools } = this;
 		if (movers.length === 0 && pools.length === 0) return false;
 		const at = [fromS, (fromS + toS) / 2, toS].map((t) => frame.startHz + frame.sweepHzPerS * t);
-		return pools.length > 0 || movers.some((m) => at.some((f) => m.reaches(f)));
+		return [...movers, ...pools].some((source) => at.some((f) => source.reaches(f)));
 	}
 
 	/** Adds their answer t seconds into the row to out[0], out[1]; waveforms at a random instant near it, with a phase of their own. */

@@ -10,13 +10,12 @@ import type { Frame } from './frame';
 import { SKIRT_FROM_RBW } from './front-end/filtered-skirt';
 import type { IncidentLine } from './incident';
 import { passing } from './line-contribution';
+import type { PassingLine } from './line-response';
 
 /** The impulse response is cut here, in 1/B. */
 const CUT_RBW = 1.15;
 /** The lattice carries what the filter sees from 3.5 B away without folding: 12 samples per 1/B. */
 const PER_RBW = 12;
-/** A skirt weaker than this against the noise beside it is left out. */
-const NEGLIGIBLE = 1e-3;
 
 /** What one stretch of samples needs, kept from row to row. */
 interface SkirtPlan {
@@ -32,6 +31,12 @@ interface SkirtPlan {
 	y: Float64Array;
 }
 
+interface Mixing {
+	offsetHz: number;
+	mixCos: Float64Array;
+	mixSin: Float64Array;
+}
+
 export class SkirtContribution implements Contribution {
 	/** √carrier power over the line's amplitude: L is counted from the whole carrier. */
 	private readonly whole: number;
@@ -41,6 +46,7 @@ export class SkirtContribution implements Contribution {
 	private readonly taps: Float64Array;
 	private readonly half: number;
 	private plan?: SkirtPlan;
+	private mixed?: Mixing;
 
 	constructor(
 		private readonly line: IncidentLine,
@@ -65,16 +71,6 @@ export class SkirtContribution implements Contribution {
 		this.taps = taps.map((g) => g / sum);
 	}
 
-	/** Whether the skirt shows at all beside noise of this power through B. */
-	static matters(line: IncidentLine, skirts: PhaseNoisePoint[][], frame: Frame, floorMw: number): boolean {
-		const power = line.re * line.re + line.im * line.im;
-		const near = skirts.reduce((sum, points) => {
-			const within = phaseNoiseIntegral(points);
-			return sum + within(3.5 * frame.rbwHz) - within(frame.rbwHz);
-		}, 0);
-		return power * near > NEGLIGIBLE * floorMw;
-	}
-
 	addTo(row: RowContext, frame: Frame, re: Float64Array, im: Float64Array): void {
 		const line = passing(this.line, frame, row.clockS);
 		const { from, to } = reachIndexes(frame, line.offsetHz, line.passingHzPerS, SKIRT_FROM_RBW * frame.rbwHz);
@@ -93,18 +89,30 @@ export class SkirtContribution implements Contribution {
 			spectrum[2 * (size - k) + 1] = -q;
 		}
 		fft.inverseTransform(phase, spectrum);
-		const firstS = (from - frame.lead) * frame.stepS - this.half * this.stepS;
+		const { mixCos, mixSin } = this.mixing(line, frame, from, count);
 		for (let i = 0; i < count; i++) {
-			const t = firstS + i * this.stepS;
-			const psi = 2 * Math.PI * ((line.offsetHz * t) % 1) - Math.PI * line.passingHzPerS * t * t;
-			const cos = Math.cos(psi);
-			const sin = Math.sin(psi);
+			const cos = mixCos[i];
+			const sin = mixSin[i];
 			// jφ·a·e^{jψ}; the inverse transform divides by its size
 			const turn = phase[2 * i] * size * this.whole;
 			x[i] = -turn * (line.re * sin + line.im * cos);
 			y[i] = turn * (line.re * cos - line.im * sin);
 		}
 		this.filter(from, to, x, y, re, im);
+	}
+
+	/** e^{jψ} of the chirp over the stretch: the same for every row, as long as the line stands where it was. */
+	private mixing(line: PassingLine, frame: Frame, from: number, count: number): Mixing {
+		const known = this.mixed;
+		if (known && known.offsetHz === line.offsetHz && known.mixCos.length === count) return known;
+		const firstS = (from - frame.lead) * frame.stepS - this.half * this.stepS;
+		const psi = (i: number): number => {
+			const t = firstS + i * this.stepS;
+			return 2 * Math.PI * ((line.offsetHz * t) % 1) - Math.PI * line.passingHzPerS * t * t;
+		};
+		const turns = Float64Array.from({ length: count }, (_, i) => psi(i));
+		this.mixed = { offsetHz: line.offsetHz, mixCos: turns.map(Math.cos), mixSin: turns.map(Math.sin) };
+		return this.mixed;
 	}
 
 	private prepared(from: number, to: number): SkirtPlan {

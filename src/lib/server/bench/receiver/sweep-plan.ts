@@ -46,7 +46,9 @@ export function planSweep(
 		row(n, clockS) {
 			if (!engine) throw new RangeError('the input has protected itself: no sweep can be made');
 			engine.row({ clockS, random: (stream) => new Random(seed, n, stream) }, values);
-			return Float32Array.from(values, (value, i) => scaleToDbm(value, settings.scale) + shownDb[i]);
+			const levels = new Float32Array(values.length);
+			for (let i = 0; i < levels.length; i++) levels[i] = scaleToDbm(values[i], settings.scale) + shownDb[i];
+			return levels;
 		},
 		durationS(n) {
 			const jitter = new Random(seed, n, 'retrace').uniform();
