@@ -121,6 +121,20 @@ describe('gradeAnswer on a marker read as the power', () => {
 		expect(both.ladder!.parts.map(({ change }) => change)[1]).toBeCloseTo(lead, 9);
 	});
 
+	it('is named with the lead left out when it was copied off the screen, whatever vague set-ups were swept before', () => {
+		// a set-up in passing, one sweep of a coarse filter: many mistakes would give almost any number there
+		const wide = { ...drawn.brief.start, rbwHz: 30e3, detector: 'positive-peak' as const };
+		const log = [
+			{ settings: wide, firstRow: 0, sweeps: 1, clockS: 0 },
+			...record.log.map((entry) => ({ ...entry, firstRow: entry.firstRow + 1 }))
+		];
+		const { value } = record.answers[power.id];
+		expect(named({ log, readings: [], answers: { [power.id]: { value: value - lead } } })).toEqual([
+			'marker-as-power',
+			'lead-left-out'
+		]);
+	});
+
 	it('is ruled out for whoever read channel power', () => {
 		const marked = record.answers[power.id].value;
 		const attached = taught.record.answers[power.id].readingId;

@@ -40,14 +40,17 @@ export function fromSource(source: Source, watched: readonly Watched[], evidence
 	return [...byValue.values()];
 }
 
-/** What theory gives for each set-up that swept, when no reading says what was done. */
+/**
+ * What theory gives for each set-up that swept, when no reading says what was done. A set-up in which the mistake would give almost
+ * any number (a spread wider than the tolerance) explains nothing.
+ */
 function fromTheory(watched: readonly Watched[], evidence: Evidence): Candidate[] {
 	const errorDb = receiverErrorDb(evidence);
 	return watched.flatMap((one) =>
 		evidence.setUps.flatMap((setUp): Candidate[] => {
 			if (one.mistake.stage !== 'reading') return [];
 			const predicted = one.mistake.predict(evidence, setUp);
-			if (!predicted) return [];
+			if (!predicted || predicted.spread > evidence.question.tolerance) return [];
 			return [{ watched: [one], value: predicted.value + errorDb, spread: predicted.spread, setUp }];
 		})
 	);

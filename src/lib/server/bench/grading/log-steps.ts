@@ -36,7 +36,7 @@ export function logSteps(
 	const blames = judged.flatMap(({ judgement, explained }) => blamesOf(judgement, explained));
 	const badAt = (is: (blame: Blame) => boolean) => {
 		const texts = new Set(blames.filter(is).map(({ text }) => text));
-		return texts.size > 0 ? { bad: [...texts].join(' ') } : {};
+		return texts.size > 0 ? { bad: [...texts].join('; ').replaceAll('; Here: ', '; ') } : {};
 	};
 	const setUps = record.log.flatMap((entry, i) => {
 		const next = record.log[i + 1]?.firstRow ?? Infinity;
