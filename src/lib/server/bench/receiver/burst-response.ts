@@ -7,7 +7,7 @@ import { addLine, type PassingLine } from './line-response';
  * Adds a burst to array indexes from…to (to excluded).
  * y = a·e^{jψ}[T(t−t₂) − T(t−t₁)] with p = π²/c + jπS, ζ = √p·s + jπδ/√p and
  * T(s) = ½K·e^{−ps²−j2πδs}·w(jζ) for Re ζ ≥ 0, K = (1+jk)^(−1/2): the difference of two complex error functions.
- * Farther than 2/B from both edges the answer is the line's own (inside) or nothing (outside).
+ * Farther than 1.4/B from both edges, where the filter's memory has fallen below 10⁻⁶, the answer is the line's own (inside) or nothing (outside).
  * @param startS, stopS the burst's edges from the sweep's start, s; may be infinite
  */
 export function addBurst(
@@ -21,7 +21,7 @@ export function addBurst(
 	im: Float64Array
 ): void {
 	const { stepS, lead } = frame;
-	const edgeS = 2 / frame.rbwHz;
+	const edgeS = EDGE_RBW / frame.rbwHz;
 	const indexAt = (s: number): number => Math.min(to, Math.max(from, Math.ceil(s / stepS) + lead));
 	const parts = Math.ceil(((stopS - startS) * frame.rbwHz) / IMPULSE_LIKE);
 	if (parts <= MOST_IMPULSES) {
@@ -45,6 +45,8 @@ export function addBurst(
 	addEdges(frame, line, -Infinity, stopS, c, d, re, im);
 }
 
+/** Time either side of an edge within which the filter answers to it, in 1/B. */
+export const EDGE_RBW = 1.4;
 /** A burst shorter than this (in 1/B) meets the filter as an impulse: the answer's own shape, to 2·10⁻³ of its peak; a few of them make a longer one. */
 const IMPULSE_LIKE = 0.05;
 const MOST_IMPULSES = 4;

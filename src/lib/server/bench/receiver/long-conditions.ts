@@ -1,6 +1,6 @@
 /** What stands at the filter during each long bucket of a row: steady noise and lines, and whatever is on for part of it. */
 import type { Scale } from '$lib/schemas/settings';
-import { addBurst } from './burst-response';
+import { addBurst, EDGE_RBW } from './burst-response';
 import type { RowContext } from './contribution';
 import type { Frame } from './frame';
 import type { Incident, IncidentLine } from './incident';
@@ -91,7 +91,7 @@ export class LongBucketConditions {
 		const fromS = b * frame.bucketS;
 		const toS = fromS + frame.bucketS;
 		const lines = this.passing.filter((p) => p.fromS < toS && p.toS > fromS).map((p) => p.line);
-		const margin = 2 / frame.rbwHz;
+		const margin = EDGE_RBW / frame.rbwHz;
 		const middleS = (fromS + toS) / 2;
 		const bursts = touching(this.timed.bursts, this.burstCursor, fromS - margin, toS + margin).filter((q) =>
 			this.shows(q, middleS)
@@ -158,7 +158,7 @@ export class LongBucketConditions {
 	}
 
 	private isShort(burst: Burst): boolean {
-		return burst.stopS - burst.startS < 4 / this.frame.rbwHz;
+		return burst.stopS - burst.startS < (2 * EDGE_RBW) / this.frame.rbwHz;
 	}
 
 	/** Instants that stand for the bucket: every interval between edges has at least one; beating lines and wide buckets need more. */
@@ -193,12 +193,12 @@ export class LongBucketConditions {
 		return list;
 	}
 
-	/** Short bursts whole, and the edges of long ones, each over the 2/B either side in which the filter answers. */
+	/** Short bursts whole, and the edges of long ones, each over the time either side in which the filter answers. */
 	private windows(b: number, bursts: Burst[], random: Random): Window[] {
 		const { frame, sampler } = this;
 		const fromS = b * frame.bucketS;
 		const toS = fromS + frame.bucketS;
-		const half = 2 / frame.rbwHz;
+		const half = EDGE_RBW / frame.rbwHz;
 		const spans: { startS: number; stopS: number }[] = [];
 		for (const burst of bursts) {
 			const middle = (burst.startS + burst.stopS) / 2;
@@ -235,7 +235,7 @@ export class LongBucketConditions {
 
 	/** Everything that is on between two instants, seen from the first. */
 	private local(bursts: Burst[], startS: number, stopS: number): WindowBurst[] {
-		const half = 2 / this.frame.rbwHz;
+		const half = EDGE_RBW / this.frame.rbwHz;
 		const list: WindowBurst[] = [];
 		for (const q of bursts)
 			if (q.stopS > startS - half && q.startS < stopS + half)
@@ -248,7 +248,7 @@ export class LongBucketConditions {
 
 	/** The filtered video t seconds into the sweep, its filter run in over `runInS`. Asked in rising order of t. */
 	filteredInstant(t: number, runInS: number, random: Random): number {
-		const half = 2 / this.frame.rbwHz;
+		const half = EDGE_RBW / this.frame.rbwHz;
 		const startS = t - Math.min(runInS + half, this.sampler.longestS);
 		const bursts = touching(this.timed.bursts, this.instantCursor, startS - half, t + half);
 		return this.sampler.last(t - startS, this.noise.at(t), this.local(bursts, startS, t), random);
@@ -268,7 +268,7 @@ export class LongBucketConditions {
 		const { frame, out } = this;
 		out.fill(0);
 		for (const p of this.passing) if (p.fromS <= t && p.toS >= t) addLineAt(frame, p.line, t, out);
-		const half = 2 / frame.rbwHz;
+		const half = EDGE_RBW / frame.rbwHz;
 		for (const burst of touching(this.timed.bursts, this.instantCursor, t - half, t + half)) {
 			this.x[0] = this.y[0] = 0;
 			const local = { ...frame, lead: 0, total: 1, stepS: 1 / frame.rbwHz };

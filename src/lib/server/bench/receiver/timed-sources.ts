@@ -63,6 +63,8 @@ export class TimedSources {
 				};
 			})
 		);
+		// noise shorter than the filter's memory rides on a burst that outshines it (a pulse's own phase noise)
+		this.stretches = this.stretches.filter((s) => (s.stopS - s.startS) * frame.rbwHz >= 1);
 		this.stretches.sort((a, b) => a.startS - b.startS);
 	}
 }
