@@ -17,10 +17,33 @@ const drift = z.strictObject({ hzPerS: finite });
 const timing = { gate: gate.optional(), hop: hop.optional(), drift: drift.optional() };
 const carrier = { frequencyHz: frequency, levelDbm };
 
-export const cw = z.strictObject({ kind: z.literal('cw'), ...carrier, phaseNoise: phaseNoise.optional(), ...timing });
-export const am = z.strictObject({ kind: z.literal('am'), ...carrier, modulatingHz: positive, depth: finite.min(0).max(1), ...timing });
-export const fm = z.strictObject({ kind: z.literal('fm'), ...carrier, modulatingHz: positive, deviationHz: finite.min(0), ...timing });
-export const pm = z.strictObject({ kind: z.literal('pm'), ...carrier, modulatingHz: positive, deviationRad: finite.min(0), ...timing });
+export const cw = z.strictObject({
+	kind: z.literal('cw'),
+	...carrier,
+	phaseNoise: phaseNoise.optional(),
+	...timing
+});
+export const am = z.strictObject({
+	kind: z.literal('am'),
+	...carrier,
+	modulatingHz: positive,
+	depth: finite.min(0).max(1),
+	...timing
+});
+export const fm = z.strictObject({
+	kind: z.literal('fm'),
+	...carrier,
+	modulatingHz: positive,
+	deviationHz: finite.min(0),
+	...timing
+});
+export const pm = z.strictObject({
+	kind: z.literal('pm'),
+	...carrier,
+	modulatingHz: positive,
+	deviationRad: finite.min(0),
+	...timing
+});
 export const digital = z.strictObject({
 	kind: z.literal('digital'),
 	...carrier,
@@ -29,7 +52,13 @@ export const digital = z.strictObject({
 	order: z.union([z.literal(2), z.literal(4), z.literal(16), z.literal(64), z.literal(256)]),
 	...timing
 });
-export const msk = z.strictObject({ kind: z.literal('msk'), ...carrier, bitRateHz: positive, bt: finite.min(0.1).max(10).optional(), ...timing });
+export const msk = z.strictObject({
+	kind: z.literal('msk'),
+	...carrier,
+	bitRateHz: positive,
+	bt: finite.min(0.1).max(10).optional(),
+	...timing
+});
 export const multicarrier = z.strictObject({
 	kind: z.literal('multicarrier'),
 	...carrier,
@@ -38,14 +67,30 @@ export const multicarrier = z.strictObject({
 	...timing
 });
 export const noise = z
-	.strictObject({ kind: z.literal('noise'), densityDbmPerHz: finite.min(-250).max(50), startHz: frequency, stopHz: frequency })
+	.strictObject({
+		kind: z.literal('noise'),
+		densityDbmPerHz: finite.min(-250).max(50),
+		startHz: frequency,
+		stopHz: frequency
+	})
 	.refine((e) => e.stopHz > e.startHz, { message: 'stopHz must be greater than startHz', path: ['stopHz'] });
 export const pulsed = z
 	.strictObject({ kind: z.literal('pulsed'), ...carrier, widthS: positive, periodS: positive, ...timing })
 	.refine((e) => e.periodS > e.widthS, { message: 'periodS must be greater than widthS', path: ['periodS'] });
 export const dc = z.strictObject({ kind: z.literal('dc'), volts: finite });
 
-export const emitter = z.discriminatedUnion('kind', [cw, am, fm, pm, digital, msk, multicarrier, noise, pulsed, dc]);
+export const emitter = z.discriminatedUnion('kind', [
+	cw,
+	am,
+	fm,
+	pm,
+	digital,
+	msk,
+	multicarrier,
+	noise,
+	pulsed,
+	dc
+]);
 export const device = z.strictObject({
 	toiDbm: finite.nullable(),
 	shiDbm: finite.nullable(),
