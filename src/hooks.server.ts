@@ -4,9 +4,10 @@ import { chooseScheme } from '$lib/server/hooks/choose-scheme';
 import { reportError } from '$lib/server/hooks/report-error';
 import { resolveSession } from '$lib/server/hooks/resolve-session';
 import { secureHeaders } from '$lib/server/hooks/secure-headers';
+import { useOneName } from '$lib/server/hooks/use-one-name';
 import { endStreams } from '$lib/server/services/attempts/open-streams';
 
-export const handle = sequence(secureHeaders, checkOrigin, resolveSession, chooseScheme);
+export const handle = sequence(secureHeaders, useOneName, checkOrigin, resolveSession, chooseScheme);
 
 export const handleError = reportError;
 
