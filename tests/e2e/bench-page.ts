@@ -138,6 +138,8 @@ export const answerField = (page: Page, question: number): Locator =>
 
 export async function handIn(page: Page): Promise<void> {
 	await page.getByRole('button', { name: 'Hand in', exact: true }).click();
+	// A press right after the first counts as its double click and does nothing.
+	await page.waitForTimeout(800);
 	await page.getByRole('button', { name: 'Hand in now' }).click();
 	await expect(page).toHaveURL(/\/finding$/, { timeout: 45_000 });
 }

@@ -56,6 +56,11 @@ export class AnswerSheet {
 		return this.#questions.filter(({ id }) => this.answers[id].text.trim() === '').map(({ id }) => id);
 	}
 
+	/** Answers (by position, from 1) that no reading is attached to. */
+	get bare(): number[] {
+		return this.#questions.flatMap(({ id }, i) => (this.answers[id].readingId ? [] : [i + 1]));
+	}
+
 	refuse(id: string, message: string): void {
 		this.problems = { ...this.problems, [id]: message };
 	}
