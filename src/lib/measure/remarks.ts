@@ -50,10 +50,9 @@ export function noiseRemarks(trace: Trace): Remark[] {
 }
 
 /** What stands in the way of a line's level at a point. */
-export const lineRemarks = (trace: Trace, index: number): Remark[] => [
-	...(isNoiseLike(shareAround(trace, index)) ? noiseRemarks(trace) : []),
-	...sparseLineRemarks(trace)
-];
+export const lineRemarks = (trace: Trace, index: number): Remark[] =>
+	// a signal spread like noise has no line between its points to miss
+	isNoiseLike(shareAround(trace, index)) ? noiseRemarks(trace) : sparseLineRemarks(trace);
 
 /**
  * Points too far apart for a detector that looks only at the points themselves.

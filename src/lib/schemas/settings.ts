@@ -27,19 +27,25 @@ export const correctionTable = z
 	});
 export const settings = z.strictObject({
 	centreHz: frequency.optional(),
-	spanHz: z.number().min(0).max(100e9).optional(),
+	spanHz: frequency.optional(),
 	startHz: frequency.optional(),
 	stopHz: frequency.optional(),
 	rbwHz: z.union([positive, auto]).optional(),
 	vbwHz: z.union([positive, auto]).optional(),
 	sweepTimeS: z.union([positive, auto]).optional(),
-	points: z.int().min(101).max(10001).optional(),
+	points: z
+		.int({ error: 'must be a whole number' })
+		.min(101, 'must be at least 101')
+		.max(10001, 'must be at most 10001')
+		.optional(),
 	detector: z.union([auto, z.enum(detectors)]).optional(),
 	scale: z.enum(scales).optional(),
-	referenceDbm: z.number().min(-170).max(60).optional(),
+	referenceDbm: finite.min(-170, 'must be at least −170 dBm').max(60, 'must be at most 60 dBm').optional(),
 	attenuationDb: z.union([finite.min(0), auto]).optional(),
 	preamp: z.boolean().optional(),
-	correctionDb: z.union([finite.min(-200).max(200), correctionTable]).optional(),
+	correctionDb: z
+		.union([finite.min(-200, 'must be at least −200 dB').max(200, 'must be at most 200 dB'), correctionTable])
+		.optional(),
 	input: inputSettings.optional(),
 	traces: z.array(traceSettings).min(1).max(4).optional()
 });

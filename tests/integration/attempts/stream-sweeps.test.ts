@@ -105,7 +105,7 @@ describe('streamSweeps(actor, attemptId, request, now)', () => {
 		expect(long.pieces.length).toBeGreaterThan(10);
 		expect(long.rows.size).toBe(1);
 		expect(long.pieces.every(({ clockS }, i) => i === 0 || clockS > long.pieces[i - 1].clockS)).toBe(true);
-		const veryLong = { ...settings, sweepTimeS: 300 };
+		const veryLong = { ...settings, sweepTimeS: 200 };
 		const began = performance.now();
 		const stream = await open(actor, attempt.id, veryLong, 1);
 		const { state, pieces } = await readStream(stream, (got) => got.length >= 5);
@@ -222,6 +222,17 @@ describe('streamSweeps(actor, attemptId, request, now)', () => {
 		});
 		expect(await logOf(attempt.id)).toEqual([]);
 		expect(await stored(attempt.id)).toMatchObject({ streamToken: null, nextRow: 0 });
+	});
+
+	it('refuses one sweep that would use up most of the receiver time left, and logs nothing', async () => {
+		const { actor, attempt } = await createAttempt();
+		await expect(open(actor, attempt.id, { ...settings, sweepTimeS: 1000 })).rejects.toMatchObject({
+			code: 'invalid',
+			issues: [
+				{ field: 'settings.sweepTimeS', message: expect.stringContaining('receiver time left') as string }
+			]
+		});
+		expect(await logOf(attempt.id)).toEqual([]);
 	});
 
 	it('refuses a row that is yet to come, and says which is next', async () => {

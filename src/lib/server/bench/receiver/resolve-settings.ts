@@ -21,7 +21,10 @@ function resolveRbwHz(settings: Settings, profile: ReceiverProfile, spanHz: numb
 	const { rbwHz = 'auto' } = settings;
 	if (rbwHz === 'auto') {
 		if (spanHz === 0)
-			throw new BenchError('rbwHz', 'span 0 shows level over time: state rbwHz, nothing couples it');
+			throw new BenchError(
+				'rbwHz',
+				'span 0 shows level over time: type a resolution bandwidth, automatic coupling has no span to go by'
+			);
 		return automaticRbwHz(spanHz, profile.rbwHz);
 	}
 	if (!profile.rbwHz.includes(rbwHz)) {

@@ -10,6 +10,7 @@ import { inTransaction } from '$lib/server/db/transaction';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 import { presentFlag } from '$lib/server/present/attempt';
+import { formatTime } from '$lib/units/format-quantity';
 import { markDrawn } from './acknowledge-rows';
 import { firstUnfinishedRow, type BenchPosition } from './advance-bench';
 import { getAttempt, lockOpenAttempt } from './get-attempt';
@@ -38,7 +39,7 @@ export interface OpenSweeps {
 
 /**
  * Takes the receiver of an attempt: logs the set-up if it is a new one, marks what was drawn, and ends any other stream.
- * @throws DomainError `invalid` for settings that the receiver refuses; `conflict` (with nextRow) for a `from` that can't
+ * @throws DomainError `invalid` for settings that the receiver refuses or that would waste its time; `conflict` (with nextRow) for a `from` that can't
  *   be served, while the input protection waits for its reset, and once the attempt is closed
  */
 export async function openSweeps(
@@ -57,7 +58,12 @@ export async function openSweeps(
 		const attempt = await lockOpenAttempt(actor, attemptId, transaction);
 		refuseUnservable(attempt, request);
 		if (request.from > 0) await markDrawn(attempt, request.from - 1, transaction);
-		const setUp = await currentOrNewSetUp(attempt, request.settings, { source, tripped, now }, transaction);
+		const setUp = await currentOrNewSetUp(
+			attempt,
+			request.settings,
+			{ source, bench, tripped, now },
+			transaction
+		);
 		const fromRow = Math.max(setUp.firstRow, Math.min(request.from, firstUnfinishedRow(attempt)));
 		refuseFarBehind(attempt, fromRow);
 		const token = randomBytes(16).toString('hex');
@@ -103,8 +109,23 @@ function refuseFarBehind({ nextRow }: Attempt, fromRow: number): void {
 	throw new DomainError('conflict', message, { details: { nextRow } });
 }
 
+/**
+ * A sweep that would use up most of the receiver time left is refused before it begins: sped up, it would be over in seconds,
+ * and the attempt with it.
+ * @throws DomainError `invalid` naming the sweep time
+ */
+function refuseWastefulSweep(attempt: Attempt, { source, bench }: NewSetUp): void {
+	const leftS = source.definition.benchTimeS - attempt.clockS;
+	const { sweepTimeS } = bench.resolved;
+	if (leftS <= 0 || sweepTimeS <= leftS / 2) return;
+	const left = leftS < 120 ? `${Math.floor(leftS)} s` : `${Math.floor(leftS / 60)} min`;
+	const message = `A sweep of ${formatTime(sweepTimeS)} would use more than half of the ${left} of receiver time left.`;
+	throw new DomainError('invalid', message, { issues: [{ field: 'settings.sweepTimeS', message }] });
+}
+
 interface NewSetUp {
 	source: SignalSource;
+	bench: PreparedBench;
 	tripped: boolean;
 	now: Date;
 }
@@ -112,12 +133,14 @@ interface NewSetUp {
 async function currentOrNewSetUp(
 	attempt: Attempt,
 	settings: Settings,
-	{ source, tripped, now }: NewSetUp,
+	given: NewSetUp,
 	transaction: Transaction
 ): Promise<SetUp> {
+	const { source, tripped, now } = given;
 	const current = await latestSetUp(attempt.id, transaction);
 	if (current && !current.tripped && !tripped && isDeepStrictEqual(current.settings, settings))
 		return current;
+	refuseWastefulSweep(attempt, given);
 	const { nextRow, clockS } = attempt;
 	await current?.update({ endRow: firstUnfinishedRow(attempt) }, { transaction });
 	// A sweep that was under way ends here: bench time goes on from where it stood.
