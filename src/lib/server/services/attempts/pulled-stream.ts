@@ -15,7 +15,8 @@ export function pulledStream(
 			async pull(controller) {
 				try {
 					const { done, value } = await chunks.next();
-					if (!done) return controller.enqueue(value);
+					// a reader that left while this frame was made has closed the stream already
+					if (!done) return reader.signal.aborted ? undefined : controller.enqueue(value);
 				} catch (cause) {
 					over();
 					const text = cause instanceof Error ? (cause.stack ?? cause.message) : String(cause);
