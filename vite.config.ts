@@ -21,7 +21,13 @@ export default defineConfig({
 			{
 				plugins: [svelte()],
 				resolve: { alias: { $lib: lib } },
-				test: { name: 'unit', environment: 'node', include: ['tests/unit/**/*.test.ts', 'tests/*.test.ts'] }
+				test: {
+					name: 'unit',
+					environment: 'node',
+					include: ['tests/unit/**/*.test.ts', 'tests/*.test.ts'],
+					// what reads the whole tree or proves a law takes its time on a busy machine
+					testTimeout: 60_000
+				}
 			},
 			{
 				resolve: { alias: { $lib: lib } },
