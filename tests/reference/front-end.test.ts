@@ -9,6 +9,7 @@ import { COMPRESSION_UNDER_TOI_DB } from '$lib/server/bench/receiver/front-end/i
 import { prepareIncident } from '$lib/server/bench/receiver/front-end/prepare-incident';
 import type { Incident } from '$lib/server/bench/receiver/incident';
 import { resolveSettings } from '$lib/server/bench/receiver/resolve-settings';
+import { ideal as plain } from './bench-on-paper';
 
 const dbm = (milliwatts: number) => 10 * Math.log10(milliwatts);
 const ratio = (db: number) => 10 ** (db / 10);
@@ -17,19 +18,8 @@ const stage = (gainDb: number, noiseFigureDb: number) => ({
 	noiseFactor: ratio(noiseFigureDb)
 });
 const ideal: ReceiverProfile = {
-	name: 'ideal',
-	startHz: 0,
-	stopHz: 50e9,
+	...plain,
 	noiseFigureDb: [{ frequencyHz: 1e9, db: 24 }],
-	preamp: null,
-	attenuatorDb: [0, 10, 20, 30],
-	maxSafeInputDbm: 60,
-	toiDbm: null,
-	shiDbm: null,
-	phaseNoise: null,
-	residuals: [],
-	referencePpm: 0,
-	levelErrorDb: 0,
 	rbwHz: [100, 1e3, 1e4, 3e4]
 };
 const incidentOf = (scene: Scene, profile: ReceiverProfile, typed: Settings) =>

@@ -1,22 +1,19 @@
 /** A modulated signal that the filter is wide enough to follow: its waveform, mixed by the chirp, through the filter's impulse response. */
 import { reachIndexes, turns, type Contribution, type RowContext } from './contribution';
 import type { Frame } from './frame';
+import { CUT_RBW, GaussianFir } from './gaussian-fir';
 import type { IncidentEnvelope } from './incident';
 import type { Seed } from './random';
 import { Schedule } from './schedule';
 import { SymbolHash } from './symbol-hash';
 import { digitalWaveform, mskWaveform, type Waveform } from './waveform';
 
-/** The impulse response is cut at ±1.15/B, where it is below 10⁻⁴ of its peak. */
-const CUT_RBW = 1.15;
-
 export class EnvelopeContribution implements Contribution {
 	private readonly waveform: Waveform;
 	private readonly schedule?: Schedule;
 	/** Fine steps to a lattice step, so that the waveform and the filter's reach beside it fit without folding. */
 	private readonly fine: number;
-	private readonly taps: Float64Array;
-	private readonly half: number;
+	private readonly fir: GaussianFir;
 	private x = new Float64Array(0);
 	private y = new Float64Array(0);
 
@@ -33,13 +30,7 @@ export class EnvelopeContribution implements Contribution {
 		if (timing && (timing.gate || timing.hop)) this.schedule = new Schedule(timing, seed);
 		this.fine = Math.max(1, Math.ceil(frame.stepS * (2 * this.waveform.halfWidthHz + 5 * frame.rbwHz)));
 		const stepS = frame.stepS / this.fine;
-		this.half = Math.ceil(CUT_RBW / frame.rbwHz / stepS);
-		const decay = (Math.PI * Math.PI) / frame.c;
-		const taps = Float64Array.from({ length: 2 * this.half + 1 }, (_, j) =>
-			Math.exp(-decay * ((j - this.half) * stepS) ** 2)
-		);
-		const sum = taps.reduce((a, b) => a + b, 0);
-		this.taps = taps.map((g) => g / sum);
+		this.fir = new GaussianFir(frame.rbwHz, frame.c, stepS, this.fine);
 	}
 
 	addTo(row: RowContext, frame: Frame, re: Float64Array, im: Float64Array): void {
@@ -70,13 +61,13 @@ export class EnvelopeContribution implements Contribution {
 		const from = Math.max(reach.from, startS === -Infinity ? 0 : at(startS - runIn));
 		const to = Math.min(reach.to, stopS === Infinity ? frame.total : at(stopS + runIn) + 1);
 		if (to <= from) return;
-		const count = (to - from - 1) * this.fine + 1 + 2 * this.half;
+		const count = (to - from - 1) * this.fine + 1 + 2 * this.fir.half;
 		if (this.x.length < count) {
 			this.x = new Float64Array(count);
 			this.y = new Float64Array(count);
 		}
 		const stepS = frame.stepS / this.fine;
-		const firstS = (from - frame.lead) * frame.stepS - this.half * stepS;
+		const firstS = (from - frame.lead) * frame.stepS - this.fir.half * stepS;
 		this.waveform.fill(row.clockS + firstS, stepS, count, this.x, this.y);
 		if (startS !== -Infinity || stopS !== Infinity)
 			for (let i = 0; i < count; i++) {
@@ -85,23 +76,7 @@ export class EnvelopeContribution implements Contribution {
 			}
 		const phase = turns(offset0 * row.clockS) + turns(0.5 * drift * row.clockS * row.clockS);
 		mix(this.x, this.y, count, offsetHz, rate, firstS, stepS, phase);
-		this.filter(from, to, re, im);
-	}
-
-	private filter(from: number, to: number, re: Float64Array, im: Float64Array): void {
-		const { taps, half, fine, x, y } = this;
-		const { re: ar, im: ai } = this.envelope;
-		for (let i = from, centre = half; i < to; i++, centre += fine) {
-			let sx = taps[half] * x[centre];
-			let sy = taps[half] * y[centre];
-			for (let j = 1; j <= half; j++) {
-				const g = taps[half + j];
-				sx += g * (x[centre - j] + x[centre + j]);
-				sy += g * (y[centre - j] + y[centre + j]);
-			}
-			re[i] += ar * sx - ai * sy;
-			im[i] += ar * sy + ai * sx;
-		}
+		this.fir.addTo(from, to, this.x, this.y, this.envelope.re, this.envelope.im, re, im);
 	}
 }
 

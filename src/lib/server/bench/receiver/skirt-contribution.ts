@@ -8,12 +8,11 @@ import { integratedPhaseNoise, phaseNoiseIntegral } from '../signal/phase-noise'
 import { reachIndexes, type Contribution, type RowContext } from './contribution';
 import type { Frame } from './frame';
 import { SKIRT_FROM_RBW } from './front-end/filtered-skirt';
+import { GaussianFir } from './gaussian-fir';
 import type { IncidentLine } from './incident';
 import { passing } from './line-contribution';
 import type { PassingLine } from './line-response';
 
-/** The impulse response is cut here, in 1/B. */
-const CUT_RBW = 1.15;
 /** The lattice carries what the filter sees from 3.5 B away without folding: 12 samples per 1/B. */
 const PER_RBW = 12;
 
@@ -43,8 +42,7 @@ export class SkirtContribution implements Contribution {
 	private readonly within: (offsetHz: number) => number;
 	private readonly fine: number;
 	private readonly stepS: number;
-	private readonly taps: Float64Array;
-	private readonly half: number;
+	private readonly fir: GaussianFir;
 	private plan?: SkirtPlan;
 	private mixed?: Mixing;
 
@@ -62,13 +60,7 @@ export class SkirtContribution implements Contribution {
 		this.within = (f) => scale * integrals.reduce((sum, integral) => sum + integral(f), 0);
 		this.fine = Math.max(1, Math.ceil(PER_RBW * frame.rbwHz * frame.stepS));
 		this.stepS = frame.stepS / this.fine;
-		this.half = Math.ceil(CUT_RBW / frame.rbwHz / this.stepS);
-		const decay = (Math.PI * Math.PI) / frame.c;
-		const taps = Float64Array.from({ length: 2 * this.half + 1 }, (_, j) =>
-			Math.exp(-decay * ((j - this.half) * this.stepS) ** 2)
-		);
-		const sum = taps.reduce((a, b) => a + b, 0);
-		this.taps = taps.map((g) => g / sum);
+		this.fir = new GaussianFir(frame.rbwHz, frame.c, this.stepS, this.fine);
 	}
 
 	addTo(row: RowContext, frame: Frame, re: Float64Array, im: Float64Array): void {
@@ -98,14 +90,14 @@ export class SkirtContribution implements Contribution {
 			x[i] = -turn * (line.re * sin + line.im * cos);
 			y[i] = turn * (line.re * cos - line.im * sin);
 		}
-		this.filter(from, to, x, y, re, im);
+		this.fir.addTo(from, to, x, y, 1, 0, re, im);
 	}
 
 	/** e^{jψ} of the chirp over the stretch: the same for every row, as long as the line stands where it was. */
 	private mixing(line: PassingLine, frame: Frame, from: number, count: number): Mixing {
 		const known = this.mixed;
 		if (known && known.offsetHz === line.offsetHz && known.mixCos.length === count) return known;
-		const firstS = (from - frame.lead) * frame.stepS - this.half * this.stepS;
+		const firstS = (from - frame.lead) * frame.stepS - this.fir.half * this.stepS;
 		const psi = (i: number): number => {
 			const t = firstS + i * this.stepS;
 			return 2 * Math.PI * ((line.offsetHz * t) % 1) - Math.PI * line.passingHzPerS * t * t;
@@ -118,7 +110,7 @@ export class SkirtContribution implements Contribution {
 	private prepared(from: number, to: number): SkirtPlan {
 		const known = this.plan;
 		if (known && known.from === from && known.to === to) return known;
-		const count = (to - from - 1) * this.fine + 1 + 2 * this.half;
+		const count = (to - from - 1) * this.fine + 1 + 2 * this.fir.half;
 		let size = 16;
 		while (size < count) size *= 2;
 		const bins = new Float64Array(size / 2);
@@ -141,27 +133,5 @@ export class SkirtContribution implements Contribution {
 			y: new Float64Array(count)
 		};
 		return this.plan;
-	}
-
-	private filter(
-		from: number,
-		to: number,
-		x: Float64Array,
-		y: Float64Array,
-		re: Float64Array,
-		im: Float64Array
-	): void {
-		const { taps, half, fine } = this;
-		for (let i = from, centre = half; i < to; i++, centre += fine) {
-			let sx = taps[half] * x[centre];
-			let sy = taps[half] * y[centre];
-			for (let j = 1; j <= half; j++) {
-				const g = taps[half + j];
-				sx += g * (x[centre - j] + x[centre + j]);
-				sy += g * (y[centre - j] + y[centre + j]);
-			}
-			re[i] += sx;
-			im[i] += sy;
-		}
 	}
 }
