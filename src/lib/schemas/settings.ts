@@ -80,3 +80,7 @@ export interface ResolvedSettings {
 	/** The sweep time that automatic coupling would choose, s. */
 	autoSweepTimeS: number;
 }
+/** The same as it crosses the wire: made by our own server, so that only its being there is checked. */
+export const resolvedSettings = z.custom<ResolvedSettings>(
+	(value) => typeof value === 'object' && value !== null
+);

@@ -17,13 +17,17 @@ import { createEvent } from '../../factories/event';
 import { createUser } from '../../factories/user';
 import { POST as start } from '../../../src/routes/api/attempts/+server';
 import { GET as view } from '../../../src/routes/api/attempts/[id]/+server';
+import { POST as abandon } from '../../../src/routes/api/attempts/[id]/abandonment/+server';
 import { POST as acknowledge } from '../../../src/routes/api/attempts/[id]/acknowledgements/+server';
 import { POST as answer } from '../../../src/routes/api/attempts/[id]/answers/+server';
+import { GET as doneRight } from '../../../src/routes/api/attempts/[id]/done-right/+server';
+import { GET as doneRightRows } from '../../../src/routes/api/attempts/[id]/done-right/rows/+server';
 import { PUT as draft } from '../../../src/routes/api/attempts/[id]/drafts/+server';
 import { GET as finding } from '../../../src/routes/api/attempts/[id]/finding/+server';
 import { POST as hint } from '../../../src/routes/api/attempts/[id]/hints/+server';
 import { POST as reading } from '../../../src/routes/api/attempts/[id]/readings/+server';
 import { GET as rows } from '../../../src/routes/api/attempts/[id]/rows/+server';
+import { GET as setUps } from '../../../src/routes/api/attempts/[id]/set-ups/+server';
 import { POST as sweeps } from '../../../src/routes/api/attempts/[id]/sweeps/+server';
 
 type Handler = (event: RequestEvent) => Promise<Response>;
@@ -47,7 +51,11 @@ const posts: Record<string, { handler: Handler; good: () => unknown }> = {
 		good: () => ({ answers: { power: { text: '-23', unit: 'dBm' } } })
 	}
 };
-const gets = { view, hint, finding, rows } as unknown as Record<string, Handler>;
+/** Every endpoint that takes no body. */
+const gets = { view, hint, finding, rows, setUps, doneRight, doneRightRows, abandon } as unknown as Record<
+	string,
+	Handler
+>;
 
 const post = (name: string, actor: Actor | null, id: string, body: unknown) =>
 	posts[name].handler(

@@ -54,12 +54,7 @@ export function resolvedFor(source: SignalSource, settings: Settings): ResolvedS
  *   has changed since the attempt began, so that its rows can't be made again
  */
 export function preparedBench(source: SignalSource, settings: Settings): PreparedBench {
-	if (source.engineVersion !== ENGINE_VERSION) {
-		throw new DomainError(
-			'conflict',
-			'The bench has been renewed since this attempt began. Hand in, or start a new one.'
-		);
-	}
+	refuseOtherEngine(source);
 	const drawn = drawnFor(source);
 	const resolved = resolvedFor(source, settings);
 	const { traces: _, referenceDbm: __, auto: ___, autoSweepTimeS: ____, ...swept } = resolved;
@@ -70,6 +65,15 @@ export function preparedBench(source: SignalSource, settings: Settings): Prepare
 	} catch (cause) {
 		throw refusalOf(cause);
 	}
+}
+
+/** @throws DomainError `conflict` when the sweep's arithmetic has changed since the attempt began: its rows can't be made again */
+export function refuseOtherEngine({ engineVersion }: SignalSource): void {
+	if (engineVersion === ENGINE_VERSION) return;
+	throw new DomainError(
+		'conflict',
+		'The bench has been renewed since this attempt began. Hand in, or start a new one.'
+	);
 }
 
 /** When the rows of a set-up begin. @param plan of these settings */
