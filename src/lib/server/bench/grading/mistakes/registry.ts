@@ -1,5 +1,6 @@
 /** Every kind of mistake that an exercise can watch. */
 import type { MistakeKind } from '../mistake';
+import { densityForPower } from './density-for-power';
 import { densityNotDivided } from './density-not-divided';
 import { densityOverChannel } from './density-over-channel';
 import { leadLeftOut } from './lead-left-out';
@@ -13,6 +14,7 @@ import { peakOnNoise } from './peak-on-noise';
 import { wrongWidth } from './wrong-width';
 
 export const mistakeKinds: readonly MistakeKind[] = [
+	densityForPower,
 	densityNotDivided,
 	densityOverChannel,
 	leadLeftOut,
