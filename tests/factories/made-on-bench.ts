@@ -1,0 +1,40 @@
+/** A mistake watched on a question of content/, made on the bench with one seed, beside what theory says of it. */
+import { readdirSync, readFileSync } from 'node:fs';
+import { join } from 'node:path';
+import type { AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
+import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
+import type { DrawnExercise } from '$lib/server/bench/exercise/drawn-exercise';
+import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
+import { runMethod } from '$lib/server/bench/exercise/run-method';
+import { judgeQuestion } from '$lib/server/bench/grading/judge-question';
+import { predictMistake } from '$lib/server/bench/grading/predict-mistake';
+import { receiverErrorDb } from '$lib/server/bench/grading/receiver-error-db';
+import { watchedMistakes } from '$lib/server/bench/grading/watched-mistakes';
+
+export function drawnFrom(slug: string, seed: number): DrawnExercise {
+	const name = readdirSync('content', { recursive: true, encoding: 'utf8' }).find((path) =>
+		path.endsWith(`/${slug}.yaml`)
+	)!;
+	const file = join('content', name);
+	return drawExercise(parseExerciseText(readFileSync(file, 'utf8'), file), seed);
+}
+
+export function madeOnBench(drawn: DrawnExercise, questionId: string, id: string) {
+	const question = drawn.questions.find((one) => one.id === questionId)!;
+	const context = { drawn, question };
+	const watched = watchedMistakes(question).find((one) => one.id === id)!;
+	const { record } = runMethod(drawn, watched.mistake.make(drawn.method, context));
+	const { value, readingId } = record.answers[questionId];
+	const named = (left: AttemptRecord) =>
+		judgeQuestion(drawn, question, left).matched?.watched.map((one) => one.id) ?? [];
+	const answers = { [questionId]: { value } };
+	return {
+		question,
+		/** What was answered, less this receiver's own error. */
+		value: value - receiverErrorDb(context),
+		predicted: predictMistake(watched, context)!,
+		/** What the finding names with the reading attached, and from the log alone. */
+		named: named({ ...record, answers: { [questionId]: { value, readingId } } }),
+		namedFromLog: named({ ...record, readings: [], answers })
+	};
+}
