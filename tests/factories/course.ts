@@ -38,7 +38,8 @@ export async function createEdition(
 		slug: 'power-of-a-spread-signal',
 		title: 'Power of a spread signal',
 		summary: 'Why a marker misleads.',
-		lessonHtml: '<p>Lesson.</p>'
+		lesson: { title: 'Why a marker misleads', words: 1, parts: [{ kind: 'text', html: '<p>Lesson.</p>' }] },
+		figures: []
 	});
 	const definition = exerciseDefinition(over);
 	return Exercise.create({

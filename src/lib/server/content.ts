@@ -1,13 +1,16 @@
 /** Reads content/: courses as their authors write them. Whatever is broken stops it with file, line and field. */
 import { readdirSync, readFileSync } from 'node:fs';
 import { join, relative } from 'node:path';
+import { marked, type Token, type Tokens } from 'marked';
 import { isMap, isNode, isSeq, LineCounter, parseDocument, type Document } from 'yaml';
 import type { z } from 'zod';
 import { courseFile, type CourseUnit } from '$lib/schemas/course-file';
 import type { Exercise } from '$lib/schemas/exercise';
+import type { Figure } from '$lib/schemas/figure';
 import { ExerciseError } from '$lib/server/bench/exercise/exercise-error';
 import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
 import { issuesOf, pathOf } from '$lib/server/bench/exercise/zod-issues';
+import { parseFigureText } from '$lib/server/bench/figure/parse-figure';
 
 /** Something in content/ can't be published: "harbour/06-power/spread.yaml:12: questions[0].unit: …". */
 export class ContentError extends Error {
@@ -24,6 +27,8 @@ export class ContentError extends Error {
 
 export interface UnitContent extends Omit<CourseUnit, 'exercises'> {
 	lessonMarkdown: string;
+	/** Of the lesson's figure blocks, in their order. */
+	figures: Figure[];
 	exercises: Exercise[];
 }
 export interface CourseContent {
@@ -73,9 +78,45 @@ function readUnit(root: string, folder: string, unit: CourseUnit): UnitContent {
 	if (stray) throw new ContentError(join(folder, stray), 1, '', 'is not named in course.yaml');
 	return {
 		...unit,
-		lessonMarkdown: readFileSync(join(root, folder, 'lesson.md'), 'utf8'),
+		...readLesson(root, join(folder, 'lesson.md')),
 		exercises: unit.exercises.map((slug) => readExercise(root, join(folder, `${slug}.yaml`), slug))
 	};
+}
+
+/** Whether a piece of Markdown is the block of a figure. */
+export const isFigureBlock = (token: Token): token is Tokens.Code =>
+	token.type === 'code' && (token as Tokens.Code).lang?.trim() === 'figure';
+
+function readLesson(root: string, path: string): Pick<UnitContent, 'lessonMarkdown' | 'figures'> {
+	const lessonMarkdown = readText(root, path);
+	const figures: Figure[] = [];
+	let line = 1;
+	for (const token of marked.lexer(lessonMarkdown)) {
+		if (isFigureBlock(token)) {
+			const figure = readFigure(token.text, path, line + 1);
+			if (figures.some(({ id }) => id === figure.id))
+				throw new ContentError(path, line + 1, 'id', `two figures of this lesson are called ${figure.id}`);
+			figures.push(figure);
+		} else {
+			marked.walkTokens([token], (inner) => {
+				if (isFigureBlock(inner))
+					throw new ContentError(path, line, '', 'a figure stands by itself, in no list and no quotation');
+			});
+		}
+		line += token.raw.split('\n').length - 1;
+	}
+	return { lessonMarkdown, figures };
+}
+
+/** @param firstLine of the figure's text in the file */
+function readFigure(text: string, path: string, firstLine: number): Figure {
+	try {
+		return parseFigureText(text);
+	} catch (cause) {
+		if (!(cause instanceof ExerciseError)) throw cause;
+		const [{ field, message, line = 1 }] = cause.issues;
+		throw new ContentError(path, firstLine + line - 1, field, message);
+	}
 }
 
 function readExercise(root: string, path: string, slug: string): Exercise {

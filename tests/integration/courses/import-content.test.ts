@@ -9,6 +9,7 @@ import { Exercise } from '$lib/server/db/models/exercise';
 import { Unit } from '$lib/server/db/models/unit';
 import { importContent } from '$lib/server/services/courses/import-content';
 import { exerciseDefinition } from '../../factories/exercise';
+import { figureBlock, writtenFigure } from '../../factories/figure';
 
 const now = new Date('2026-03-02T09:00:00Z');
 let root: string;
@@ -27,7 +28,10 @@ beforeEach(() => {
 		summary: 'From the quay.',
 		units: [{ number: 6, slug: 'spread', title: 'Spread', summary: 'Wide.', exercises: [`spread-${made}`] }]
 	});
-	writeFileSync(path('06-spread/lesson.md'), '# Why\n\nA **marker** reads one slice.\n');
+	writeFileSync(
+		path('06-spread/lesson.md'),
+		`# Why\n\nA **marker** reads one slice.\n\n${figureBlock()}\nSo it does.\n`
+	);
 	write(`06-spread/spread-${made}.yaml`, exerciseDefinition({ slug: `spread-${made}` }));
 });
 afterEach(() => rmSync(root, { recursive: true }));
@@ -36,6 +40,7 @@ const path = (name: string) => join(root, slug, name);
 const write = (name: string, data: unknown) => writeFileSync(path(name), stringify(data));
 const change = (name: string, from: string | RegExp, to: string) =>
 	writeFileSync(path(name), readFileSync(path(name), 'utf8').replace(from, to));
+const LESSON = '06-spread/lesson.md';
 const exerciseFile = () => `06-spread/spread-${made}.yaml`;
 const run = () => importContent({ root, now });
 const editions = async () => {
@@ -56,7 +61,16 @@ describe('importContent({root, now})', () => {
 		expect(edition).toMatchObject({ number: 1, title: 'Harbour', summary: 'From the quay.', createdAt: now });
 		const [unit] = await Unit.findAll({ where: { editionId: edition.id } });
 		expect(unit).toMatchObject({ number: 6, slug: 'spread', title: 'Spread' });
-		expect(unit.lessonHtml).toContain('<strong>marker</strong>');
+		expect(unit.lesson).toEqual({
+			title: 'Why',
+			words: 8,
+			parts: [
+				{ kind: 'text', html: '<p>A <strong>marker</strong> reads one slice.</p>' },
+				{ kind: 'figure', id: 'hump' },
+				{ kind: 'text', html: '<p>So it does.</p>' }
+			]
+		});
+		expect(unit.figures).toEqual([{ ...writtenFigure(), rangeDb: 80 }]);
 		const [exercise] = await Exercise.findAll({ where: { editionId: edition.id } });
 		expect(exercise).toMatchObject({ unitId: unit.id, number: 1, slug: `spread-${made}`, tries: 3 });
 		expect(exercise.definition).toEqual(exerciseDefinition({ slug: `spread-${made}` }));
@@ -73,6 +87,7 @@ describe('importContent({root, now})', () => {
 
 	it.each([
 		['a lesson', '06-spread/lesson.md', 'slice', 'part'],
+		['a figure', '06-spread/lesson.md', 'climbs', 'rises'],
 		['an exercise', '', 'tries: 3', 'tries: 4'],
 		['the course', 'course.yaml', 'From the quay.', 'From the pier.']
 	])(
@@ -130,6 +145,31 @@ describe('importContent({root, now})', () => {
 			'a lesson that is missing',
 			() => rmSync(path('06-spread/lesson.md')),
 			() => /06-spread\/lesson.md:1: is missing/
+		],
+		[
+			'a figure that the receiver can’t do',
+			() => change(LESSON, '- 1000\n', '- 1001\n'),
+			() => new RegExp(`^${slug}/${LESSON}:${lineOf(LESSON, '- 1001')}: controls\\[0\\].choices\\[1\\]: `)
+		],
+		[
+			'a figure with a key that nobody knows',
+			() => change(LESSON, 'seed:', 'sead:'),
+			() => new RegExp(`^${slug}/${LESSON}:\\d+: seed: `)
+		],
+		[
+			'a figure that is no YAML',
+			() => change(LESSON, 'caption:', 'caption: ]['),
+			() => new RegExp(`^${slug}/${LESSON}:${lineOf(LESSON, '][')}: `)
+		],
+		[
+			'two figures of one name',
+			() => change(LESSON, 'So it does.', `So it does.\n\n${figureBlock()}`),
+			() => new RegExp(`^${slug}/${LESSON}:\\d+: id: two figures of this lesson are called hump`)
+		],
+		[
+			'a figure in a list',
+			() => writeFileSync(path(LESSON), `# Why\n\n- ${figureBlock().replaceAll('\n', '\n  ')}`),
+			() => new RegExp(`^${slug}/${LESSON}:3: a figure stands by itself`)
 		],
 		[
 			'a file that no unit names',

@@ -1,11 +1,12 @@
-import { LineCounter, isMap, isNode, parseDocument, type Document } from 'yaml';
+import { LineCounter, parseDocument } from 'yaml';
 import { exercise as exerciseSchema, type Exercise } from '$lib/schemas/exercise';
 import { BenchError } from '../bench-error';
 import { checkExercise } from './check-exercise';
 import { drawParameters } from './draw-parameters';
 import { ExerciseError, type ExerciseIssue } from './exercise-error';
 import { fillExercise } from './fill-exercise';
-import { issuesOf, pathOf } from './zod-issues';
+import { lineOf } from './line-of';
+import { issuesOf } from './zod-issues';
 
 /** Draws filled in to see that every place comes out valid. */
 const TRIAL_DRAWS = 12;
@@ -54,17 +55,4 @@ export function parseExerciseText(text: string, file: string): Exercise {
 		}));
 		throw new ExerciseError(placed, file);
 	}
-}
-
-/** Line of the entry a field names, or of the nearest one around it that is there. */
-function lineOf(document: Document, lines: LineCounter, field: string): number | undefined {
-	for (let path = pathOf(field); path.length > 0; path = path.slice(0, -1)) {
-		const around = path.length > 1 ? document.getIn(path.slice(0, -1), true) : document.contents;
-		const pair = isMap(around)
-			? around.items.find(({ key }) => String(key) === String(path.at(-1)))
-			: undefined;
-		const node = isNode(pair?.key) ? pair.key : document.getIn(path, true);
-		if (isNode(node) && node.range) return lines.linePos(node.range[0]).line;
-	}
-	return undefined;
 }

@@ -5,9 +5,11 @@ import {
 	type InferAttributes,
 	type InferCreationAttributes
 } from 'sequelize';
+import type { Figure } from '$lib/schemas/figure';
+import type { Lesson } from '$lib/schemas/lesson';
 import { sequelize } from '../connection';
 
-/** A unit of an edition, with its lesson as sanitised HTML. */
+/** A unit of an edition, with its lesson as sanitised HTML and the figures that stand in it. */
 export class Unit extends Model<InferAttributes<Unit>, InferCreationAttributes<Unit>> {
 	declare id: CreationOptional<number>;
 	declare editionId: number;
@@ -16,7 +18,9 @@ export class Unit extends Model<InferAttributes<Unit>, InferCreationAttributes<U
 	declare slug: string;
 	declare title: string;
 	declare summary: string;
-	declare lessonHtml: string;
+	declare lesson: Lesson;
+	/** As the author wrote them, checked at import. */
+	declare figures: Figure[];
 }
 
 Unit.init(
@@ -27,7 +31,8 @@ Unit.init(
 		slug: DataTypes.STRING(80),
 		title: DataTypes.STRING(300),
 		summary: DataTypes.STRING(300),
-		lessonHtml: DataTypes.TEXT('medium')
+		lesson: DataTypes.JSON,
+		figures: DataTypes.JSON
 	},
 	{ sequelize, tableName: 'units', timestamps: false }
 );

@@ -6,7 +6,8 @@ import { Edition } from '$lib/server/db/models/edition';
 import { Exercise } from '$lib/server/db/models/exercise';
 import { Unit } from '$lib/server/db/models/unit';
 import { inTransaction } from '$lib/server/db/transaction';
-import { renderMarkdown, renderMarkdownTemplate } from './render-markdown';
+import { renderLesson } from './render-lesson';
+import { renderMarkdownTemplate } from './render-markdown';
 
 export interface ImportedCourse {
 	slug: string;
@@ -65,9 +66,14 @@ async function lockedCourse(slug: string, now: Date, transaction: Transaction): 
 }
 
 async function createUnit(editionId: number, content: UnitContent, transaction: Transaction): Promise<void> {
-	const { number, slug, title, summary, lessonMarkdown, exercises } = content;
+	const { number, slug, title, summary, lessonMarkdown, figures, exercises } = content;
+	const lesson = renderLesson(
+		lessonMarkdown,
+		figures.map(({ id }) => id),
+		title
+	);
 	const unit = await Unit.create(
-		{ editionId, number, slug, title, summary, lessonHtml: renderMarkdown(lessonMarkdown) },
+		{ editionId, number, slug, title, summary, lesson, figures },
 		{ transaction }
 	);
 	const rows = exercises.map((definition, index) => ({

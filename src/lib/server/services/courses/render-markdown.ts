@@ -33,11 +33,15 @@ const ALLOWED = {
 
 let purify: ReturnType<typeof createDOMPurify> | undefined;
 
-/** Markdown to HTML that is safe to show. Run when content is imported, not when a page is asked for. */
-export function renderMarkdown(markdown: string): string {
+/** `html` with nothing left in it but what prose needs. */
+export function sanitised(html: string): string {
 	purify ??= createDOMPurify(new JSDOM('').window);
-	return purify.sanitize(marked.parse(markdown, { async: false }), ALLOWED);
+	return purify.sanitize(html, ALLOWED);
 }
+
+/** Markdown to HTML that is safe to show. Run when content is imported, not when a page is asked for. */
+export const renderMarkdown = (markdown: string): string =>
+	sanitised(marked.parse(markdown, { async: false }));
 
 /**
  * The same for a text with {name} and {expression | digits} in it: they come out as they went in,
