@@ -2,7 +2,7 @@
 import { z } from 'zod';
 import { exerciseView } from './exercise-view';
 import { finding } from './finding';
-import { readingRequest } from './reading';
+import { benchRequest } from './reading';
 import { settings, type ResolvedSettings } from './settings';
 import { receiverFlag, rowNumber } from './sweep-stream';
 
@@ -39,27 +39,42 @@ export const findingResponse = z.strictObject({ finding });
 /** `POST /api/attempts/[id]/hints`: the next hint. */
 export const hintResponse = z.strictObject({ hint: z.string(), revealed: z.int(), left: z.int() });
 
-/** `POST /api/attempts/[id]/readings`: the server replays these rows and takes the reading itself. */
-export const takeReadingRequest = z.strictObject({
-	/** The rows the trace holds: the first and the last. A live trace is its last row alone. */
-	rows: z
-		.strictObject({ from: rowNumber, to: rowNumber })
-		.refine((rows) => rows.to >= rows.from, { message: 'to must not be less than from', path: ['to'] }),
-	/** Which trace, 1…4, of the set-up that swept the last row. */
-	trace: z.int().min(1).max(4),
-	request: readingRequest
-});
+/**
+ * `POST /api/attempts/[id]/readings`: the server replays these rows and takes the reading itself. A count has neither rows
+ * nor trace: the server takes it with the set-up in force, on the bench clock.
+ */
+export const takeReadingRequest = z
+	.strictObject({
+		/** The rows the trace holds: the first and the last. A live trace is its last row alone. */
+		rows: z
+			.strictObject({ from: rowNumber, to: rowNumber })
+			.refine((rows) => rows.to >= rows.from, { message: 'to must not be less than from', path: ['to'] })
+			.optional(),
+		/** Which trace, 1…4, of the set-up that swept the last row. */
+		trace: z.int().min(1).max(4).optional(),
+		request: benchRequest
+	})
+	.superRefine(({ request, ...taken }, context) => {
+		const counts = request.kind === 'count';
+		for (const field of ['rows', 'trace'] as const) {
+			if (counts !== (taken[field] !== undefined)) continue;
+			const message = counts ? 'a count is taken off no trace: leave this out' : 'say what it is read from';
+			context.addIssue({ code: 'custom', path: [field], message });
+		}
+	});
 
 export const remarkView = z.strictObject({ code: z.string(), text: z.string() });
 /** A reading as the server took it. */
 export const readingView = z.strictObject({
 	id: readingId,
+	/** A count has a row number of its own, which no sweep has. */
 	rows: z.strictObject({ from: rowNumber, to: rowNumber }),
-	trace: z.int(),
-	/** What the trace was: "average of 16" is mode average, count 16. */
-	mode: z.string(),
+	/** Null for a count. */
+	trace: z.int().nullable(),
+	/** What the trace was: "average of 16" is mode average, count 16. Null for a count. */
+	mode: z.string().nullable(),
 	count: z.int(),
-	request: readingRequest,
+	request: benchRequest,
 	kind: z.string(),
 	value: z.number(),
 	unit: z.string(),
@@ -78,7 +93,7 @@ export const draftsView = z.strictObject({
 	savedAt: z.iso.datetime().nullable()
 });
 
-/** Where the bench stands. To show it again: fetch rows restartRow…drawnTo, then ask for sweeps from drawnTo + 1. */
+/** Where the bench stands. To show it again: fetch rows restartRow…drawnTo, then ask for sweeps from resumeFrom. */
 export const benchView = z.strictObject({
 	/** As typed; the exercise's start settings until the first sweep. */
 	settings,
@@ -86,7 +101,7 @@ export const benchView = z.strictObject({
 	/** Number of the set-up in the log, null before the first sweep. */
 	setUp: z.int().nullable(),
 	nextRow: rowNumber,
-	/** Last row of this set-up known to be drawn; null when none is. */
+	/** Last row known to be drawn since the restart; null when none is. */
 	drawnTo: rowNumber.nullable(),
 	/** What to give as `from` to go on here. */
 	resumeFrom: rowNumber,

@@ -1,6 +1,7 @@
 /** What a learner is shown of an exercise: nothing here may hold a scene, a seed, a truth or a mistake watched for. */
 import { z } from 'zod';
 import { answerUnits, chainPart } from './exercise';
+import { maskLimits } from './reading';
 import { lossTable } from './scene';
 import { settings } from './settings';
 
@@ -47,6 +48,8 @@ export const exerciseView = z.strictObject({
 	/** Loss of each lead or pad in the chain, as the learner is told it. */
 	leads: z.array(z.strictObject({ label: z.string(), loss: lossTable })),
 	cautions: z.array(z.string()),
+	/** Limits that the order sets, as levels on the screen. */
+	mask: z.strictObject({ limits: maskLimits }).optional(),
 	receiver: receiverView,
 	start: settings,
 	questions: z.array(questionView),

@@ -6,7 +6,7 @@
 import { z } from 'zod';
 import { units } from '$lib/units/unit';
 import { quantity } from './quantity';
-import { readingRequest } from './reading';
+import { maskLimits, readingRequest } from './reading';
 import { receiverProfile } from './receiver';
 import { device, emitter, lossTable } from './scene';
 import { settings } from './settings';
@@ -124,6 +124,8 @@ export const exercise = z.strictObject({
 	/** Loss shown to the learner for each lead or pad in the chain. */
 	leads: z.array(z.strictObject({ label: line, loss: templateOf(lossTable) })).max(4),
 	cautions: z.array(line).min(1).max(6),
+	/** Limits that the order sets, as levels on the screen: drawn as a ceiling, and offered as a reading. */
+	mask: z.strictObject({ limits: templateOf(maskLimits) }).optional(),
 	receiver: z.union([z.enum(['field', 'modest']), receiverProfile]),
 	parameters: z.record(valueName, parameterDraw),
 	/** Values computed from the parameters, in order. */

@@ -91,7 +91,8 @@ export const amDepth = z.strictObject({ ...kind('am-depth'), carrierHz: frequenc
 export const fmDeviation = z.strictObject({ ...kind('fm-deviation'), carrierHz: frequency });
 export const pulse = z.strictObject({ ...kind('pulse'), carrierHz: frequency });
 export const time = z.strictObject(kind('time'));
-export const mask = z.strictObject({ ...kind('mask'), limits: z.array(limit).min(1).max(100) });
+export const maskLimits = z.array(limit).min(1).max(100);
+export const mask = z.strictObject({ ...kind('mask'), limits: maskLimits });
 
 /** A reading off a trace. */
 export const readingRequest = z.discriminatedUnion('kind', [
@@ -124,6 +125,7 @@ export const countRequest = z.strictObject({ ...kind('count'), atHz: frequency, 
 /** Everything a learner can ask for on the bench. */
 export const benchRequest = z.discriminatedUnion('kind', [...readingRequest.options, countRequest]);
 
+export type MaskLimits = z.infer<typeof maskLimits>;
 export type ReadingRequest = z.infer<typeof readingRequest>;
 export type CountRequest = z.infer<typeof countRequest>;
 export type BenchRequest = z.infer<typeof benchRequest>;

@@ -23,6 +23,11 @@ describe('frequencies in a column', () => {
 describe('values', () => {
 	it('have one decimal when they are levels', () =>
 		expect(shownReading(-11.74, 'dBm')).toEqual({ figure: '−11.7', unit: 'dBm' }));
+	it('of a count go down to a digit of its spread', () =>
+		expect(shownReading(450_012_345.678, 'Hz', 0.02)).toEqual({
+			figure: '450.012\u2009345\u200968',
+			unit: 'MHz'
+		}));
 	it('come in the unit that suits them when they are widths', () =>
 		expect(shownReading(17400, 'Hz').unit).toBe('kHz'));
 	it('show a spread to a digit that says something', () => {

@@ -106,6 +106,11 @@ describe('parseExercise(data)', () => {
 			(d: never) => set(d, 'leads.0.loss.0.lossDb', '=carrierDbm'),
 			'leads[0].loss[0].lossDb'
 		],
+		[
+			'limits shown with a hidden value',
+			(d: never) => set(d, 'mask', { limits: [{ startHz: 449e6, stopHz: 451e6, levelDbm: '=carrierDbm' }] }),
+			'mask.limits[0].levelDbm'
+		],
 		['a name shown that is not drawn', (d: never) => set(d, 'shown.0', 'nothing'), 'shown[0]'],
 		[
 			'a unit that the quantity is not in',

@@ -30,8 +30,19 @@ export function frequencyFigure(
 	return `${plus && frequencyHz > 0 ? '+' : ''}${whole}${grouped && `.${grouped}`}`;
 }
 
-/** A reading's value: frequencies and times in the unit that suits them, levels and ratios with one decimal. */
-export function shownReading(value: number, unit: string): Shown {
+/**
+ * A reading's value: frequencies and times in the unit that suits them, levels and ratios with one decimal.
+ * @param spreadHz of a counted frequency, which is shown down to a digit of its spread
+ */
+export function shownReading(value: number, unit: string, spreadHz?: number): Shown {
+	if (unit === 'Hz' && spreadHz) {
+		const { unit: column } = frequencyColumn(value, 1);
+		const decimals = Math.ceil(Math.log10(frequencySizes[column] / spreadHz));
+		return {
+			figure: frequencyFigure(value, { unit: column, decimals: Math.min(12, Math.max(0, decimals)) }),
+			unit: column
+		};
+	}
 	if (unit === 'Hz') return showFrequency(value, value < 1000 ? 1 : 3);
 	if (unit === 's') return showTime(value, 3);
 	if (unit === '1') return { figure: formatFigure(value, 2), unit: '' };

@@ -40,22 +40,27 @@ export interface BenchParts {
 		restartRow: number;
 		drawnTo: number | null;
 	} | null;
+	/** The last row drawn of each set-up that was. */
+	held: number[];
 	settings: Settings;
 	resolved: ResolvedSettings;
 	flags: ReceiverFlag[];
 }
 
-export function presentBench({ attempt, setUp, settings, resolved, flags }: BenchParts): BenchView {
+export function presentBench({ attempt, setUp, held, settings, resolved, flags }: BenchParts): BenchView {
 	const { nextRow, clockS } = attempt;
-	const drawnTo = setUp?.drawnTo ?? null;
+	const own = setUp?.drawnTo ?? null;
+	const restartRow = setUp?.restartRow ?? nextRow;
+	// Holds and averages may go on over set-ups: what an earlier one drew is still in them.
+	const since = held.filter((row) => row >= restartRow);
 	return {
 		settings,
 		resolved,
 		setUp: setUp?.number ?? null,
 		nextRow,
-		drawnTo,
-		resumeFrom: drawnTo === null ? (setUp?.firstRow ?? nextRow) : drawnTo + 1,
-		restartRow: setUp?.restartRow ?? nextRow,
+		drawnTo: since.length > 0 ? Math.max(...since) : null,
+		resumeFrom: own === null ? (setUp?.firstRow ?? nextRow) : own + 1,
+		restartRow,
 		clockS,
 		benchTimeUsedS: clockS,
 		flags,

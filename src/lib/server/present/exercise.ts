@@ -1,5 +1,6 @@
 import type { ChainPart, ExerciseQuestion, Tolerance } from '$lib/schemas/exercise';
 import type { ExerciseView, QuestionView, ReceiverView } from '$lib/schemas/exercise-view';
+import type { MaskLimits } from '$lib/schemas/reading';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { LossTable } from '$lib/schemas/scene';
 import type { Settings } from '$lib/schemas/settings';
@@ -20,6 +21,7 @@ export interface ExerciseParts {
 		chain: ChainPart[];
 		leads: { label: string; loss: LossTable }[];
 		cautions: string[];
+		mask?: { limits: MaskLimits };
 		start: Settings;
 	};
 	profile: ReceiverProfile;
@@ -42,6 +44,7 @@ export function presentExercise(parts: ExerciseParts): ExerciseView {
 		chain: brief.chain,
 		leads: brief.leads.map(({ label, loss }) => ({ label, loss })),
 		cautions: brief.cautions,
+		...(brief.mask && { mask: brief.mask }),
 		receiver: presentReceiver(parts.profile),
 		start: brief.start,
 		questions: parts.questions.map(({ id, text }, i) => presentQuestion(id, text, parts.written[i])),

@@ -1,14 +1,14 @@
 import type { ReadingView } from '$lib/schemas/attempt';
-import type { ReadingRequest } from '$lib/schemas/reading';
+import type { BenchRequest } from '$lib/schemas/reading';
 
 export interface ReadingRecord {
 	id: number;
 	fromRow: number;
 	toRow: number;
-	trace: number;
-	mode: string;
+	trace: number | null;
+	mode: string | null;
 	rowCount: number;
-	request: ReadingRequest;
+	request: BenchRequest;
 	kind: string;
 	value: number;
 	unit: string;

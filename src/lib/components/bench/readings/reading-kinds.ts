@@ -1,40 +1,48 @@
 /** The readings a person can start from the menu: what each is called, what it asks for, and where its bracket stands. */
-import type { ReadingRequest } from '$lib/schemas/reading';
+import type { BenchRequest, MaskLimits } from '$lib/schemas/reading';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 
-type Kind = ReadingRequest['kind'];
+type Kind = BenchRequest['kind'];
 
 /** One blank of a reading's form. */
 export interface ReadingField {
 	name: string;
 	label: string;
-	dimension: 'frequency' | 'ratio' | 'share' | 'number';
+	dimension: 'frequency' | 'time' | 'ratio' | 'share' | 'number';
 }
 
-/** What the form starts from: the window on show and the selected marker, if any. */
+/** What the form starts from: the window on show, the selected marker, if any, and the order's limits. */
 export interface ReadingContext {
 	resolved: ResolvedSettings;
+	limits?: MaskLimits;
 	markerHz?: number;
 	otherMarkerHz?: number;
 }
+
+export const readingGroups = ['Level', 'Power', 'Width', 'Carrier', 'Distortion', 'Limits', 'Time'] as const;
+export type ReadingGroup = (typeof readingGroups)[number];
 
 export interface ReadingKind {
 	kind: Kind;
 	label: string;
 	/** One line under the label in the menu. */
 	says: string;
-	group: 'Power' | 'Width' | 'Carrier' | 'Distortion';
+	group: ReadingGroup;
+	/** Whether it can be asked for here; absent: over frequency. */
+	offered?: (context: ReadingContext) => boolean;
 	/** Needs the average detector on the power scale; starting it sets both, in the log. */
 	power?: true;
+	/** Started at once when there are none. */
 	fields: readonly ReadingField[];
 	/** Values to start the form from, by field name. */
 	start: (context: ReadingContext) => Record<string, number>;
 	/** The finished request. */
-	request: (values: Record<string, number>) => ReadingRequest;
+	request: (values: Record<string, number>, context: ReadingContext) => BenchRequest;
 	/** Where the bracket stands on the plot; absent when there is none. */
 	band?: (values: Record<string, number>) => { start: number; stop: number };
 }
 
+const overTime = ({ resolved }: ReadingContext) => resolved.spanHz === 0;
 const frequency = (name: string, label: string): ReadingField => ({ name, label, dimension: 'frequency' });
 const channelFields = [frequency('centreHz', 'Centre'), frequency('widthHz', 'Width')];
 /** A quarter of the window, on a 1-2-5 figure: a width to start typing from, no more. */
@@ -89,6 +97,16 @@ export const readingKinds: readonly ReadingKind[] = [
 		}),
 		request: ({ startHz, stopHz }) => ({ kind: 'band-power', startHz, stopHz }),
 		band: ({ startHz, stopHz }) => ({ start: startHz, stop: stopHz })
+	},
+	{
+		kind: 'count',
+		label: 'Frequency count',
+		says: 'a carrier counted for a gate time, finer than any point',
+		group: 'Carrier',
+		offered: () => true,
+		fields: [frequency('atHz', 'At'), { name: 'gateS', label: 'Gate', dimension: 'time' }],
+		start: (context) => ({ atHz: startHz(context), gateS: 0.1 }),
+		request: ({ atHz, gateS }) => ({ kind: 'count', atHz, gateS })
 	},
 	{
 		kind: 'noise-density',
@@ -204,8 +222,39 @@ export const readingKinds: readonly ReadingKind[] = [
 			upperHz: Math.max(startHz(context), context.otherMarkerHz ?? context.resolved.stopHz)
 		}),
 		request: ({ lowerHz, upperHz }) => ({ kind: 'intercept', lowerHz, upperHz })
+	},
+	{
+		kind: 'mask',
+		label: 'Margin to the mask',
+		says: 'the least room under the order’s limits',
+		group: 'Limits',
+		offered: (context) => context.limits !== undefined && !overTime(context),
+		fields: [],
+		start: () => ({}),
+		request: (_, { limits = [] }) => ({ kind: 'mask', limits })
+	},
+	{
+		kind: 'time',
+		label: 'Times',
+		says: 'on time of what comes and goes, at half its voltage',
+		group: 'Time',
+		offered: overTime,
+		fields: [],
+		start: () => ({}),
+		request: () => ({ kind: 'time' })
 	}
 ];
+
+/** The kinds that can be asked for with this window, by group; groups without any are left out. */
+export const offeredKinds = (context: ReadingContext): { group: ReadingGroup; kinds: ReadingKind[] }[] =>
+	readingGroups
+		.map((group) => ({
+			group,
+			kinds: readingKinds.filter(
+				(kind) => kind.group === group && (kind.offered?.(context) ?? !overTime(context))
+			)
+		}))
+		.filter(({ kinds }) => kinds.length > 0);
 
 /** The kind's entry; undefined for readings that are markers. */
 export const readingKind = (kind: Kind): ReadingKind | undefined =>

@@ -1,15 +1,15 @@
 /** Everything behind one bench page, tied together. */
-import { formatFrequency } from '$lib/units/format-quantity';
+import { formatFrequency, formatTime } from '$lib/units/format-quantity';
 import { isProblem } from '$lib/measure/reading';
 import { takeReading } from '$lib/measure/take-reading';
 import type { AttemptView } from '$lib/schemas/attempt';
-import type { ReadingRequest } from '$lib/schemas/reading';
-import { readingKind } from '../readings/reading-kinds';
+import type { BenchRequest, CountRequest, ReadingRequest } from '$lib/schemas/reading';
+import { readingKind, type ReadingContext } from '../readings/reading-kinds';
 import type { ReadingRow } from '../readings/reading-row';
 import { shownReading } from '../shown-quantity';
 import { AnswerSheet } from './answer-sheet.svelte';
 import { Refusal, type BenchWire } from './bench-wire';
-import { MarkerList } from './marker-list.svelte';
+import { MarkerList, type Marker } from './marker-list.svelte';
 import { ReadingList } from './reading-list.svelte';
 import { SetupSheet } from './setup-sheet.svelte';
 import { SweepRun } from './sweep-run.svelte';
@@ -134,13 +134,48 @@ export class Bench {
 		this.markers.move(letter, Math.min(stop, Math.max(start, at)));
 	}
 
-	/** Starts a reading. A reading of power puts detector and averages on power first, where the log shows it. */
-	async startReading(request: ReadingRequest, values: Record<string, number>): Promise<void> {
+	/** What a reading's form starts from. */
+	get readingContext(): ReadingContext {
+		const { selected, list } = this.markers;
+		const other = list.find((marker) => marker.letter !== selected?.letter);
+		const { resolved } = this.run;
+		// In span 0 a marker stands in time, and what is read is at the centre.
+		const hz = (marker: Marker | undefined) => (resolved.spanHz > 0 ? marker?.at : undefined);
+		return {
+			resolved,
+			limits: this.attempt.exercise.mask?.limits,
+			markerHz: hz(selected),
+			otherMarkerHz: hz(other)
+		};
+	}
+
+	/**
+	 * Starts a reading. A reading of power puts detector and averages on power first, where the log shows it; a count is
+	 * taken at once.
+	 */
+	async startReading(request: BenchRequest, values: Record<string, number>): Promise<void> {
+		if (request.kind === 'count') return this.#count(request);
 		this.readings.follow(request, values);
 		const { detector, scale } = this.run.resolved;
 		if (!readingKind(request.kind)?.power || (detector === 'average' && scale === 'power')) return;
 		await this.sheet.setAll({ detector: 'average', scale: 'power' });
 		this.notice = 'Detector set to average and averages to power: a power reading adds power.';
+	}
+
+	/** Puts other values into a reading that follows the traces. */
+	changeReading(id: number, request: BenchRequest, values: Record<string, number>): void {
+		if (request.kind !== 'count') this.readings.change(id, request, values);
+	}
+
+	async #count(request: CountRequest): Promise<void> {
+		const at = this.markers.list.find((marker) => marker.at === request.atHz);
+		this.notice = `Counting for ${formatTime(request.gateS)} …`;
+		try {
+			await this.readings.count(request, at?.letter);
+			this.notice = undefined;
+		} catch {
+			this.notice = 'The server could not be reached; nothing was counted.';
+		}
 	}
 
 	toggle(): void {

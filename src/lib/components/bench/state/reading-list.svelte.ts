@@ -3,14 +3,22 @@ import type { Reading, ReadingProblem } from '$lib/measure/reading';
 import { takeReading } from '$lib/measure/take-reading';
 import type { Trace } from '$lib/measure/trace';
 import type { ReadingView } from '$lib/schemas/attempt';
-import type { ReadingRequest } from '$lib/schemas/reading';
+import type { CountRequest, ReadingRequest } from '$lib/schemas/reading';
 import type { ResolvedSettings } from '$lib/schemas/settings';
-import { readingPlace, readingWords, takenFromWords } from '../readings/reading-words';
+import { readingPlace, readingWords, sourceWords, takenFromWords } from '../readings/reading-words';
 import type { ReadingRow } from '../readings/reading-row';
-import type { BenchWire } from './bench-wire';
+import { Refusal, type BenchWire } from './bench-wire';
 import type { Marker, MarkerList } from './marker-list.svelte';
 import type { SweepRun } from './sweep-run.svelte';
 import type { ShownTrace, TraceSet } from './trace-set.svelte';
+
+interface RefusedCount {
+	id: number;
+	request: CountRequest;
+	/** The marker it was asked at. */
+	letter?: string;
+	message: string;
+}
 
 interface Following {
 	id: number;
@@ -24,6 +32,8 @@ export class ReadingList {
 	/** Readings that are taken anew from every sweep. */
 	following = $state.raw<readonly Following[]>([]);
 	taken = $state.raw<readonly ReadingView[]>([]);
+	/** Counts that found nothing to count, until they are put away. */
+	refused = $state.raw<readonly RefusedCount[]>([]);
 	readonly #wire: BenchWire;
 	readonly #run: SweepRun;
 	readonly #traces: TraceSet;
@@ -33,7 +43,13 @@ export class ReadingList {
 	readonly markerRows = $derived.by(() => this.#markers.list.map((marker) => this.#markerRow(marker)));
 	readonly followingRows = $derived.by(() => this.following.map((entry) => this.#followingRow(entry)));
 	readonly takenRows = $derived.by(() => this.taken.map(takenRow));
-	readonly rows = $derived([...this.followingRows, ...this.markerRows, ...this.takenRows]);
+	readonly refusedRows = $derived(this.refused.map(refusedRow));
+	readonly rows = $derived([
+		...this.followingRows,
+		...this.markerRows,
+		...this.refusedRows,
+		...this.takenRows
+	]);
 
 	constructor(parts: {
 		wire: BenchWire;
@@ -65,16 +81,28 @@ export class ReadingList {
 	 * Has the server take a row's reading from the same sweeps: what comes back is evidence.
 	 * @throws Refusal with the reason why the sweeps don't support it
 	 */
-	async take(row: ReadingRow): Promise<ReadingView> {
-		const trace = this.#traces.read[row.trace - 1];
+	async take({ trace: number = 1, request }: ReadingRow): Promise<ReadingView> {
+		const trace = this.#traces.read[number - 1];
 		await this.#run.settleAcknowledgement(trace.rows.to);
-		const reading = await this.#wire.takeReading({
-			rows: trace.rows,
-			trace: row.trace,
-			request: row.request
-		});
+		const reading = await this.#wire.takeReading({ rows: trace.rows, trace: number, request });
 		this.taken = [...this.taken, reading];
 		return reading;
+	}
+
+	/** Counts on the bench, between two sweeps. What can't be counted stays in the list with the reason. */
+	async count(request: CountRequest, letter?: string): Promise<void> {
+		this.refused = this.refused.filter((before) => before.request.atHz !== request.atHz);
+		try {
+			const reading = await this.#run.between(() => this.#wire.takeReading({ request }));
+			this.taken = [...this.taken, reading];
+		} catch (error) {
+			if (!(error instanceof Refusal)) throw error;
+			this.refused = [...this.refused, { id: this.#nextId++, request, letter, message: error.message }];
+		}
+	}
+
+	putAway(id: number): void {
+		this.refused = this.refused.filter((count) => count.id !== id);
 	}
 
 	/** A trace as `measure` takes it; undefined while it holds nothing. */
@@ -146,17 +174,27 @@ function measurable(shown: ShownTrace, resolved: ResolvedSettings): Trace {
 }
 
 function takenRow(reading: ReadingView): ReadingRow {
-	const { id, request, trace, kind, value, unit, spread, remarks } = reading;
+	const { id, request, trace, value, unit, spread, remarks } = reading;
 	const delta = request.kind === 'delta' && request.fromHz !== undefined && request.toHz !== undefined;
 	return {
 		key: `taken-${id}`,
 		takenId: id,
 		request,
-		trace,
+		trace: trace ?? undefined,
 		words: readingWords(request),
 		atHz: delta ? request.toHz! - request.fromHz! : readingPlace(request),
 		relative: delta,
-		outcome: { kind, value, unit, spread, remarks } as ReadingRow['outcome'],
-		takenFrom: takenFromWords(reading.rows, trace)
+		outcome: { value, unit, spread, remarks } as ReadingRow['outcome'],
+		takenFrom: sourceWords(reading)
 	};
 }
+
+const refusedRow = ({ id, request, letter, message }: RefusedCount): ReadingRow => ({
+	key: `refused-${id}`,
+	refusedId: id,
+	letter,
+	request,
+	words: readingWords(request),
+	outcome: { problem: message, needs: '' },
+	takenFrom: ''
+});

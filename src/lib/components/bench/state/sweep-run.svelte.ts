@@ -109,6 +109,25 @@ export class SweepRun {
 		this.#acknowledgedTo = drawnTo;
 	}
 
+	/**
+	 * Lets something else use the receiver: the sweep under way ends, and sweeping goes on afterwards if it was on.
+	 * @throws whatever `act` throws
+	 */
+	async between<T>(act: () => Promise<T>): Promise<T> {
+		const wasRunning = this.running;
+		this.stop();
+		await this.settleAcknowledgement();
+		try {
+			const done = await act();
+			const { bench } = await this.#wire.reload();
+			this.#nextRow = bench.resumeFrom;
+			this.benchTimeUsedS = bench.benchTimeUsedS;
+			return done;
+		} finally {
+			if (wasRunning) void this.start();
+		}
+	}
+
 	/** Resolves once the stream has begun; what follows comes in on its own. */
 	async #ask(settings: Settings, sweeps: number | undefined, resetProtection?: boolean): Promise<void> {
 		this.#stream?.abort();

@@ -76,6 +76,7 @@ function checkNames(exercise: Exercise): ExerciseIssue[] {
 	check(exercise.scene, 'scene', known);
 	check(exercise.start, 'start', shown, 'the learner sees this: list it in shown');
 	check(exercise.leads, 'leads', shown, 'the learner sees this: list it in shown');
+	check(exercise.mask, 'mask', shown, 'the learner sees this: list it in shown');
 	check(exercise.questions, 'questions', known);
 	exercise.method.forEach((step, i) => {
 		check(step, `method[${i}]`, known);

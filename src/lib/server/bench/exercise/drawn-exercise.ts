@@ -2,6 +2,7 @@
 import type { ReadingRequest } from '$lib/measure/reading-request';
 import type { AnswerUnit, ChainPart, Exercise, WatchedMistake } from '$lib/schemas/exercise';
 import type { Quantity } from '$lib/schemas/quantity';
+import type { MaskLimits } from '$lib/schemas/reading';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { LossTable, Scene } from '$lib/schemas/scene';
 import type { Settings } from '$lib/schemas/settings';
@@ -40,6 +41,7 @@ export interface Brief {
 	chain: ChainPart[];
 	leads: { label: string; loss: LossTable }[];
 	cautions: string[];
+	mask?: { limits: MaskLimits };
 	hints: string[];
 	start: Settings;
 }

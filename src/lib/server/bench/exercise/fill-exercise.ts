@@ -1,5 +1,5 @@
 import { lossDbAt } from './loss-db-at';
-import { readingRequest } from '$lib/schemas/reading';
+import { maskLimits, readingRequest } from '$lib/schemas/reading';
 import { scene as sceneSchema, lossTable, type Scene } from '$lib/schemas/scene';
 import { settings as settingsSchema, type Settings } from '$lib/schemas/settings';
 import type { Exercise, ExerciseQuestion, MethodStep, WatchedMistake } from '$lib/schemas/exercise';
@@ -54,6 +54,9 @@ function fillBrief(exercise: Exercise, scope: Scope): Brief {
 			loss: filled(lossTable, loss, scope, `leads[${i}].loss`)
 		})),
 		cautions: exercise.cautions.map((caution, i) => text(caution, `cautions[${i}]`)),
+		...(exercise.mask && {
+			mask: { limits: filled(maskLimits, exercise.mask.limits, scope, 'mask.limits') }
+		}),
 		hints: exercise.hints.map((hint, i) => text(hint, `hints[${i}]`)),
 		start: filled(settingsSchema, exercise.start, scope, 'start')
 	};

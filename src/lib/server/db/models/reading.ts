@@ -6,35 +6,37 @@ import {
 	type InferCreationAttributes,
 	type NonAttribute
 } from 'sequelize';
-import type { Remark } from '$lib/measure/remark';
-import type { ReadingRequest } from '$lib/measure/reading-request';
+import type { BenchRequest } from '$lib/schemas/reading';
 import type { TraceMode } from '$lib/schemas/settings';
 import { sequelize } from '../connection';
 import { SetUp } from './set-up';
 
-/** A number the server took off a replayed trace, and what it takes to take it again. */
+/** A number the server took, off a replayed trace or by counting, and what it takes to take it again. */
 export class Reading extends Model<InferAttributes<Reading>, InferCreationAttributes<Reading>> {
 	declare id: CreationOptional<number>;
 	declare attemptId: number;
-	/** The set-up that swept the last row. */
+	/** The set-up that swept the last row, or that counted. */
 	declare setUpId: number;
+	/** A count has a row number of its own. */
 	declare fromRow: number;
 	declare toRow: number;
-	/** 1 … 4 */
-	declare trace: number;
-	declare mode: TraceMode;
-	/** Rows that make up the trace. */
+	/** 1 … 4; null for a count, as all that tells of a trace. */
+	declare trace: number | null;
+	declare mode: TraceMode | null;
+	/** Rows that make up the trace; 1 for a count. */
 	declare rowCount: number;
-	declare request: ReadingRequest;
+	declare request: BenchRequest;
 	declare kind: string;
 	declare value: number;
 	declare unit: string;
 	/** One standard deviation, in `unit`. */
 	declare spread: number;
-	declare remarks: Remark[];
+	declare remarks: { code: string; text: string }[];
 	declare parts: unknown;
-	/** SHA-256 of the replayed trace as float32. */
-	declare traceHash: string;
+	/** SHA-256 of the replayed trace as float32; null for a count. */
+	declare traceHash: string | null;
+	/** Bench clock when a count began, s; null for a reading off a trace. */
+	declare clockS: CreationOptional<number | null>;
 	declare engineVersion: number;
 	declare takenAt: Date;
 	declare setUp?: NonAttribute<SetUp>;
@@ -47,8 +49,8 @@ Reading.init(
 		setUpId: DataTypes.BIGINT.UNSIGNED,
 		fromRow: DataTypes.INTEGER.UNSIGNED,
 		toRow: DataTypes.INTEGER.UNSIGNED,
-		trace: DataTypes.INTEGER.UNSIGNED,
-		mode: DataTypes.STRING(16),
+		trace: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true },
+		mode: { type: DataTypes.STRING(16), allowNull: true },
 		rowCount: DataTypes.INTEGER.UNSIGNED,
 		request: DataTypes.JSON,
 		kind: DataTypes.STRING(40),
@@ -57,7 +59,8 @@ Reading.init(
 		spread: DataTypes.DOUBLE,
 		remarks: DataTypes.JSON,
 		parts: { type: DataTypes.JSON, allowNull: true },
-		traceHash: DataTypes.CHAR(64),
+		traceHash: { type: DataTypes.CHAR(64), allowNull: true },
+		clockS: { type: DataTypes.DOUBLE, allowNull: true },
 		engineVersion: DataTypes.INTEGER.UNSIGNED,
 		takenAt: DataTypes.DATE(3)
 	},

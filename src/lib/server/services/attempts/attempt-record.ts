@@ -17,14 +17,19 @@ export function attemptRecord(
 			clockS: setUp.clockS,
 			at: setUp.loggedAt.toISOString()
 		})),
-		readings: readings.map((taken) => ({
-			id: String(taken.id),
-			request: taken.request,
-			reading: readingOf(taken),
-			trace: taken.trace,
-			rows: { from: taken.fromRow, to: taken.toRow },
-			at: taken.takenAt.toISOString()
-		})),
+		readings: readings.flatMap((taken) => {
+			const { request } = taken;
+			// The grader doesn't know counts yet.
+			if (request.kind === 'count') return [];
+			return {
+				id: String(taken.id),
+				request,
+				reading: readingOf(taken),
+				trace: taken.trace ?? 1,
+				rows: { from: taken.fromRow, to: taken.toRow },
+				at: taken.takenAt.toISOString()
+			};
+		}),
 		answers
 	};
 }

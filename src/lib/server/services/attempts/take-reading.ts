@@ -16,16 +16,19 @@ import { resolvedFor } from './prepared-bench';
 import { isReplayable, replayedTrace } from './replayed-trace';
 import { setUpLog, setUpOfRow } from './set-up-log';
 import { exerciseOf, signalSource } from './signal-source';
+import { takeCount } from './take-count';
 
 /** A trace of more rows than this is not replayed: an average's greatest count. */
 const MOST_ROWS = 10_000;
 const TOO_MUCH = 'That is more sweeps than can be replayed. Hold or average fewer.';
 
+type Rows = NonNullable<TakeReadingRequest['rows']>;
 type Shown = ResolvedSettings['traces'][number];
 
 /**
  * Takes a reading as evidence: sweeps the rows that make up the trace again, takes the reading off them here, and keeps
  * that value with a hash of the trace. Whatever number the page showed plays no part.
+ * A count is taken on the bench itself.
  * @throws DomainError `invalid`, naming what the replay doesn't support: rows never drawn or of another set-up, a trace
  *   that isn't there, a reading that has no number
  */
@@ -35,6 +38,9 @@ export async function takeReading(
 	{ rows, trace: number, request }: TakeReadingRequest,
 	now: Date
 ): Promise<ReadingResponse> {
+	if (request.kind === 'count') return takeCount(actor, attemptId, request, now);
+	// The schema lets no other reading through without them.
+	if (!rows || number === undefined) refuse('rows', 'Say what it is read from.');
 	const attempt = await getAttempt(actor, 'attempt.work', attemptId);
 	const source = signalSource(attempt, await exerciseOf(attempt));
 	const log = await setUpLog(attemptId);
@@ -81,7 +87,7 @@ function refuse(field: string, message: string): never {
 	throw new DomainError('invalid', message, { issues: [{ field, message }] });
 }
 
-function drawnSetUp(log: SetUp[], rows: TakeReadingRequest['rows']): SetUp {
+function drawnSetUp(log: SetUp[], rows: Rows): SetUp {
 	const setUp = setUpOfRow(log, rows.to);
 	if (!setUp || setUp.drawnTo === null || rows.to > setUp.drawnTo) {
 		refuse('rows.to', `Row ${rows.to} was not drawn on this bench, so nothing can be read off it.`);
@@ -105,7 +111,7 @@ function shownTrace({ traces }: ResolvedSettings, number: number): Shown {
 	return shown;
 }
 
-function rowsOfTrace(log: SetUp[], rows: TakeReadingRequest['rows'], { mode, count }: Shown): DrawnRows[] {
+function rowsOfTrace(log: SetUp[], rows: Rows, { mode, count }: Shown): DrawnRows[] {
 	const drawn = drawnRows(log, rows.from, rows.to);
 	const stretches =
 		mode === 'live' ? lastRows(drawn, 1) : mode === 'average' ? lastRows(drawn, count) : drawn;

@@ -12,7 +12,7 @@ import { presentAttempt, presentBench, presentFlag } from '$lib/server/present/a
 import { presentExercise } from '$lib/server/present/exercise';
 import { presentReading } from '$lib/server/present/reading';
 import { drawnFor, preparedBench, resolvedFor, type SignalSource } from './prepared-bench';
-import { latestSetUp } from './set-up-log';
+import { setUpLog } from './set-up-log';
 import { exerciseOf, signalSource } from './signal-source';
 
 /** Everything the bench page needs to stand exactly where the attempt stands. */
@@ -59,13 +59,15 @@ async function viewBench(
 	source: SignalSource,
 	transaction?: Transaction
 ): Promise<BenchView> {
-	const setUp = await latestSetUp(attempt.id, transaction);
+	const log = await setUpLog(attempt.id, transaction);
+	const setUp = log.at(-1) ?? null;
 	const settings = setUp?.settings ?? drawnFor(source).brief.start;
 	// Nobody sweeps a closed attempt, or one of an earlier engine: there is nothing to warn of.
 	const live = setUp !== null && attempt.closedAt === null && attempt.engineVersion === ENGINE_VERSION;
 	return presentBench({
 		attempt,
 		setUp,
+		held: log.flatMap(({ drawnTo }) => drawnTo ?? []),
 		settings,
 		resolved: resolvedFor(source, settings),
 		flags: live ? preparedBench(source, settings).plan.flags.map(presentFlag) : []
