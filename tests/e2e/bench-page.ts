@@ -1,6 +1,7 @@
 /** How a person goes about the bench page: signing in, starting an exercise, setting up, reading, answering. */
 import AxeBuilder from '@axe-core/playwright';
 import { expect, type Locator, type Page } from '@playwright/test';
+import { ready } from './ready';
 
 const PASSWORD = 'nine-quiet-carriers';
 
@@ -45,8 +46,10 @@ export async function openBench(page: Page): Promise<void> {
 	await expectSweeping(page);
 }
 
-export const expectSweeping = (page: Page): Promise<void> =>
-	expect(page.getByText(/^Sweep \d+/)).toBeVisible({ timeout: 20_000 });
+export async function expectSweeping(page: Page): Promise<void> {
+	await ready(page);
+	await expect(page.getByText(/^Sweep \d+/)).toBeVisible({ timeout: 20_000 });
+}
 
 /** What the work order says of channel and lead. */
 export async function order(page: Page): Promise<{ channel: string; leadDb: number }> {

@@ -14,6 +14,7 @@ import {
 	signIn,
 	startReading
 } from './bench-page';
+import { ready } from './ready';
 
 test.setTimeout(180_000);
 test.use({ viewport: { width: 1440, height: 900 } });
@@ -59,6 +60,7 @@ test('an exercise can be done on the keyboard alone', async ({ page }) => {
 	await tabTo(page, page.getByRole('button', { name: /^Start/ }));
 	await page.keyboard.press('Enter');
 	await expect(page).toHaveURL(/attempts/);
+	await ready(page);
 	const { channel } = await order(page);
 
 	await tabTo(page, page.getByRole('textbox', { name: /^Centre/ }));

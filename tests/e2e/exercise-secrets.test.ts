@@ -1,6 +1,7 @@
 import { expect, test, type Page } from '@playwright/test';
 import { createConnection } from 'mariadb';
 import { answerField, handIn, openBench, order, setUp, signIn } from './bench-page';
+import { ready } from './ready';
 
 interface Recorded {
 	url: string;
@@ -82,6 +83,7 @@ test('neither seed nor scene nor truths reach the browser before the attempt clo
 	await expect(page.getByText(/^Kept \d\d:\d\d/)).toBeVisible();
 	const attemptId = /attempts\/(\d+)/.exec(page.url())![1];
 	await page.reload();
+	await ready(page);
 	await expect(answerField(page, 2)).toHaveValue('-60');
 	await page.getByRole('button', { name: 'Stop' }).click();
 	await settled();

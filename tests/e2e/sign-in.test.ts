@@ -1,34 +1,15 @@
-import AxeBuilder from '@axe-core/playwright';
 import { expect, test, type Page } from '@playwright/test';
+import { collectFaults, expectAccessible } from './bench-page';
 import { rawRequest } from './raw-request';
+import { personMenu, ready } from './ready';
 
 const PASSWORD = 'nine-quiet-carriers';
 const own = process.env.E2E_ORIGIN ?? '';
-
-/** What the policy stopped, and what the console called an error, on any page from here on. */
-async function collectFaults(page: Page): Promise<string[]> {
-	const faults: string[] = [];
-	await page.exposeFunction('noteFault', (fault: string) => faults.push(fault));
-	await page.addInitScript(() => {
-		document.addEventListener('securitypolicyviolation', ({ violatedDirective, blockedURI }) =>
-			(window as unknown as { noteFault(fault: string): void }).noteFault(
-				`${violatedDirective} ${blockedURI}`
-			)
-		);
-	});
-	page.on('pageerror', (error) => faults.push(error.message));
-	return faults;
-}
 
 async function signIn(page: Page, email: string, password = PASSWORD): Promise<void> {
 	await page.getByLabel('E-mail address').fill(email);
 	await page.getByLabel('Password').fill(password);
 	await page.getByRole('button', { name: 'Sign in' }).click();
-}
-
-async function expectAccessible(page: Page): Promise<void> {
-	const { violations } = await new AxeBuilder({ page }).analyze();
-	expect(violations.map(({ id, nodes }) => [id, nodes.map(({ html }) => html)])).toEqual([]);
 }
 
 const homes: [string, string, string][] = [
@@ -45,7 +26,7 @@ for (const [role, email, home] of homes) {
 		await signIn(page, email);
 		await expect(page).toHaveURL(home);
 		await expect(page.getByRole('main')).toContainText(role);
-		await page.locator('summary').click();
+		await personMenu(page).click();
 		await page.getByRole('button', { name: 'Sign out' }).click();
 		await expect(page).toHaveURL('/');
 		await page.goto(home);
@@ -105,13 +86,21 @@ test('it all works from the keyboard', async ({ page }) => {
 	await page.keyboard.type(PASSWORD);
 	await page.keyboard.press('Enter');
 	await expect(page).toHaveURL('/admin');
-	const summary = page.locator('summary');
-	await summary.focus();
+	const menu = personMenu(page);
+	await menu.focus();
 	await page.keyboard.press('Enter');
 	await expect(page.getByRole('button', { name: 'Sign out' })).toBeVisible();
 	await page.keyboard.press('Escape');
 	await expect(page.getByRole('button', { name: 'Sign out' })).toBeHidden();
-	await expect(summary).toBeFocused();
+	await expect(menu).toBeFocused();
+	await ready(page);
+	await page.keyboard.press('Enter');
+	await page.keyboard.press('Tab');
+	await expect(page.getByRole('banner').getByRole('link', { name: 'Learn' })).toBeFocused();
+	await page.keyboard.press('Shift+Tab');
+	await expect(menu).toBeFocused();
+	await page.keyboard.press('Shift+Tab');
+	await expect(page.getByRole('button', { name: 'Sign out' })).toBeHidden();
 });
 
 test.describe('without a script', () => {
@@ -124,7 +113,10 @@ test.describe('without a script', () => {
 		await expect(page.locator('html')).toHaveAttribute('data-scheme', 'night');
 		await signIn(page, 'morwenna.slee@tarnvale.example');
 		await expect(page).toHaveURL('/office');
-		await page.locator('summary').click();
+		await personMenu(page).click();
+		await page.keyboard.press('Escape');
+		await expect(page.getByRole('button', { name: 'Sign out' })).toBeHidden();
+		await personMenu(page).click();
 		await page.getByRole('button', { name: 'Sign out' }).click();
 		await expect(page).toHaveURL('/');
 	});
@@ -136,11 +128,13 @@ test('the colour scheme changes at once, stays, and asks for nothing', async ({ 
 	const ground = () => page.evaluate(() => getComputedStyle(document.documentElement).backgroundColor);
 	expect(await ground()).toBe('rgb(251, 249, 244)');
 	const requests: string[] = [];
+	await ready(page);
 	page.on('request', (request) => requests.push(request.url()));
 	await page.getByRole('button', { name: 'Night scheme' }).click();
 	expect(await ground()).toBe('rgb(36, 40, 44)');
 	expect(requests).toEqual([]);
 	await page.reload();
+	await ready(page);
 	expect(await ground()).toBe('rgb(36, 40, 44)');
 	await page.getByRole('button', { name: 'Day scheme' }).click();
 	await page.reload();
@@ -170,7 +164,7 @@ for (const colorScheme of ['light', 'dark'] as const) {
 				}
 				await signIn(page, 'owen.mell@tarnvale.example');
 				await expect(page).toHaveURL('/admin');
-				await page.locator('summary').click();
+				await personMenu(page).click();
 				await look();
 				expect(faults).toEqual([]);
 			});
@@ -211,7 +205,7 @@ test('a cookie that was planted is not taken up, and one that has been signed ou
 		(await rawRequest('GET', '/teach', { cookie: `session=${value}` })).status;
 	expect(await pageOf(token)).toBe(200);
 	expect(await pageOf(planted)).toBe(303);
-	await page.locator('summary').click();
+	await personMenu(page).click();
 	await page.getByRole('button', { name: 'Sign out' }).click();
 	await expect(page).toHaveURL('/');
 	expect(await pageOf(token)).toBe(303);
