@@ -3,7 +3,10 @@ import { Course } from '$lib/server/db/models/course';
 import { Edition } from '$lib/server/db/models/edition';
 import { Exercise } from '$lib/server/db/models/exercise';
 import { Unit } from '$lib/server/db/models/unit';
+import { parseFigureText } from '$lib/server/bench/figure/parse-figure';
+import { stringify } from 'yaml';
 import { exerciseDefinition } from './exercise';
+import { writtenFigure } from './figure';
 
 let made = 0;
 const now = new Date('2026-03-02T09:00:00Z');
@@ -38,8 +41,15 @@ export async function createEdition(
 		slug: 'power-of-a-spread-signal',
 		title: 'Power of a spread signal',
 		summary: 'Why a marker misleads.',
-		lesson: { title: 'Why a marker misleads', words: 1, parts: [{ kind: 'text', html: '<p>Lesson.</p>' }] },
-		figures: []
+		lesson: {
+			title: 'Why a marker misleads',
+			words: 1,
+			parts: [
+				{ kind: 'text', html: '<p>Lesson.</p>' },
+				{ kind: 'figure', id: 'hump' }
+			]
+		},
+		figures: [parseFigureText(stringify(writtenFigure()))]
 	});
 	const definition = exerciseDefinition(over);
 	return Exercise.create({

@@ -9,5 +9,7 @@ export function createEvent(
 ): RequestEvent {
 	const url = new URL(`http://bench.example/api${query}`);
 	const init = { method, body, headers: { 'content-type': 'application/json' }, duplex: 'half' };
-	return { locals: { actor }, params, url, request: new Request(url, init) } as unknown as RequestEvent;
+	const request = new Request(url, init);
+	const getClientAddress = () => '192.0.2.1';
+	return { locals: { actor }, params, url, request, getClientAddress } as unknown as RequestEvent;
 }

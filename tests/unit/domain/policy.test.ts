@@ -33,6 +33,7 @@ const table: Record<Action, [string[], string[], string[], string[], string[]]> 
 	'admin.enter': [[], [], [], [], any],
 	'profile.read': [mine, mine, mine, mine, any],
 	'profile.change': [mine, mine, mine, mine, any],
+	'lesson.read': [any, any, [], [], any],
 	'attempt.start': [mine, mine, [], [], mine],
 	'attempt.work': [mine, mine, [], [], mine],
 	'attempt.read': [mine, [...mine, ...cohort], mine, mine, any],

@@ -9,6 +9,7 @@ export type Action =
 	| 'admin.enter'
 	| 'profile.read'
 	| 'profile.change'
+	| 'lesson.read' // with its live figures
 	| 'attempt.start'
 	| 'attempt.work' // settings, sweeps, readings, drafts, hints, answers
 	| 'attempt.read'
@@ -58,6 +59,7 @@ export const PERMISSIONS: Record<Action, Partial<Record<Role, readonly Reach[]>>
 	'admin.enter': { administrator: ANY },
 	'profile.read': THEIR_OWN,
 	'profile.change': THEIR_OWN,
+	'lesson.read': { apprentice: ANY, instructor: ANY, administrator: ANY },
 	// Whoever works on an attempt is told the truth at its end, so these go with 'answer-key.read'.
 	'attempt.start': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
 	'attempt.work': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },

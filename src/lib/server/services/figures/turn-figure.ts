@@ -1,0 +1,66 @@
+import type { Figure, FigureChoice } from '$lib/schemas/figure';
+import type { FigureRequest, FigureState } from '$lib/schemas/figure-view';
+import { Unit } from '$lib/server/db/models/unit';
+import { addressBlock } from '$lib/server/domain/address-block';
+import { may } from '$lib/server/domain/policy';
+import type { Actor } from '$lib/server/domain/role';
+import { takeTry, type Bucket, type Limit } from '$lib/server/domain/sign-in-limit';
+import { DomainError, type Issue } from '$lib/server/errors';
+import { LeastRecentlyUsed } from '../attempts/least-recently-used';
+import { figureState } from './figure-states';
+
+/** Figures made for one address, behind which a whole training room may sit. What is made already costs nothing. */
+export const FIGURE_LIMIT: Limit = { capacity: 120, drainS: 0.5 };
+
+// Of this process: it is this process's time that is shared out.
+const buckets = new LeastRecentlyUsed<string, Bucket>(10_000);
+
+/**
+ * A lesson's figure with its controls where the reader put them.
+ * @param unitId of any edition
+ * @param address network address that asks
+ * @throws DomainError `not_found`; `invalid` naming the control whose value is not among its choices; `too_many`
+ */
+export async function turnFigure(
+	actor: Actor,
+	{ unitId, figureId, address }: { unitId: number; figureId: string; address: string },
+	{ values }: FigureRequest,
+	now: Date
+): Promise<FigureState> {
+	if (!may(actor, 'lesson.read'))
+		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	const unit = await Unit.findByPk(unitId, { attributes: ['id', 'figures'] });
+	const figure = unit?.figures.find(({ id }) => id === figureId);
+	if (!figure) throw new DomainError('not_found', 'There is no such figure.');
+	return figureState({ unitId, figure }, chosen(figure, values), () => count(address, now));
+}
+
+/** One choice for each control, as asked; @throws DomainError for one that isn't offered */
+function chosen({ controls }: Figure, values: FigureRequest['values']): FigureChoice[] {
+	const known = new Set<string>(controls.map(({ setting }) => setting));
+	const issues: Issue[] = [
+		...Object.keys(values)
+			.filter((key) => !known.has(key))
+			.map((key) => ({ field: `values.${key}`, message: 'is no control of this figure' })),
+		...controls
+			.filter(({ setting, choices }) => !Object.hasOwn(values, setting) || !choices.includes(values[setting]))
+			.map(({ setting, choices }) => ({
+				field: `values.${setting}`,
+				message: `must be one of ${choices.map(String).join(', ')}`
+			}))
+	];
+	if (issues.length > 0) throw new DomainError('invalid', 'The figure can’t be set like that.', { issues });
+	return controls.map(({ setting }) => values[setting]);
+}
+
+function count(address: string, now: Date): void {
+	const name = addressBlock(address);
+	const empty = (): Bucket => ({ level: 0, updatedAt: now });
+	const { retryAfterS, bucket } = takeTry(buckets.get(name, empty), FIGURE_LIMIT, now);
+	if (retryAfterS > 0) {
+		const message = `Too many figures at once. The next one is possible in ${retryAfterS} s.`;
+		throw new DomainError('too_many', message, { retryAfterS });
+	}
+	buckets.forget(name);
+	buckets.get(name, () => bucket);
+}
