@@ -7,6 +7,7 @@ import { quantity as quantitySchema } from '$lib/schemas/quantity';
 import type { z } from 'zod';
 import { profileNamed } from '../receiver/profiles';
 import type { Seed } from '../receiver/random';
+import { mistakeId } from '../grading/watched-mistakes';
 import { truth } from '../truth/truth';
 import type { Brief, DrawnExercise, DrawnQuestion, FilledStep } from './drawn-exercise';
 import { ExerciseError } from './exercise-error';
@@ -82,9 +83,10 @@ function fillQuestion(question: ExerciseQuestion, scene: Scene, scope: Scope, fi
 		tolerance: 'absolute' in tolerance ? tolerance.absolute : Math.abs(value) * tolerance.relative,
 		frequencyHz,
 		leadDb: scene.path ? lossDbAt(scene.path, frequencyHz) : 0,
-		mistakes: question.mistakes.map(
-			(mistake, i) => fillTemplate(mistake, scope, `${field}.mistakes[${i}]`) as WatchedMistake
-		)
+		mistakes: question.mistakes.map((mistake, i) => ({
+			...(fillTemplate(mistake, scope, `${field}.mistakes[${i}]`) as WatchedMistake),
+			id: mistakeId(mistake)
+		}))
 	};
 }
 

@@ -23,7 +23,9 @@ function changesOf(
 	{ evidence }: Judgement
 ): { watched?: Watched; change: number }[] {
 	const slips = matched.watched.flatMap((watched) =>
-		watched.mistake.stage === 'slip' ? [{ watched, change: -watched.mistake.change(evidence) }] : []
+		watched.mistake.stage === 'slip'
+			? [{ watched, change: -(watched.mistake.change(evidence, matched.setUp) ?? 0) }]
+			: []
 	);
 	const rest = total - slips.reduce((sum, { change }) => sum + change, 0);
 	const readings = matched.watched.filter(({ mistake }) => mistake.stage === 'reading');

@@ -29,7 +29,7 @@ export interface Source extends TakenReading {
 	setUp: SetUp;
 	/** Correction that was set, at the frequency read, dB. */
 	appliedDb: number;
-	/** Its value brought to the reference plane: the lead added, the correction already applied not counted twice. */
+	/** Its value brought to the reference plane: lead and pad added, the correction already applied not counted twice. */
 	planeValue: number;
 }
 
@@ -64,7 +64,7 @@ function sourceOf(
 	const trace = resolved.traces[taken.trace - 1] ?? resolved.traces[0];
 	const readAtHz = quantityFrequencyHz(taken.request) || question.frequencyHz;
 	const appliedDb = correctionAt(resolved.correctionDb, readAtHz);
-	const shift = isAbsoluteLevel(taken.reading.unit) ? question.leadDb - appliedDb : 0;
+	const shift = isAbsoluteLevel(taken.reading.unit) ? question.leadDb + resolved.input.padDb - appliedDb : 0;
 	const source: Source = {
 		...taken,
 		family: familyOf(taken.request.kind),

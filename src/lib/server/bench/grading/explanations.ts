@@ -80,8 +80,9 @@ function slipped(from: readonly Candidate[], watched: readonly Watched[], eviden
 	return from.flatMap((base) =>
 		watched.flatMap((slip): Candidate[] => {
 			if (slip.mistake.stage !== 'slip') return [];
-			const value = base.value + slip.mistake.change(evidence);
-			return [{ ...base, watched: [...base.watched, slip], value }];
+			const change = slip.mistake.change(evidence, base.setUp);
+			if (change === null) return [];
+			return [{ ...base, watched: [...base.watched, slip], value: base.value + change }];
 		})
 	);
 }

@@ -81,7 +81,8 @@ export interface ReadingMistake extends Words {
 /** Made after a right reading, with correction or pencil: a fixed change of the number, in the question's unit. */
 export interface Slip extends Words {
 	stage: 'slip';
-	change(context: Context): number;
+	/** Null when it can't be made with that set-up: no pad, no pad left out. */
+	change(context: Context, setUp?: SetUp): number | null;
 }
 
 export type Mistake = ReadingMistake | Slip;

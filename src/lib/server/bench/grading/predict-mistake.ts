@@ -8,11 +8,8 @@ import type { Watched } from './watched-mistakes';
  */
 export function predictMistake({ mistake }: Watched, context: Context): Prediction | null {
 	const { drawn, question } = context;
-	if (mistake.stage === 'slip') {
-		return {
-			value: question.truth + mistake.change(context),
-			spread: MODEL_SPREAD_DB
-		};
-	}
-	return mistake.predict(context, setUpOf(drawn, mistake.make(drawn.method, context), question.id));
+	const setUp = setUpOf(drawn, mistake.make(drawn.method, context), question.id);
+	if (mistake.stage === 'reading') return mistake.predict(context, setUp);
+	const change = mistake.change(context, setUp);
+	return change === null ? null : { value: question.truth + change, spread: MODEL_SPREAD_DB };
 }

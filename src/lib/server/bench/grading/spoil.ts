@@ -47,6 +47,20 @@ export const withSum = (
 		isAnswer(step, questionId) ? { ...step, value: (scope: Scope) => sum(step.value(scope)) } : step
 	);
 
+/** The method with `changeDb` more added back for what is lost on the way: in the correction, where it is typed on the bench, else in the sum. */
+export function withLoss(steps: readonly FilledStep[], questionId: string, changeDb: number): FilledStep[] {
+	if (!correctsOnBench(steps)) return withSum(steps, questionId, (value) => value + changeDb);
+	return steps.map((step) => {
+		if (step.do !== 'set' || step.settings.correctionDb === undefined) return step;
+		const { correctionDb } = step.settings;
+		const changed =
+			typeof correctionDb === 'number'
+				? correctionDb + changeDb
+				: correctionDb.map((point) => ({ ...point, db: point.db + changeDb }));
+		return { ...step, settings: { ...step.settings, correctionDb: changed } };
+	});
+}
+
 /** Whether the method corrects for the lead on the bench rather than by a sum. */
 export const correctsOnBench = (steps: readonly FilledStep[]): boolean =>
 	steps.some(

@@ -12,7 +12,7 @@ export interface Watched {
 }
 
 /** @throws ExerciseError naming the kind or the parameter at fault */
-export function bindMistake({ kind, ...parameters }: WatchedMistake, field: string): Mistake {
+export function bindMistake({ kind, id: _, ...parameters }: WatchedMistake, field: string): Mistake {
 	const known = mistakeKinds.find((candidate) => candidate.kind === kind);
 	if (!known) {
 		const kinds = mistakeKinds.map((candidate) => candidate.kind).join(', ');
@@ -21,14 +21,17 @@ export function bindMistake({ kind, ...parameters }: WatchedMistake, field: stri
 	return known.bind(parameters, field);
 }
 
-/** The mistakes watched on a question; a kind watched in several ways has its parameters in its name. */
-export const watchedMistakes = ({ id, mistakes }: DrawnQuestion): Watched[] =>
-	mistakes.map((watched, i) => {
-		const { kind, ...parameters } = watched;
-		const values = Object.values(parameters).map(String);
-		return {
-			id: [kind, ...values].join(' '),
-			kind,
-			mistake: bindMistake(watched, `questions.${id}.mistakes[${i}]`)
-		};
-	});
+/**
+ * Names a mistake by its kind and parameters as the author wrote them, expressions too ("wrong-width 2000",
+ * "coupling-left-out couplingDb"): the same on every seed.
+ */
+export const mistakeId = ({ kind, id: _, ...parameters }: WatchedMistake): string =>
+	[kind, ...Object.values(parameters).map((value) => String(value).replace(/^=/, ''))].join(' ');
+
+/** The mistakes watched on a question. */
+export const watchedMistakes = (question: DrawnQuestion): Watched[] =>
+	question.mistakes.map((watched, i) => ({
+		id: typeof watched.id === 'string' ? watched.id : mistakeId(watched),
+		kind: watched.kind,
+		mistake: bindMistake(watched, `questions.${question.id}.mistakes[${i}]`)
+	}));
