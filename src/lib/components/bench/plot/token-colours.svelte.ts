@@ -18,7 +18,7 @@ export function tokenColours(element: () => Element | undefined) {
 		};
 	});
 	return {
-		of(token: TraceStyle['token']): string {
+		of(token: TraceStyle['token'] | 'ink'): string {
 			subscribe();
 			const target = element();
 			return target ? getComputedStyle(target).getPropertyValue(`--${token}`).trim() || 'currentColor' : '';

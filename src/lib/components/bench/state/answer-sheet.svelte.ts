@@ -17,12 +17,16 @@ export class AnswerSheet {
 	handingIn = $state(false);
 	/** A refusal that belongs to no question. */
 	trouble = $state<string | undefined>();
+	/** Handed in, here or elsewhere. */
+	closed = $state(false);
 	readonly answered: number = $derived(
 		Object.values(this.answers).filter((answer) => answer.text.trim() !== '').length
 	);
 	readonly #wire: BenchWire;
 	readonly #questions: readonly QuestionView[];
 	#timer: ReturnType<typeof setTimeout> | undefined;
+	/** The last keeping of drafts: answers handed in wait for it, so that none arrives late. */
+	#keeping: Promise<void> = Promise.resolve();
 
 	constructor(questions: readonly QuestionView[], drafts: DraftsView, wire: BenchWire) {
 		this.#wire = wire;
@@ -71,14 +75,17 @@ export class AnswerSheet {
 		this.handingIn = true;
 		this.trouble = undefined;
 		try {
+			await this.#keeping;
 			await this.#wire.handIn($state.snapshot(this.answers));
 			this.state = 'kept';
+			this.closed = true;
 			return true;
 		} catch (error) {
 			if (!(error instanceof Refusal)) {
 				this.trouble = 'The server could not be reached. Everything typed is still here; try again.';
 				return false;
 			}
+			if (error.status === 409) this.closed = true;
 			this.#sort(error);
 			return false;
 		} finally {
@@ -101,14 +108,18 @@ export class AnswerSheet {
 		this.state = 'typing';
 		this.problems = Object.fromEntries(Object.entries(this.problems).filter(([key]) => key !== id));
 		clearTimeout(this.#timer);
-		this.#timer = setTimeout(() => void this.#keep(), restMs);
+		this.#timer = setTimeout(() => this.#keepSoon(), restMs);
 	}
 
 	/** Keeps at once what waits to be kept: the page is going. */
 	flush(): void {
-		if (this.state === 'kept') return;
+		if (this.state === 'kept' || this.closed) return;
 		clearTimeout(this.#timer);
 		void this.#keep(true);
+	}
+
+	#keepSoon(): void {
+		this.#keeping = this.#keep();
 	}
 
 	async #keep(leaving = false): Promise<void> {
@@ -118,10 +129,11 @@ export class AnswerSheet {
 		} catch (error) {
 			this.state = 'not-kept';
 			if (error instanceof Refusal && error.status < 500) {
-				this.trouble = error.message;
+				if (error.status === 409) this.closed = true;
+				else this.trouble = error.message;
 				return;
 			}
-			this.#timer = setTimeout(() => void this.#keep(), retryMs);
+			this.#timer = setTimeout(() => this.#keepSoon(), retryMs);
 		}
 	}
 }

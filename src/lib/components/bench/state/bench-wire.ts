@@ -7,6 +7,7 @@ import type {
 	TypedAnswer
 } from '$lib/schemas/attempt';
 import type { Frame } from '$lib/schemas/frames';
+import type { LoggedSetUp } from '$lib/schemas/set-up-log';
 import type { SweepsRequest } from '$lib/schemas/sweep-stream';
 
 export interface Issue {
@@ -31,11 +32,15 @@ export interface BenchWire {
 	sweeps(request: SweepsRequest, signal: AbortSignal): Promise<AsyncIterable<Frame[]>>;
 	/** Rows drawn before, both ends included, at once. */
 	rows(from: number, to: number): Promise<AsyncIterable<Frame[]>>;
+	/** What was set so far; absent where nothing is logged. */
+	setUps?(): Promise<LoggedSetUp[]>;
 	acknowledge(row: number): Promise<void>;
 	takeReading(request: TakeReadingRequest): Promise<ReadingView>;
 	/** @param leaving the page is going, and the request must outlive it */
 	saveDrafts(answers: Record<string, TypedAnswer>, leaving?: boolean): Promise<string>;
 	nextHint(): Promise<HintResponse>;
 	handIn(answers: Record<string, TypedAnswer>): Promise<void>;
+	/** Ends the attempt without answers; absent where there is nothing to spend. */
+	abandon?(): Promise<void>;
 	reload(): Promise<AttemptView>;
 }

@@ -4,6 +4,10 @@ import { isProblem } from '$lib/measure/reading';
 import { takeReading } from '$lib/measure/take-reading';
 import type { AttemptView } from '$lib/schemas/attempt';
 import type { BenchRequest, CountRequest, ReadingRequest } from '$lib/schemas/reading';
+import type { LoggedSetUp } from '$lib/schemas/set-up-log';
+import type { ResolvedSettings } from '$lib/schemas/settings';
+import { Playback } from '../over-time/playback.svelte';
+import type { View } from '../over-time/ViewSwitch.svelte';
 import { readingKind, type ReadingContext } from '../readings/reading-kinds';
 import type { ReadingRow } from '../readings/reading-row';
 import { shownReading } from '../shown-quantity';
@@ -13,7 +17,11 @@ import { MarkerList, type Marker } from './marker-list.svelte';
 import { ReadingList } from './reading-list.svelte';
 import { SetupSheet } from './setup-sheet.svelte';
 import { SweepRun } from './sweep-run.svelte';
-import { TraceSet } from './trace-set.svelte';
+import { TraceSet, type KeptRow } from './trace-set.svelte';
+
+/** Points of earlier set-ups fetched at once to be played back, and sweeps at most. */
+const fetchedPoints = 4_000_000;
+const mostFetched = 1000;
 
 /** Where to put a marker: the highest point, or the next one to a side. */
 export type PeakStep = 'highest' | 'left' | 'right';
@@ -21,6 +29,9 @@ export type PeakStep = 'highest' | 'left' | 'right';
 export class Bench {
 	readonly traces = new TraceSet();
 	readonly markers = new MarkerList();
+	readonly playback = new Playback();
+	/** How the sweeps are looked at. */
+	view = $state<View>('spectrum');
 	readonly run: SweepRun;
 	readonly sheet: SetupSheet;
 	readonly readings: ReadingList;
@@ -51,7 +62,14 @@ export class Bench {
 
 	/** The ends of the axis: Hz, or s in span 0. */
 	get axis(): { kind: 'frequency' | 'time'; start: number; stop: number } {
-		const { startHz, stopHz, spanHz, sweepTimeS } = this.run.resolved;
+		return this.axisOf(this.run.resolved);
+	}
+
+	axisOf({ startHz, stopHz, spanHz, sweepTimeS }: ResolvedSettings): {
+		kind: 'frequency' | 'time';
+		start: number;
+		stop: number;
+	} {
 		return spanHz > 0
 			? { kind: 'frequency', start: startHz, stop: stopHz }
 			: { kind: 'time', start: 0, stop: sweepTimeS };
@@ -64,6 +82,7 @@ export class Bench {
 	}
 
 	close(): void {
+		this.playback.close();
 		this.answers.flush();
 		this.run.stop();
 	}
@@ -100,6 +119,11 @@ export class Bench {
 		}
 		const place = placeOf(outcome.parts);
 		if (place !== undefined) this.markers.move(letter, place);
+	}
+
+	/** The attempt has been handed in, on this page or another one. */
+	get closed(): boolean {
+		return this.run.closed || this.answers.closed;
 	}
 
 	/** Adds a marker at a place, by default on the highest point, else in the middle. */
@@ -178,6 +202,33 @@ export class Bench {
 		}
 	}
 
+	readonly mostFetched = mostFetched;
+
+	/** Plays back the sweeps of the set-up in force, as they are kept here. The receiver rests meanwhile. */
+	playBackKept(): void {
+		this.run.stop();
+		const rows = this.traces.rows.slice();
+		if (rows.length > 0) this.playback.open({ resolved: this.run.resolved, rows, words: 'this set-up' });
+	}
+
+	/** Set-ups before the one in force of which something was drawn, oldest first. */
+	async earlierSetUps(): Promise<LoggedSetUp[]> {
+		const all = (await this.wire.setUps?.()) ?? [];
+		return all.filter(({ rows }) => rows !== null && rows.to < this.traces.restartRow);
+	}
+
+	/** Fetches the last sweeps of an earlier set-up and plays them back. */
+	async playBack({ rows: drawn, resolved, number }: LoggedSetUp): Promise<void> {
+		if (!drawn) return;
+		const most = Math.min(mostFetched, Math.floor(fetchedPoints / resolved.points));
+		const rows: KeptRow[] = [];
+		for await (const frames of await this.wire.rows(Math.max(drawn.from, drawn.to - most + 1), drawn.to)) {
+			for (const frame of frames) if (frame.type === 'piece' && frame.last) rows.push(frame);
+		}
+		this.run.stop();
+		if (rows.length > 0) this.playback.open({ resolved, rows, words: `set-up ${number + 1}` });
+	}
+
 	toggle(): void {
 		if (this.run.running) this.run.stop();
 		else void this.start();
@@ -185,6 +236,7 @@ export class Bench {
 
 	/** Sweeps on; a refusal is told at the field it belongs to. */
 	async start(resetProtection?: boolean): Promise<void> {
+		this.playback.close();
 		try {
 			await this.run.start(undefined, resetProtection);
 		} catch (error) {
@@ -228,8 +280,18 @@ export class Bench {
 		this.run.stop();
 		await this.run.settleAcknowledgement().catch(() => undefined);
 		const taken = await this.answers.handIn();
-		if (!taken && running) await this.start();
+		if (this.answers.closed) this.run.closed = true;
+		else if (running) await this.start();
 		return taken;
+	}
+
+	/** Ends the attempt without answers. @throws Refusal when it has been closed already */
+	async abandon(): Promise<void> {
+		this.run.stop();
+		await this.run.settleAcknowledgement().catch(() => undefined);
+		await this.wire.abandon?.();
+		this.run.closed = true;
+		this.answers.closed = true;
 	}
 
 	async nextHint(): Promise<void> {

@@ -26,6 +26,8 @@ export class SweepRun {
 	flags = $state.raw<readonly ReceiverFlag[]>([]);
 	benchTimeUsedS = $state(0);
 	speedUp = $state(1);
+	/** The attempt has been handed in, here or elsewhere: nothing more is swept or told. */
+	closed = $state(false);
 	/** A new set-up is on its way and nothing of it has come back yet. */
 	settling = $state(false);
 
@@ -36,6 +38,8 @@ export class SweepRun {
 	#drawnTo: number | undefined;
 	#acknowledgedTo: number | undefined;
 	#acknowledgedAtMs = 0;
+	/** The last telling of what was drawn: they go one after another, so that none arrives late. */
+	#telling: Promise<void> = Promise.resolve();
 	#clock: { clockS: number; usedS: number };
 
 	constructor(bench: BenchView, traces: TraceSet, wire: BenchWire) {
@@ -103,8 +107,14 @@ export class SweepRun {
 			await nextPaint();
 			this.#drawnTo = Math.max(row, this.#drawnTo ?? 0);
 		}
+		const told = this.#telling.then(() => this.#tell());
+		this.#telling = told.catch(() => undefined);
+		return told;
+	}
+
+	async #tell(): Promise<void> {
 		const drawnTo = this.#drawnTo;
-		if (drawnTo === undefined || drawnTo === this.#acknowledgedTo) return;
+		if (this.closed || drawnTo === undefined || drawnTo === this.#acknowledgedTo) return;
 		await this.#wire.acknowledge(drawnTo);
 		this.#acknowledgedTo = drawnTo;
 	}
@@ -218,6 +228,7 @@ export class SweepRun {
 		if (end.reason === 'server-stopping') return;
 		this.ended = { reason: end.reason, message: end.message };
 		this.running = false;
+		if (end.reason === 'closed') this.closed = true;
 		if (end.reason === 'input-protection' && !this.flags.some((flag) => flag.kind === 'input-protection')) {
 			this.flags = [...this.flags, { kind: 'input-protection' }];
 		}
@@ -230,7 +241,12 @@ export class SweepRun {
 	/** Another tab or device has gone on: load where the bench stands, and go on from there. */
 	async #catchUp(settings: Settings, sweeps: number | undefined, refusal: Refusal): Promise<void> {
 		const { bench, state } = await this.#wire.reload();
-		if (state === 'closed' || bench.resumeFrom === this.#nextRow) throw refusal;
+		if (state === 'closed') {
+			this.stop();
+			this.closed = true;
+			return;
+		}
+		if (bench.resumeFrom === this.#nextRow) throw refusal;
 		this.#nextRow = bench.resumeFrom;
 		return this.#ask(settings, sweeps);
 	}

@@ -17,8 +17,22 @@ export interface ShownTrace extends TraceSetUp {
 	drawnDbm: ArrayLike<number>;
 }
 
-/** Points kept since the restart, so that a trace turned to hold or average starts from all its rows. */
+/** A whole sweep as it came. */
+export interface KeptRow {
+	row: number;
+	/** Bench clock when it ended, s. */
+	clockS: number;
+	levelsDbm: Float32Array;
+}
+
+/**
+ * Points kept since the restart (48 MB), so that a trace turned to hold or average starts from all its rows, and so that
+ * they can be played back.
+ */
 const keptPoints = 12_000_000;
+
+/** Sweeps of so many points that are kept at most. */
+export const mostRows = (points: number): number => Math.max(2, Math.floor(keptPoints / points));
 
 /** Figures change at most this often, ms. */
 const readEveryMs = 200;
@@ -37,13 +51,18 @@ export class TraceSet {
 
 	#setUps: readonly TraceSetUp[] = [];
 	#scale: ResolvedSettings['scale'] = 'log';
-	#rows: { row: number; levelsDbm: Float32Array }[] = [];
+	#rows: KeptRow[] = [];
 	#readAtMs = -Infinity;
 	#piece: Float32Array | undefined;
 	#sweptPoints = 0;
 	#held: Partial<Record<TraceSetUp['mode'], ArrayLike<number>>> = {};
 	/** Traces kept as they were, by position. */
 	#kept: (ShownTrace | undefined)[] = [];
+
+	/** Every whole sweep kept since the restart, oldest first. Not reactive: read `lastRow` to hear of more. */
+	get rows(): readonly KeptRow[] {
+		return this.#rows;
+	}
 
 	/** Forgets every row: the set-up changed. */
 	restart(restartRow: number): void {
@@ -71,7 +90,7 @@ export class TraceSet {
 		this.#piece.set(piece.levelsDbm, piece.fromPoint);
 		this.#sweptPoints = piece.fromPoint + piece.levelsDbm.length;
 		if (!piece.last) return undefined;
-		this.#add(piece.row, this.#piece);
+		this.#add({ row: piece.row, clockS: piece.clockS, levelsDbm: this.#piece });
 		this.#piece = undefined;
 		return piece.row;
 	}
@@ -90,13 +109,14 @@ export class TraceSet {
 		this.#readAtMs = performance.now();
 	}
 
-	#add(row: number, levelsDbm: Float32Array): void {
-		this.#rows.push({ row, levelsDbm });
+	#add(kept: KeptRow): void {
+		const { levelsDbm } = kept;
+		this.#rows.push(kept);
 		for (const mode of ['max-hold', 'min-hold'] as const) {
 			const held = this.#held[mode];
 			if (held) this.#held[mode] = combineRows([held, levelsDbm], mode, 2, this.#scale);
 		}
-		const most = Math.max(2, Math.floor(keptPoints / levelsDbm.length));
+		const most = mostRows(levelsDbm.length);
 		if (this.#rows.length > most) this.#rows.splice(0, this.#rows.length - most);
 	}
 

@@ -9,6 +9,7 @@ import {
 	type AttemptView
 } from '$lib/schemas/attempt';
 import { FrameDecoder, type Frame } from '$lib/schemas/frames';
+import { setUpsResponse } from '$lib/schemas/set-up-log';
 
 /** @param attemptId whose endpoints are meant */
 export function attemptWire(attemptId: AttemptView['id']): BenchWire {
@@ -30,6 +31,7 @@ export function attemptWire(attemptId: AttemptView['id']): BenchWire {
 	return {
 		sweeps: async (request, signal) => framesOf(await send('POST', '/sweeps', request, { signal })),
 		rows: async (from, to) => framesOf(await answered(fetch(`${base}/rows?from=${from}&to=${to}`))),
+		setUps: async () => setUpsResponse.parse(await (await answered(fetch(`${base}/set-ups`))).json()).setUps,
 		acknowledge: async (row) => {
 			await send('POST', '/acknowledgements', { row });
 		},
@@ -42,6 +44,9 @@ export function attemptWire(attemptId: AttemptView['id']): BenchWire {
 		nextHint: async () => hintResponse.parse(await (await send('POST', '/hints', {})).json()),
 		handIn: async (answers) => {
 			await send('POST', '/answers', { answers });
+		},
+		abandon: async () => {
+			await send('POST', '/abandonment', {});
 		},
 		reload: async () => attemptResponse.parse(await (await answered(fetch(base))).json()).attempt
 	};
