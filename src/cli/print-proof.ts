@@ -1,3 +1,4 @@
+import { brief } from '$lib/server/bench/proof/brief';
 import type { ProofRow, ProofTable } from '$lib/server/bench/proof/proof-table';
 
 const percent = (share: number): string => `${(100 * share).toFixed(1)} %`;
@@ -8,10 +9,10 @@ const cells = (row: ProofRow): string[] => [
 	row.mistake ?? 'taught method',
 	percent(row.passShare),
 	row.mistake === null ? 'faultless '.concat(percent(row.namedShare)) : percent(row.namedShare),
-	row.meanError.toFixed(2),
-	row.mistake === null ? row.bias.toFixed(2) : '',
-	row.scatter.toFixed(2),
-	row.edgeError.toFixed(2),
+	brief(row.meanError),
+	row.mistake === null ? brief(row.bias) : '',
+	brief(row.scatter),
+	brief(row.edgeError),
 	row.failures.length > 0 ? 'FAILS' : 'ok'
 ];
 

@@ -8,7 +8,7 @@ import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { judgeQuestion } from '$lib/server/bench/grading/judge-question';
 import { predictMistake } from '$lib/server/bench/grading/predict-mistake';
-import { receiverErrorDb } from '$lib/server/bench/grading/receiver-error-db';
+import { ownError } from '$lib/server/bench/grading/own-error';
 import { watchedMistakes } from '$lib/server/bench/grading/watched-mistakes';
 
 export function drawnFrom(slug: string, seed: number): DrawnExercise {
@@ -31,7 +31,7 @@ export function madeOnBench(drawn: DrawnExercise, questionId: string, id: string
 	return {
 		question,
 		/** What was answered, less this receiver's own error. */
-		value: value - receiverErrorDb(context),
+		value: value - ownError(context),
 		predicted: predictMistake(watched, context)!,
 		/** What the finding names with the reading attached, and from the log alone. */
 		named: named({ ...record, answers: { [questionId]: { value, readingId } } }),

@@ -5,8 +5,9 @@
  */
 import { z } from 'zod';
 import { units } from '$lib/units/unit';
+import { part } from './part';
 import { quantity } from './quantity';
-import { maskLimits, readingRequest } from './reading';
+import { benchRequest, maskLimits } from './reading';
 import { receiverProfile } from './receiver';
 import { device, emitter, lossTable } from './scene';
 import { settings } from './settings';
@@ -58,7 +59,8 @@ export const sceneTemplate = z.strictObject({
 export const settingsTemplate = templateOf(settings);
 
 const quantityTemplate = templateOf(quantity);
-const readingTemplate = templateOf(readingRequest);
+const partTemplate = templateOf(part);
+const readingTemplate = templateOf(benchRequest);
 
 /** The sketch of what is connected, from source to receiver; `plane` marks where the answers hold. */
 export const chainPart = z.discriminatedUnion('part', [
@@ -78,6 +80,8 @@ export const exerciseQuestion = z.strictObject({
 	id: slug,
 	text: line,
 	quantity: quantityTemplate,
+	/** Asks for a part of the quantity in place of its value: the distance of a delta, one neighbour of several. */
+	part: partTemplate.optional(),
 	unit: z.enum(answerUnits),
 	/** Half width of what counts as right: in the question's unit, or as a share of the true value. */
 	tolerance: z.union(
@@ -87,7 +91,8 @@ export const exerciseQuestion = z.strictObject({
 		],
 		{ error: 'give either absolute or relative, greater than 0' }
 	),
-	digits: z.int().min(0).max(6),
+	/** Decimals, in that unit. */
+	digits: z.int().min(0).max(9),
 	mistakes: z.array(watchedMistake).min(1).max(20)
 });
 
@@ -99,6 +104,8 @@ export const methodStep = z.discriminatedUnion('do', [
 	z.strictObject({
 		do: z.literal('read'),
 		reading: readingTemplate,
+		/** What of the reading the name stands for; absent: its value. */
+		part: partTemplate.optional(),
 		trace: z.int().min(1).max(4).default(1),
 		as: valueName,
 		why

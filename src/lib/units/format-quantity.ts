@@ -50,18 +50,33 @@ export const showFrequency = (frequencyHz: number, digits?: number): Shown =>
 /** A time in the largest unit that leaves a whole digit. @param digits as for a frequency, down to 1 ns */
 export const showTime = (timeS: number, digits?: number): Shown => show(timeS, TIMES, digits);
 
+/**
+ * A value in base units to a given digit, in the unit that suits it: 12 345 Hz to −1 digits is 12.35 kHz.
+ * @param digits decimals of the base unit; below 0: tens, hundreds … of it
+ */
+export function showMeasured(value: number, unit: string, digits: number): Shown {
+	const scales = unit === 'Hz' ? FREQUENCIES : unit === 's' ? TIMES : undefined;
+	if (!scales) return { figure: formatFigure(value, Math.max(0, digits)), unit: unit === '1' ? '' : unit };
+	const steps = Math.round(Math.log10(scaleOf(value, scales).factor));
+	return show(value, scales, Math.max(0, digits + steps));
+}
+
 export const formatFrequency = (frequencyHz: number, digits?: number): string =>
 	joinShown(showFrequency(frequencyHz, digits));
 export const formatTime = (timeS: number, digits?: number): string => joinShown(showTime(timeS, digits));
 
 function show(value: number, scales: Scaled[], digits?: number): Shown {
+	const scale = scaleOf(value, scales);
+	const figure = formatFigure(value / scale.factor, digits ?? scale.decimals);
+	return { figure: groupDecimals(digits === undefined ? trimZeros(figure) : figure), unit: scale.unit };
+}
+
+function scaleOf(value: number, scales: Scaled[]): Scaled {
 	const smallest = scales[scales.length - 1];
 	// Half a last digit of leeway, so that 999 999.999 999 9 Hz is 1 MHz and not 1000.000 kHz.
 	const size = Math.abs(value) + smallest.factor / 2;
-	const scale =
-		value === 0 ? scales.find((s) => s.factor === 1)! : (scales.find((s) => size >= s.factor) ?? smallest);
-	const figure = formatFigure(value / scale.factor, digits ?? scale.decimals);
-	return { figure: groupDecimals(digits === undefined ? trimZeros(figure) : figure), unit: scale.unit };
+	if (value === 0) return scales.find((s) => s.factor === 1)!;
+	return scales.find((s) => size >= s.factor) ?? smallest;
 }
 
 const trimZeros = (figure: string): string => (figure.includes('.') ? figure.replace(/\.?0+$/, '') : figure);

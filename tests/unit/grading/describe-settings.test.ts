@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import type { BenchRequest } from '$lib/schemas/reading';
 import { describeReading } from '$lib/server/bench/grading/describe-reading';
 import { describeSettings } from '$lib/server/bench/grading/describe-settings';
 
@@ -36,9 +37,13 @@ describe('describeSettings(before, after)', () => {
 });
 
 describe('describeReading(request)', () => {
-	it.each([
+	it.each<[BenchRequest, string]>([
 		[{ kind: 'channel-power', centreHz: 450e6, widthHz: 25e3 }, 'channel power, 25 kHz'],
 		[{ kind: 'peak' }, 'highest point'],
+		[{ kind: 'count', atHz: 450.025e6, gateS: 0.5 }, 'frequency count, at 450.025 MHz, gate 500 ms'],
+		[{ kind: 'delta', fromHz: 1e6, toHz: 1.5e6 }, 'difference of two markers, from 1 MHz to 1.5 MHz'],
+		[{ kind: 'occupied-bandwidth', percent: 99 }, 'occupied bandwidth, 99 %'],
+		[{ kind: 'x-db-bandwidth', db: 26 }, 'bandwidth, 26 dB down'],
 		[{ kind: 'marker', atHz: 450.025e6 }, 'marker, at 450.025 MHz']
 	])('%o', (request, words) => expect(plain(describeReading(request))).toBe(words));
 });

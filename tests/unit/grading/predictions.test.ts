@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { predictMistake } from '$lib/server/bench/grading/predict-mistake';
-import { receiverErrorDb } from '$lib/server/bench/grading/receiver-error-db';
+import { ownError } from '$lib/server/bench/grading/own-error';
 import { watchedMistakes } from '$lib/server/bench/grading/watched-mistakes';
 import { contentExercise } from '../../factories/content-exercise';
 
@@ -29,7 +29,7 @@ describe.each(kinds)('%s', (kind) => {
 			const context = { drawn, question };
 			const predicted = predictMistake(watched, context)!;
 			const { record } = runMethod(drawn, watched.mistake.make(drawn.method, context));
-			const off = record.answers[question.id].value - receiverErrorDb(context) - predicted.value;
+			const off = record.answers[question.id].value - ownError(context) - predicted.value;
 			expect(Math.abs(off), `${slug}, ${question.id}, seed ${seed}`).toBeLessThan(3 * predicted.spread);
 		}
 	});

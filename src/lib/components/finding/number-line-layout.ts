@@ -36,7 +36,8 @@ export function numberLineLayout(marks: readonly Mark[], width: number): NumberL
 	const values = marks.map((mark) => mark.value);
 	const low = Math.min(...values);
 	const high = Math.max(...values);
-	const margin = Math.max((high - low) * 0.08, 0.5 * Math.max(1e-9, Math.abs(high) * 1e-3 + 0.5));
+	// Marks that all but coincide still need an axis of some length.
+	const margin = Math.max((high - low) * 0.08, Math.abs(high) * 1e-6, 1e-9);
 	const start = low - margin;
 	const stop = high + margin;
 	const x = (value: number) => sidePx + ((value - start) / (stop - start)) * (width - 2 * sidePx);

@@ -1,9 +1,13 @@
 /** What an attempt leaves behind, as the grader takes it: stored by the services, made afresh by proofs. */
 import type { Reading } from '$lib/measure/reading';
-import type { ReadingRequest } from '$lib/measure/reading-request';
+import type { BenchRequest } from '$lib/schemas/reading';
 import type { Settings } from '$lib/schemas/settings';
+import type { Count } from '../receiver/count';
 
-/** One set-up and the sweeps drawn with it. */
+/** What is taken on the bench: read off a trace, or counted. */
+export type BenchReading = Reading | Count;
+
+/** One set-up and the sweeps drawn with it; none where it was only counted with. */
 export interface SettingsLogEntry {
 	/** As typed. */
 	settings: Settings;
@@ -19,11 +23,11 @@ export interface SettingsLogEntry {
 /** A reading as the server took it off replayed rows. */
 export interface TakenReading {
 	id: string;
-	request: ReadingRequest;
-	reading: Reading;
-	/** Which trace of the set-up, 1…4. */
+	request: BenchRequest;
+	reading: BenchReading;
+	/** Which trace of the set-up, 1…4; 1 for a count. */
 	trace: number;
-	/** First and last row in the trace. */
+	/** First and last row in the trace; a count has a row number of its own. */
 	rows: { from: number; to: number };
 	at?: string;
 }

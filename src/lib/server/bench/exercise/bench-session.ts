@@ -1,16 +1,17 @@
 import { combineRows } from '$lib/measure/combine-rows';
 import { isProblem } from '$lib/measure/reading';
-import type { ReadingRequest } from '$lib/measure/reading-request';
 import { takeReading } from '$lib/measure/take-reading';
 import type { Trace } from '$lib/measure/trace';
+import type { BenchRequest, CountRequest } from '$lib/schemas/reading';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { Scene } from '$lib/schemas/scene';
 import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 import { BenchError } from '../bench-error';
+import { countFrequency } from '../receiver/count';
 import type { Seed } from '../receiver/random';
 import { resolveSettings } from '../receiver/resolve-settings';
 import { restartsTraces } from '../receiver/restarts-traces';
-import type { SettingsLogEntry, TakenReading } from './attempt-record';
+import type { BenchReading, SettingsLogEntry, TakenReading } from './attempt-record';
 import { patchSettings } from './patch-settings';
 
 /** What sweeps: row after row of detected levels, and how long each takes on the bench clock. */
@@ -66,21 +67,36 @@ export class BenchSession {
 	}
 
 	/**
-	 * Takes a reading off a trace of the present set-up.
+	 * Takes a reading off a trace of the present set-up, or counts with it.
 	 * @param traceNumber 1…4
 	 * @throws BenchError when nothing was swept, there is no such trace, or no number exists
 	 */
-	read(request: ReadingRequest, traceNumber: number): TakenReading {
+	read(request: BenchRequest, traceNumber: number): TakenReading {
+		if (request.kind === 'count') return this.count(request);
 		const { trace, rowCount } = this.trace(traceNumber);
 		const reading = takeReading(trace, request);
 		if (isProblem(reading)) throw new BenchError('reading', `${reading.problem} (${reading.needs})`);
-		const taken: TakenReading = {
-			id: String(this.readings.length + 1),
-			request,
-			reading,
-			trace: traceNumber,
-			rows: { from: this.row - rowCount, to: this.row - 1 }
-		};
+		return this.taken(request, reading, traceNumber, { from: this.row - rowCount, to: this.row - 1 });
+	}
+
+	/** Counts: takes a row number of its own and its gate's time on the bench clock; traces stay as they are. */
+	private count(request: CountRequest): TakenReading {
+		const { scene, profile, resolved, seed, row, clockS } = this;
+		const reading = countFrequency(scene, profile, resolved, seed, request, row, clockS);
+		if ('problem' in reading) throw new BenchError('reading', `${reading.problem} (${reading.needs})`);
+		this.log.push({ settings: this.settings, firstRow: row, sweeps: 0, clockS });
+		this.row += 1;
+		this.clockS += request.gateS;
+		return this.taken(request, reading, 1, { from: row, to: row });
+	}
+
+	private taken(
+		request: BenchRequest,
+		reading: BenchReading,
+		trace: number,
+		rows: TakenReading['rows']
+	): TakenReading {
+		const taken = { id: String(this.readings.length + 1), request, reading, trace, rows };
 		this.readings.push(taken);
 		return taken;
 	}

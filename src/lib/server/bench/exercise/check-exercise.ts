@@ -1,6 +1,6 @@
 import type { Exercise } from '$lib/schemas/exercise';
 import { bindMistake } from '../grading/watched-mistakes';
-import { isAbsoluteLevel } from '../grading/evidence';
+import { isAbsoluteLevel } from '../grading/asked';
 import { profileNamed } from '../receiver/profiles';
 import { BenchError } from '../bench-error';
 import type { ExerciseIssue } from './exercise-error';

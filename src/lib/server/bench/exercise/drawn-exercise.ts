@@ -1,8 +1,8 @@
 /** An exercise with one seed's numbers in it. It holds the scene and the truths: it never leaves the server. */
-import type { ReadingRequest } from '$lib/measure/reading-request';
 import type { AnswerUnit, ChainPart, Exercise, WatchedMistake } from '$lib/schemas/exercise';
+import type { Part } from '$lib/schemas/part';
 import type { Quantity } from '$lib/schemas/quantity';
-import type { MaskLimits } from '$lib/schemas/reading';
+import type { BenchRequest, MaskLimits } from '$lib/schemas/reading';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { LossTable, Scene } from '$lib/schemas/scene';
 import type { Settings } from '$lib/schemas/settings';
@@ -13,13 +13,15 @@ export interface DrawnQuestion {
 	id: string;
 	text: string;
 	quantity: Quantity;
+	/** The part of it that is asked; absent: its value. */
+	part?: Part;
 	unit: AnswerUnit;
 	digits: number;
 	/** True value at the reference plane, in `unit`. */
 	truth: number;
 	/** Half width of what counts as right, in `unit`. */
 	tolerance: number;
-	/** Where in frequency the question asks. */
+	/** Where in frequency the question asks: the place it names, else where the quantity is found in the scene. */
 	frequencyHz: number;
 	/** Loss between the reference plane and the connector there, dB. */
 	leadDb: number;
@@ -30,7 +32,8 @@ export interface DrawnQuestion {
 export type FilledStep =
 	| { do: 'set'; settings: Settings; why?: string }
 	| { do: 'sweep'; sweeps: number; why?: string }
-	| { do: 'read'; reading: ReadingRequest; trace: number; as: string; why?: string }
+	/** Named is the part of the reading, where one is given, else its value. */
+	| { do: 'read'; reading: BenchRequest; part?: Part; trace: number; as: string; why?: string }
 	| { do: 'answer'; question: string; value: (scope: Scope) => number; reading: string; why?: string };
 
 /** What the learner is told, placeholders filled in. */

@@ -1,9 +1,11 @@
 import { lossDbAt } from './loss-db-at';
-import { maskLimits, readingRequest } from '$lib/schemas/reading';
+import { part as partSchema, partOf, unitOfPart, type Part } from '$lib/schemas/part';
+import { benchRequest, maskLimits } from '$lib/schemas/reading';
 import { scene as sceneSchema, lossTable, type Scene } from '$lib/schemas/scene';
 import { settings as settingsSchema, type Settings } from '$lib/schemas/settings';
 import type { Exercise, ExerciseQuestion, MethodStep, WatchedMistake } from '$lib/schemas/exercise';
-import { quantity as quantitySchema } from '$lib/schemas/quantity';
+import { quantity as quantitySchema, type Quantity } from '$lib/schemas/quantity';
+import type { Unit } from '$lib/units/unit';
 import type { z } from 'zod';
 import { profileNamed } from '../receiver/profiles';
 import type { Seed } from '../receiver/random';
@@ -63,20 +65,43 @@ function fillBrief(exercise: Exercise, scope: Scope): Brief {
 	};
 }
 
+/** What a question asks of the scene: the value of its quantity or a part of it, and where that stands. */
+function asked(
+	scene: Scene,
+	quantity: Quantity,
+	question: ExerciseQuestion,
+	scope: Scope,
+	field: string
+): { part?: Part; value: number; unit: Unit; placeHz: number } {
+	const whole = truth(scene, quantity);
+	const [low, high] = [partOf(whole.parts, 'lowerHz'), partOf(whole.parts, 'upperHz')];
+	const middleHz = low !== undefined && high !== undefined ? (low + high) / 2 : undefined;
+	const placeHz = partOf(whole.parts, 'frequencyHz') ?? middleHz ?? 0;
+	if (question.part === undefined) return { value: whole.value, unit: whole.unit, placeHz };
+	const part = filled(partSchema, question.part, scope, `${field}.part`);
+	const value = partOf(whole.parts, part);
+	if (value === undefined) {
+		throw new ExerciseError([{ field: `${field}.part`, message: `${quantity.kind} has no such part here` }]);
+	}
+	return { part, value, unit: unitOfPart(part), placeHz };
+}
+
 function fillQuestion(question: ExerciseQuestion, scene: Scene, scope: Scope, field: string): DrawnQuestion {
 	const quantity = filled(quantitySchema, question.quantity, scope, `${field}.quantity`);
-	const { value, unit } = truth(scene, quantity);
+	const { part, value, unit, placeHz } = asked(scene, quantity, question, scope, field);
 	if (unit !== question.unit) {
+		const what = part === undefined ? quantity.kind : `this part of ${quantity.kind}`;
 		throw new ExerciseError([
-			{ field: `${field}.unit`, message: `${quantity.kind} is in ${unit}, not ${question.unit}` }
+			{ field: `${field}.unit`, message: `${what} is in ${unit}, not ${question.unit}` }
 		]);
 	}
 	const { tolerance } = question;
-	const frequencyHz = quantityFrequencyHz(quantity);
+	const frequencyHz = quantityFrequencyHz(quantity) || placeHz;
 	return {
 		id: question.id,
 		text: fillText(question.text, scope, `${field}.text`),
-		quantity: quantity,
+		quantity,
+		...(part !== undefined && { part }),
 		unit,
 		digits: question.digits,
 		truth: value,
@@ -99,8 +124,11 @@ function fillStep(step: MethodStep, scope: Scope, field: string): FilledStep {
 			};
 		case 'sweep':
 			return step;
-		case 'read':
-			return { ...step, reading: filled(readingRequest, step.reading, scope, `${field}.reading`) };
+		case 'read': {
+			const part =
+				step.part === undefined ? undefined : filled(partSchema, step.part, scope, `${field}.part`);
+			return { ...step, reading: filled(benchRequest, step.reading, scope, `${field}.reading`), part };
+		}
 		case 'answer': {
 			const value = parseExpression(step.value, `${field}.value`);
 			return { ...step, value: (readings) => value.evaluate({ ...scope, ...readings }) };

@@ -19,6 +19,7 @@ export function methodStates(drawn: DrawnExercise, steps: readonly FilledStep[])
 	let resolved = resolveSettings(settings, drawn.profile);
 	let restartRow = 0;
 	let nextRow = 0;
+	let sweptTo = -1;
 	return steps.map((step) => {
 		if (step.do === 'set') {
 			settings = patchSettings(settings, step.settings);
@@ -26,7 +27,12 @@ export function methodStates(drawn: DrawnExercise, steps: readonly FilledStep[])
 			if (restartsTraces(resolved, after)) restartRow = nextRow;
 			resolved = after;
 		}
-		if (step.do === 'sweep') nextRow += step.sweeps;
-		return { settings, resolved, rows: nextRow > restartRow ? { from: restartRow, to: nextRow - 1 } : null };
+		if (step.do === 'sweep') {
+			nextRow += step.sweeps;
+			sweptTo = nextRow - 1;
+		}
+		// A count takes a row number that nothing is swept with.
+		if (step.do === 'read' && step.reading.kind === 'count') nextRow += 1;
+		return { settings, resolved, rows: sweptTo >= restartRow ? { from: restartRow, to: sweptTo } : null };
 	});
 }

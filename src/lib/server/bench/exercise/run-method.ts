@@ -1,9 +1,11 @@
+import { partOf, type Part } from '$lib/schemas/part';
+import { BenchError } from '../bench-error';
 import { prepareSweep } from '../receiver/sweep';
 import type { AttemptRecord, TakenReading } from './attempt-record';
 import { BenchSession, type SweepWith } from './bench-session';
 import type { DrawnExercise, FilledStep } from './drawn-exercise';
 
-/** A step as it was done: what it read, or what it answered. */
+/** A step as it was done: the reading taken, and the number it named or answered. */
 export interface PlayedStep {
 	step: FilledStep;
 	taken?: TakenReading;
@@ -43,8 +45,8 @@ export function runMethod(
 			case 'read': {
 				const taken = bench.read(step.reading, step.trace);
 				byName.set(step.as, taken);
-				values[step.as] = taken.reading.value;
-				return { step, taken };
+				values[step.as] = named(taken, step.part);
+				return { step, taken, value: values[step.as] };
 			}
 			case 'answer': {
 				const value = step.value(values);
@@ -56,4 +58,12 @@ export function runMethod(
 		}
 	});
 	return { record, steps: played, evidence };
+}
+
+/** The number that a read step names. @throws BenchError when the reading has no such part */
+function named({ reading }: TakenReading, part: Part | undefined): number {
+	if (part === undefined) return reading.value;
+	const value = partOf('parts' in reading ? reading.parts : undefined, part);
+	if (value === undefined) throw new BenchError('part', `${reading.kind} has no such part here`);
+	return value;
 }

@@ -1,6 +1,7 @@
 import type { Candidate } from './explanations';
 import type { Explanation } from './mistake';
 import type { Judgement } from './judge-question';
+import { worthAStep } from './spreads';
 import type { Watched } from './watched-mistakes';
 
 /** One mistake's share of the way from the learner's number to the true one, explained. */
@@ -12,9 +13,6 @@ export interface Account {
 	explanation?: Explanation;
 	text: string;
 }
-
-/** Less than this is not worth a step of its own, in the question's unit. */
-const WORTH_A_STEP = 0.05;
 
 /** Changes that the mistakes of a candidate make good, reading first, then sums; what is left goes to what was read. */
 function changesOf(
@@ -30,7 +28,7 @@ function changesOf(
 	const rest = total - slips.reduce((sum, { change }) => sum + change, 0);
 	const readings = matched.watched.filter(({ mistake }) => mistake.stage === 'reading');
 	if (readings.length === 0) {
-		return Math.abs(rest) < WORTH_A_STEP ? slips : [...slips, { change: rest }];
+		return Math.abs(rest) < worthAStep(evidence.question) ? slips : [...slips, { change: rest }];
 	}
 	let left = rest;
 	const shares = readings.map((watched, i) => {

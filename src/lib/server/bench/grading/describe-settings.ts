@@ -54,6 +54,8 @@ const PHRASES: Describe[] = [
 	input
 ];
 const ORDINARY: Settings = {};
+/** What is said of a set-up that was there before. */
+export const SAME = 'Swept again';
 
 /** What changed from one set-up to the next, in words: "Centre 450 MHz, span 100 kHz". From nothing: all that isn't ordinary. */
 export function describeSettings(before: Settings | undefined, after: Settings): string {
@@ -62,5 +64,5 @@ export function describeSettings(before: Settings | undefined, after: Settings):
 		.filter(([was, is]) => is !== undefined && is !== was)
 		.map(([, is]) => is as string);
 	const sentence = changed.join(', ');
-	return sentence ? sentence[0].toUpperCase() + sentence.slice(1) : 'Swept again';
+	return sentence ? sentence[0].toUpperCase() + sentence.slice(1) : SAME;
 }

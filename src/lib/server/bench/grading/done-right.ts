@@ -1,12 +1,16 @@
 import type { PlayedStepView } from '$lib/schemas/done-right';
 import type { DoneRightStep } from '$lib/schemas/finding';
+import { unitOfPart } from '$lib/schemas/part';
+import type { Unit } from '$lib/units/unit';
 import type { SweepWith } from '../exercise/bench-session';
 import { questionOf, type DrawnExercise } from '../exercise/drawn-exercise';
 import { methodStates } from '../exercise/method-states';
 import { runMethod, type PlayedStep } from '../exercise/run-method';
+import { partsOf } from './asked';
 import { describeReading } from './describe-reading';
 import { describeSettings } from './describe-settings';
 import { readingMark } from './reading-mark';
+import { shownDigits } from './spreads';
 
 const sentence = (text: string): string => text[0].toUpperCase() + text.slice(1);
 
@@ -18,18 +22,28 @@ function described(drawn: DrawnExercise, { step, taken, value }: PlayedStep): Do
 		case 'sweep':
 			return { text: step.sweeps === 1 ? 'One sweep' : `${step.sweeps} sweeps`, ...why };
 		case 'read': {
-			const { value: read, unit } = taken!.reading;
+			const { reading } = taken!;
+			const unit = step.part === undefined ? reading.unit : unitOfPart(step.part);
 			return {
 				text: sentence(describeReading(step.reading)),
-				value: { value: read, unit, digits: unit === 'Hz' ? 0 : 1 },
+				value: { value: value as number, unit, digits: digitsOf(unit, reading.spread) },
 				...why
 			};
 		}
 		case 'answer': {
-			const { unit, digits, text } = questionOf(drawn, step.question);
-			return { text: `Answer: ${text}`, value: { value: value as number, unit, digits }, ...why };
+			const question = questionOf(drawn, step.question);
+			const { unit, text } = question;
+			const measured = { value: value as number, unit, digits: shownDigits(question) };
+			return { text: `Answer: ${text}`, value: measured, ...why };
 		}
 	}
+}
+
+/** Decimals worth showing: one of a level; of hertz and seconds down to a tenth of the spread. */
+function digitsOf(unit: Unit, spread: number): number {
+	if (unit !== 'Hz' && unit !== 's') return 1;
+	const least = unit === 'Hz' ? 2 : 9;
+	return spread > 0 ? Math.min(least, 1 - Math.floor(Math.log10(spread))) : least;
 }
 
 /** The taught method on the learner's own seed, step by step, with what it reads there. */
@@ -63,5 +77,5 @@ const shownReading = ({ request, reading, trace }: NonNullable<PlayedStep['taken
 	trace,
 	spread: reading.spread,
 	remarks: reading.remarks.map(({ code, text }) => ({ code, text })),
-	mark: readingMark(request, reading.parts)
+	mark: readingMark(request, partsOf(reading))
 });

@@ -1,15 +1,16 @@
-import type { ReadingRequest } from '$lib/measure/reading-request';
+import type { BenchRequest } from '$lib/schemas/reading';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import type { AttemptRecord, GivenAnswer, TakenReading } from '../exercise/attempt-record';
 import type { DrawnExercise, DrawnQuestion } from '../exercise/drawn-exercise';
 import { quantityFrequencyHz } from '../exercise/quantity-frequency';
 import { resolveSettings } from '../receiver/resolve-settings';
 import { tableDb } from '../receiver/table-db';
+import { givenBy, isAbsoluteLevel } from './asked';
 import type { SetUp } from './mistake';
 
-/** Readings by what they are of: one point, a band's power, a density, or a quantity of their own. */
-export type Family = 'point' | 'band' | 'density' | 'other';
-const FAMILIES: Partial<Record<ReadingRequest['kind'], Family>> = {
+/** Readings by what they are of: one point, a band's power, a density; every other kind is a family of its own. */
+export type Family = 'point' | 'band' | 'density' | BenchRequest['kind'];
+const FAMILIES: Partial<Record<BenchRequest['kind'], Family>> = {
 	marker: 'point',
 	peak: 'point',
 	'next-peak': 'point',
@@ -19,7 +20,7 @@ const FAMILIES: Partial<Record<ReadingRequest['kind'], Family>> = {
 	'noise-density': 'density',
 	'power-density': 'density'
 };
-export const familyOf = (kind: string): Family => FAMILIES[kind as ReadingRequest['kind']] ?? 'other';
+export const familyOf = (kind: BenchRequest['kind']): Family => FAMILIES[kind] ?? kind;
 
 /** A reading with all that the grader asks of it. */
 export interface Source extends TakenReading {
@@ -29,7 +30,7 @@ export interface Source extends TakenReading {
 	setUp: SetUp;
 	/** Correction that was set, at the frequency read, dB. */
 	appliedDb: number;
-	/** Its value brought to the reference plane: lead and pad added, the correction already applied not counted twice. */
+	/** What it gives to the question, brought to the reference plane: lead and pad added, the correction already applied not counted twice. */
 	planeValue: number;
 }
 
@@ -44,12 +45,14 @@ export interface Evidence {
 	setUps: SetUp[];
 }
 
-const LEVELS = ['dBm', 'dBm/Hz'];
-/** Whether a unit is an absolute level, which lead and correction shift. */
-export const isAbsoluteLevel = (unit: string): boolean => LEVELS.includes(unit);
-
 const correctionAt = (correctionDb: ResolvedSettings['correctionDb'], frequencyHz: number): number =>
 	typeof correctionDb === 'number' ? correctionDb : tableDb(correctionDb, frequencyHz);
+
+/** Whether the number a reading gives to a question is a level, which the lead shifts. */
+function isLevelGiven({ reading }: TakenReading, { unit, part }: DrawnQuestion): boolean {
+	if (!unit.startsWith('dB')) return false;
+	return isAbsoluteLevel(part === undefined ? reading.unit : unit);
+}
 
 function sourceOf(
 	taken: TakenReading,
@@ -57,21 +60,24 @@ function sourceOf(
 	question: DrawnQuestion,
 	record: AttemptRecord
 ): Source[] {
-	const entry = record.log.findLastIndex(({ firstRow, sweeps }) => firstRow <= taken.rows.to && sweeps > 0);
+	const counted = taken.request.kind === 'count';
+	const entry = record.log.findLastIndex(
+		({ firstRow, sweeps }) => firstRow <= taken.rows.to && (sweeps > 0 || counted)
+	);
 	// Rows that no set-up swept are nobody's evidence.
 	if (entry < 0) return [];
 	const resolved = resolveSettings(record.log[entry].settings, drawn.profile);
 	const trace = resolved.traces[taken.trace - 1] ?? resolved.traces[0];
 	const readAtHz = quantityFrequencyHz(taken.request) || question.frequencyHz;
 	const appliedDb = correctionAt(resolved.correctionDb, readAtHz);
-	const shift = isAbsoluteLevel(taken.reading.unit) ? question.leadDb + resolved.input.padDb - appliedDb : 0;
+	const shift = isLevelGiven(taken, question) ? question.leadDb + resolved.input.padDb - appliedDb : 0;
 	const source: Source = {
 		...taken,
 		family: familyOf(taken.request.kind),
 		entry,
 		setUp: { resolved, trace, sweeps: taken.rows.to - taken.rows.from + 1 },
 		appliedDb,
-		planeValue: taken.reading.value + shift
+		planeValue: givenBy(taken.reading, question) + shift
 	};
 	return [source];
 }

@@ -1,6 +1,7 @@
 import type { Evidence, Source } from './evidence';
-import { MODEL_SPREAD_DB, type SetUp } from './mistake';
-import { receiverErrorDb } from './receiver-error-db';
+import type { SetUp } from './mistake';
+import { ownError } from './own-error';
+import { copyingSpread, modelSpread } from './spreads';
 import { supports } from './supports';
 import type { Watched } from './watched-mistakes';
 
@@ -12,9 +13,6 @@ export interface Candidate {
 	source?: Source;
 	setUp?: SetUp;
 }
-
-/** A number copied off a reading differs from it by its rounding. */
-const copyingSpread = (digits: number): number => Math.hypot(0.1, 0.5 * 10 ** -digits);
 
 const shownBy = (source: Source, watched: readonly Watched[], evidence: Evidence): Watched[] =>
 	watched.filter(
@@ -33,7 +31,7 @@ export function fromSource(source: Source, watched: readonly Watched[], evidence
 		const known = byValue.get(value.toFixed(6));
 		if (known) known.watched.push(shown);
 		else {
-			const spread = copyingSpread(evidence.question.digits);
+			const spread = copyingSpread(evidence.question);
 			byValue.set(value.toFixed(6), { watched: [shown], value, spread, source, setUp: source.setUp });
 		}
 	}
@@ -45,20 +43,20 @@ export function fromSource(source: Source, watched: readonly Watched[], evidence
  * any number (a spread wider than the tolerance) explains nothing.
  */
 function fromTheory(watched: readonly Watched[], evidence: Evidence): Candidate[] {
-	const errorDb = receiverErrorDb(evidence);
+	const error = ownError(evidence);
 	return watched.flatMap((one) =>
 		evidence.setUps.flatMap((setUp): Candidate[] => {
 			if (one.mistake.stage !== 'reading') return [];
 			const predicted = one.mistake.predict(evidence, setUp);
 			if (!predicted || predicted.spread > evidence.question.tolerance) return [];
-			return [{ watched: [one], value: predicted.value + errorDb, spread: predicted.spread, setUp }];
+			return [{ watched: [one], value: predicted.value + error, spread: predicted.spread, setUp }];
 		})
 	);
 }
 
 /** Right readings, for slips to start from: those taken, else what this receiver would show. */
 function rightOnes(watched: readonly Watched[], evidence: Evidence): Candidate[] {
-	const spread = copyingSpread(evidence.question.digits);
+	const spread = copyingSpread(evidence.question);
 	const right = evidence.pool.filter(
 		(source) => supports(source, evidence.question) && shownBy(source, watched, evidence).length === 0
 	);
@@ -72,8 +70,8 @@ function rightOnes(watched: readonly Watched[], evidence: Evidence): Candidate[]
 		}));
 	}
 	if (evidence.attached) return [];
-	const value = evidence.question.truth + receiverErrorDb(evidence);
-	return [{ watched: [], value, spread: MODEL_SPREAD_DB, setUp: evidence.setUps[0] }];
+	const value = evidence.question.truth + ownError(evidence);
+	return [{ watched: [], value, spread: modelSpread(evidence.question), setUp: evidence.setUps[0] }];
 }
 
 function slipped(from: readonly Candidate[], watched: readonly Watched[], evidence: Evidence): Candidate[] {

@@ -4,6 +4,7 @@ import type { DrawnExercise, DrawnQuestion } from '../exercise/drawn-exercise';
 import { evidenceFor, type Evidence, type Source } from './evidence';
 import { fromSource, type Candidate } from './explanations';
 import { matchMistakes } from './match-mistakes';
+import { copyingReach } from './spreads';
 import { supports } from './supports';
 import { watchedMistakes, type Watched } from './watched-mistakes';
 
@@ -24,10 +25,8 @@ export interface Judgement {
 	remarks: Remark[];
 }
 
-/** How far an answer may be from the reading it is said to be, dB: rounding to a whole decibel. */
-const COPYING_REACH = 0.55;
-const gives = (source: Source, value: number): boolean =>
-	Math.abs(source.planeValue - value) <= COPYING_REACH;
+const gives = (source: Source, value: number, question: DrawnQuestion): boolean =>
+	Math.abs(source.planeValue - value) <= copyingReach(question);
 
 /** Judges one question. Pure: the same record always gets the same judgement. */
 export function judgeQuestion(
@@ -60,7 +59,7 @@ function judgeMethod(
 	const { attached, pool, question } = evidence;
 	const faults = (source: Source) => fromSource(source, watched, evidence);
 	const sound = (source: Source) => supports(source, question) && faults(source).length === 0;
-	const giving = pool.filter((source) => gives(source, value));
+	const giving = pool.filter((source) => gives(source, value, question));
 	const source = giving.find(sound) ?? attached ?? giving[0];
 	const remarks = readingRemarks(source);
 	if (!source) {
@@ -70,8 +69,9 @@ function judgeMethod(
 		});
 		return { verdict: 'right-but-method', matched: null, source, remarks };
 	}
-	if (sound(source) && gives(source, value)) return { verdict: 'right', matched: null, source, remarks };
-	if (!gives(source, value)) {
+	if (sound(source) && gives(source, value, question))
+		return { verdict: 'right', matched: null, source, remarks };
+	if (!gives(source, value, question)) {
 		remarks.push({ code: 'not-from-evidence', text: 'The reading you attached does not give this number.' });
 	} else if (!supports(source, question)) {
 		remarks.push({

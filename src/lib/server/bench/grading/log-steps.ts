@@ -1,11 +1,12 @@
 import type { FindingLogStep } from '$lib/schemas/finding';
 import type { AttemptRecord } from '../exercise/attempt-record';
 import type { DrawnExercise } from '../exercise/drawn-exercise';
-import { figure } from '../exercise/figure';
+import { quantityText } from '../exercise/quantity-text';
 import { describeReading } from './describe-reading';
-import { describeSettings } from './describe-settings';
+import { describeSettings, SAME } from './describe-settings';
 import type { Judgement } from './judge-question';
 import type { ExplainedQuestion } from './question-finding';
+import { shownDigits } from './spreads';
 
 interface Blame {
 	entry?: number;
@@ -42,12 +43,20 @@ export function logSteps(
 		const next = record.log[i + 1]?.firstRow ?? Infinity;
 		const readings = record.readings.filter(({ rows }) => rows.to >= entry.firstRow && rows.to < next);
 		const text = describeSettings(record.log[i - 1]?.settings, entry.settings);
+		const step = {
+			...wallTime(entry.at),
+			clockS: entry.clockS,
+			text,
+			...badAt((blame) => blame.entry === i)
+		};
+		// A count with the set-up that stands is no step of its own.
+		const onlyCounted = entry.sweeps === 0 && i > 0 && text === SAME;
 		return [
-			{ ...wallTime(entry.at), clockS: entry.clockS, text, ...badAt((blame) => blame.entry === i) },
+			...(onlyCounted && !('bad' in step) ? [] : [step]),
 			...readings.map((taken) => ({
 				...wallTime(taken.at),
 				clockS: entry.clockS,
-				text: `Reading: ${describeReading(taken.request)}, ${figure(taken.reading.value, 1)} ${taken.reading.unit}`,
+				text: `Reading: ${describeReading(taken.request)}, ${quantityText(taken.reading.value, taken.reading.unit)}`,
 				...badAt((blame) => blame.reading === taken.id)
 			}))
 		];
@@ -58,7 +67,7 @@ export function logSteps(
 		if (!answer) return [];
 		const taken = record.readings.find(({ id }) => id === answer.readingId);
 		const from = taken ? `, from ${describeReading(taken.request)}` : ', no reading attached';
-		const text = `Answer ${i + 1}: ${figure(answer.value, question.digits)} ${question.unit}${from}`;
+		const text = `Answer ${i + 1}: ${quantityText(answer.value, question.unit, shownDigits(question))}${from}`;
 		return [{ clockS, text, ...badAt((blame) => blame.question === question.id) }];
 	});
 	return [...setUps, ...answers];

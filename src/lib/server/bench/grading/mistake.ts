@@ -21,9 +21,6 @@ export interface SetUp {
 	sweeps: number;
 }
 
-/** Least standard deviation of a prediction, dB: drifts of a reading that theory doesn't follow. */
-export const MODEL_SPREAD_DB = 0.1;
-
 /**
  * The number that theory says the mistake gives at the reference plane, lead accounted for, and its standard deviation:
  * with a receiver that has no level error of its own (all numbers of one attempt share that).
@@ -69,7 +66,7 @@ interface Words {
 /** Made with the receiver: the reading taken shows whether. */
 export interface ReadingMistake extends Words {
 	stage: 'reading';
-	/** Kinds of reading it can be made with; whoever took others didn't make it. */
+	/** What it can be made with, as kinds of reading or whole families of them; whoever took others didn't make it. */
 	families: readonly Family[];
 	shows(source: Source, context: Context): boolean;
 	/** What is reported from that reading, at the reference plane; absent: the reading itself. */

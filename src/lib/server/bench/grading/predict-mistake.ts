@@ -1,5 +1,6 @@
-import { MODEL_SPREAD_DB, type Context, type Prediction } from './mistake';
+import type { Context, Prediction } from './mistake';
 import { setUpOf } from './set-up-of';
+import { modelSpread } from './spreads';
 import type { Watched } from './watched-mistakes';
 
 /**
@@ -11,5 +12,5 @@ export function predictMistake({ mistake }: Watched, context: Context): Predicti
 	const setUp = setUpOf(drawn, mistake.make(drawn.method, context), question.id);
 	if (mistake.stage === 'reading') return mistake.predict(context, setUp);
 	const change = mistake.change(context, setUp);
-	return change === null ? null : { value: question.truth + change, spread: MODEL_SPREAD_DB };
+	return change === null ? null : { value: question.truth + change, spread: modelSpread(question) };
 }

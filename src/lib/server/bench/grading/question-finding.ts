@@ -1,12 +1,13 @@
 import type { FindingLadder, FindingMistake, QuestionFinding } from '$lib/schemas/finding';
 import type { SettingsLogEntry } from '../exercise/attempt-record';
 import { accountFor, type Account } from './account-for';
-import { quantityName } from './describe-reading';
-import { isAbsoluteLevel } from './evidence';
+import { isAbsoluteLevel } from './asked';
+import { askedName } from './describe-reading';
 import type { Judgement } from './judge-question';
 import { numberLine } from './number-line';
 import { questionPlot } from './question-plot';
 import { questionTitle } from './question-title';
+import { shownDigits } from './spreads';
 
 export interface ExplainedQuestion {
 	finding: QuestionFinding;
@@ -16,7 +17,7 @@ export interface ExplainedQuestion {
 function ladderOf({ evidence }: Judgement, accounts: readonly Account[], yours: number): FindingLadder {
 	const { question, drawn } = evidence;
 	const { unit, truth, leadDb } = question;
-	const name = quantityName(question.quantity.kind);
+	const name = askedName(question);
 	const levels = [{ value: truth, text: `${name} at ${drawn.brief.plane}` }];
 	if (isAbsoluteLevel(unit) && leadDb !== 0) {
 		levels.push({ value: truth - leadDb, text: `${name} at the receiver` });
@@ -37,7 +38,7 @@ export function explainQuestion(judgement: Judgement, log: readonly SettingsLogE
 	const { evidence, verdict, matched, difference, remarks } = judgement;
 	const { question, answer } = evidence;
 	const accounts = matched && answer ? accountFor(judgement, matched, answer.value) : [];
-	const measured = (value: number) => ({ value, unit: question.unit, digits: question.digits });
+	const measured = (value: number) => ({ value, unit: question.unit, digits: shownDigits(question) });
 	return {
 		accounts,
 		finding: {

@@ -2,8 +2,9 @@ import type { FindingPlot } from '$lib/schemas/finding';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import { formatFrequency } from '$lib/units/format-quantity';
 import type { SettingsLogEntry } from '../exercise/attempt-record';
+import type { DrawnQuestion } from '../exercise/drawn-exercise';
 import { resolveSettings } from '../receiver/resolve-settings';
-import { quantityName } from './describe-reading';
+import { askedName } from './describe-reading';
 import type { Judgement } from './judge-question';
 import { placeHz } from './place';
 import { widthHzOf } from './read-width';
@@ -15,22 +16,27 @@ export function questionPlot({ evidence, source }: Judgement, log: readonly Sett
 	const last = log.findLast((entry) => entry.sweeps > 0);
 	const resolved = source?.setUp.resolved ?? (last && resolveSettings(last.settings, drawn.profile));
 	const rows = source?.rows ?? (last && { from: last.firstRow, to: last.firstRow + last.sweeps - 1 });
-	const width = widthHzOf(question.quantity);
 	const pointHz = source?.family === 'point' ? placeHz(source.reading) : undefined;
 	return {
-		band:
-			width === undefined
-				? null
-				: {
-						startHz: question.frequencyHz - width / 2,
-						stopHz: question.frequencyHz + width / 2,
-						value: question.truth,
-						unit: question.unit,
-						text: `true ${quantityName(question.quantity.kind)}, ${formatFrequency(width)}`
-					},
+		band: bandOf(question),
 		point: pointHz === undefined || !source ? null : { frequencyHz: pointHz, levelDbm: source.reading.value },
 		trace: rows && resolved ? drawnTrace(rows, resolved, source?.trace ?? 1) : null,
 		signal: resolved ? signalLevels(drawn.scene, resolved) : null
+	};
+}
+
+/** The band asked for, at its true level; a bandwidth that is asked for is a band itself. */
+function bandOf(question: DrawnQuestion): FindingPlot['band'] {
+	const { quantity, frequencyHz, truth: value, unit } = question;
+	const isWidth = quantity.kind === 'occupied-bandwidth' || quantity.kind === 'x-db-bandwidth';
+	const width = isWidth && question.part === undefined ? value : widthHzOf(quantity);
+	if (width === undefined || frequencyHz === 0) return null;
+	return {
+		startHz: frequencyHz - width / 2,
+		stopHz: frequencyHz + width / 2,
+		value,
+		unit,
+		text: isWidth ? `true ${askedName(question)}` : `true ${askedName(question)}, ${formatFrequency(width)}`
 	};
 }
 

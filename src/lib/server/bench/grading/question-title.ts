@@ -1,5 +1,6 @@
-import { figure } from '../exercise/figure';
+import { quantityText } from '../exercise/quantity-text';
 import type { Judgement } from './judge-question';
+import { shownDigits } from './spreads';
 
 const joined = (phrases: readonly string[]): string =>
 	phrases.length < 2 ? phrases.join('') : `${phrases.slice(0, -1).join(', ')}, and ${phrases.at(-1)}`;
@@ -18,9 +19,9 @@ export function questionTitle({ verdict, matched, difference, evidence, remarks 
 			return `The number is right, but its evidence is not. ${remarks.at(-1)?.text ?? ''}`.trim();
 		case 'wrong': {
 			if (phrases) return `You ${phrases}.`;
-			const off = figure(Math.abs(difference ?? 0), question.digits);
 			const unit = question.unit.startsWith('dB') ? 'dB' : question.unit;
-			return `Your number is ${off} ${unit} too ${(difference ?? 0) < 0 ? 'low' : 'high'}, and none of the usual mistakes gives it.`;
+			const off = quantityText(Math.abs(difference ?? 0), unit, shownDigits(question));
+			return `Your number is ${off} too ${(difference ?? 0) < 0 ? 'low' : 'high'}, and none of the usual mistakes gives it.`;
 		}
 	}
 }

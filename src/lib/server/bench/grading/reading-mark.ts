@@ -8,7 +8,8 @@ export function readingMark(request: { kind: string }, parts: unknown): ReadingM
 	if (found.lowerHz !== undefined && found.upperHz !== undefined) {
 		return { startHz: found.lowerHz, stopHz: found.upperHz };
 	}
-	if (found.frequencyHz !== undefined) return { frequencyHz: found.frequencyHz };
+	// The frequency of a difference is a distance.
+	if (found.frequencyHz !== undefined && request.kind !== 'delta') return { frequencyHz: found.frequencyHz };
 	const atHz = quantityFrequencyHz(request);
 	const width = widthHzOf(request);
 	if (width !== undefined && atHz > 0) return { startHz: atHz - width / 2, stopHz: atHz + width / 2 };

@@ -1,5 +1,5 @@
 /** Ways to put a mistake into a method: change what is set, what is read, or the sum. */
-import type { ReadingRequest } from '$lib/measure/reading-request';
+import type { BenchRequest } from '$lib/schemas/reading';
 import type { Settings } from '$lib/schemas/settings';
 import type { FilledStep } from '../exercise/drawn-exercise';
 import type { Scope } from '../exercise/expression';
@@ -26,7 +26,7 @@ export function readStepOf(steps: readonly FilledStep[], questionId: string): Re
 export function withReading(
 	steps: readonly FilledStep[],
 	questionId: string,
-	reading: ReadingRequest,
+	reading: BenchRequest,
 	sum: (value: number) => number = (value) => value
 ): FilledStep[] {
 	const taken = readStepOf(steps, questionId);

@@ -1,4 +1,5 @@
 import { SPREADS_APART } from '../grading/mistakes-apart';
+import { brief } from './brief';
 import type { Outcome, SeedProof } from './prove-seed';
 
 /** Shares that a proof asks for. */
@@ -98,7 +99,7 @@ function taughtFailures(
 	);
 	const allowed = BIAS_SHARE * tolerance + (STANDARD_ERRORS * scatter) / Math.sqrt(Math.max(1, done));
 	if (done >= BIAS_SEEDS && Math.abs(bias) > allowed) {
-		failures.push(`is off by ${bias.toFixed(2)} on average, at most ${allowed.toFixed(2)} allowed`);
+		failures.push(`is off by ${brief(bias)} on average, at most ${brief(allowed)} allowed`);
 	}
 	return failures;
 }
@@ -161,6 +162,6 @@ function tightFailures(proofs: readonly SeedProof[]): string[] {
 	}
 	return [...worst].map(
 		([question, least]) =>
-			`${question}: the tolerance must be at least the receiver’s level error and three spreads, ${least.toFixed(2)} dB`
+			`${question}: the tolerance must be at least the receiver’s own error and three spreads, ${brief(least)}`
 	);
 }

@@ -1,14 +1,14 @@
 import type { Exercise } from '$lib/schemas/exercise';
 import { BenchError } from '../bench-error';
-import type { AttemptRecord } from '../exercise/attempt-record';
+import type { AttemptRecord, TakenReading } from '../exercise/attempt-record';
 import type { SweepWith } from '../exercise/bench-session';
 import { drawExercise } from '../exercise/draw-exercise';
 import type { DrawnExercise, DrawnQuestion, FilledStep } from '../exercise/drawn-exercise';
 import { runMethod } from '../exercise/run-method';
-import { isAbsoluteLevel } from '../grading/evidence';
 import { judgeQuestion, type Judgement } from '../grading/judge-question';
 import { spreadsBetween } from '../grading/mistakes-apart';
-import { receiverErrorDb } from '../grading/receiver-error-db';
+import { greatestOwnError, ownError } from '../grading/own-error';
+import { modelSpread } from '../grading/spreads';
 import { watchedMistakes, type Watched } from '../grading/watched-mistakes';
 import { memoSweeps } from './memo-sweeps';
 
@@ -37,7 +37,7 @@ export interface SeedProof {
 	outcomes: Outcome[];
 	/** By question: spreads between the two mistakes' outcomes that lie nearest to each other. */
 	nearest: { question: string; spreads: number }[];
-	/** Tolerances that the receiver's level error and three spreads don't fit into. */
+	/** Tolerances that the receiver's own error and three spreads don't fit into. */
 	tooTight: { question: string; least: number }[];
 }
 
@@ -70,12 +70,19 @@ function attempt(
 		const { record, evidence } = runMethod(drawn, steps, sweepWith);
 		const judgement = judgeQuestion(drawn, question, leave(record, question.id));
 		const error = record.answers[question.id].value - question.truth;
-		const bias = error - receiverErrorDb({ drawn, question });
-		return { judgement, error, bias, spread: evidence[question.id].reading.spread };
+		const bias = error - ownError({ drawn, question });
+		return { judgement, error, bias, spread: spreadOf(evidence[question.id], question) };
 	} catch (cause) {
 		if (cause instanceof BenchError) return { problem: `${cause.field}: ${cause.message}` };
 		throw cause;
 	}
+}
+
+/** One standard deviation of what was answered from, in the question's unit. */
+function spreadOf({ reading }: TakenReading, question: DrawnQuestion): number {
+	const inDecibels = question.unit.startsWith('dB') && reading.unit.startsWith('dB');
+	const its = question.part === undefined ? reading.unit === question.unit : false;
+	return inDecibels || its ? reading.spread : modelSpread(question);
 }
 
 function outcome(
@@ -107,8 +114,9 @@ export function proveSeed(exercise: Exercise, seed: number, sweepWith: SweepWith
 		});
 		proof.outcomes.push(taught, ...made);
 		proof.nearest.push({ question: question.id, spreads: nearestSpreads(made) });
-		const least = drawn.profile.levelErrorDb + 3 * taught.spread;
-		if (isAbsoluteLevel(question.unit) && question.tolerance < least) {
+		const greatest = greatestOwnError({ drawn, question });
+		const least = greatest + 3 * taught.spread;
+		if (greatest > 0 && question.tolerance < least) {
 			proof.tooTight.push({ question: question.id, least });
 		}
 	}

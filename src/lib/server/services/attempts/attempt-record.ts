@@ -1,5 +1,4 @@
-import type { Reading as ReadOff } from '$lib/measure/reading';
-import type { AttemptRecord, GivenAnswer } from '$lib/server/bench/exercise/attempt-record';
+import type { AttemptRecord, BenchReading, GivenAnswer } from '$lib/server/bench/exercise/attempt-record';
 import type { Reading } from '$lib/server/db/models/reading';
 import type { SetUp } from '$lib/server/db/models/set-up';
 
@@ -17,24 +16,26 @@ export function attemptRecord(
 			clockS: setUp.clockS,
 			at: setUp.loggedAt.toISOString()
 		})),
-		readings: readings.flatMap((taken) => {
-			const { request } = taken;
-			// The grader doesn't know counts yet.
-			if (request.kind === 'count') return [];
-			return {
-				id: String(taken.id),
-				request,
-				reading: readingOf(taken),
-				trace: taken.trace ?? 1,
-				rows: { from: taken.fromRow, to: taken.toRow },
-				at: taken.takenAt.toISOString()
-			};
-		}),
+		readings: readings.map((taken) => ({
+			id: String(taken.id),
+			request: taken.request,
+			reading: readingOf(taken),
+			trace: taken.trace ?? 1,
+			rows: { from: taken.fromRow, to: taken.toRow },
+			at: taken.takenAt.toISOString()
+		})),
 		answers
 	};
 }
 
-/** The columns hold what `takeReading` gave; their types say no more than that each is a column. */
-function readingOf({ kind, value, unit, spread, remarks, parts }: Reading): ReadOff {
-	return { kind, value, unit, spread, remarks, ...((parts ?? null) === null ? {} : { parts }) } as ReadOff;
+/** The columns hold what was read off or counted; their types say no more than that each is a column. */
+function readingOf({ kind, value, unit, spread, remarks, parts }: Reading): BenchReading {
+	return {
+		kind,
+		value,
+		unit,
+		spread,
+		remarks,
+		...((parts ?? null) === null ? {} : { parts })
+	} as BenchReading;
 }

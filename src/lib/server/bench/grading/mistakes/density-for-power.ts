@@ -2,9 +2,10 @@ import { powerRatioToDb } from '$lib/units/decibel';
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
-import { MODEL_SPREAD_DB, defineMistake, type Context } from '../mistake';
+import { defineMistake, type Context } from '../mistake';
 import { askedWidthHz, densityDbmPerHz } from '../scene-power';
 import { withReading } from '../spoil';
+import { modelSpread } from '../spreads';
 
 const askedOf = ({ question }: Context): number => askedWidthHz(question) as number;
 
@@ -17,7 +18,7 @@ export const densityForPower = defineMistake('density-for-power', z.strictObject
 	shows: () => true,
 	predict: (context) => ({
 		value: densityDbmPerHz(context, askedOf(context)),
-		spread: MODEL_SPREAD_DB
+		spread: modelSpread(context.question)
 	}),
 	explain({ question, drawn, yours }) {
 		const widthHz = askedOf({ question, drawn });

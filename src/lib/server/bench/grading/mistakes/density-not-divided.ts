@@ -2,10 +2,11 @@ import { powerRatioToDb } from '$lib/units/decibel';
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
-import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
+import { defineMistake } from '../mistake';
 import { widthHzOf } from '../read-width';
 import { channelDbm, flatWidthHz } from '../scene-power';
 import { withReading } from '../spoil';
+import { modelSpread } from '../spreads';
 
 /** The power of the whole channel given as a density: never divided by a bandwidth. */
 export const densityNotDivided = defineMistake(
@@ -19,7 +20,7 @@ export const densityNotDivided = defineMistake(
 		shows: () => true,
 		predict: (context) => ({
 			value: channelDbm(context, context.question.frequencyHz, widthHz),
-			spread: MODEL_SPREAD_DB
+			spread: modelSpread(context.question)
 		}),
 		explain({ source, yours, drawn, question }) {
 			const used = (source && widthHzOf(source.request)) ?? widthHz;

@@ -2,10 +2,11 @@ import { powerRatioToDb } from '$lib/units/decibel';
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
-import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
+import { defineMistake } from '../mistake';
 import { sameWidth, widthHzOf } from '../read-width';
 import { channelDbm } from '../scene-power';
 import { withReading } from '../spoil';
+import { modelSpread } from '../spreads';
 
 /** The channel's power divided by the channel's width where the density in its middle is asked: the empty edges count too. */
 export const densityOverChannel = defineMistake(
@@ -24,7 +25,7 @@ export const densityOverChannel = defineMistake(
 			family === 'band' ? planeValue - powerRatioToDb(widthHzOf(request) as number) : planeValue,
 		predict: (context) => ({
 			value: channelDbm(context, context.question.frequencyHz, widthHz) - powerRatioToDb(widthHz),
-			spread: MODEL_SPREAD_DB
+			spread: modelSpread(context.question)
 		}),
 		explain({ question, drawn }) {
 			const power = channelDbm({ question, drawn }, question.frequencyHz, widthHz);

@@ -1,8 +1,9 @@
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
-import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
+import { defineMistake } from '../mistake';
 import { averagesDecibels, LOG_AVERAGE_DB } from '../noise-law';
 import { withSettings } from '../spoil';
+import { modelSpread } from '../spreads';
 
 /** Powers added up from a trace averaged in decibels: 2.51 dB low on anything that behaves as noise. */
 export const logAverage = defineMistake('log-average', z.strictObject({}), () => ({
@@ -12,7 +13,9 @@ export const logAverage = defineMistake('log-average', z.strictObject({}), () =>
 	families: ['band'],
 	shows: (source) => averagesDecibels(source.setUp),
 	predict: ({ question }, setUp) =>
-		averagesDecibels(setUp) ? { value: question.truth - LOG_AVERAGE_DB, spread: MODEL_SPREAD_DB } : null,
+		averagesDecibels(setUp)
+			? { value: question.truth - LOG_AVERAGE_DB, spread: modelSpread(question) }
+			: null,
 	explain: ({ change, yours, question }) => ({
 		title: 'The mean of decibels is not the mean power',
 		text: 'Your trace averaged decibels. Noise falls far below its mean more often than it rises far above, so the mean of its levels stands 2.51 dB under the level of its mean. Averages on power add up right.',

@@ -1,10 +1,11 @@
 import { powerRatioToDb } from '$lib/units/decibel';
 import { z } from 'zod';
 import { figure, shortFigure } from '$lib/server/bench/exercise/figure';
-import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
+import { defineMistake } from '../mistake';
 import { averagesDecibels, bandSpreadDb, LOG_AVERAGE_DB, NOISE_BANDWIDTH } from '../noise-law';
 import { askedWidthHz } from '../scene-power';
 import { withSettings } from '../spoil';
+import { modelSpread } from '../spreads';
 
 const RBW_FOR_NOISE_DB = powerRatioToDb(NOISE_BANDWIDTH);
 /**
@@ -24,7 +25,10 @@ export const logDensity = defineMistake('log-density', z.strictObject({}), () =>
 		averagesDecibels(setUp)
 			? {
 					value: context.question.truth - LOG_AVERAGE_DB,
-					spread: Math.hypot(MODEL_SPREAD_DB, bandSpreadDb(setUp, askedWidthHz(context.question) ?? 0))
+					spread: Math.hypot(
+						modelSpread(context.question),
+						bandSpreadDb(setUp, askedWidthHz(context.question) ?? 0)
+					)
 				}
 			: null,
 	explain({ setUp, source, change, yours, drawn, question }) {

@@ -3,11 +3,12 @@ import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
 import { figure, shortFigure } from '$lib/server/bench/exercise/figure';
 import { quantityFrequencyHz } from '$lib/server/bench/exercise/quantity-frequency';
-import { MODEL_SPREAD_DB, defineMistake, type Context } from '../mistake';
+import { defineMistake, type Context } from '../mistake';
 import { averagesDecibels, LOG_AVERAGE_DB, NOISE_BANDWIDTH, pointSpreadDb } from '../noise-law';
 import { placeHz } from '../place';
 import { askedWidthHz, densityDbmPerHz, flatWidthHz } from '../scene-power';
 import { withReading } from '../spoil';
+import { modelSpread } from '../spreads';
 
 const widthOf = ({ question }: Context): number => askedWidthHz(question) as number;
 const COUNTS = [
@@ -41,7 +42,7 @@ export const markerAsPower = defineMistake('marker-as-power', z.strictObject({})
 		const { rbwHz } = setUp.resolved;
 		const averagedLog = averagesDecibels(setUp) ? LOG_AVERAGE_DB : 0;
 		const value = densityDbmPerHz(context, rbwHz) + powerRatioToDb(NOISE_BANDWIDTH * rbwHz) - averagedLog;
-		return { value, spread: Math.hypot(MODEL_SPREAD_DB, pointSpreadDb(setUp)) };
+		return { value, spread: Math.hypot(modelSpread(context.question), pointSpreadDb(setUp)) };
 	},
 	explain({ change, setUp, ...context }) {
 		const rbwHz = setUp?.resolved.rbwHz ?? context.drawn.profile.rbwHz[0];

@@ -2,10 +2,11 @@ import { powerRatioToDb } from '$lib/units/decibel';
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
-import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
+import { defineMistake } from '../mistake';
 import { NOISE_BANDWIDTH, pointSpreadDb } from '../noise-law';
 import { densityDbmPerHz } from '../scene-power';
 import { withReading } from '../spoil';
+import { modelSpread } from '../spreads';
 
 /** A marker's level given as a density: the power in one resolution bandwidth, not in one hertz. */
 export const markerNotDivided = defineMistake('marker-not-divided', z.strictObject({}), () => ({
@@ -17,7 +18,7 @@ export const markerNotDivided = defineMistake('marker-not-divided', z.strictObje
 	predict: (context, setUp) => ({
 		value:
 			densityDbmPerHz(context, setUp.resolved.rbwHz) + powerRatioToDb(NOISE_BANDWIDTH * setUp.resolved.rbwHz),
-		spread: Math.hypot(MODEL_SPREAD_DB, pointSpreadDb(setUp))
+		spread: Math.hypot(modelSpread(context.question), pointSpreadDb(setUp))
 	}),
 	explain({ setUp, yours, drawn }) {
 		const rbwHz = setUp?.resolved.rbwHz ?? drawn.profile.rbwHz[0];

@@ -1,8 +1,9 @@
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
 import { mixerChangeDb, mixerLevelDbm, overloads } from '../mixer';
-import { MODEL_SPREAD_DB, defineMistake } from '../mistake';
+import { defineMistake } from '../mistake';
 import { withSettings } from '../spoil';
+import { modelSpread } from '../spreads';
 
 /** A carrier read while the mixer has more than it can take: compressed, and low. Made by too little attenuation, or a preamplifier left on. */
 export const overloaded = defineMistake(
@@ -16,7 +17,10 @@ export const overloaded = defineMistake(
 		shows: ({ setUp }, context) => overloads(context, setUp.resolved),
 		predict: (context, { resolved }) =>
 			overloads(context, resolved)
-				? { value: context.question.truth + mixerChangeDb(context, resolved), spread: MODEL_SPREAD_DB }
+				? {
+						value: context.question.truth + mixerChangeDb(context, resolved),
+						spread: modelSpread(context.question)
+					}
 				: null,
 		explain({ setUp, yours, drawn, question }) {
 			const context = { drawn, question };

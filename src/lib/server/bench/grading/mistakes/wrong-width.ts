@@ -1,11 +1,12 @@
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
-import { MODEL_SPREAD_DB, defineMistake, type Context } from '../mistake';
+import { defineMistake, type Context } from '../mistake';
 import { bandSpreadDb } from '../noise-law';
 import { sameWidth, widthHzOf } from '../read-width';
 import { askedWidthHz, channelDbm } from '../scene-power';
 import { withReading } from '../spoil';
+import { modelSpread } from '../spreads';
 
 const askedOf = ({ question }: Context): number => askedWidthHz(question) as number;
 
@@ -26,7 +27,7 @@ export const wrongWidth = defineMistake(
 		predict(context, setUp) {
 			const value = channelDbm(context, context.question.frequencyHz, widthHz);
 			const noisy = bandSpreadDb(setUp, Math.min(widthHz, askedOf(context)));
-			return { value, spread: Math.hypot(MODEL_SPREAD_DB, noisy) };
+			return { value, spread: Math.hypot(modelSpread(context.question), noisy) };
 		},
 		explain({ source, drawn, question }) {
 			const context = { drawn, question };
