@@ -36,6 +36,7 @@ const table: Record<Action, [string[], string[], string[], string[], string[]]> 
 	'lesson.read': [any, any, [], [], any],
 	'attempt.start': [mine, mine, [], [], mine],
 	'attempt.work': [mine, mine, [], [], mine],
+	'saved-set-up.keep': [mine, mine, [], [], mine],
 	'attempt.read': [mine, [...mine, ...cohort], mine, mine, any],
 	'answer-key.read': [['mine, closed'], any, [], [], any],
 	'progress.read': [mine, [...mine, ...cohort], any, [...mine, ...company], any],

@@ -13,6 +13,7 @@ export type Action =
 	| 'attempt.start'
 	| 'attempt.work' // settings, sweeps, readings, drafts, hints, answers
 	| 'attempt.read'
+	| 'saved-set-up.keep' // set-ups put by under a name
 	| 'answer-key.read' // truths, scene and seed of an attempt
 	| 'progress.read' // names and progress
 	| 'sign-off.decide'
@@ -63,6 +64,7 @@ export const PERMISSIONS: Record<Action, Partial<Record<Role, readonly Reach[]>>
 	// Whoever works on an attempt is told the truth at its end, so these go with 'answer-key.read'.
 	'attempt.start': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
 	'attempt.work': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
+	'saved-set-up.keep': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
 	'attempt.read': { ...THEIR_OWN, instructor: ['own', 'own-cohort'] },
 	'answer-key.read': { apprentice: ['own-closed'], instructor: ANY, administrator: ANY },
 	'progress.read': {
