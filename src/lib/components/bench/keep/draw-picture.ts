@@ -7,17 +7,11 @@ import { levelLines, levelWindow } from '../plot/level-axis';
 import { plotFrame, type PlotFrame } from '../plot/plot-frame';
 import { traceStyle } from '../plot/trace-style';
 import type { BenchSnapshot } from './bench-snapshot';
+import { figureFont, textFont, type TokenColour } from './picture-pen';
 import { drawTitleBlock, titleBlockPx } from './title-block';
 
 const size = { width: 1200, height: 560 };
 const ratio = 2;
-/** Fonts as the page has them; a canvas doesn't inherit. */
-export const textFont = (px: number, weight = 400) => `${weight} ${px}px "Spline Sans Variable", sans-serif`;
-export const figureFont = (px: number, weight = 400) => `${weight} ${px}px "Spline Sans Mono Variable", monospace`;
-
-/** A colour token of the page. */
-export type TokenColour = (token: string) => string;
-
 /** Draws the picture on a canvas, made as large as it takes: 1200 px wide at two device pixels each. */
 export function drawPicture(
 	canvas: HTMLCanvasElement,

@@ -1,6 +1,6 @@
 /** The title block under a kept picture: what it shows, how it was set, who, when. */
 import type { BenchSnapshot } from './bench-snapshot';
-import { figureFont, textFont, type TokenColour } from './draw-picture';
+import { figureFont, textFont, type TokenColour } from './picture-pen';
 import { setUpLines } from './set-up-lines';
 import { showFrequency } from '$lib/units/format-quantity';
 
@@ -69,13 +69,20 @@ export function drawTitleBlock(
 }
 
 const localTime = (at: Date) =>
-	at.toLocaleString('en-GB', { day: 'numeric', month: 'short', year: 'numeric', hour: '2-digit', minute: '2-digit' });
+	at.toLocaleString('en-GB', {
+		day: 'numeric',
+		month: 'short',
+		year: 'numeric',
+		hour: '2-digit',
+		minute: '2-digit'
+	});
 
 function wrapped(context: CanvasRenderingContext2D, text: string, widthPx: number): string[] {
 	const lines = [''];
 	for (const word of text.split(' ')) {
 		const longer = `${lines[lines.length - 1]} ${word}`.trim();
-		if (context.measureText(longer).width <= widthPx || lines[lines.length - 1] === '') lines[lines.length - 1] = longer;
+		if (context.measureText(longer).width <= widthPx || lines[lines.length - 1] === '')
+			lines[lines.length - 1] = longer;
 		else lines.push(word);
 	}
 	return lines;
@@ -85,6 +92,7 @@ function wrapped(context: CanvasRenderingContext2D, text: string, widthPx: numbe
 function fitted(context: CanvasRenderingContext2D, text: string, widthPx: number): string {
 	if (context.measureText(text).width <= widthPx) return text;
 	let shorter = text;
-	while (shorter.length > 1 && context.measureText(`${shorter}…`).width > widthPx) shorter = shorter.slice(0, -1);
+	while (shorter.length > 1 && context.measureText(`${shorter}…`).width > widthPx)
+		shorter = shorter.slice(0, -1);
 	return `${shorter}…`;
 }

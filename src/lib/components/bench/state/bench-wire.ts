@@ -7,7 +7,9 @@ import type {
 	TypedAnswer
 } from '$lib/schemas/attempt';
 import type { Frame } from '$lib/schemas/frames';
+import type { SavedSetUpView } from '$lib/schemas/saved-set-up';
 import type { LoggedSetUp } from '$lib/schemas/set-up-log';
+import type { Settings } from '$lib/schemas/settings';
 import type { SweepsRequest } from '$lib/schemas/sweep-stream';
 
 export interface Issue {
@@ -32,6 +34,13 @@ export interface BenchWire {
 	sweeps(request: SweepsRequest, signal: AbortSignal): Promise<AsyncIterable<Frame[]>>;
 	/** Rows drawn before, both ends included, at once. */
 	rows(from: number, to: number): Promise<AsyncIterable<Frame[]>>;
+	/** Set-ups put by under a name; absent where nobody is signed in. */
+	savedSetUps?: {
+		list(): Promise<SavedSetUpView[]>;
+		/** @returns whether one of the same name was replaced */
+		save(name: string, settings: Settings): Promise<boolean>;
+		remove(id: number): Promise<void>;
+	};
 	/** What was set so far; absent where nothing is logged. */
 	setUps?(): Promise<LoggedSetUp[]>;
 	acknowledge(row: number): Promise<void>;

@@ -5,7 +5,7 @@ import { takeReading } from '$lib/measure/take-reading';
 import type { AttemptView } from '$lib/schemas/attempt';
 import type { BenchRequest, CountRequest, ReadingRequest } from '$lib/schemas/reading';
 import type { LoggedSetUp } from '$lib/schemas/set-up-log';
-import type { ResolvedSettings } from '$lib/schemas/settings';
+import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 import { Playback } from '../over-time/playback.svelte';
 import type { View } from '../over-time/ViewSwitch.svelte';
 import { readingKind, type ReadingContext } from '../readings/reading-kinds';
@@ -15,7 +15,7 @@ import { AnswerSheet } from './answer-sheet.svelte';
 import { Refusal, type BenchWire } from './bench-wire';
 import { MarkerList, type Marker } from './marker-list.svelte';
 import { ReadingList } from './reading-list.svelte';
-import { SetupSheet } from './setup-sheet.svelte';
+import { refusedSetUp, SetupSheet } from './setup-sheet.svelte';
 import { SweepRun } from './sweep-run.svelte';
 import { TraceSet, type KeptRow } from './trace-set.svelte';
 
@@ -227,6 +227,24 @@ export class Bench {
 		}
 		this.run.stop();
 		if (rows.length > 0) this.playback.open({ resolved, rows, words: `set-up ${number + 1}` });
+	}
+
+	/**
+	 * Puts a set-up from elsewhere in force, whole. What was kept of a trace isn't in it, so such a trace is live again.
+	 * @returns why the receiver refuses it, naming the fields; undefined when it is in force
+	 */
+	async recall(settings: Settings): Promise<string | undefined> {
+		this.playback.close();
+		const traces = settings.traces?.map((trace) =>
+			trace.mode === 'kept' ? { mode: 'live' as const } : trace
+		);
+		try {
+			await this.run.change({ ...settings, ...(traces && { traces }) });
+			return undefined;
+		} catch (error) {
+			if (!(error instanceof Refusal)) throw error;
+			return refusedSetUp(error);
+		}
 	}
 
 	toggle(): void {

@@ -94,4 +94,8 @@ function reasonFor(field: string, refusal: Refusal): string {
 		.join(' ');
 }
 
+/** Why a whole set-up was refused: each field by its name. */
+export const refusedSetUp = (refusal: Refusal): string =>
+	refusal.issues.length === 0 ? refusal.message : reasonFor('', refusal);
+
 const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);

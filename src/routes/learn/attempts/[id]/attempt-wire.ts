@@ -9,6 +9,7 @@ import {
 	type AttemptView
 } from '$lib/schemas/attempt';
 import { FrameDecoder, type Frame } from '$lib/schemas/frames';
+import { savedSetUpsResponse, saveSetUpResponse } from '$lib/schemas/saved-set-up';
 import { setUpsResponse } from '$lib/schemas/set-up-log';
 
 /** @param attemptId whose endpoints are meant */
@@ -32,6 +33,7 @@ export function attemptWire(attemptId: AttemptView['id']): BenchWire {
 		sweeps: async (request, signal) => framesOf(await send('POST', '/sweeps', request, { signal })),
 		rows: async (from, to) => framesOf(await answered(fetch(`${base}/rows?from=${from}&to=${to}`))),
 		setUps: async () => setUpsResponse.parse(await (await answered(fetch(`${base}/set-ups`))).json()).setUps,
+		savedSetUps,
 		acknowledge: async (row) => {
 			await send('POST', '/acknowledgements', { row });
 		},
@@ -51,6 +53,23 @@ export function attemptWire(attemptId: AttemptView['id']): BenchWire {
 		reload: async () => attemptResponse.parse(await (await answered(fetch(base))).json()).attempt
 	};
 }
+
+const savedSetUps: NonNullable<BenchWire['savedSetUps']> = {
+	list: async () => savedSetUpsResponse.parse(await (await answered(fetch('/api/set-ups'))).json()).setUps,
+	save: async (name, settings) => {
+		const response = await answered(
+			fetch('/api/set-ups', {
+				method: 'POST',
+				headers: { 'content-type': 'application/json' },
+				body: JSON.stringify({ name, settings })
+			})
+		);
+		return saveSetUpResponse.parse(await response.json()).replaced;
+	},
+	remove: async (id) => {
+		await answered(fetch(`/api/set-ups/${id}`, { method: 'DELETE' }));
+	}
+};
 
 /** The response when it is good. @throws Refusal with what the server said when it is not */
 async function answered(asked: Promise<Response>): Promise<Response> {
