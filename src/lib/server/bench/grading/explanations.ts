@@ -1,5 +1,5 @@
 import type { Evidence, Source } from './evidence';
-import type { SetUp } from './mistake';
+import { isMadeWith, type SetUp } from './mistake';
 import { ownError } from './own-error';
 import { copyingSpread, modelSpread } from './spreads';
 import { supports } from './supports';
@@ -17,9 +17,7 @@ export interface Candidate {
 const shownBy = (source: Source, watched: readonly Watched[], evidence: Evidence): Watched[] =>
 	watched.filter(
 		({ mistake }) =>
-			mistake.stage === 'reading' &&
-			mistake.families.includes(source.family) &&
-			mistake.shows(source, evidence)
+			mistake.stage === 'reading' && isMadeWith(mistake, source) && mistake.shows(source, evidence)
 	);
 
 /** What a reading gives, by the mistakes it shows: those that make the same number of it are made together. */
@@ -80,7 +78,8 @@ function slipped(from: readonly Candidate[], watched: readonly Watched[], eviden
 			if (slip.mistake.stage !== 'slip') return [];
 			const change = slip.mistake.change(evidence, base.setUp);
 			if (change === null) return [];
-			return [{ ...base, watched: [...base.watched, slip], value: base.value + change }];
+			const value = slip.mistake.given?.(base.value, evidence) ?? base.value + change;
+			return [{ ...base, watched: [...base.watched, slip], value }];
 		})
 	);
 }

@@ -67,7 +67,7 @@ interface Words {
 export interface ReadingMistake extends Words {
 	stage: 'reading';
 	/** What it can be made with, as kinds of reading or whole families of them; whoever took others didn't make it. */
-	families: readonly Family[];
+	families: readonly Family[] | 'all';
 	shows(source: Source, context: Context): boolean;
 	/** What is reported from that reading, at the reference plane; absent: the reading itself. */
 	fromReading?(source: Source, context: Context): number;
@@ -75,11 +75,17 @@ export interface ReadingMistake extends Words {
 	predict(context: Context, setUp: SetUp): Prediction | null;
 }
 
+/** Whether a reading is of the kinds that a mistake is made with. */
+export const isMadeWith = ({ families }: ReadingMistake, { family, request }: Source): boolean =>
+	families === 'all' || families.includes(family) || families.includes(request.kind);
+
 /** Made after a right reading, with correction or pencil: a fixed change of the number, in the question's unit. */
 export interface Slip extends Words {
 	stage: 'slip';
 	/** Null when it can't be made with that set-up: no pad, no pad left out. */
 	change(context: Context, setUp?: SetUp): number | null;
+	/** What is given for a right number, where that isn't the number and the change: half of it, twice it. */
+	given?(value: number, context: Context): number;
 }
 
 export type Mistake = ReadingMistake | Slip;

@@ -27,6 +27,7 @@ export function numberLine({ evidence, watched, matched, verdict, source }: Judg
 /** A marker's number hangs on the learner's own bandwidth; everything else is as the taught method would have it. */
 function predictedOn(watched: Watched, context: Context, setUp: SetUp | undefined): Prediction | null {
 	const { mistake } = watched;
-	const ofPoint = mistake.stage === 'reading' && mistake.families.includes('point');
+	const ofPoint =
+		mistake.stage === 'reading' && mistake.families !== 'all' && mistake.families.includes('point');
 	return (ofPoint && setUp && mistake.predict(context, setUp)) || predictMistake(watched, context);
 }

@@ -4,7 +4,7 @@ import type { DrawnQuestion } from '../exercise/drawn-exercise';
 import { quantityFrequencyHz } from '../exercise/quantity-frequency';
 import { asksPlace } from './asked';
 import { familyOf, type Source } from './evidence';
-import { placeHz } from './place';
+import { takenAtHz } from './place';
 import { sameWidth, widthHzOf } from './read-width';
 
 type Check = (source: Source, question: DrawnQuestion) => boolean;
@@ -17,11 +17,6 @@ const onLineHz = (source: Source): number => Math.max(source.setUp.resolved.rbwH
 const near = (a: number | undefined, b: number | undefined, withinHz: number): boolean =>
 	a === undefined || b === undefined || Math.abs(a - b) <= withinHz;
 const fieldsOf = (asked: object): Fields => asked as Fields;
-
-/** Where a reading was taken, Hz: where its marker came to stand, else where it was put; in span 0, where the receiver stood. */
-const takenAtHz = ({ reading, request, setUp: { resolved } }: Source): number | undefined =>
-	placeHz(reading) ??
-	(quantityFrequencyHz(request) || (resolved.spanHz === 0 ? resolved.centreHz : undefined));
 
 /** A marker stands on the line; farther away it is on something else, or on nothing. Lines may move by the tolerance. */
 const onLine: Check = (source, { frequencyHz }) =>

@@ -5,6 +5,7 @@ import { couplingWrongSign } from './coupling-wrong-sign';
 import { densityForPower } from './density-for-power';
 import { densityNotDivided } from './density-not-divided';
 import { densityOverChannel } from './density-over-channel';
+import { halfOrDouble } from './half-or-double';
 import { leadAtOtherPoint } from './lead-at-other-point';
 import { leadLeftOut } from './lead-left-out';
 import { leadTwice } from './lead-twice';
@@ -18,6 +19,8 @@ import { padLeftOut } from './pad-left-out';
 import { padTwice } from './pad-twice';
 import { pathLeftOut } from './path-left-out';
 import { peakOnNoise } from './peak-on-noise';
+import { unitMixed } from './unit-mixed';
+import { wrongNeighbour } from './wrong-neighbour';
 import { wrongWidth } from './wrong-width';
 
 export const mistakeKinds: readonly MistakeKind[] = [
@@ -26,6 +29,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	densityForPower,
 	densityNotDivided,
 	densityOverChannel,
+	halfOrDouble,
 	leadAtOtherPoint,
 	leadLeftOut,
 	leadTwice,
@@ -39,5 +43,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	padTwice,
 	pathLeftOut,
 	peakOnNoise,
+	unitMixed,
+	wrongNeighbour,
 	wrongWidth
 ];
