@@ -44,14 +44,24 @@ export interface CourseContent {
  */
 export function readContent(root: string): CourseContent[] {
 	const courses = foldersIn(root).map((folder) => readCourse(root, folder));
+	refuseTwins(courses, 'exercises', ({ units }) => units.flatMap(({ exercises }) => exercises));
+	refuseTwins(courses, 'units', ({ units }) => units);
+	return courses;
+}
+
+/** Exercises and units are found by their names alone, whatever the course. */
+function refuseTwins(
+	courses: CourseContent[],
+	what: string,
+	namedIn: (course: CourseContent) => { slug: string }[]
+): void {
 	const seen = new Set<string>();
-	for (const { slug: course, units } of courses) {
-		for (const { slug } of units.flatMap((unit) => unit.exercises)) {
-			if (seen.has(slug)) throw new ContentError(course, 1, 'slug', `two exercises are called ${slug}`);
+	for (const course of courses) {
+		for (const { slug } of namedIn(course)) {
+			if (seen.has(slug)) throw new ContentError(course.slug, 1, 'slug', `two ${what} are called ${slug}`);
 			seen.add(slug);
 		}
 	}
-	return courses;
 }
 
 function readCourse(root: string, folder: string): CourseContent {

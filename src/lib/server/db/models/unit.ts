@@ -3,11 +3,13 @@ import {
 	Model,
 	type CreationOptional,
 	type InferAttributes,
-	type InferCreationAttributes
+	type InferCreationAttributes,
+	type NonAttribute
 } from 'sequelize';
 import type { Figure } from '$lib/schemas/figure';
 import type { Lesson } from '$lib/schemas/lesson';
 import { sequelize } from '../connection';
+import { Edition } from './edition';
 
 /** A unit of an edition, with its lesson as sanitised HTML and the figures that stand in it. */
 export class Unit extends Model<InferAttributes<Unit>, InferCreationAttributes<Unit>> {
@@ -21,6 +23,7 @@ export class Unit extends Model<InferAttributes<Unit>, InferCreationAttributes<U
 	declare lesson: Lesson;
 	/** As the author wrote them, checked at import. */
 	declare figures: Figure[];
+	declare edition?: NonAttribute<Edition>;
 }
 
 Unit.init(
@@ -36,3 +39,4 @@ Unit.init(
 	},
 	{ sequelize, tableName: 'units', timestamps: false }
 );
+Unit.belongsTo(Edition, { as: 'edition', foreignKey: 'editionId' });

@@ -1,0 +1,60 @@
+import type { LessonPart } from '$lib/schemas/lesson';
+import type { LessonPartView, LessonView } from '$lib/schemas/lesson-view';
+import { Exercise } from '$lib/server/db/models/exercise';
+import { Unit } from '$lib/server/db/models/unit';
+import { listAttempts } from '$lib/server/db/queries/attempts-at-exercise';
+import { findPublishedUnit, type PlacedUnit } from '$lib/server/db/queries/find-unit';
+import { may } from '$lib/server/domain/policy';
+import type { Actor } from '$lib/server/domain/role';
+import { DomainError } from '$lib/server/errors';
+import { presentFigure } from '$lib/server/present/figure';
+import { presentProgress } from '$lib/server/present/progress';
+import { firstState } from '../figures/figure-states';
+
+/** The lesson of a unit as published now, with what this person has done of its exercises. @throws DomainError `not_found` */
+export async function getLesson(actor: Actor, slug: string): Promise<LessonView> {
+	if (!may(actor, 'lesson.read'))
+		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	const unit = await findPublishedUnit(slug);
+	if (!unit) throw new DomainError('not_found', 'There is no such unit.');
+	const { id, number, title, summary, lesson, edition } = unit;
+	const exercises = await Exercise.findAll({
+		where: { unitId: id },
+		attributes: ['number', 'slug', 'title', 'tries'],
+		order: [['number', 'ASC']]
+	});
+	const attempts = await listAttempts(actor.id, edition.courseId, null);
+	return {
+		course: { slug: edition.course.slug, title: edition.title },
+		unit: { id, number, slug, title, summary },
+		title: lesson.title,
+		words: lesson.words,
+		parts: lesson.parts.map((part) => presentPart(unit, part)),
+		exercises: exercises.map((exercise) =>
+			presentProgress(
+				exercise,
+				attempts.filter(({ exerciseSlug }) => exerciseSlug === exercise.slug)
+			)
+		),
+		...(await around(unit))
+	};
+}
+
+function presentPart(unit: PlacedUnit, part: LessonPart): LessonPartView {
+	if (part.kind === 'text') return part;
+	const figure = unit.figures.find(({ id }) => id === part.id);
+	if (!figure) throw new Error(`Unit ${unit.id} has no figure ${part.id}`);
+	return { kind: 'figure', figure: presentFigure(figure, firstState({ unitId: unit.id, figure })) };
+}
+
+async function around({ editionId, id }: Unit): Promise<Pick<LessonView, 'before' | 'after'>> {
+	const units = await Unit.findAll({
+		where: { editionId },
+		attributes: ['id', 'number', 'slug', 'title'],
+		order: [['number', 'ASC']]
+	});
+	const at = units.findIndex((unit) => unit.id === id);
+	const line = (unit: Unit | undefined) =>
+		unit ? { number: unit.number, slug: unit.slug, title: unit.title } : null;
+	return { before: line(units[at - 1]), after: line(units[at + 1]) };
+}
