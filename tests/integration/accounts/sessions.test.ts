@@ -38,7 +38,7 @@ async function getSession(token: string): Promise<Session> {
 
 describe('a session', () => {
 	it('tells who holds its token, with their roles as they are now', async () => {
-		const { token } = await createSession(user.id);
+		const { token } = await createSession(user.id, 'computer');
 		const before = await validateSession(token);
 		expect(before?.user).toEqual({
 			id: user.id,
@@ -53,14 +53,14 @@ describe('a session', () => {
 
 	it('has a token of 160 random bits, and no two have the same', async () => {
 		const tokens = await Promise.all(
-			Array.from({ length: 20 }, async () => (await createSession(user.id)).token)
+			Array.from({ length: 20 }, async () => (await createSession(user.id, 'computer')).token)
 		);
 		for (const token of tokens) expect(token).toMatch(/^[a-z2-7]{32}$/);
 		expect(new Set(tokens).size).toBe(20);
 	});
 
 	it('keeps the SHA-256 of its token in 32 bytes, and the token nowhere', async () => {
-		const { token } = await createSession(user.id);
+		const { token } = await createSession(user.id, 'computer');
 		const [row] = await sequelize.query<{ id: Buffer; length: number; everything: Buffer }>(
 			`SELECT id, LENGTH(id) AS length, CONCAT_WS('|', id, user_id, created_at, expires_at) AS everything
 			 FROM sessions WHERE user_id = :id`,
@@ -77,15 +77,15 @@ describe('a session', () => {
 		['the token and a space', (token: string) => `${token} `],
 		['nothing', () => '']
 	])('is not opened by %s', async (_, key) => {
-		const { token } = await createSession(user.id);
+		const { token } = await createSession(user.id, 'computer');
 		expect(await validateSession(key(token))).toBeNull();
 		expect(await validateSession(token)).not.toBeNull();
 	});
 
 	it('lasts for 12 hours without a request, and is then removed', async () => {
-		const { token } = await createSession(user.id);
+		const { token } = await createSession(user.id, 'computer');
 		await letHoursPass(token, 11.99);
-		const { token: other } = await createSession(user.id);
+		const { token: other } = await createSession(user.id, 'computer');
 		await letHoursPass(other, 12.01);
 		expect(await validateSession(token)).not.toBeNull();
 		expect(await validateSession(other)).toBeNull();
@@ -94,7 +94,7 @@ describe('a session', () => {
 
 	it('lasts 12 hours more from each request, wherever in the 12 hours it comes', async () => {
 		for (const hours of [0.2, 3, 5.9, 6.1, 11.9]) {
-			const { token } = await createSession(user.id);
+			const { token } = await createSession(user.id, 'computer');
 			await letHoursPass(token, hours);
 			const validated = await validateSession(token);
 			expect(validated?.renewed).toBe(true);
@@ -105,12 +105,12 @@ describe('a session', () => {
 	});
 
 	it('is not written again at each request', async () => {
-		const { token } = await createSession(user.id);
+		const { token } = await createSession(user.id, 'computer');
 		expect((await validateSession(token))?.renewed).toBe(false);
 	});
 
 	it('ends 7 days after signing in, however busy', async () => {
-		const { token } = await createSession(user.id);
+		const { token } = await createSession(user.id, 'computer');
 		await letHoursPass(token, 11, 7 * 24 - 2);
 		const validated = await validateSession(token);
 		const left = ((validated?.expiresAt.getTime() ?? 0) - Date.now()) / HOUR_MS;
@@ -123,7 +123,7 @@ describe('a session', () => {
 	});
 
 	it('ends at the next request when the person is disabled', async () => {
-		const { token } = await createSession(user.id);
+		const { token } = await createSession(user.id, 'computer');
 		await user.update({ disabledAt: new Date() });
 		expect(await validateSession(token)).toBeNull();
 		await user.update({ disabledAt: null });
@@ -132,11 +132,11 @@ describe('a session', () => {
 
 	it('ends by itself, or with all others of the same person', async () => {
 		const sessions = [
-			await createSession(user.id),
-			await createSession(user.id),
-			await createSession(user.id)
+			await createSession(user.id, 'computer'),
+			await createSession(user.id, 'computer'),
+			await createSession(user.id, 'computer')
 		];
-		const stranger = await createSession((await createUser('apprentice')).user.id);
+		const stranger = await createSession((await createUser('apprentice')).user.id, 'computer');
 		const open = async () =>
 			Promise.all(sessions.map(async ({ token }) => (await validateSession(token)) !== null));
 		await endSession(sessions[1].token);
@@ -147,7 +147,7 @@ describe('a session', () => {
 	});
 
 	it('leaves no row behind when it has run out', async () => {
-		const [old, live] = [await createSession(user.id), await createSession(user.id)];
+		const [old, live] = [await createSession(user.id, 'computer'), await createSession(user.id, 'computer')];
 		await letHoursPass(old.token, 13);
 		await deleteExpiredSessions();
 		expect(await findSession(old.token)).toBeNull();

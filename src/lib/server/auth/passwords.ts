@@ -17,3 +17,9 @@ export const hashPassword = (password: string): Promise<string> => gate(() => ha
 /** Whether `password` is the one behind `passwordHash`. Without a hash: false, after the same work. */
 export const verifyPassword = (passwordHash: string | undefined, password: string): Promise<boolean> =>
 	gate(async () => (await verify(passwordHash ?? NOBODYS_HASH, password)) && passwordHash !== undefined);
+
+/** Whether a hash was made with less work than is asked for now, or by another algorithm. */
+export function isOutdatedHash(passwordHash: string): boolean {
+	const [, memory, time] = /^\$argon2id\$v=19\$m=(\d+),t=(\d+),p=\d+\$/.exec(passwordHash) ?? [];
+	return !(Number(memory) >= COST.memoryCost && Number(time) >= COST.timeCost);
+}

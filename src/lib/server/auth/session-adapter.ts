@@ -34,14 +34,17 @@ export class SessionAdapter implements Adapter {
 
 	async setSession({ id, userId, expiresAt, attributes }: DatabaseSession): Promise<void> {
 		const { transaction } = this;
-		await Session.create(
-			{ id: bytesOf(id), userId, expiresAt, createdAt: attributes.createdAt },
-			{ transaction }
-		);
+		await Session.create({ id: bytesOf(id), userId, expiresAt, ...attributes }, { transaction });
 	}
 
 	async updateSessionExpiration(id: string, expiresAt: Date): Promise<void> {
 		await Session.update({ expiresAt }, { where: { id: bytesOf(id) }, transaction: this.transaction });
+	}
+
+	/** Notes a request; moves the expiry with it. */
+	async touchSession(id: string, expiresAt: Date, lastUsedAt: Date): Promise<void> {
+		const where = { id: bytesOf(id) };
+		await Session.update({ expiresAt, lastUsedAt }, { where, transaction: this.transaction });
 	}
 
 	async deleteSession(id: string): Promise<void> {
@@ -58,9 +61,16 @@ export class SessionAdapter implements Adapter {
 	}
 }
 
-const presentSession = ({ id, userId, createdAt, expiresAt }: Session): DatabaseSession => ({
+const presentSession = ({
+	id,
+	userId,
+	createdAt,
+	expiresAt,
+	device,
+	lastUsedAt
+}: Session): DatabaseSession => ({
 	id: id.toString('hex'),
 	userId,
 	expiresAt,
-	attributes: { createdAt }
+	attributes: { createdAt, device, lastUsedAt }
 });

@@ -1,5 +1,6 @@
 import { Lucia, TimeSpan } from 'lucia';
 import type { Transaction } from 'sequelize';
+import type { DeviceKind } from '$lib/schemas/device-kind';
 import { SessionAdapter } from './session-adapter';
 import { createToken, hashToken } from './token';
 
@@ -16,6 +17,8 @@ interface UserAttributes {
 
 interface SessionAttributes {
 	createdAt: Date;
+	device: string;
+	lastUsedAt: Date;
 }
 
 declare module 'lucia' {
@@ -43,16 +46,24 @@ export interface SignedIn {
 const lucia = (transaction?: Transaction) =>
 	new Lucia<SessionAttributes, UserAttributes>(new SessionAdapter(transaction), {
 		sessionExpiresIn: IDLE,
-		getSessionAttributes: ({ createdAt }) => ({ createdAt }),
+		getSessionAttributes: ({ createdAt, device, lastUsedAt }) => ({ createdAt, device, lastUsedAt }),
 		getUserAttributes: ({ email, displayName, roles }) => ({ email, displayName, roles })
 	});
+
+/** The id under which the session of this token is kept. */
+export const sessionIdOf = (token: string): Buffer => hashToken(token);
 
 const idOf = (token: string): string => hashToken(token).toString('hex');
 
 /** Starts a session of this person, under a token never used before. */
-export async function createSession(userId: number, transaction?: Transaction): Promise<NewSession> {
+export async function createSession(
+	userId: number,
+	device: DeviceKind,
+	transaction?: Transaction
+): Promise<NewSession> {
 	const token = createToken();
-	const attributes = { createdAt: new Date() };
+	const now = new Date();
+	const attributes = { createdAt: now, device, lastUsedAt: now };
 	const session = await lucia(transaction).createSession(userId, attributes, { sessionId: idOf(token) });
 	return { token, expiresAt: session.expiresAt };
 }
@@ -69,7 +80,9 @@ export async function validateSession(token: string): Promise<SignedIn | null> {
 	const expiresAt = new Date(Math.min(Date.now() + IDLE.milliseconds(), lastMs));
 	// Lucia moves an expiry only in its second half and knows no last moment, so what it has set is set right here.
 	const renewed = session.fresh || expiresAt.getTime() - session.expiresAt.getTime() > LAG.milliseconds();
-	if (renewed) await new SessionAdapter().updateSessionExpiration(session.id, expiresAt);
+	// Near its last moment a session's expiry stands still, and it is used all the same.
+	const used = Date.now() - session.lastUsedAt.getTime() > LAG.milliseconds();
+	if (renewed || used) await new SessionAdapter().touchSession(session.id, expiresAt, new Date());
 	return { user, expiresAt: renewed ? expiresAt : session.expiresAt, renewed };
 }
 

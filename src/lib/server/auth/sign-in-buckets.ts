@@ -42,7 +42,7 @@ export function takeTries(counted: Counted[], now: Date): Promise<void> {
 		}
 		const retryAfterS = Math.max(...takes.map((take) => take.retryAfterS));
 		if (retryAfterS > 0) {
-			const message = `Too many tries at signing in. The next one is possible in ${retryAfterS} s.`;
+			const message = `Too many tries with a wrong password. The next one is possible in ${retryAfterS} s.`;
 			throw new DomainError('too_many', message, { retryAfterS });
 		}
 		for (const { row, bucket } of takes) await row.update(bucket, { transaction });

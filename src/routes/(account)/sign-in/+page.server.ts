@@ -32,7 +32,8 @@ export const actions: Actions = {
 					...form,
 					address: getClientAddress(),
 					deviceToken: readDeviceCookie(cookies, secure),
-					sessionToken: readSessionCookie(cookies, secure)
+					sessionToken: readSessionCookie(cookies, secure),
+					userAgent: request.headers.get('user-agent')
 				},
 				new Date()
 			);

@@ -19,6 +19,8 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
 	declare passwordHash: string;
 	/** Since when this person may not sign in; null while they may. */
 	declare disabledAt: CreationOptional<Date | null>;
+	/** Null before the first time. */
+	declare lastSignInAt: CreationOptional<Date | null>;
 	declare createdAt: CreationOptional<Date>;
 	declare updatedAt: CreationOptional<Date>;
 
@@ -32,6 +34,7 @@ User.init(
 		displayName: { type: DataTypes.STRING(120), allowNull: false },
 		passwordHash: { type: DataTypes.STRING(255), allowNull: false },
 		disabledAt: { type: DataTypes.DATE(3), defaultValue: null },
+		lastSignInAt: { type: DataTypes.DATE(3), defaultValue: null },
 		createdAt: DataTypes.DATE(3),
 		updatedAt: DataTypes.DATE(3)
 	},

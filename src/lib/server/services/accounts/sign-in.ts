@@ -1,11 +1,13 @@
+import type { Transaction } from 'sequelize';
 import { isKnownDevice, rememberDevice } from '$lib/server/auth/known-devices';
-import { verifyPassword } from '$lib/server/auth/passwords';
+import { hashPassword, isOutdatedHash, verifyPassword } from '$lib/server/auth/passwords';
 import { createSession, endSession } from '$lib/server/auth/sessions';
 import { giveBackTries, takeTries, type Counted } from '$lib/server/auth/sign-in-buckets';
 import { User } from '$lib/server/db/models/user';
 import { UserRole } from '$lib/server/db/models/user-role';
 import { inTransaction } from '$lib/server/db/transaction';
 import { addressBlock } from '$lib/server/domain/address-block';
+import { deviceKind } from '$lib/server/domain/device-kind';
 import { normaliseEmail } from '$lib/server/domain/email';
 import { homeOf } from '$lib/server/domain/rooms';
 import { ACCOUNT_LIMIT, ADDRESS_LIMIT, DEVICE_LIMIT } from '$lib/server/domain/sign-in-limit';
@@ -21,6 +23,8 @@ export interface SignInRequest {
 	/** What the browser's device and session cookies hold, if anything. */
 	deviceToken: string | undefined;
 	sessionToken: string | undefined;
+	/** What the browser says it is. */
+	userAgent?: string | null;
 }
 
 export interface SignInResult {
@@ -48,18 +52,42 @@ export async function signIn(request: SignInRequest, now: Date): Promise<SignInR
 	await takeTries(counted, now);
 
 	const right = await verifyPassword(user?.passwordHash, request.password);
-	if (!user || !right || user.disabledAt) {
-		throw new DomainError('invalid', 'This e-mail address and password don’t belong together.');
-	}
+	if (!user || !right || user.disabledAt) refuse();
 
+	const newHash = isOutdatedHash(user.passwordHash) ? await hashPassword(request.password) : null;
 	const result = await inTransaction(async (transaction) => {
 		await giveBackTries(counted, now, transaction);
+		await noteSignIn(user, request.password, newHash, now, transaction);
 		if (request.sessionToken) await endSession(request.sessionToken, transaction);
 		const deviceToken = await rememberDevice(request.deviceToken, user.id, now, transaction);
-		const { token, expiresAt } = await createSession(user.id, transaction);
+		const { token, expiresAt } = await createSession(user.id, deviceKind(request.userAgent), transaction);
 		return { sessionToken: token, expiresAt, deviceToken };
 	});
 	await forgetExpired(now);
 	const roles = (user.userRoles ?? []).map(({ role }) => role);
 	return { ...result, home: homeOf(actorOf({ id: user.id, roles })) };
+}
+
+/**
+ * Notes when this was, under a lock on the account, and puts a costlier hash in the place of an old one.
+ * Throws DomainError `invalid` if the account or its password has changed since it was looked at.
+ */
+async function noteSignIn(
+	seen: User,
+	password: string,
+	newHash: string | null,
+	now: Date,
+	transaction: Transaction
+): Promise<void> {
+	const user = await User.findByPk(seen.id, { lock: transaction.LOCK.UPDATE, transaction });
+	const same = user?.passwordHash === seen.passwordHash;
+	if (!user || user.disabledAt || !(same || (await verifyPassword(user.passwordHash, password)))) refuse();
+	await user.update(
+		{ lastSignInAt: now, ...(newHash && same && { passwordHash: newHash }) },
+		{ transaction }
+	);
+}
+
+function refuse(): never {
+	throw new DomainError('invalid', 'This e-mail address and password don’t belong together.');
 }
