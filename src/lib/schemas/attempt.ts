@@ -2,6 +2,7 @@
 import { z } from 'zod';
 import { exerciseView } from './exercise-view';
 import { finding } from './finding';
+import { markings } from './markings';
 import { benchRequest } from './reading';
 import { settings, type ResolvedSettings } from './settings';
 import { receiverFlag, rowNumber } from './sweep-stream';
@@ -126,6 +127,8 @@ export const attemptView = z.strictObject({
 	bench: benchView,
 	readings: z.array(readingView),
 	drafts: draftsView,
+	/** Null before anything was marked. */
+	markings: markings.nullable(),
 	hints: z.strictObject({ count: z.int(), revealed: z.array(z.string()) })
 });
 export const attemptResponse = z.strictObject({ attempt: attemptView });

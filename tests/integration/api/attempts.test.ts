@@ -25,6 +25,7 @@ import { GET as doneRightRows } from '../../../src/routes/api/attempts/[id]/done
 import { PUT as draft } from '../../../src/routes/api/attempts/[id]/drafts/+server';
 import { GET as finding } from '../../../src/routes/api/attempts/[id]/finding/+server';
 import { POST as hint } from '../../../src/routes/api/attempts/[id]/hints/+server';
+import { PUT as markings } from '../../../src/routes/api/attempts/[id]/markings/+server';
 import { POST as reading } from '../../../src/routes/api/attempts/[id]/readings/+server';
 import { GET as rows } from '../../../src/routes/api/attempts/[id]/rows/+server';
 import { GET as setUps } from '../../../src/routes/api/attempts/[id]/set-ups/+server';
@@ -45,6 +46,22 @@ const posts: Record<string, { handler: Handler; good: () => unknown }> = {
 	drafts: {
 		handler: draft as unknown as Handler,
 		good: () => ({ answers: { power: { text: '-23', unit: 'dBm', readingId: null } } })
+	},
+	counts: {
+		handler: reading as unknown as Handler,
+		good: () => ({ request: { kind: 'count', atHz: 450e6, gateS: 0.1 } })
+	},
+	markings: {
+		handler: markings as unknown as Handler,
+		good: () => ({
+			markings: {
+				markers: [{ letter: 'A', at: 450e6, trace: 1 }],
+				selected: 'A',
+				readings: [{ request: { kind: 'peak' }, trace: 1, values: { centreHz: 450e6 } }],
+				levelUnit: 'dBm',
+				antenna: [{ frequencyHz: 450e6, dbPerM: 18.4 }]
+			}
+		})
 	},
 	answers: {
 		handler: answer as unknown as Handler,
@@ -67,7 +84,7 @@ const post = (name: string, actor: Actor | null, id: string, body: unknown) =>
 	);
 
 async function checksums(): Promise<unknown> {
-	const tables = 'attempts, set_ups, readings, drafts, answers, findings';
+	const tables = 'attempts, set_ups, readings, drafts, markings, answers, findings';
 	return sequelize.query(`CHECKSUM TABLE ${tables}`, { type: QueryTypes.SELECT });
 }
 

@@ -1,11 +1,13 @@
 import { describe, expect, it } from 'vitest';
 import { attemptView } from '$lib/schemas/attempt';
+import type { Markings } from '$lib/schemas/markings';
 import type { Settings } from '$lib/schemas/settings';
 import { Attempt } from '$lib/server/db/models/attempt';
 import { Draft } from '$lib/server/db/models/draft';
 import { acknowledgeRows } from '$lib/server/services/attempts/acknowledge-rows';
 import { getAttemptView } from '$lib/server/services/attempts/get-attempt-view';
 import { revealHint } from '$lib/server/services/attempts/reveal-hint';
+import { saveMarkings } from '$lib/server/services/attempts/save-markings';
 import { saveDrafts } from '$lib/server/services/attempts/save-drafts';
 import { takeReading } from '$lib/server/services/attempts/take-reading';
 import { createAttempt, secretsOf, sweep } from '../../factories/attempt';
@@ -13,6 +15,22 @@ import { createUser } from '../../factories/user';
 
 const now = new Date('2026-03-02T10:00:00Z');
 const settings: Settings = { centreHz: 450e6, spanHz: 1e6, rbwHz: 30e3, points: 101 };
+const markings: Markings = {
+	markers: [
+		{ letter: 'A', at: 0, trace: 1, follows: 'peak' },
+		{ letter: 'C', at: 450.0125e6, trace: 1, from: 'A' }
+	],
+	selected: 'C',
+	readings: [
+		{
+			request: { kind: 'channel-power', centreHz: 450e6, widthHz: 2e5 },
+			trace: 1,
+			values: { centreHz: 450e6, widthHz: 2e5 }
+		}
+	],
+	levelUnit: 'dBµV/m',
+	antenna: [{ frequencyHz: 450e6, dbPerM: 18.4 }]
+};
 const power = { text: '-23,', unit: 'dBm' };
 
 describe('getAttemptView(actor, attemptId)', () => {
@@ -49,6 +67,7 @@ describe('getAttemptView(actor, attemptId)', () => {
 		const { reading } = await takeReading(actor, attempt.id, asked, now);
 		await saveDrafts(actor, attempt.id, { answers: { power: { ...power, readingId: reading.id } } }, now);
 		await revealHint(actor, attempt.id);
+		await saveMarkings(actor, attempt.id, { markings }, now);
 		const view = await getAttemptView(actor, attempt.id);
 		expect(attemptView.parse(view)).toEqual(view);
 		expect(view.bench).toMatchObject({
@@ -66,6 +85,7 @@ describe('getAttemptView(actor, attemptId)', () => {
 			answers: { power: { ...power, readingId: reading.id } },
 			savedAt: now.toISOString()
 		});
+		expect(view.markings).toEqual(markings);
 		expect(view.hints).toEqual({ count: 2, revealed: ['Which reading adds the slices up?'] });
 		expect((await sweep(actor, attempt.id, held, { from: 6, sweeps: 2 })).state.fromRow).toBe(6);
 	});
@@ -164,5 +184,20 @@ describe('revealHint(actor, attemptId)', () => {
 		const { attempt } = await createAttempt();
 		const { actor: stranger } = await createUser('apprentice');
 		await expect(revealHint(stranger, attempt.id)).rejects.toMatchObject({ code: 'not_found' });
+	});
+});
+
+describe('saveMarkings(actor, attemptId, markings, now)', () => {
+	it('is refused once the attempt is closed, and to anybody else', async () => {
+		const { actor, attempt } = await createAttempt();
+		const { actor: stranger } = await createUser('apprentice');
+		await expect(saveMarkings(stranger, attempt.id, { markings }, now)).rejects.toMatchObject({
+			code: 'not_found'
+		});
+		await Attempt.update({ closedAt: now }, { where: { id: attempt.id } });
+		await expect(saveMarkings(actor, attempt.id, { markings }, now)).rejects.toMatchObject({
+			code: 'conflict'
+		});
+		expect((await getAttemptView(actor, attempt.id)).markings).toBeNull();
 	});
 });

@@ -9,6 +9,7 @@ export const wireOf = (does: Partial<BenchWire>): BenchWire => ({
 	acknowledge: unasked,
 	takeReading: unasked,
 	saveDrafts: unasked,
+	saveMarkings: unasked,
 	nextHint: unasked,
 	handIn: unasked,
 	reload: unasked,

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { levelLines, levelWindow } from '$lib/components/bench/plot/level-axis';
+import { levelLines } from '$lib/components/bench/levels/level-lines';
+import { levelWindow } from '$lib/components/bench/plot/level-axis';
 
 describe('levelLines(referenceDbm, topDbm, bottomDbm)', () => {
 	it('draws one line every 20 dB from the reference down, with a true minus', () => {

@@ -57,9 +57,12 @@ export function shownSpread(spread: number, value: number, unit: string): string
 			? value / Number(shownReading(value, unit).figure.replace(/[^\d.]/g, ''))
 			: 1;
 	const scaled = spread / size;
-	const digits = scaled >= 9.5 ? 0 : Math.min(4, Math.max(1, Math.ceil(-Math.log10(scaled) - 0.02)));
-	return `±${formatFigure(scaled, digits)}`;
+	return `±${formatFigure(scaled, spreadDigits(scaled))}`;
 }
+
+/** Decimals down to the first digit that says something. */
+export const spreadDigits = (spread: number): number =>
+	spread >= 9.5 ? 0 : Math.min(4, Math.max(1, Math.ceil(-Math.log10(spread) - 0.02)));
 
 /** A setting's value in the unit that suits it, as short as it can be. */
 export function shownSetting(value: number, base: 'Hz' | 's' | 'dBm' | 'dB' | ''): Shown {

@@ -1,5 +1,6 @@
 import type { AttemptView, BenchView, DraftsView, ReadingView } from '$lib/schemas/attempt';
 import type { ExerciseView } from '$lib/schemas/exercise-view';
+import type { Markings } from '$lib/schemas/markings';
 import type { ReceiverFlag } from '$lib/schemas/sweep-stream';
 import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 
@@ -13,6 +14,7 @@ export interface AttemptParts {
 	bench: BenchView;
 	readings: ReadingView[];
 	drafts: DraftsView;
+	markings: Markings | null;
 }
 
 export function presentAttempt(parts: AttemptParts): AttemptView {
@@ -28,6 +30,7 @@ export function presentAttempt(parts: AttemptParts): AttemptView {
 		bench: parts.bench,
 		readings: parts.readings,
 		drafts: parts.drafts,
+		markings: parts.markings,
 		hints: { count: hints.length, revealed: hints.slice(0, attempt.hintsRevealed) }
 	};
 }

@@ -1,5 +1,6 @@
 /** The words of the set-up strip. */
-import type { Detector, Scale, TraceMode } from '$lib/schemas/settings';
+import type { Detector, ResolvedSettings, Scale, TraceMode } from '$lib/schemas/settings';
+import { formatFigure } from '$lib/units/format-quantity';
 
 export const detectorWords: Record<Detector, string> = {
 	'rise-fall': 'rise and fall',
@@ -40,3 +41,15 @@ export const settingWords: Record<string, string> = {
 	traces: 'Traces',
 	input: 'Input'
 };
+
+/** What a correction does, in words; empty when it does nothing. */
+export function correctionWords(correction: ResolvedSettings['correctionDb']): string {
+	if (typeof correction === 'number') {
+		if (correction === 0) return '';
+		const figure = formatFigure(Math.abs(correction), Number.isInteger(correction * 10) ? 1 : 2);
+		return correction > 0 ? `Loss of ${figure} dB added back` : `${figure} dB taken off, as for a gain`;
+	}
+	const losses = correction.map(({ db }) => db);
+	const [least, most] = [Math.min(...losses), Math.max(...losses)].map((db) => formatFigure(db, 1));
+	return `Loss of ${least}${least === most ? '' : ` to ${most}`} dB added back`;
+}

@@ -10,6 +10,7 @@ import type { Frame } from '$lib/schemas/frames';
 import type { SavedSetUpView } from '$lib/schemas/saved-set-up';
 import type { LoggedSetUp } from '$lib/schemas/set-up-log';
 import type { Settings } from '$lib/schemas/settings';
+import type { Markings } from '$lib/schemas/markings';
 import type { SweepsRequest } from '$lib/schemas/sweep-stream';
 
 export interface Issue {
@@ -47,6 +48,8 @@ export interface BenchWire {
 	takeReading(request: TakeReadingRequest): Promise<ReadingView>;
 	/** @param leaving the page is going, and the request must outlive it */
 	saveDrafts(answers: Record<string, TypedAnswer>, leaving?: boolean): Promise<string>;
+	/** @param leaving as for drafts */
+	saveMarkings(markings: Markings, leaving?: boolean): Promise<void>;
 	nextHint(): Promise<HintResponse>;
 	handIn(answers: Record<string, TypedAnswer>): Promise<void>;
 	/** Ends the attempt without answers; absent where there is nothing to spend. */

@@ -1,19 +1,20 @@
 /** Everything behind one bench page, tied together. */
 import { formatFrequency, formatTime } from '$lib/units/format-quantity';
-import { isProblem } from '$lib/measure/reading';
-import { takeReading } from '$lib/measure/take-reading';
 import type { AttemptView } from '$lib/schemas/attempt';
-import type { BenchRequest, CountRequest, ReadingRequest } from '$lib/schemas/reading';
+import type { BenchRequest, CountRequest } from '$lib/schemas/reading';
 import type { LoggedSetUp } from '$lib/schemas/set-up-log';
 import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 import { Playback } from '../over-time/playback.svelte';
 import type { View } from '../over-time/ViewSwitch.svelte';
 import { readingKind, type ReadingContext } from '../readings/reading-kinds';
 import type { ReadingRow } from '../readings/reading-row';
-import { shownReading } from '../shown-quantity';
+import { inDbm, type LevelScale } from '../levels/level-scale';
 import { AnswerSheet } from './answer-sheet.svelte';
 import { Refusal, type BenchWire } from './bench-wire';
+import type { Markings } from '$lib/schemas/markings';
+import { MarkingsKeeper } from './markings-keeper.svelte';
 import { MarkerList, type Marker } from './marker-list.svelte';
+import { addMarker, followPeak, keepFollowing, spokenMarker, toPeak, type PeakStep } from './move-markers';
 import { ReadingList } from './reading-list.svelte';
 import { refusedSetUp, SetupSheet } from './setup-sheet.svelte';
 import { SweepRun } from './sweep-run.svelte';
@@ -23,8 +24,13 @@ import { TraceSet, type KeptRow } from './trace-set.svelte';
 const fetchedPoints = 4_000_000;
 const mostFetched = 1000;
 
-/** Where to put a marker: the highest point, or the next one to a side. */
-export type PeakStep = 'highest' | 'left' | 'right';
+/** The ends of an axis: Hz, or s in span 0, where the centre is the one frequency there is. */
+export interface BenchAxis {
+	kind: 'frequency' | 'time';
+	start: number;
+	stop: number;
+	centreHz: number;
+}
 
 export class Bench {
 	readonly traces = new TraceSet();
@@ -38,10 +44,13 @@ export class Bench {
 	readonly answers: AnswerSheet;
 	readonly attempt: AttemptView;
 	hints = $state.raw<readonly string[]>([]);
+	/** The unit that levels are shown in. */
+	levels = $state.raw<LevelScale>(inDbm);
 	/** What was just done on the person's behalf, in words. */
 	notice = $state<string | undefined>();
 	/** What the live region says; `count` makes the same words count as said again. */
 	said = $state.raw<{ words: string; count: number } | undefined>();
+	readonly keeper: MarkingsKeeper;
 	readonly wire: BenchWire;
 
 	constructor(attempt: AttemptView, wire: BenchWire) {
@@ -58,21 +67,36 @@ export class Bench {
 		});
 		this.answers = new AnswerSheet(attempt.exercise.questions, attempt.drafts, wire);
 		this.hints = attempt.hints.revealed;
+		if (attempt.markings) {
+			const { levelUnit, antenna } = attempt.markings;
+			this.markers.restore(attempt.markings);
+			this.readings.restore(attempt.markings.readings);
+			this.levels = { unit: levelUnit, antenna };
+		}
+		this.keeper = new MarkingsKeeper(this.markings, wire);
+	}
+
+	/** What lies on the bench besides its set-up and its evidence. */
+	get markings(): Markings {
+		return {
+			// Where one that follows stands is found again from the trace.
+			markers: this.markers.list.map((marker) => (marker.follows ? { ...marker, at: 0 } : marker)),
+			selected: this.markers.selected?.letter ?? null,
+			readings: this.readings.following.map(({ request, trace, values }) => ({ request, trace, values })),
+			levelUnit: this.levels.unit,
+			antenna: this.levels.antenna
+		};
 	}
 
 	/** The ends of the axis: Hz, or s in span 0. */
-	get axis(): { kind: 'frequency' | 'time'; start: number; stop: number } {
+	get axis(): BenchAxis {
 		return this.axisOf(this.run.resolved);
 	}
 
-	axisOf({ startHz, stopHz, spanHz, sweepTimeS }: ResolvedSettings): {
-		kind: 'frequency' | 'time';
-		start: number;
-		stop: number;
-	} {
+	axisOf({ startHz, stopHz, centreHz, spanHz, sweepTimeS }: ResolvedSettings): BenchAxis {
 		return spanHz > 0
-			? { kind: 'frequency', start: startHz, stop: stopHz }
-			: { kind: 'time', start: 0, stop: sweepTimeS };
+			? { kind: 'frequency', start: startHz, stop: stopHz, centreHz }
+			: { kind: 'time', start: 0, stop: sweepTimeS, centreHz };
 	}
 
 	/** Shows what was drawn before and goes on sweeping, unless something stands in the way. */
@@ -84,6 +108,7 @@ export class Bench {
 	close(): void {
 		this.playback.close();
 		this.answers.flush();
+		this.keeper.flush();
 		this.run.stop();
 	}
 
@@ -103,22 +128,8 @@ export class Bench {
 		return (stop - start) / (this.run.resolved.points - 1);
 	}
 
-	/** Puts a marker on the highest point, or on the next peak to a side of where it stands. */
 	toPeak(letter: string, step: PeakStep): void {
-		const marker = this.markers.find(letter);
-		const trace = marker && this.readings.traceOf(marker.trace);
-		if (!marker || !trace) return;
-		const request: ReadingRequest =
-			step === 'highest'
-				? { kind: 'peak' }
-				: { kind: 'next-peak', fromHz: marker.at, side: step === 'left' ? 'lower' : 'upper' };
-		const outcome = takeReading(trace, request);
-		if (isProblem(outcome)) {
-			this.notice = `${outcome.problem} ${outcome.needs}`;
-			return;
-		}
-		const place = placeOf(outcome.parts);
-		if (place !== undefined) this.markers.move(letter, place);
+		toPeak(this, letter, step);
 	}
 
 	/** The attempt has been handed in, on this page or another one. */
@@ -126,31 +137,16 @@ export class Bench {
 		return this.run.closed || this.answers.closed;
 	}
 
-	/** Adds a marker at a place, by default on the highest point, else in the middle. */
 	addMarker(at?: number): void {
-		const { start, stop } = this.axis;
-		const marker = this.markers.add(at ?? (start + stop) / 2);
-		if (!marker) this.notice = 'All eight markers are in use. Take one away first.';
-		else if (at === undefined) this.toPeak(marker.letter, 'highest');
+		addMarker(this, at);
 	}
 
-	/** Adds a marker that keeps to the highest point. */
 	followPeak(): void {
-		const { start, stop } = this.axis;
-		if (!this.markers.add((start + stop) / 2, { follows: 'peak' })) {
-			this.notice = 'All eight markers are in use. Take one away first.';
-		}
-		this.keepFollowing();
+		followPeak(this);
 	}
 
-	/** Puts the markers that follow something where it is now. */
 	keepFollowing(): void {
-		for (const marker of this.markers.list.filter(({ follows }) => follows)) {
-			const trace = this.readings.traceOf(marker.trace);
-			const outcome = trace && takeReading(trace, { kind: 'peak' });
-			const place = outcome && !isProblem(outcome) ? placeOf(outcome.parts) : undefined;
-			if (place !== undefined && place !== marker.at) this.markers.keepAt(marker.letter, place);
-		}
+		keepFollowing(this);
 	}
 
 	moveMarker(letter: string, at: number): void {
@@ -192,7 +188,7 @@ export class Bench {
 	}
 
 	async #count(request: CountRequest): Promise<void> {
-		const at = this.markers.list.find((marker) => marker.at === request.atHz);
+		const at = this.markers.list.find((one) => one.at === request.atHz);
 		this.notice = `Counting for ${formatTime(request.gateS)} …`;
 		try {
 			await this.readings.count(request, at?.letter);
@@ -252,7 +248,7 @@ export class Bench {
 		else void this.start();
 	}
 
-	/** Sweeps on; a refusal is told at the field it belongs to. */
+	/** Sweeps on, with the input protection reset if asked; a refusal is told at the field it belongs to. */
 	async start(resetProtection?: boolean): Promise<void> {
 		this.playback.close();
 		try {
@@ -267,7 +263,12 @@ export class Bench {
 	/** Lets the selected marker be read out. */
 	say(): void {
 		const row = this.readings.markerRows.find(({ letter }) => letter === this.markers.selectedLetter);
-		if (row) this.said = { words: spoken(row), count: (this.said?.count ?? 0) + 1 };
+		if (row) this.said = { words: spokenMarker(this, row), count: (this.said?.count ?? 0) + 1 };
+	}
+
+	/** A place on the axis in words: a frequency, or a time in span 0. */
+	writePlace(at: number): string {
+		return this.axis.kind === 'time' ? formatTime(at) : formatFrequency(at);
 	}
 
 	/** The next attenuator step that takes 10 dB or more off; the last one if there is none. */
@@ -276,11 +277,6 @@ export class Bench {
 		const wanted = this.run.resolved.attenuationDb + 10;
 		const step = attenuatorDb.find((db) => db >= wanted) ?? Math.max(...attenuatorDb);
 		return this.sheet.setAll({ attenuationDb: step });
-	}
-
-	/** Puts the receiver back on after its input protection opened; it opens again if nothing was changed. */
-	resetProtection(): Promise<void> {
-		return this.start(true);
 	}
 
 	/** Takes a row's reading as evidence and rests an answer on it. @throws Refusal with the reason */
@@ -316,19 +312,4 @@ export class Bench {
 		const { hint } = await this.wire.nextHint();
 		this.hints = [...this.hints, hint];
 	}
-}
-
-function placeOf(parts: unknown): number | undefined {
-	if (typeof parts !== 'object' || parts === null) return undefined;
-	const { frequencyHz, timeS } = parts as { frequencyHz?: number; timeS?: number };
-	return frequencyHz ?? timeS;
-}
-
-/** A marker as it is read out: letter, place, level. */
-function spoken({ letter, words, atHz, outcome, relative }: ReadingRow): string {
-	const place = atHz === undefined ? '' : `${relative && atHz > 0 ? 'plus ' : ''}${formatFrequency(atHz)}, `;
-	if (!outcome) return `${words} ${letter}: nothing swept yet.`;
-	if ('problem' in outcome) return `${words} ${letter}: ${outcome.problem}`;
-	const { figure, unit } = shownReading(outcome.value, outcome.unit);
-	return `${words} ${letter}: ${place}${figure} ${unit}`.replaceAll('−', 'minus ');
 }

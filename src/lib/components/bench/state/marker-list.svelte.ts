@@ -1,24 +1,21 @@
 /** The markers of a bench: A to H, where each stands, which one is selected. */
 
-export interface Marker {
-	letter: string;
-	/** Place on the axis: Hz, or s in span 0. */
-	at: number;
-	/** Number of the trace it stands on, 1 to 4. */
-	trace: number;
-	/** Letter of the marker it is read from; absent for an absolute reading. */
-	from?: string;
-	/** Keeps to the highest point until it is moved by hand. */
-	follows?: 'peak';
-}
+import { markerLetters, type Markings } from '$lib/schemas/markings';
 
-export const markerLetters = ['A', 'B', 'C', 'D', 'E', 'F', 'G', 'H'] as const;
+/** `at` is its place on the axis; one that follows something goes on following until it is moved by hand. */
+export type Marker = Markings['markers'][number];
 
 export class MarkerList {
 	list = $state.raw<readonly Marker[]>([]);
 	selectedLetter = $state<string | undefined>();
 	readonly selected = $derived(this.list.find((marker) => marker.letter === this.selectedLetter));
 	readonly full = $derived(this.list.length >= markerLetters.length);
+
+	/** Puts markers back as they stood. */
+	restore({ markers, selected }: Pick<Markings, 'markers' | 'selected'>): void {
+		this.list = markers;
+		this.selectedLetter = selected ?? undefined;
+	}
 
 	/** Adds a marker under the first free letter and selects it. @returns undefined when all eight stand */
 	add(at: number, options: Pick<Marker, 'follows' | 'from'> & { trace?: number } = {}): Marker | undefined {
@@ -48,9 +45,8 @@ export class MarkerList {
 
 	/** Reads `letter` from another marker, or absolutely again when `from` is undefined. */
 	readFrom(letter: string, from: string | undefined): void {
-		this.#change(letter, ({ from: _, ...marker }) =>
-			from && from !== letter ? { ...marker, from } : marker
-		);
+		const other = from === letter ? undefined : this.find(from);
+		this.#change(letter, ({ from: _, ...marker }) => (other ? { ...marker, from: other.letter } : marker));
 	}
 
 	standOn(letter: string, trace: number): void {

@@ -3,6 +3,7 @@ import type { Reading, ReadingProblem } from '$lib/measure/reading';
 import { takeReading } from '$lib/measure/take-reading';
 import type { Trace } from '$lib/measure/trace';
 import type { ReadingView } from '$lib/schemas/attempt';
+import type { Markings } from '$lib/schemas/markings';
 import type { CountRequest, ReadingRequest } from '$lib/schemas/reading';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import { readingPlace, readingWords, sourceWords, takenFromWords } from '../readings/reading-words';
@@ -67,6 +68,11 @@ export class ReadingList {
 
 	follow(request: ReadingRequest, values: Record<string, number>, trace = 1): void {
 		this.following = [...this.following, { id: this.#nextId++, request, trace, values }];
+	}
+
+	/** Puts readings that follow the traces back as they were. */
+	restore(readings: Markings['readings']): void {
+		this.following = readings.map((entry) => ({ id: this.#nextId++, ...entry }));
 	}
 
 	change(id: number, request: ReadingRequest, values: Record<string, number>): void {

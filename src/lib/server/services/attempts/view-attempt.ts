@@ -3,6 +3,7 @@ import type { AttemptView, BenchView, DraftsView } from '$lib/schemas/attempt';
 import { fillText } from '$lib/server/bench/exercise/fill-text';
 import { ENGINE_VERSION } from '$lib/server/bench/receiver/random';
 import type { Attempt } from '$lib/server/db/models/attempt';
+import { AttemptMarkings } from '$lib/server/db/models/attempt-markings';
 import { Draft } from '$lib/server/db/models/draft';
 import { Reading } from '$lib/server/db/models/reading';
 import { SetUp } from '$lib/server/db/models/set-up';
@@ -33,7 +34,8 @@ export async function viewAttempt(attempt: Attempt, transaction?: Transaction): 
 		hints: drawnFor(source).brief.hints,
 		bench: await viewBench(attempt, source, transaction),
 		readings: readings.map((reading) => presentReading(reading, reading.setUp?.number ?? 0)),
-		drafts: await viewDrafts(attempt.id, transaction)
+		drafts: await viewDrafts(attempt.id, transaction),
+		markings: (await AttemptMarkings.findByPk(attempt.id, { transaction }))?.markings ?? null
 	});
 }
 

@@ -43,6 +43,9 @@ export function attemptWire(attemptId: AttemptView['id']): BenchWire {
 			const response = await send('PUT', '/drafts', { answers }, { keepalive: leaving });
 			return draftsResponse.parse(await response.json()).savedAt;
 		},
+		saveMarkings: async (markings, leaving) => {
+			await send('PUT', '/markings', { markings }, { keepalive: leaving });
+		},
 		nextHint: async () => hintResponse.parse(await (await send('POST', '/hints', {})).json()),
 		handIn: async (answers) => {
 			await send('POST', '/answers', { answers });
