@@ -282,8 +282,18 @@ describe('input protection', () => {
 			protectionTrips: 1,
 			clockS: 0
 		});
+		await expect(open(actor, attempt.id, bare)).rejects.toMatchObject({ code: 'conflict' });
 		const padded = { ...bare, input: { padDb: 30 as const } };
-		await expect(open(actor, attempt.id, padded)).rejects.toMatchObject({ code: 'conflict' });
+		const waiting = await sweep(actor, attempt.id, padded);
+		expect(waiting).toMatchObject({
+			state: { resolved: { input: { padDb: 30 } } },
+			end: { reason: 'input-protection' }
+		});
+		expect(await stored(attempt.id)).toMatchObject({
+			protectionTripped: true,
+			protectionTrips: 1,
+			clockS: 0
+		});
 		const again = await sweep(actor, attempt.id, bare, { resetProtection: true });
 		expect(again.end?.reason).toBe('input-protection');
 		const safe = await sweep(actor, attempt.id, padded, { resetProtection: true, sweeps: 2 });

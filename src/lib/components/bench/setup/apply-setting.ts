@@ -54,7 +54,7 @@ export function expectedSettings(resolved: ResolvedSettings, wanted: Settings | 
 		...resolved,
 		...Object.fromEntries(typed),
 		traces: resolved.traces,
-		input: resolved.input
+		input: { ...resolved.input, ...wanted.input }
 	};
 	if (wanted.startHz !== undefined && wanted.stopHz !== undefined) {
 		expected.centreHz = (wanted.startHz + wanted.stopHz) / 2;

@@ -10,6 +10,7 @@ import { readingKind, type ReadingContext } from '../readings/reading-kinds';
 import type { ReadingRow } from '../readings/reading-row';
 import { inDbm, type LevelScale } from '../levels/level-scale';
 import { AnswerSheet } from './answer-sheet.svelte';
+import { overloadRemedy, type Remedy } from './overload-remedy';
 import { Refusal, type BenchWire } from './bench-wire';
 import type { Markings } from '$lib/schemas/markings';
 import { MarkingsKeeper } from './markings-keeper.svelte';
@@ -271,12 +272,9 @@ export class Bench {
 		return this.axis.kind === 'time' ? formatTime(at) : formatFrequency(at);
 	}
 
-	/** The next attenuator step that takes 10 dB or more off; the last one if there is none. */
-	moreAttenuation(): Promise<void> {
-		const { attenuatorDb } = this.attempt.exercise.receiver;
-		const wanted = this.run.resolved.attenuationDb + 10;
-		const step = attenuatorDb.find((db) => db >= wanted) ?? Math.max(...attenuatorDb);
-		return this.sheet.setAll({ attenuationDb: step });
+	/** What takes 10 dB off an overloaded mixer: the attenuator, then pads; undefined when all are in. */
+	get overloadRemedy(): Remedy | undefined {
+		return overloadRemedy(this.run.resolved, this.attempt.exercise.receiver);
 	}
 
 	/** Takes a row's reading as evidence and rests an answer on it. @throws Refusal with the reason */

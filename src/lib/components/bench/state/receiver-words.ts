@@ -38,8 +38,9 @@ export function warningOf(flag: ReceiverFlag): Warning {
 			return {
 				kind: flag.kind,
 				cause: 'Input protection has opened',
-				consequence: 'too much power or DC at the connector. Add attenuation or a pad, then reset.',
-				brief: 'add attenuation or a pad, then reset.'
+				consequence:
+					'too much power, or DC, at the connector. Put a pad, a DC block or the matched load there, then reset.',
+				brief: 'put a pad, a DC block or the load at the input, then reset.'
 			};
 	}
 }

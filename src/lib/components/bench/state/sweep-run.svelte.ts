@@ -47,7 +47,7 @@ export class SweepRun {
 		this.#traces = traces;
 		this.settings = bench.settings;
 		this.resolved = bench.resolved;
-		this.flags = bench.flags;
+		this.flags = bench.protectionTripped ? withProtection(bench.flags) : bench.flags;
 		this.benchTimeUsedS = bench.benchTimeUsedS;
 		this.#clock = { clockS: bench.clockS, usedS: bench.benchTimeUsedS };
 		this.#nextRow = bench.resumeFrom;
@@ -229,9 +229,7 @@ export class SweepRun {
 		this.ended = { reason: end.reason, message: end.message };
 		this.running = false;
 		if (end.reason === 'closed') this.closed = true;
-		if (end.reason === 'input-protection' && !this.flags.some((flag) => flag.kind === 'input-protection')) {
-			this.flags = [...this.flags, { kind: 'input-protection' }];
-		}
+		if (end.reason === 'input-protection') this.flags = withProtection(this.flags);
 	}
 
 	#tellTime(clockS: number): void {
@@ -284,3 +282,7 @@ export class SweepRun {
 		);
 	}
 }
+
+/** The protection stays open until it is reset, whatever the set-up. */
+const withProtection = (flags: readonly ReceiverFlag[]): readonly ReceiverFlag[] =>
+	flags.some(({ kind }) => kind === 'input-protection') ? flags : [...flags, { kind: 'input-protection' }];

@@ -32,7 +32,7 @@ export interface OpenSweeps {
 	/** The first row to send. */
 	fromRow: number;
 	flags: ReceiverFlag[];
-	/** The input protection has just tripped: nothing may be swept. */
+	/** The input protection has tripped: nothing may be swept. */
 	tripped: boolean;
 	benchTimeS: number;
 }
@@ -40,7 +40,7 @@ export interface OpenSweeps {
 /**
  * Takes the receiver of an attempt: logs the set-up if it is a new one, marks what was drawn, and ends any other stream.
  * @throws DomainError `invalid` for settings that the receiver refuses or that would waste its time; `conflict` (with nextRow) for a `from` that can't
- *   be served, while the input protection waits for its reset, and once the attempt is closed
+ *   be served, for sweeping on while the input protection waits for its reset, and once the attempt is closed
  */
 export async function openSweeps(
 	actor: Actor,
@@ -53,9 +53,12 @@ export async function openSweeps(
 	// Before the row is locked: preparing takes its time, and a refusal must leave no trace.
 	const bench = preparedBench(source, request.settings);
 	const flags = bench.plan.flags.map(presentFlag);
-	const tripped = bench.plan.isProtected;
 	return inTransaction(async (transaction) => {
 		const attempt = await lockOpenAttempt(actor, attemptId, transaction);
+		// A receiver that waits for its reset is set up like any other; it only sweeps nothing.
+		const waits = attempt.protectionTripped && request.resetProtection !== true;
+		if (waits) await refuseSweeping(attempt, request, transaction);
+		const tripped = waits || bench.plan.isProtected;
 		refuseUnservable(attempt, request);
 		if (request.from > 0) await markDrawn(attempt, request.from - 1, transaction);
 		const setUp = await currentOrNewSetUp(
@@ -71,7 +74,7 @@ export async function openSweeps(
 			{
 				streamToken: token,
 				protectionTripped: tripped,
-				protectionTrips: attempt.protectionTrips + (tripped ? 1 : 0)
+				protectionTrips: attempt.protectionTrips + (tripped && !waits ? 1 : 0)
 			},
 			{ transaction }
 		);
@@ -90,13 +93,21 @@ export async function openSweeps(
 	});
 }
 
+/** With the same set-up as before the only wish can be to sweep. */
+async function refuseSweeping(
+	attempt: Attempt,
+	request: SweepsRequest,
+	transaction: Transaction
+): Promise<void> {
+	const current = await latestSetUp(attempt.id, transaction);
+	if (!current || !isDeepStrictEqual(current.settings, request.settings)) return;
+	throw new DomainError(
+		'conflict',
+		'The input protection has tripped. Put a pad, a DC block or the matched load at the input, then reset it.'
+	);
+}
+
 function refuseUnservable(attempt: Attempt, request: SweepsRequest): void {
-	if (attempt.protectionTripped && request.resetProtection !== true) {
-		throw new DomainError(
-			'conflict',
-			'The input protection has tripped. Add a pad or attenuation, then reset it.'
-		);
-	}
 	const { nextRow } = attempt;
 	if (request.from <= nextRow) return;
 	const message = `Row ${request.from} is yet to come: the next one is ${nextRow}.`;
