@@ -82,6 +82,11 @@ export const exerciseQuestion = z.strictObject({
 	quantity: quantityTemplate,
 	/** Asks for a part of the quantity in place of its value: the distance of a delta, one neighbour of several. */
 	part: partTemplate.optional(),
+	/**
+	 * Asks for a level or density without the noise it stands in: the receiver's own, and beside a line the scene's too.
+	 * An answer may then be a reading with that noise taken off as power.
+	 */
+	noiseTakenOff: z.boolean().default(false),
 	unit: z.enum(answerUnits),
 	/** Half width of what counts as right: in the question's unit, or as a share of the true value. */
 	tolerance: z.union(

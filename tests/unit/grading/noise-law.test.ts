@@ -35,6 +35,19 @@ describe('how noise is shown', () => {
 		expect(shownPower(setUp({ detector: 'negative-peak' }, 1))).toBeLessThan(0.5);
 	});
 
+	it.each([4, 16, 64])(
+		'held at the minimum over %d sweeps, falls as one over them, and no lower than a video filter fills it',
+		(sweeps) => {
+			const held = (vbwHz: number) =>
+				shownPower(
+					setUp({ detector: 'sample', scale: 'power', vbwHz, traces: [{ mode: 'min-hold' }] }, sweeps)
+				);
+			// The least of n standard exponentials has mean 1/n (Rényi 1953, from memory).
+			expect(held(300e3) * sweeps).toBeCloseTo(1, 1);
+			expect(held(900)).toBeGreaterThan(held(300e3));
+		}
+	);
+
 	it('averaged in decibels stands 10·γ/ln 10 = 2.507 dB low', () =>
 		expect(LOG_AVERAGE_DB).toBeCloseTo((10 * 0.5772156649) / Math.LN10, 4));
 

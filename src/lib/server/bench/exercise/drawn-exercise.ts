@@ -15,6 +15,8 @@ export interface DrawnQuestion {
 	quantity: Quantity;
 	/** The part of it that is asked; absent: its value. */
 	part?: Part;
+	/** Whether it is asked without the noise it stands in. */
+	noiseTakenOff: boolean;
 	unit: AnswerUnit;
 	digits: number;
 	/** True value at the reference plane, in `unit`. */

@@ -102,6 +102,7 @@ function fillQuestion(question: ExerciseQuestion, scene: Scene, scope: Scope, fi
 		text: fillText(question.text, scope, `${field}.text`),
 		quantity,
 		...(part !== undefined && { part }),
+		noiseTakenOff: question.noiseTakenOff,
 		unit,
 		digits: question.digits,
 		truth: value,

@@ -22,7 +22,7 @@ function changesOf(
 ): { watched?: Watched; change: number }[] {
 	const slips = matched.watched.flatMap((watched) =>
 		watched.mistake.stage === 'slip'
-			? [{ watched, change: -(watched.mistake.change(evidence, matched.setUp) ?? 0) }]
+			? [{ watched, change: -(watched.mistake.change(evidence, matched.setUp, matched.source) ?? 0) }]
 			: []
 	);
 	const rest = total - slips.reduce((sum, { change }) => sum + change, 0);

@@ -1,26 +1,15 @@
-import type { BenchRequest } from '$lib/schemas/reading';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import type { AttemptRecord, GivenAnswer, TakenReading } from '../exercise/attempt-record';
 import type { DrawnExercise, DrawnQuestion } from '../exercise/drawn-exercise';
 import { quantityFrequencyHz } from '../exercise/quantity-frequency';
+import { drawReceiverError } from '../receiver/receiver-error';
 import { resolveSettings } from '../receiver/resolve-settings';
 import { tableDb } from '../receiver/table-db';
 import { givenBy, isAbsoluteLevel } from './asked';
+import { familyOf, type Family } from './family';
 import type { SetUp } from './mistake';
-
-/** Readings by what they are of: one point, a band's power, a density; every other kind is a family of its own. */
-export type Family = 'point' | 'band' | 'density' | BenchRequest['kind'];
-const FAMILIES: Partial<Record<BenchRequest['kind'], Family>> = {
-	marker: 'point',
-	peak: 'point',
-	'next-peak': 'point',
-	minimum: 'point',
-	'band-power': 'band',
-	'channel-power': 'band',
-	'noise-density': 'density',
-	'power-density': 'density'
-};
-export const familyOf = (kind: BenchRequest['kind']): Family => FAMILIES[kind] ?? kind;
+import { noiseTakenOff } from './noise-in-reading';
+import { ownError } from './own-error';
 
 /** A reading with all that the grader asks of it. */
 export interface Source extends TakenReading {
@@ -32,6 +21,10 @@ export interface Source extends TakenReading {
 	appliedDb: number;
 	/** What it gives to the question, brought to the reference plane: lead and pad added, the correction already applied not counted twice. */
 	planeValue: number;
+	/** That with the noise taken off, where the question asks for it: what is right to report. NaN where nothing is left. */
+	cleanValue: number;
+	/** By how much this receiver's reference shows too high what stands at the frequency asked, Hz. */
+	shiftHz: number;
 }
 
 export interface Evidence {
@@ -71,15 +64,20 @@ function sourceOf(
 	const readAtHz = quantityFrequencyHz(taken.request) || question.frequencyHz;
 	const appliedDb = correctionAt(resolved.correctionDb, readAtHz);
 	const shift = isLevelGiven(taken, question) ? question.leadDb + resolved.input.padDb - appliedDb : 0;
-	const source: Source = {
+	const source = {
 		...taken,
 		family: familyOf(taken.request.kind),
 		entry,
 		setUp: { resolved, trace, sweeps: taken.rows.to - taken.rows.from + 1 },
 		appliedDb,
+		shiftHz: drawReceiverError(drawn.profile, drawn.seed).frequency * question.frequencyHz,
 		planeValue: givenBy(taken.reading, question) + shift
 	};
-	return [source];
+	const context = { drawn, question };
+	const cleanValue = question.noiseTakenOff
+		? noiseTakenOff(context, source, ownError(context))
+		: source.planeValue;
+	return [{ ...source, cleanValue }];
 }
 
 /** What there is to judge one question by, from what the log and the readings say. */

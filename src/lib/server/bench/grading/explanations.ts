@@ -25,7 +25,8 @@ export function fromSource(source: Source, watched: readonly Watched[], evidence
 	const byValue = new Map<string, Candidate>();
 	for (const shown of shownBy(source, watched, evidence)) {
 		if (shown.mistake.stage !== 'reading') continue;
-		const value = shown.mistake.fromReading?.(source, evidence) ?? source.planeValue;
+		const value = shown.mistake.fromReading?.(source, evidence) ?? source.cleanValue;
+		if (!Number.isFinite(value)) continue;
 		const known = byValue.get(value.toFixed(6));
 		if (known) known.watched.push(shown);
 		else {
@@ -56,12 +57,15 @@ function fromTheory(watched: readonly Watched[], evidence: Evidence): Candidate[
 function rightOnes(watched: readonly Watched[], evidence: Evidence): Candidate[] {
 	const spread = copyingSpread(evidence.question);
 	const right = evidence.pool.filter(
-		(source) => supports(source, evidence.question) && shownBy(source, watched, evidence).length === 0
+		(source) =>
+			Number.isFinite(source.cleanValue) &&
+			supports(source, evidence.question) &&
+			shownBy(source, watched, evidence).length === 0
 	);
 	if (right.length > 0) {
 		return right.map((source) => ({
 			watched: [],
-			value: source.planeValue,
+			value: source.cleanValue,
 			spread,
 			source,
 			setUp: source.setUp
@@ -76,10 +80,12 @@ function slipped(from: readonly Candidate[], watched: readonly Watched[], eviden
 	return from.flatMap((base) =>
 		watched.flatMap((slip): Candidate[] => {
 			if (slip.mistake.stage !== 'slip') return [];
-			const change = slip.mistake.change(evidence, base.setUp);
+			const { setUp, source } = base;
+			const change = slip.mistake.change(evidence, setUp, source);
 			if (change === null) return [];
 			const value = slip.mistake.given?.(base.value, evidence) ?? base.value + change;
-			return [{ ...base, watched: [...base.watched, slip], value }];
+			const unsure = source || !setUp ? 0 : (slip.mistake.spread?.(evidence, setUp) ?? 0);
+			return [{ ...base, watched: [...base.watched, slip], value, spread: Math.hypot(base.spread, unsure) }];
 		})
 	);
 }

@@ -26,7 +26,7 @@ export interface Judgement {
 }
 
 const gives = (source: Source, value: number, question: DrawnQuestion): boolean =>
-	Math.abs(source.planeValue - value) <= copyingReach(question);
+	[source.planeValue, source.cleanValue].some((given) => Math.abs(given - value) <= copyingReach(question));
 
 /** Judges one question. Pure: the same record always gets the same judgement. */
 export function judgeQuestion(

@@ -7,7 +7,8 @@ import type { ResolvedSettings } from '$lib/schemas/settings';
 import type { DrawnExercise, DrawnQuestion, FilledStep } from '../exercise/drawn-exercise';
 import { ExerciseError } from '../exercise/exercise-error';
 import { issuesOf } from '../exercise/zod-issues';
-import type { Family, Source } from './evidence';
+import type { Source } from './evidence';
+import type { Family } from './family';
 
 export interface Context {
 	drawn: DrawnExercise;
@@ -79,13 +80,18 @@ export interface ReadingMistake extends Words {
 export const isMadeWith = ({ families }: ReadingMistake, { family, request }: Source): boolean =>
 	families === 'all' || families.includes(family) || families.includes(request.kind);
 
-/** Made after a right reading, with correction or pencil: a fixed change of the number, in the question's unit. */
+/** Made after a right reading, with correction or pencil: a change of the number that follows from set-up and reading, in the question's unit. */
 export interface Slip extends Words {
 	stage: 'slip';
-	/** Null when it can't be made with that set-up: no pad, no pad left out. */
-	change(context: Context, setUp?: SetUp): number | null;
+	/**
+	 * Null when it can't be made with that set-up: no pad, no pad left out.
+	 * @param source the reading it was made with, where one was taken
+	 */
+	change(context: Context, setUp?: SetUp, source?: Source): number | null;
 	/** What is given for a right number, where that isn't the number and the change: half of it, twice it. */
 	given?(value: number, context: Context): number;
+	/** Standard deviation of that change, where theory gives it and no reading; absent: none worth counting. */
+	spread?(context: Context, setUp: SetUp): number;
 }
 
 export type Mistake = ReadingMistake | Slip;

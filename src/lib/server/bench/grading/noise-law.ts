@@ -45,6 +45,19 @@ function rowLaws(setUp: SetUp): Law[] {
 	}
 }
 
+/**
+ * The same where least counts. About a null the power is |z|² + |ż|²t², and a pole at V sees ⟨t²⟩ = 2/(2π·V)²: what is left of a trough
+ * is the sum of two exponentials, of mean 1 and of mean a = 2·(0.4247·B/V)², since ⟨|ż|²⟩ = (2π·0.4247·B)² for the Gaussian filter.
+ */
+function troughLaws(setUp: SetUp): Law[] {
+	const { detector, scale } = setUp.resolved;
+	const a = troughFill(setUp);
+	if (detector !== 'sample' || scale !== 'power' || a >= 1) return rowLaws(setUp);
+	return [(x) => 1 - (Math.exp(-x) - a * Math.exp(-x / a)) / (1 - a)];
+}
+
+const troughFill = ({ resolved: { rbwHz, vbwHz } }: SetUp): number => 2 * ((0.4247 * rbwHz) / vbwHz) ** 2;
+
 /** Cumulative law of the mean of `degrees` independent exponentials (Wilson & Hilferty, PNAS 17, 684, 1931). */
 function meanLaw(degrees: number): Law {
 	if (degrees === 1) return (x) => -Math.expm1(-x);
@@ -60,6 +73,18 @@ function meanOfGreatest(law: Law, count: number): number {
 	return sum * step;
 }
 
+/** Mean of the least of `count` draws: ∫(1 − F)ᶜ, on a scale that is fine where few are left. */
+function meanOfLeast(law: Law, count: number): number {
+	const steps = 2000;
+	const end = 30;
+	let sum = 0;
+	for (let i = 0; i < steps; i++) {
+		const [from, to] = [i, i + 1].map((n) => end * (n / steps) ** 3);
+		sum += (to - from) * (1 - law((from + to) / 2)) ** count;
+	}
+	return sum;
+}
+
 const laws = new Map<string, number>();
 function cached(key: string, make: () => number): number {
 	const known = laws.get(key);
@@ -71,11 +96,21 @@ function cached(key: string, make: () => number): number {
 
 /** Mean power that a set-up shows for noise of mean power 1: 1 unless it detects peaks or holds. */
 export function shownPower(setUp: SetUp): number {
-	const count = setUp.trace.mode === 'max-hold' ? Math.max(1, setUp.sweeps) : 1;
+	const held = setUp.trace.mode === 'max-hold' || setUp.trace.mode === 'min-hold';
+	const count = held ? Math.max(1, setUp.sweeps) : 1;
+	const meanOf = setUp.trace.mode === 'min-hold' ? meanOfLeast : meanOfGreatest;
 	const { detector } = setUp.resolved;
 	if (count === 1 && (detector === 'average' || detector === 'sample')) return 1;
-	return cached(`${detector} ${bucketOf(setUp).toPrecision(4)} ${count}`, () => {
-		const powers = rowLaws(setUp).map((law) => meanOfGreatest(law, count));
+	const key = [
+		detector,
+		bucketOf(setUp).toPrecision(4),
+		setUp.trace.mode,
+		count,
+		troughFill(setUp).toPrecision(4)
+	];
+	return cached(key.join(' '), () => {
+		const laws = setUp.trace.mode === 'min-hold' ? troughLaws(setUp) : rowLaws(setUp);
+		const powers = laws.map((law) => meanOf(law, count));
 		return powers.reduce((sum, power) => sum + power, 0) / powers.length;
 	});
 }

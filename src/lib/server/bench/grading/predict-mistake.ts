@@ -12,5 +12,7 @@ export function predictMistake({ mistake }: Watched, context: Context): Predicti
 	const setUp = setUpOf(drawn, mistake.make(drawn.method, context), question.id);
 	if (mistake.stage === 'reading') return mistake.predict(context, setUp);
 	const change = mistake.change(context, setUp);
-	return change === null ? null : { value: question.truth + change, spread: modelSpread(question) };
+	if (change === null) return null;
+	const spread = Math.hypot(modelSpread(question), mistake.spread?.(context, setUp) ?? 0);
+	return { value: question.truth + change, spread };
 }

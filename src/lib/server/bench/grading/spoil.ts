@@ -1,7 +1,7 @@
 /** Ways to put a mistake into a method: change what is set, what is read, or the sum. */
 import type { BenchRequest } from '$lib/schemas/reading';
 import type { Settings } from '$lib/schemas/settings';
-import type { FilledStep } from '../exercise/drawn-exercise';
+import type { DrawnQuestion, FilledStep } from '../exercise/drawn-exercise';
 import type { Scope } from '../exercise/expression';
 import { patchSettings } from '../exercise/patch-settings';
 
@@ -67,3 +67,19 @@ export const correctsOnBench = (steps: readonly FilledStep[]): boolean =>
 		(step) =>
 			step.do === 'set' && step.settings.correctionDb !== undefined && step.settings.correctionDb !== 0
 	);
+
+/** The method with every sweep made `count` times. */
+export const withSweeps = (steps: readonly FilledStep[], count: number): FilledStep[] =>
+	steps.map((step) => (step.do === 'sweep' ? { ...step, sweeps: count } : step));
+
+/** The method with the reading handed in for a question answered as it stands, lead counted, no other sum done. */
+export function withRawReading(
+	steps: readonly FilledStep[],
+	{ id, leadDb }: Pick<DrawnQuestion, 'id' | 'leadDb'>
+): FilledStep[] {
+	const { as } = readStepOf(steps, id);
+	const byHandDb = correctsOnBench(steps) ? 0 : leadDb;
+	return steps.map((step) =>
+		isAnswer(step, id) ? { ...step, value: (scope: Scope) => (scope[as] as number) + byHandDb } : step
+	);
+}

@@ -3,7 +3,8 @@ import type { BenchRequest } from '$lib/schemas/reading';
 import type { DrawnQuestion } from '../exercise/drawn-exercise';
 import { quantityFrequencyHz } from '../exercise/quantity-frequency';
 import { asksPlace } from './asked';
-import { familyOf, type Source } from './evidence';
+import type { Source } from './evidence';
+import { familyOf } from './family';
 import { takenAtHz } from './place';
 import { sameWidth, widthHzOf } from './read-width';
 
@@ -18,9 +19,9 @@ const near = (a: number | undefined, b: number | undefined, withinHz: number): b
 	a === undefined || b === undefined || Math.abs(a - b) <= withinHz;
 const fieldsOf = (asked: object): Fields => asked as Fields;
 
-/** A marker stands on the line; farther away it is on something else, or on nothing. Lines may move by the tolerance. */
+/** A marker stands on the line, where this receiver shows it; farther away it is on something else, or on nothing. Lines may move by the tolerance. */
 const onLine: Check = (source, { frequencyHz }) =>
-	frequencyHz === 0 || near(takenAtHz(source), frequencyHz, onLineHz(source));
+	frequencyHz === 0 || near(takenAtHz(source), frequencyHz + source.shiftHz, onLineHz(source));
 
 /** Three standard deviations of a count, or a point of a trace, within what is right. */
 const fineEnough: Check = (source, { tolerance }) =>
