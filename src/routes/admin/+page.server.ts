@@ -1,9 +1,13 @@
 import { requireUser } from '$lib/server/auth/require-actor';
 import { respond } from '$lib/server/respond';
-import { enterRoom } from '$lib/server/services/accounts/enter-room';
+import { getPeopleOverview } from '$lib/server/services/overviews/get-people-overview';
+import { getServerState } from '$lib/server/services/overviews/get-server-state';
 import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async (event) => {
 	const actor = requireUser(event);
-	await respond(() => enterRoom(actor, 'admin.enter'));
+	return respond(async () => ({
+		server: await getServerState(actor, new Date()),
+		...(await getPeopleOverview(actor))
+	}));
 };

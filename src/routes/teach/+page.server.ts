@@ -1,9 +1,9 @@
 import { requireUser } from '$lib/server/auth/require-actor';
 import { respond } from '$lib/server/respond';
-import { enterRoom } from '$lib/server/services/accounts/enter-room';
+import { getTeachOverview } from '$lib/server/services/overviews/get-teach-overview';
 import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async (event) => {
 	const actor = requireUser(event);
-	await respond(() => enterRoom(actor, 'teach.enter'));
+	return respond(() => getTeachOverview(actor, new Date()));
 };

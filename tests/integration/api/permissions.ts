@@ -1,0 +1,77 @@
+/** Who gets in where: house.md's table, door by door. */
+import { roles, type Role } from '$lib/server/domain/role';
+
+export interface Reach {
+	/** Of an attempt: who gets in where it is somebody else's. */
+	who: 'everybody' | readonly Role[];
+	/** What the path's id names. */
+	thing?: 'attempt';
+	/** Of an attempt: there is nothing for its owner before it has closed. */
+	absentWhileOpen?: boolean;
+	/** A body that is read without complaint, so that the refusal is one of the person. */
+	body?: unknown;
+	query?: string;
+}
+
+const everybody: Reach = { who: 'everybody' };
+const signedIn: Reach = { who: roles };
+const learners: Reach = { who: ['apprentice', 'instructor', 'administrator'] };
+/** Nobody but the owner, whatever their role. */
+const owner: Reach = { who: [], thing: 'attempt' };
+/** Also whoever may read everybody's attempts. */
+const readable: Reach = { who: ['administrator'], thing: 'attempt' };
+const settings = { centreHz: 450e6, spanHz: 1e6, rbwHz: 30e3, points: 101 };
+
+export const REACH: Record<string, Reach> = {
+	'layout /': everybody,
+	'load /': everybody,
+	'load /sign-in': everybody,
+	'action /sign-in?/default': everybody,
+	'POST /sign-out': everybody,
+	'POST /scheme': everybody,
+
+	'load /account': signedIn,
+	'action /account?/name': signedIn,
+	'action /account?/password': signedIn,
+	'action /account?/end': signedIn,
+	'action /account?/endOthers': signedIn,
+	'action /account?/endAll': signedIn,
+
+	'load /learn': learners,
+	'load /teach': { who: ['instructor', 'administrator'] },
+	'load /office': { who: ['coordinator', 'administrator'] },
+	'load /company': { who: ['company-contact', 'administrator'] },
+	'load /admin': { who: ['administrator'] },
+
+	'load /learn/exercises/[slug]': learners,
+	'action /learn/exercises/[slug]?/start': learners,
+	'load /learn/units/[slug]': learners,
+	'POST /api/attempts': { ...learners, body: { exercise: 'spread-carrier-1' } },
+	'GET /api/figures/[unitId]/[figureId]': learners,
+	'POST /api/figures/[unitId]/[figureId]': learners,
+	'GET /api/set-ups': learners,
+	'POST /api/set-ups': { ...learners, body: { name: 'narrow', settings } },
+	'DELETE /api/set-ups/[id]': learners,
+
+	'load /learn/attempts/[id]': readable,
+	'load /learn/attempts/[id]/finding': readable,
+	'GET /api/attempts/[id]': readable,
+	'GET /api/attempts/[id]/set-ups': readable,
+	'GET /api/attempts/[id]/rows': { ...readable, query: '?from=0&to=0' },
+	'GET /api/attempts/[id]/finding': readable,
+	'GET /api/attempts/[id]/done-right': readable,
+	'GET /api/attempts/[id]/done-right/rows': { ...readable, query: '?from=0&to=0' },
+	'POST /api/attempts/[id]/abandonment': owner,
+	'POST /api/attempts/[id]/acknowledgements': { ...owner, body: { row: 0 } },
+	'POST /api/attempts/[id]/answers': { ...owner, body: { answers: { power: { text: '-23', unit: 'dBm' } } } },
+	'PUT /api/attempts/[id]/drafts': {
+		...owner,
+		body: { answers: { power: { text: '-23', unit: 'dBm', readingId: null } } }
+	},
+	'POST /api/attempts/[id]/hints': owner,
+	'POST /api/attempts/[id]/readings': {
+		...owner,
+		body: { rows: { from: 0, to: 1 }, trace: 1, request: { kind: 'peak' } }
+	},
+	'POST /api/attempts/[id]/sweeps': { ...owner, body: { settings, from: 0, sweeps: 1 } }
+};
