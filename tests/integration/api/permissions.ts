@@ -8,6 +8,8 @@ export interface Reach {
 	thing?: 'attempt';
 	/** Of an attempt: there is nothing for its owner before it has closed. */
 	absentWhileOpen?: boolean;
+	/** The path names nothing that exists here: whoever may ask is told so. */
+	absent?: boolean;
 	/** A body that is read without complaint, so that the refusal is one of the person. */
 	body?: unknown;
 	query?: string;
@@ -45,13 +47,12 @@ export const REACH: Record<string, Reach> = {
 
 	'load /learn/exercises/[slug]': learners,
 	'action /learn/exercises/[slug]?/start': learners,
-	'load /learn/units/[slug]': learners,
+	'load /learn/units/[slug]': { ...learners, absent: true },
 	'POST /api/attempts': { ...learners, body: { exercise: 'spread-carrier-1' } },
-	'GET /api/figures/[unitId]/[figureId]': learners,
-	'POST /api/figures/[unitId]/[figureId]': learners,
+	'POST /api/figures/[unitId]/[figureId]': { ...learners, absent: true, body: { values: {} } },
 	'GET /api/set-ups': learners,
 	'POST /api/set-ups': { ...learners, body: { name: 'narrow', settings } },
-	'DELETE /api/set-ups/[id]': learners,
+	'DELETE /api/set-ups/[id]': { ...learners, absent: true },
 
 	'load /learn/attempts/[id]': readable,
 	'load /learn/attempts/[id]/finding': readable,
@@ -69,6 +70,10 @@ export const REACH: Record<string, Reach> = {
 		body: { answers: { power: { text: '-23', unit: 'dBm', readingId: null } } }
 	},
 	'POST /api/attempts/[id]/hints': owner,
+	'PUT /api/attempts/[id]/markings': {
+		...owner,
+		body: { markings: { markers: [], selected: null, readings: [], levelUnit: 'dBm', antenna: null } }
+	},
 	'POST /api/attempts/[id]/readings': {
 		...owner,
 		body: { rows: { from: 0, to: 1 }, trace: 1, request: { kind: 'peak' } }
