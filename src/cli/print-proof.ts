@@ -1,5 +1,6 @@
 import { brief } from '$lib/server/bench/proof/brief';
 import type { ProofRow, ProofTable } from '$lib/server/bench/proof/proof-table';
+import { printColumns } from './print-columns';
 
 const percent = (share: number): string => `${(100 * share).toFixed(1)} %`;
 const HEADS = ['question', 'done by', 'passes', 'named', 'mean error', 'bias', 'scatter', 'edge', ''];
@@ -19,17 +20,10 @@ const cells = (row: ProofRow): string[] => [
 /** A proof as a table of text: how often each way of doing it passes and is named, and what failed. */
 export function printProof(table: ProofTable): string {
 	const lines = [HEADS, ...table.rows.map(cells)];
-	const widths = HEADS.map((_, column) => Math.max(...lines.map((line) => line[column].length)));
-	const printed = lines.map((line) =>
-		line
-			.map((cell, column) => (column < 2 ? cell.padEnd(widths[column]) : cell.padStart(widths[column])))
-			.join('  ')
-			.trimEnd()
-	);
 	const last = table.fromSeed + table.seeds - 1;
 	return [
 		`${table.exercise}: seeds ${table.fromSeed} to ${last}, ${table.redraws} draws turned down`,
-		...printed,
+		...printColumns(lines, 2),
 		`mistakes four spreads apart on ${percent(table.apartShare)} of the seeds`,
 		...table.failures.map((failure) => `FAILS ${failure}`),
 		''

@@ -1,21 +1,24 @@
-/** The proof on the command line: progress on stderr, a table and one line that sums it up on stdout. */
-import { existsSync, readdirSync, readFileSync } from 'node:fs';
-import { basename, join } from 'node:path';
+/** The proof on the command line: progress on stderr, a table and one line that sums it up on stdout. All cores work at it. */
 import { parseArgs } from 'node:util';
 import { BenchError } from '$lib/server/bench/bench-error';
-import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
-import { proveExercise } from '$lib/server/bench/proof/prove-exercise';
+import { tableOf } from '$lib/server/bench/proof/prove-exercise';
 import type { ProofTable } from '$lib/server/bench/proof/proof-table';
+import type { SeedProof } from '$lib/server/bench/proof/prove-seed';
+import { askedExercises, wholeNumber, type AskedExercise } from './asked-exercises';
+import { runTasks, TaskFault } from './parallel/run-tasks';
+import type { ProofTask } from './parallel/task';
 import { printProof } from './print-proof';
+import { progressOf } from './progress';
 
-const CONTENT = 'content';
 const BAD_INPUT = 2;
 const DEFAULT_SEEDS = 200;
+/** Seeds that a worker does at a time. */
+const BATCH = 5;
 const USAGE =
 	'proof [EXERCISE] [--seeds N] [--from-seed K] [--json]   EXERCISE: a slug in content/ or a file';
 
 interface Asked {
-	files: string[];
+	exercises: AskedExercise[];
 	seeds: number;
 	fromSeed: number;
 	json: boolean;
@@ -26,84 +29,77 @@ interface Asked {
  * @returns the exit code: 0 when every exercise asked is proven, 1 when one is not, 2 for bad input
  */
 export async function proof(args: string[]): Promise<number> {
+	const startedAt = performance.now();
 	try {
-		const { files, seeds, fromSeed, json } = parse(args);
-		const tables: ProofTable[] = [];
-		for (const file of files) tables.push(proveFile(file, seeds, fromSeed));
-		if (json) process.stdout.write(`${JSON.stringify(tables)}\n`);
+		const asked = parse(args);
+		const tables = await prove(asked);
+		if (asked.json) process.stdout.write(`${JSON.stringify(tables)}\n`);
 		else process.stdout.write(tables.map(printProof).join('\n'));
-		process.stdout.write(json ? '' : summary(tables, seeds));
+		const tookS = (performance.now() - startedAt) / 1000;
+		process.stdout.write(asked.json ? '' : summary(tables, asked.seeds, tookS));
 		return tables.every(({ passed }) => passed) ? 0 : 1;
 	} catch (error) {
-		if (!(error instanceof BenchError)) throw error;
+		if (!(error instanceof BenchError || (error instanceof TaskFault && error.field !== undefined)))
+			throw error;
 		process.stderr.write(`${error.message.replace(/\s+/g, ' ')}\n`);
 		return BAD_INPUT;
 	}
 }
 
 function parse(args: string[]): Asked {
+	const { values, positionals } = read(args);
+	if (positionals.length > 1)
+		throw new BenchError('exercise', `exercise: name one, or none for all. ${USAGE}`);
+	return {
+		exercises: askedExercises(positionals.at(0)),
+		seeds: wholeNumber(values.seeds ?? String(DEFAULT_SEEDS), 'seeds', 1, 100_000),
+		fromSeed: wholeNumber(values['from-seed'] ?? '1', 'from-seed', 0, 2 ** 52),
+		json: values.json ?? false
+	};
+}
+
+function read(args: string[]) {
 	const options = {
 		seeds: { type: 'string' },
 		'from-seed': { type: 'string' },
 		json: { type: 'boolean' }
 	} as const;
-	const parsed = attempt(() => parseArgs({ args, options, allowPositionals: true }));
-	const { values, positionals } = parsed;
-	if (positionals.length > 1)
-		throw new BenchError('exercise', `exercise: name one, or none for all. ${USAGE}`);
-	return {
-		files: positionals.length === 1 ? [fileOf(positionals[0])] : exerciseFiles(),
-		seeds: integer(values.seeds ?? String(DEFAULT_SEEDS), 'seeds', 1, 100_000),
-		fromSeed: integer(values['from-seed'] ?? '1', 'from-seed', 0, 2 ** 52),
-		json: values.json ?? false
-	};
-}
-
-function attempt<T>(read: () => T): T {
 	try {
-		return read();
+		return parseArgs({ args, options, allowPositionals: true });
 	} catch (cause) {
 		throw new BenchError('arguments', `${(cause as Error).message} ${USAGE}`);
 	}
 }
 
-function integer(text: string, name: string, least: number, most: number): number {
-	const value = /^\d+$/.test(text) ? Number(text) : NaN;
-	if (value >= least && value <= most) return value;
-	throw new BenchError(name, `${name}: an integer from ${least} to ${most}; given ${text}`);
-}
-
-/** Every exercise under content/, in order. */
-const exerciseFiles = (): string[] =>
-	readdirSync(CONTENT, { recursive: true, encoding: 'utf8' })
-		.filter((path) => path.endsWith('.yaml') && basename(path) !== 'course.yaml')
-		.sort()
-		.map((path) => join(CONTENT, path));
-
-function fileOf(name: string): string {
-	const file = existsSync(name) ? name : exerciseFiles().find((path) => basename(path, '.yaml') === name);
-	if (file) return file;
-	const known = exerciseFiles().map((path) => basename(path, '.yaml'));
-	throw new BenchError(
-		'exercise',
-		`exercise: no file and no exercise is called ${name}; there are ${known.join(', ')}`
+async function prove({ exercises, seeds, fromSeed }: Asked): Promise<ProofTable[]> {
+	const tasks = exercises.flatMap(({ file }) =>
+		Array.from({ length: Math.ceil(seeds / BATCH) }, (_, i): ProofTask => {
+			const first = i * BATCH;
+			return { do: 'prove', file, fromSeed: fromSeed + first, seeds: Math.min(BATCH, seeds - first) };
+		})
 	);
+	const total = seeds * exercises.length;
+	const report = progressOf(
+		total,
+		exercises.length === 1 ? `seeds of ${exercises[0].exercise.slug}` : 'seeds'
+	);
+	const results: SeedProof[][] = [];
+	let done = 0;
+	await runTasks(tasks, (index, result) => {
+		results[index] = result;
+		done += result.length;
+		report(done);
+	});
+	return exercises.map(({ file, exercise }) => {
+		const own = results.filter((_, i) => tasks[i].file === file).flat();
+		return tableOf(exercise, fromSeed, own);
+	});
 }
 
-function proveFile(file: string, seeds: number, fromSeed: number): ProofTable {
-	const exercise = parseExerciseText(readFileSync(file, 'utf8'), file);
-	const startedAt = performance.now();
-	const shown = process.stderr.isTTY;
-	const onProgress = (done: number) => {
-		const text = `${exercise.slug}: ${done} of ${seeds} seeds, ${((performance.now() - startedAt) / 1000).toFixed(0)} s`;
-		if (shown) process.stderr.write(`\r${text}${done === seeds ? '\n' : ''}`);
-		else if (done % Math.ceil(seeds / 10) === 0 || done === seeds) process.stderr.write(`${text}\n`);
-	};
-	return proveExercise(exercise, { seeds, fromSeed, onProgress });
-}
-
-function summary(tables: ProofTable[], seeds: number): string {
+function summary(tables: ProofTable[], seeds: number, tookS: number): string {
 	const proven = tables.filter(({ passed }) => passed).length;
 	const noun = tables.length === 1 ? 'exercise' : 'exercises';
-	return `\n${proven} of ${tables.length} ${noun} proven over ${seeds} seeds\n`;
+	const failing = tables.filter(({ passed }) => !passed).map(({ exercise }) => exercise);
+	const not = failing.length > 0 ? `; not proven: ${failing.join(', ')}` : '';
+	return `\n${proven} of ${tables.length} ${noun} proven over ${seeds} seeds in ${tookS.toFixed(0)} s${not}\n`;
 }

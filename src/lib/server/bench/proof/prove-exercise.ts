@@ -15,19 +15,26 @@ export interface ProofOptions {
 	sweepWith?: SweepWith;
 }
 
-/**
- * Proves an exercise over many seeds: the taught method passes, each mistake made on the bench fails and is named.
- * Fails at the first seed that can't be drawn.
- * @throws BenchError when a seed can't be drawn
- */
-export function proveExercise(exercise: Exercise, options: ProofOptions): ProofTable {
+/** What each of `seeds` seeds from `fromSeed` says. @throws BenchError when one can't be drawn */
+export function proveSeeds(exercise: Exercise, options: ProofOptions): SeedProof[] {
 	const { seeds, fromSeed, onProgress, sweepWith = prepareSweep } = options;
-	const proofs: SeedProof[] = [];
-	for (let i = 0; i < seeds; i++) {
-		proofs.push(proveSeed(exercise, fromSeed + i, sweepWith));
+	return Array.from({ length: seeds }, (_, i) => {
+		const proof = proveSeed(exercise, fromSeed + i, sweepWith);
 		onProgress?.(i + 1);
-	}
+		return proof;
+	});
+}
+
+/** What proofs of seeds from `fromSeed` upwards, in order, say together. */
+export function tableOf(exercise: Exercise, fromSeed: number, proofs: readonly SeedProof[]): ProofTable {
 	const { questions } = drawExercise(exercise, fromSeed);
 	const tolerances = new Map(questions.map(({ id, tolerance }) => [id, tolerance]));
 	return proofTable(exercise.slug, fromSeed, proofs, tolerances);
 }
+
+/**
+ * Proves an exercise over many seeds: the taught method passes, each mistake made on the bench fails and is named.
+ * @throws BenchError when a seed can't be drawn
+ */
+export const proveExercise = (exercise: Exercise, options: ProofOptions): ProofTable =>
+	tableOf(exercise, options.fromSeed, proveSeeds(exercise, options));
