@@ -1,4 +1,5 @@
 /** Ways to put a mistake into a method: change what is set, what is read, or the sum. */
+import type { Part } from '$lib/schemas/part';
 import type { BenchRequest } from '$lib/schemas/reading';
 import type { Settings } from '$lib/schemas/settings';
 import type { DrawnQuestion, FilledStep } from '../exercise/drawn-exercise';
@@ -22,16 +23,19 @@ export function readStepOf(steps: readonly FilledStep[], questionId: string): Re
 	return steps.find((step) => step.do === 'read' && step.as === answer.reading) as ReadStep;
 }
 
-/** The method with another reading taken for a question; its answer is then that reading, `sum` applied. */
+/** The method with another reading taken for a question; its answer is then that reading (its `part`, where one is named), `sum` applied. */
 export function withReading(
 	steps: readonly FilledStep[],
 	questionId: string,
 	reading: BenchRequest,
-	sum: (value: number) => number = (value) => value
+	sum: (value: number) => number = (value) => value,
+	otherPart?: Part
 ): FilledStep[] {
 	const taken = readStepOf(steps, questionId);
 	return steps.map((step) => {
-		if (step === taken) return { ...taken, reading };
+		// Another kind of reading has other parts, or none.
+		const part = otherPart ?? (reading.kind === taken.reading.kind ? taken.part : undefined);
+		if (step === taken) return { ...taken, reading, part };
 		if (!isAnswer(step, questionId)) return step;
 		return { ...step, value: (scope: Scope) => sum(step.value(scope)) };
 	});

@@ -128,11 +128,15 @@ const CHECKS: Partial<Record<BenchRequest['kind'] | 'point' | 'band' | 'density'
 	intercept
 };
 
+const isWidth = (family: string): boolean => family === 'occupied-bandwidth' || family === 'x-db-bandwidth';
+
 /** Whether a reading is of what the question asks: the same quantity, at the same place, over the same width, as finely as asked. */
 export function supports(source: Source, question: DrawnQuestion): boolean {
 	const asked = familyOf(question.quantity.kind);
 	if (asked !== 'count' && asked !== 'point' && source.family !== asked) return false;
-	if (asksPlace(question)) return showsPlace(source, question);
+	// An edge of a bandwidth is a place that its own reading gives.
+	if (asksPlace(question) && (source.family !== asked || !isWidth(asked)))
+		return showsPlace(source, question);
 	if (source.family !== asked) return false;
 	return (CHECKS[asked] ?? onLine)(source, question);
 }

@@ -8,6 +8,7 @@ import { couplingWrongSign } from './coupling-wrong-sign';
 import { densityForPower } from './density-for-power';
 import { densityNotDivided } from './density-not-divided';
 import { densityOverChannel } from './density-over-channel';
+import { edgeFromWidth } from './edge-from-width';
 import { floorAsSignal } from './floor-as-signal';
 import { gainTakenOff } from './gain-taken-off';
 import { halfOrDouble } from './half-or-double';
@@ -15,13 +16,18 @@ import { leadAtOtherPoint } from './lead-at-other-point';
 import { leadLeftOut } from './lead-left-out';
 import { leadTwice } from './lead-twice';
 import { leadWrongSign } from './lead-wrong-sign';
+import { levelForRatio } from './level-for-ratio';
 import { logAverage } from './log-average';
 import { logDensity } from './log-density';
 import { markerAsPower } from './marker-as-power';
 import { markerNotDivided } from './marker-not-divided';
 import { markerOverResolution } from './marker-over-resolution';
+import { markersForBands } from './markers-for-bands';
+import { neighbourWidth } from './neighbour-width';
 import { noiseNotTakenOff } from './noise-not-taken-off';
 import { overloaded } from './overloaded';
+import { ownNoise } from './own-noise';
+import { ownProducts } from './own-products';
 import { padLeftOut } from './pad-left-out';
 import { padTwice } from './pad-twice';
 import { pathLeftOut } from './path-left-out';
@@ -30,7 +36,12 @@ import { periodForOnTime } from './period-for-on-time';
 import { silenceForOnTime } from './silence-for-on-time';
 import { troughOnNoise } from './trough-on-noise';
 import { unitMixed } from './unit-mixed';
+import { wideResolution } from './wide-resolution';
+import { widthAtLevel } from './width-at-level';
+import { widthOfShare } from './width-of-share';
+import { windowTooWide } from './window-too-wide';
 import { wrongNeighbour } from './wrong-neighbour';
+import { wrongOffset } from './wrong-offset';
 import { wrongWidth } from './wrong-width';
 
 export const mistakeKinds: readonly MistakeKind[] = [
@@ -42,6 +53,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	densityForPower,
 	densityNotDivided,
 	densityOverChannel,
+	edgeFromWidth,
 	floorAsSignal,
 	gainTakenOff,
 	halfOrDouble,
@@ -49,13 +61,18 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	leadLeftOut,
 	leadTwice,
 	leadWrongSign,
+	levelForRatio,
 	logAverage,
 	logDensity,
 	markerAsPower,
 	markerNotDivided,
 	markerOverResolution,
+	markersForBands,
+	neighbourWidth,
 	noiseNotTakenOff,
 	overloaded,
+	ownNoise,
+	ownProducts,
 	padLeftOut,
 	padTwice,
 	pathLeftOut,
@@ -64,6 +81,11 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	silenceForOnTime,
 	troughOnNoise,
 	unitMixed,
+	wideResolution,
+	widthAtLevel,
+	widthOfShare,
+	windowTooWide,
 	wrongNeighbour,
+	wrongOffset,
 	wrongWidth
 ];
