@@ -4,7 +4,7 @@ import type { Context, SetUp } from './mistake';
 import { shownReading } from './shown-reading';
 
 /** So little noise that nothing shows of it. */
-const SILENT = [{ frequencyHz: 1e9, db: -200 }];
+const SILENT = [{ frequencyHz: 1e9, db: -100 }];
 
 export interface OwnShare {
 	/** What the reading shows over what it would show if the mixer were straight, in the question's unit. */

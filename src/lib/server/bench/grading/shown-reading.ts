@@ -33,8 +33,8 @@ export function shownPrediction(context: Context, setUp: SetUp, request: Reading
 	return { value, spread: Math.hypot(modelSpread(context.question), noiseSpread(trace, setUp, settled)) };
 }
 
-/** Standard deviations that the highest of some tens of noisy points stands over their mean. */
-const HIGHEST = 2;
+/** Standard deviations that the highest of some tens of noisy points stands over their mean, less what their noise widens. */
+const HIGHEST = 1.2;
 
 /** An x dB width counts from the highest point, and of noisy points the highest stands over their mean. */
 function settledRequest(setUp: SetUp, request: ReadingRequest): ReadingRequest {

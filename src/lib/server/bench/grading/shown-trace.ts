@@ -9,6 +9,7 @@ import { lossDbAt } from '../exercise/loss-db-at';
 import { prepareIncident } from '../receiver/front-end/prepare-incident';
 import type { Incident } from '../receiver/incident';
 import { gaussianConstant } from '../receiver/resolution-filter';
+import { normalIntegral } from '../signal/normal-integral';
 
 type Drawn = Pick<DrawnExercise, 'scene' | 'seed'>;
 
@@ -20,7 +21,17 @@ const drawnTraces = new WeakMap<Scene, Map<string, Trace>>();
  */
 export function shownTrace(drawn: Drawn, profile: ReceiverProfile, resolved: ResolvedSettings): Trace {
 	const { startHz, stopHz, points, rbwHz, attenuationDb, preamp, input } = resolved;
-	const seen = [profile.name, profile.toiDbm, startHz, stopHz, points, rbwHz, attenuationDb, preamp, input];
+	const seen = [
+		profile.name,
+		startHz,
+		stopHz,
+		points,
+		rbwHz,
+		attenuationDb,
+		preamp,
+		input,
+		resolved.detector
+	];
 	const key = JSON.stringify(seen);
 	const traces = drawnTraces.get(drawn.scene) ?? new Map<string, Trace>();
 	drawnTraces.set(drawn.scene, traces);
@@ -37,7 +48,7 @@ function makeTrace({ scene, seed }: Drawn, profile: ReceiverProfile, resolved: R
 	const levelsDbm = Float64Array.from({ length: points }, (_, i) => {
 		const frequencyHz = startHz + i * stepHz;
 		const backDb = input.padDb + (scene.path ? lossDbAt(scene.path, frequencyHz) : 0);
-		return milliwattsToDbm(power(frequencyHz) + linesMw(wide, frequencyHz, rbwHz)) + backDb;
+		return milliwattsToDbm(power(frequencyHz) + linesMw(wide, frequencyHz, resolved, stepHz)) + backDb;
 	});
 	return {
 		startHz,
@@ -52,11 +63,22 @@ function makeTrace({ scene, seed }: Drawn, profile: ReceiverProfile, resolved: R
 	};
 }
 
-function linesMw({ lines }: Incident, frequencyHz: number, rbwHz: number): number {
-	const exponent = -2 * gaussianConstant(rbwHz);
+/** Lines through the filter, mW; a mean over the point's bucket where the detector averages. */
+function linesMw(
+	{ lines }: Incident,
+	frequencyHz: number,
+	{ rbwHz, detector }: ResolvedSettings,
+	stepHz: number
+): number {
+	const sigmaHz = 1 / (2 * Math.sqrt(gaussianConstant(rbwHz)));
+	const share = (offsetHz: number): number => {
+		if (detector !== 'average') return Math.exp(-0.5 * (offsetHz / sigmaHz) ** 2);
+		const [low, high] = [-0.5, 0.5].map((half) => (offsetHz + half * stepHz) / sigmaHz);
+		const bellHz = Math.sqrt(2 * Math.PI) * sigmaHz;
+		return (bellHz / stepHz) * (normalIntegral(high) - normalIntegral(low));
+	};
 	return lines.reduce(
-		(sum, line) =>
-			sum + (line.re ** 2 + line.im ** 2) * Math.exp(exponent * (frequencyHz - line.frequencyHz) ** 2),
+		(sum, line) => sum + (line.re ** 2 + line.im ** 2) * share(Math.abs(frequencyHz - line.frequencyHz)),
 		0
 	);
 }

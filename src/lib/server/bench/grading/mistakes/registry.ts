@@ -25,6 +25,7 @@ import { markerOverResolution } from './marker-over-resolution';
 import { markersForBands } from './markers-for-bands';
 import { neighbourWidth } from './neighbour-width';
 import { noiseNotTakenOff } from './noise-not-taken-off';
+import { otherSideRead } from './other-side';
 import { overloaded } from './overloaded';
 import { ownNoise } from './own-noise';
 import { ownProducts } from './own-products';
@@ -70,6 +71,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	markersForBands,
 	neighbourWidth,
 	noiseNotTakenOff,
+	otherSideRead,
 	overloaded,
 	ownNoise,
 	ownProducts,

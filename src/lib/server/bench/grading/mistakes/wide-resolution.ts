@@ -1,23 +1,24 @@
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
-import type { ReadingRequest } from '$lib/measure/reading-request';
 import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import { figure } from '$lib/server/bench/exercise/figure';
-import { defineMistake, type Context } from '../mistake';
+import { askedReading } from '../asked-reading';
+import { defineMistake } from '../mistake';
 import { shownPrediction } from '../shown-reading';
-import { readStepOf, withSettings } from '../spoil';
+import { withSettings } from '../spoil';
 import { widthText } from '../width-words';
 
 /** From this share of the width upwards the filter is to blame; common practice stays below 3 %. */
 const LARGEST_SHARE = 0.05;
+
+/** Through a filter that follows its symbols a signal strays more than noise would. */
+const SYMBOLS = 2;
 
 const widthHzOf = ({ quantity, truth }: DrawnQuestion): number =>
 	// An edge is a place, not a width: the window it lies in says how wide things are.
 	quantity.kind === 'occupied-bandwidth' && truth > (quantity.widthHz ?? Infinity)
 		? quantity.widthHz! / 2
 		: truth;
-const requestOf = ({ drawn, question }: Context): ReadingRequest =>
-	readStepOf(drawn.method, question.id).reading as ReadingRequest;
 
 /** A width read through a filter that is wide against it: the filter smears power across the edges. */
 export const wideResolution = defineMistake(
@@ -31,10 +32,11 @@ export const wideResolution = defineMistake(
 		shows: ({ setUp, request }, context) =>
 			setUp.resolved.rbwHz > LARGEST_SHARE * widthHzOf(context.question) &&
 			request.kind === context.question.quantity.kind,
-		predict: (context, setUp) =>
-			setUp.resolved.rbwHz > LARGEST_SHARE * widthHzOf(context.question)
-				? shownPrediction(context, setUp, requestOf(context))
-				: null,
+		predict(context, setUp) {
+			if (setUp.resolved.rbwHz <= LARGEST_SHARE * widthHzOf(context.question)) return null;
+			const shown = shownPrediction(context, setUp, askedReading(context));
+			return shown && { ...shown, spread: SYMBOLS * shown.spread };
+		},
 		explain({ setUp, question, change }) {
 			const used = setUp?.resolved.rbwHz ?? rbwHz;
 			const widthHz = widthHzOf(question);
@@ -46,6 +48,6 @@ export const wideResolution = defineMistake(
 				bad: { at: 'set-up', text: `Here: resolution ${formatFrequency(used)}; take 1 to 3 % of the width` }
 			};
 		},
-		make: (steps) => withSettings(steps, { rbwHz, vbwHz: 'auto' })
+		make: (steps) => withSettings(steps, { rbwHz, vbwHz: 'auto', sweepTimeS: 'auto' })
 	})
 );

@@ -1,7 +1,9 @@
 import { z } from 'zod';
 import type { ReadingRequest } from '$lib/measure/reading-request';
 import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
+import { askedReading } from '../asked-reading';
 import { defineMistake, type Context, type SetUp } from '../mistake';
+import { setUpOf } from '../set-up-of';
 import { shownPrediction, shownReading } from '../shown-reading';
 import { withReading, withSettings } from '../spoil';
 import { wideText, widthText } from '../width-words';
@@ -21,9 +23,10 @@ const seenHz = ({ resolved }: SetUp, request: ReadingRequest): number =>
 
 /** Whether something beside the signal moves a width read over so much by more than half of what is right. */
 function takesInMore(context: Context, setUp: SetUp, request: ReadingRequest): boolean {
-	const { quantity, tolerance, truth } = context.question;
-	const window = quantity.kind === 'occupied-bandwidth' ? quantity.widthHz : undefined;
-	if (seenHz(setUp, request) < 1.1 * (window ?? 0)) return false;
+	const { drawn, question } = context;
+	const { tolerance, truth } = question;
+	const taughtHz = seenHz(setUpOf(drawn, drawn.method, question.id), askedReading(context));
+	if (seenHz(setUp, request) < 1.1 * taughtHz) return false;
 	const value = shownReading(context, setUp, request);
 	return value !== null && value - truth > tolerance / 2;
 }
