@@ -19,7 +19,7 @@ export interface ReadingContext {
 	otherMarkerHz?: number;
 }
 
-export const readingGroups = ['Level', 'Power', 'Width', 'Carrier', 'Distortion', 'Limits', 'Time'] as const;
+export const readingGroups = ['Power', 'Width', 'Carrier', 'Distortion', 'Limits', 'Time'] as const;
 export type ReadingGroup = (typeof readingGroups)[number];
 
 export interface ReadingKind {

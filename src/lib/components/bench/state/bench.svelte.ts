@@ -1,12 +1,12 @@
 /** Everything behind one bench page, tied together. */
 import { formatFrequency, formatTime } from '$lib/units/format-quantity';
 import type { AttemptView } from '$lib/schemas/attempt';
-import type { BenchRequest, CountRequest } from '$lib/schemas/reading';
+import type { BenchRequest } from '$lib/schemas/reading';
 import type { LoggedSetUp } from '$lib/schemas/set-up-log';
 import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 import { Playback } from '../over-time/playback.svelte';
 import type { View } from '../over-time/ViewSwitch.svelte';
-import { readingKind, type ReadingContext } from '../readings/reading-kinds';
+import type { ReadingContext } from '../readings/reading-kinds';
 import type { ReadingRow } from '../readings/reading-row';
 import { inDbm, type LevelScale } from '../levels/level-scale';
 import { AnswerSheet } from './answer-sheet.svelte';
@@ -14,10 +14,11 @@ import { overloadRemedy, type Remedy } from './overload-remedy';
 import { Refusal, type BenchWire } from './bench-wire';
 import type { Markings } from '$lib/schemas/markings';
 import { MarkingsKeeper } from './markings-keeper.svelte';
-import { MarkerList, type Marker } from './marker-list.svelte';
+import { MarkerList } from './marker-list.svelte';
 import { addMarker, followPeak, keepFollowing, spokenMarker, toPeak, type PeakStep } from './move-markers';
 import { ReadingList } from './reading-list.svelte';
 import { refusedSetUp, SetupSheet } from './setup-sheet.svelte';
+import { readingContext, startReading } from './start-reading';
 import { SweepRun } from './sweep-run.svelte';
 import { TraceSet, type KeptRow } from './trace-set.svelte';
 
@@ -47,6 +48,8 @@ export class Bench {
 	hints = $state.raw<readonly string[]>([]);
 	/** The unit that levels are shown in. */
 	levels = $state.raw<LevelScale>(inDbm);
+	/** A run takes its sweeps once and stops. */
+	once = $state(false);
 	/** What was just done on the person's behalf, in words. */
 	notice = $state<string | undefined>();
 	/** What the live region says; `count` makes the same words count as said again. */
@@ -157,46 +160,16 @@ export class Bench {
 
 	/** What a reading's form starts from. */
 	get readingContext(): ReadingContext {
-		const { selected, list } = this.markers;
-		const other = list.find((marker) => marker.letter !== selected?.letter);
-		const { resolved } = this.run;
-		// In span 0 a marker stands in time, and what is read is at the centre.
-		const hz = (marker: Marker | undefined) => (resolved.spanHz > 0 ? marker?.at : undefined);
-		return {
-			resolved,
-			limits: this.attempt.exercise.mask?.limits,
-			markerHz: hz(selected),
-			otherMarkerHz: hz(other)
-		};
+		return readingContext(this);
 	}
 
-	/**
-	 * Starts a reading. A reading of power puts detector and averages on power first, where the log shows it; a count is
-	 * taken at once.
-	 */
-	async startReading(request: BenchRequest, values: Record<string, number>): Promise<void> {
-		if (request.kind === 'count') return this.#count(request);
-		this.readings.follow(request, values);
-		const { detector, scale } = this.run.resolved;
-		if (!readingKind(request.kind)?.power || (detector === 'average' && scale === 'power')) return;
-		await this.sheet.setAll({ detector: 'average', scale: 'power' });
-		this.notice = 'Detector set to average and averages to power: a power reading adds power.';
+	startReading(request: BenchRequest, values: Record<string, number>): Promise<void> {
+		return startReading(this, request, values);
 	}
 
 	/** Puts other values into a reading that follows the traces. */
 	changeReading(id: number, request: BenchRequest, values: Record<string, number>): void {
 		if (request.kind !== 'count') this.readings.change(id, request, values);
-	}
-
-	async #count(request: CountRequest): Promise<void> {
-		const at = this.markers.list.find((one) => one.at === request.atHz);
-		this.notice = `Counting for ${formatTime(request.gateS)} …`;
-		try {
-			await this.readings.count(request, at?.letter);
-			this.notice = undefined;
-		} catch {
-			this.notice = 'The server could not be reached; nothing was counted.';
-		}
 	}
 
 	readonly mostFetched = mostFetched;
@@ -249,11 +222,20 @@ export class Bench {
 		else void this.start();
 	}
 
+	/** How many sweeps a run takes: no end, or once the sweeps of the longest average. */
+	get #sweeps(): number | undefined {
+		if (!this.once) return undefined;
+		return Math.max(
+			1,
+			...this.run.resolved.traces.map(({ mode, count }) => (mode === 'average' ? count : 1))
+		);
+	}
+
 	/** Sweeps on, with the input protection reset if asked; a refusal is told at the field it belongs to. */
 	async start(resetProtection?: boolean): Promise<void> {
 		this.playback.close();
 		try {
-			await this.run.start(undefined, resetProtection);
+			await this.run.start(this.#sweeps, resetProtection);
 		} catch (error) {
 			this.run.stop();
 			if (!(error instanceof Refusal)) throw error;

@@ -35,6 +35,8 @@ export class SweepRun {
 	readonly #traces: TraceSet;
 	#stream: AbortController | undefined;
 	#nextRow: number;
+	/** Sweeps of the run under way; without end when undefined. */
+	#wanted: number | undefined;
 	#drawnTo: number | undefined;
 	#acknowledgedTo: number | undefined;
 	#acknowledgedAtMs = 0;
@@ -67,7 +69,8 @@ export class SweepRun {
 
 	/** Sweeps on with the set-up in force, `sweeps` times or until stopped. */
 	start(sweeps?: number, resetProtection?: boolean): Promise<void> {
-		this.running = sweeps === undefined;
+		this.running = true;
+		this.#wanted = sweeps;
 		return this.#ask(this.settings, sweeps, resetProtection);
 	}
 
@@ -88,10 +91,10 @@ export class SweepRun {
 		const wasRunning = this.running;
 		this.settling = true;
 		try {
-			await this.#ask(settings, wasRunning ? undefined : 1);
+			await this.#ask(settings, wasRunning ? this.#wanted : 1);
 		} catch (error) {
 			this.settings = before;
-			if (wasRunning && error instanceof Refusal && error.status === 422) void this.start();
+			if (wasRunning && error instanceof Refusal && error.status === 422) void this.start(this.#wanted);
 			throw error;
 		} finally {
 			this.settling = false;
@@ -134,7 +137,7 @@ export class SweepRun {
 			this.benchTimeUsedS = bench.benchTimeUsedS;
 			return done;
 		} finally {
-			if (wasRunning) void this.start();
+			if (wasRunning) void this.start(this.#wanted);
 		}
 	}
 
