@@ -1,0 +1,64 @@
+import { describe, expect, it } from 'vitest';
+import { lessonView } from '$lib/schemas/lesson-view';
+import { Unit } from '$lib/server/db/models/unit';
+import { getLesson } from '$lib/server/services/courses/get-lesson';
+import { startAttempt } from '$lib/server/services/attempts/start-attempt';
+import { createCourse, createEdition } from '../../factories/course';
+import { createUser } from '../../factories/user';
+
+const now = new Date('2026-03-02T10:00:00Z');
+let made = 0;
+
+/** A course whose only unit has a name that nobody else's has. */
+async function course() {
+	const { course, exercise } = await createCourse();
+	const slug = `unit-under-test-${(made += 1)}`;
+	await Unit.update({ slug }, { where: { id: exercise.unitId } });
+	return { course, exercise, slug };
+}
+
+describe('getLesson(actor, slug)', () => {
+	it('shows the lesson with its figures drawn, the exercises with their standing, and nothing of any scene', async () => {
+		const { actor } = await createUser('apprentice');
+		const { exercise, slug } = await course();
+		await startAttempt(actor, exercise.slug, now);
+		const lesson = await getLesson(actor, slug);
+		expect(lessonView.parse(lesson)).toEqual(lesson);
+		expect(lesson).toMatchObject({ title: 'Why a marker misleads', before: null, after: null });
+		expect(lesson.exercises).toMatchObject([{ slug: exercise.slug, standing: 'open' }]);
+		expect(lesson.parts.map(({ kind }) => kind)).toEqual(['text', 'figure']);
+		const [, part] = lesson.parts;
+		if (part.kind !== 'figure') throw new Error('no figure');
+		expect(part.figure.start.traces[0].levelsDbm).toHaveLength(201);
+		expect(JSON.stringify(lesson)).not.toMatch(/emitters|symbolRateHz|seed|truth|mistake/);
+	});
+
+	it('names the units around it', async () => {
+		const { actor } = await createUser('apprentice');
+		const { exercise, slug } = await course();
+		const unit = await Unit.findByPk(exercise.unitId);
+		if (!unit) throw new Error('no unit');
+		for (const number of [5, 7, 8])
+			await Unit.create({
+				...unit.get(),
+				id: undefined,
+				number,
+				slug: `${slug}-${number}`,
+				title: `T${number}`
+			});
+		expect(await getLesson(actor, slug)).toMatchObject({
+			before: { number: 5, title: 'T5' },
+			after: { number: 7, title: 'T7' }
+		});
+	});
+
+	it('is open to instructors, closed to those who learn nothing here, and knows no unit that is gone', async () => {
+		const as = async (role: Parameters<typeof createUser>[0]) => (await createUser(role)).actor;
+		const { course: parent, slug } = await course();
+		expect((await getLesson(await as('instructor'), slug)).unit.slug).toBe(slug);
+		await expect(getLesson(await as('coordinator'), slug)).rejects.toMatchObject({ code: 'forbidden' });
+		await expect(getLesson(await as('apprentice'), 'nothing')).rejects.toMatchObject({ code: 'not_found' });
+		await createEdition(parent, 2, { slug: `later-${slug}` });
+		await expect(getLesson(await as('apprentice'), slug)).rejects.toMatchObject({ code: 'not_found' });
+	});
+});
