@@ -15,9 +15,13 @@ const MANY = 800;
 const PER_ENVELOPE = 12;
 const BLOCK = 4;
 const REACH_RBW = 2.5;
+/** Stands for nothing at all, mW. */
+const LEAST_MW = 1e-30;
 
 /** Powers seen at one tuned offset, mW: at instants, and the extremes of blocks (rising). */
 interface Seen {
+	/** Of all instants, dB over 1 mW. */
+	meanDb: number;
 	instants: Float64Array;
 	greatest: Float64Array;
 	least: Float64Array;
@@ -78,7 +82,13 @@ export class EnvelopePool {
 		);
 		const extremes = (pick: (a: number, b: number) => number) =>
 			Float64Array.from(blocks, (block) => block.reduce((a, b) => pick(a, b))).sort();
-		return { instants, greatest: extremes(Math.max), least: extremes(Math.min) };
+		const meanMw = instants.reduce((sum, power) => sum + power, 0) / total;
+		return {
+			meanDb: 10 * Math.log10(Math.max(LEAST_MW, meanMw)),
+			instants,
+			greatest: extremes(Math.max),
+			least: extremes(Math.min)
+		};
 	}
 
 	start(clockS: number): void {
@@ -97,39 +107,55 @@ export class EnvelopePool {
 
 	/** Power at a random instant near t seconds into the row; 0 while it is off or out of reach. */
 	power(t: number, random: Random): number {
-		const instants = this.seenAt(t)?.instants;
-		return instants ? instants[Math.floor(random.uniform() * instants.length)] : 0;
+		const place = this.placeAt(t);
+		if (!place) return 0;
+		const { instants } = place.seen;
+		return place.gain * instants[Math.floor(random.uniform() * instants.length)];
 	}
 
 	/** The power it shows as often above as below, for places where an extreme must not be drawn twice. */
 	typical(t: number): number {
-		const seen = this.seenAt(t);
-		return seen
-			? Math.sqrt(
-					seen.greatest[seen.greatest.length >> 1] * Math.max(1e-30, seen.least[seen.least.length >> 1])
-				)
-			: 0;
+		const place = this.placeAt(t);
+		if (!place) return 0;
+		const { greatest, least } = place.seen;
+		return (
+			place.gain * Math.sqrt(greatest[greatest.length >> 1] * Math.max(LEAST_MW, least[least.length >> 1]))
+		);
 	}
 
 	/** Greatest (or least) power over a stretch of lengthS about t: of as many blocks as it holds. */
 	extreme(t: number, lengthS: number, greatest: boolean, random: Random): number {
-		const seen = this.seenAt(t);
-		if (!seen) return 0;
+		const place = this.placeAt(t);
+		if (!place) return 0;
 		const share = random.open() ** (1 / Math.max(1, (lengthS * this.ratePerS) / BLOCK));
-		const list = greatest ? seen.greatest : seen.least;
+		const list = greatest ? place.seen.greatest : place.seen.least;
 		const index = Math.floor((greatest ? share : 1 - share) * list.length);
-		return list[Math.min(list.length - 1, index)];
+		return place.gain * list[Math.min(list.length - 1, index)];
 	}
 
-	private seenAt(t: number): Seen | undefined {
-		const { envelope, frame } = this;
+	/** Where the filter is tuned t seconds into the row: the nearest place followed, and the gain from there to here. */
+	private placeAt(t: number): { seen: Seen; gain: number } | undefined {
+		const { envelope, frame, seen } = this;
 		const at = this.clockS + t;
 		const on = this.schedule ? this.stretches.find((s) => at >= s.startS && at < s.stopS) : undefined;
 		if (this.schedule && !on) return undefined;
 		const drift = (envelope.timing?.driftHzPerS ?? 0) * at;
 		const offset = frame.startHz + frame.sweepHzPerS * t - (on?.channelHz ?? envelope.frequencyHz) - drift;
-		if (this.stepHz === Infinity) return this.seen[0];
-		const place = Math.round((offset - this.firstHz) / this.stepHz);
-		return place >= 0 && place < this.seen.length ? this.seen[place] : undefined;
+		if (this.stepHz === Infinity) return { seen: seen[0], gain: 1 };
+		const position = (offset - this.firstHz) / this.stepHz;
+		const place = Math.round(position);
+		if (place < 0 || place >= seen.length) return undefined;
+		return { seen: seen[place], gain: 10 ** (this.differenceDb(place, position - place) / 10) };
+	}
+
+	/** How the mean power changes from a place to `by` steps beside it, dB: a parabola through three places, which a Gaussian skirt is. */
+	private differenceDb(place: number, by: number): number {
+		const { seen } = this;
+		const middle = Math.min(seen.length - 2, Math.max(1, place));
+		const [below, here, above] = [-1, 0, 1].map((step) => seen[middle + step].meanDb);
+		const slope = (above - below) / 2;
+		const bend = (above - 2 * here + below) / 2;
+		const at = (x: number): number => slope * x + bend * x * x;
+		return at(place - middle + by) - at(place - middle);
 	}
 }

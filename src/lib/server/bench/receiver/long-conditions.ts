@@ -251,7 +251,18 @@ export class LongBucketConditions {
 		const half = EDGE_RBW / this.frame.rbwHz;
 		const startS = t - Math.min(runInS + half, this.sampler.longestS);
 		const bursts = touching(this.timed.bursts, this.instantCursor, startS - half, t + half);
-		return this.sampler.last(t - startS, this.noise.at(t), this.local(bursts, startS, t), random);
+		const seen = this.local(bursts, startS, t);
+		if (this.modulated.within(startS, t)) seen.push(this.standing(t, random));
+		return this.sampler.last(t - startS, this.noise.at(t), seen, random);
+	}
+
+	/** What modulated signals show t seconds into the sweep, as a line that stands in the filter while the video settles. */
+	private standing(t: number, random: Random): WindowBurst {
+		const { out } = this;
+		out.fill(0);
+		this.modulated.addAt(t, out, random);
+		const line = { re: out[0], im: out[1], offsetHz: 0, passingHzPerS: 0 };
+		return { line, startS: -Infinity, stopS: Infinity };
 	}
 
 	/** Conditions at the edge before bucket b. */

@@ -23,6 +23,8 @@ const FAINT = 1e-9;
 const STAND_INS = 16;
 /** Share of the power on either side that such a spectrum's width leaves out. */
 const OUTSIDE = 0.005;
+/** Beyond that width the skirt sets in, in B: the filter passes a signal there with 19 dB less, far more than any skirt. */
+const WHOLE_FROM_RBW = 1.25;
 
 /** A line's skirt is phase within 3.5 B of it (bench.md §1). */
 export const lineSource = (frequencyHz: number, powerMw: number, rbwHz: number): SkirtSource => ({
@@ -70,10 +72,13 @@ export function densitySources(
 	return sources;
 }
 
-/** A signal followed as a whole: near it its skirt is phase; farther out it is that of as many lines of equal power. */
+/**
+ * A signal followed as a whole: while the filter is on it its skirt is phase; beside it, that of as many lines of equal power.
+ * Its waveform, unlike a line, brings no skirt of its own, so the filter must still see enough of it where the skirt sets in.
+ */
 export function wholeSources(density: Density, powerMw: number, rbwHz: number): SkirtSource[] {
-	const phaseFromHz = frequencyAtShare(density, OUTSIDE) - SKIRT_FROM_RBW * rbwHz;
-	const phaseToHz = frequencyAtShare(density, 1 - OUTSIDE) + SKIRT_FROM_RBW * rbwHz;
+	const phaseFromHz = frequencyAtShare(density, OUTSIDE) - WHOLE_FROM_RBW * rbwHz;
+	const phaseToHz = frequencyAtShare(density, 1 - OUTSIDE) + WHOLE_FROM_RBW * rbwHz;
 	return Array.from({ length: STAND_INS }, (_, i) => {
 		const frequencyHz = frequencyAtShare(density, (i + 0.5) / STAND_INS);
 		return {
