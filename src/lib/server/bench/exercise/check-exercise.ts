@@ -5,6 +5,7 @@ import { profileNamed } from '../receiver/profiles';
 import { BenchError } from '../bench-error';
 import type { ExerciseIssue } from './exercise-error';
 import { parseExpression } from './expression';
+import { DISPLAYED_PER_HZ } from './displayed-per-hz';
 import { eachExpression, fillTemplate } from './fill-template';
 import { namesInText } from './fill-text';
 
@@ -78,6 +79,7 @@ function checkNames(exercise: Exercise): ExerciseIssue[] {
 	check(exercise.leads, 'leads', shown, 'the learner sees this: list it in shown');
 	check(exercise.mask, 'mask', shown, 'the learner sees this: list it in shown');
 	check(exercise.questions, 'questions', known);
+	known.add(DISPLAYED_PER_HZ);
 	exercise.method.forEach((step, i) => {
 		check(step, `method[${i}]`, known);
 		if (step.do === 'read') known.add(step.as);

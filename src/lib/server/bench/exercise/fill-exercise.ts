@@ -9,6 +9,7 @@ import type { Unit } from '$lib/units/unit';
 import type { z } from 'zod';
 import { profileNamed } from '../receiver/profiles';
 import type { Seed } from '../receiver/random';
+import { drawReceiverError } from '../receiver/receiver-error';
 import { mistakeId } from '../grading/watched-mistakes';
 import { truth } from '../truth/truth';
 import type { Brief, DrawnExercise, DrawnQuestion, FilledStep } from './drawn-exercise';
@@ -16,6 +17,7 @@ import { ExerciseError } from './exercise-error';
 import { parseExpression, type Scope } from './expression';
 import { fillTemplate } from './fill-template';
 import { fillText } from './fill-text';
+import { DISPLAYED_PER_HZ } from './displayed-per-hz';
 import { quantityFrequencyHz } from './quantity-frequency';
 import { issuesOf } from './zod-issues';
 
@@ -143,15 +145,17 @@ function fillStep(step: MethodStep, scope: Scope, field: string): FilledStep {
  */
 export function fillExercise(exercise: Exercise, scope: Scope, seed: Seed, redraws: number): DrawnExercise {
 	const scene = fillScene(exercise, scope);
+	const profile = typeof exercise.receiver === 'string' ? profileNamed(exercise.receiver) : exercise.receiver;
+	const onScreen = { ...scope, [DISPLAYED_PER_HZ]: 1 + drawReceiverError(profile, seed).frequency };
 	return {
 		exercise,
 		seed,
 		redraws,
-		profile: typeof exercise.receiver === 'string' ? profileNamed(exercise.receiver) : exercise.receiver,
+		profile,
 		parameters: scope,
 		scene,
 		brief: fillBrief(exercise, scope),
 		questions: exercise.questions.map((q, i) => fillQuestion(q, scene, scope, `questions[${i}]`)),
-		method: exercise.method.map((step, i) => fillStep(step, scope, `method[${i}]`))
+		method: exercise.method.map((step, i) => fillStep(step, onScreen, `method[${i}]`))
 	};
 }

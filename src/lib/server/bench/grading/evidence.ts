@@ -2,9 +2,9 @@ import type { ResolvedSettings } from '$lib/schemas/settings';
 import type { AttemptRecord, GivenAnswer, TakenReading } from '../exercise/attempt-record';
 import type { DrawnExercise, DrawnQuestion } from '../exercise/drawn-exercise';
 import { quantityFrequencyHz } from '../exercise/quantity-frequency';
-import { drawReceiverError } from '../receiver/receiver-error';
 import { resolveSettings } from '../receiver/resolve-settings';
 import { tableDb } from '../receiver/table-db';
+import { displayedHz } from './displayed';
 import { givenBy, isAbsoluteLevel } from './asked';
 import { familyOf, type Family } from './family';
 import type { SetUp } from './mistake';
@@ -19,12 +19,12 @@ export interface Source extends TakenReading {
 	setUp: SetUp;
 	/** Correction that was set, at the frequency read, dB. */
 	appliedDb: number;
+	/** What this receiver displays for each true hertz. */
+	displayedPerHz: number;
 	/** What it gives to the question, brought to the reference plane: lead and pad added, the correction already applied not counted twice. */
 	planeValue: number;
 	/** That with the noise taken off, where the question asks for it: what is right to report. NaN where nothing is left. */
 	cleanValue: number;
-	/** By how much this receiver's reference shows too high what stands at the frequency asked, Hz. */
-	shiftHz: number;
 }
 
 export interface Evidence {
@@ -70,7 +70,7 @@ function sourceOf(
 		entry,
 		setUp: { resolved, trace, sweeps: taken.rows.to - taken.rows.from + 1 },
 		appliedDb,
-		shiftHz: drawReceiverError(drawn.profile, drawn.seed).frequency * question.frequencyHz,
+		displayedPerHz: displayedHz({ drawn }, 1),
 		planeValue: givenBy(taken.reading, question) + shift
 	};
 	const context = { drawn, question };

@@ -10,7 +10,16 @@ export function placeHz(reading: BenchReading): number | undefined {
 	return reading.parts.frequencyHz;
 }
 
-/** Where a reading was taken, Hz: where its marker came to stand, else where it was put; in span 0, where the receiver stood. */
-export const takenAtHz = ({ reading, request, setUp: { resolved } }: Source): number | undefined =>
-	placeHz(reading) ??
-	(quantityFrequencyHz(request) || (resolved.spanHz === 0 ? resolved.centreHz : undefined));
+/** What truly stands where the receiver of a reading displays `hz`. */
+export const trueHz = ({ displayedPerHz }: Source, hz: number | undefined): number | undefined =>
+	hz === undefined ? undefined : hz / displayedPerHz;
+
+/**
+ * Where a reading was taken, Hz as it truly is: where its marker came to stand, else where it was put; in span 0, where the
+ * receiver stood.
+ */
+export function takenAtHz(source: Source): number | undefined {
+	const { reading, request, setUp } = source;
+	const standing = setUp.resolved.spanHz === 0 ? setUp.resolved.centreHz : undefined;
+	return trueHz(source, placeHz(reading) ?? (quantityFrequencyHz(request) || standing));
+}

@@ -1,4 +1,5 @@
 /** How exact things are in a question's own unit: what theory leaves open, what copying a number off a reading rounds away. */
+import type { SetUp } from './mistake';
 import type { DrawnQuestion } from '../exercise/drawn-exercise';
 
 type Asked = Pick<DrawnQuestion, 'unit' | 'digits' | 'tolerance' | 'truth'>;
@@ -15,6 +16,19 @@ const THREE_DIGITS = 0.005;
  */
 export const modelSpread = (question: Asked): number =>
 	inDecibels(question) ? 0.1 : Math.max(halfDigit(question), question.tolerance / 10);
+
+/**
+ * Standard deviation of what a trace's points leave open, Hz: a marker stands up to half a step beside its place, either
+ * end of a distance does. 0 for anything but a frequency, and for a count.
+ */
+export function pointsSpread(
+	{ quantity, unit }: Pick<DrawnQuestion, 'quantity' | 'unit'>,
+	{ resolved }: SetUp
+): number {
+	if (unit !== 'Hz' || quantity.kind === 'count') return 0;
+	const stepHz = resolved.spanHz / (resolved.points - 1);
+	return stepHz / Math.sqrt(quantity.kind === 'delta' ? 6 : 12);
+}
 
 /** Standard deviation of a number copied off a reading about that reading: its rounding. */
 export function copyingSpread(question: Asked): number {

@@ -5,7 +5,7 @@ import { quantityFrequencyHz } from '../exercise/quantity-frequency';
 import { asksPlace } from './asked';
 import type { Source } from './evidence';
 import { familyOf } from './family';
-import { takenAtHz } from './place';
+import { takenAtHz, trueHz } from './place';
 import { sameWidth, widthHzOf } from './read-width';
 
 type Check = (source: Source, question: DrawnQuestion) => boolean;
@@ -19,9 +19,9 @@ const near = (a: number | undefined, b: number | undefined, withinHz: number): b
 	a === undefined || b === undefined || Math.abs(a - b) <= withinHz;
 const fieldsOf = (asked: object): Fields => asked as Fields;
 
-/** A marker stands on the line, where this receiver shows it; farther away it is on something else, or on nothing. Lines may move by the tolerance. */
+/** A marker stands on the line; farther away it is on something else, or on nothing. Lines may move by the tolerance. */
 const onLine: Check = (source, { frequencyHz }) =>
-	frequencyHz === 0 || near(takenAtHz(source), frequencyHz + source.shiftHz, onLineHz(source));
+	frequencyHz === 0 || near(takenAtHz(source), frequencyHz, onLineHz(source));
 
 /** Three standard deviations of a count, or a point of a trace, within what is right. */
 const fineEnough: Check = (source, { tolerance }) =>
@@ -49,7 +49,7 @@ const density: Check = ({ request }, { quantity, frequencyHz }) => {
 
 const delta: Check = (source, question) => {
 	const [read, asked] = [fieldsOf(source.request), fieldsOf(question.quantity)];
-	const [low, high] = [read.fromHz, read.toHz].sort((a = 0, b = 0) => a - b);
+	const [low, high] = [read.fromHz, read.toHz].map((hz) => trueHz(source, hz)).sort((a = 0, b = 0) => a - b);
 	const [wantedLow, wantedHigh] = [asked.fromHz, asked.toHz].sort((a = 0, b = 0) => a - b);
 	if (low === undefined || high === undefined) return question.unit === 's';
 	const within = onLineHz(source);

@@ -9,6 +9,7 @@ import { judgeQuestion, type Judgement } from '../grading/judge-question';
 import { spreadsBetween } from '../grading/mistakes-apart';
 import { greatestOwnError, ownError } from '../grading/own-error';
 import { modelSpread } from '../grading/spreads';
+import { predictMistake } from '../grading/predict-mistake';
 import { watchedMistakes, type Watched } from '../grading/watched-mistakes';
 import { memoSweeps } from './memo-sweeps';
 
@@ -21,7 +22,7 @@ export interface Outcome {
 	error: number | null;
 	/** What of the error is not this receiver's own: over the seeds, nothing should be left of it. */
 	bias: number;
-	/** One standard deviation of the reading answered from. */
+	/** One standard deviation of the reading answered from; of a mistake, what theory leaves open where that is less. */
 	spread: number;
 	/** Within the tolerance. */
 	passes: boolean;
@@ -110,7 +111,10 @@ export function proveSeed(exercise: Exercise, seed: number, sweepWith: SweepWith
 		const taught = outcome(question, null, attempt(drawn, question, drawn.method, sweeps, EVIDENCE[0]));
 		const made = watchedMistakes(question).map((watched) => {
 			const steps = watched.mistake.make(drawn.method, { drawn, question });
-			return outcome(question, watched, attempt(drawn, question, steps, sweeps, leave));
+			const done = outcome(question, watched, attempt(drawn, question, steps, sweeps, leave));
+			// A reading taken badly may not know how sure it is (a line swept too fast looks like noise); theory knows.
+			const predicted = predictMistake(watched, { drawn, question });
+			return { ...done, spread: Math.min(done.spread, predicted?.spread ?? Infinity) };
 		});
 		proof.outcomes.push(taught, ...made);
 		proof.nearest.push({ question: question.id, spreads: nearestSpreads(made) });

@@ -3,8 +3,11 @@ import type { MistakeKind } from '../mistake';
 import { averagedOverBursts } from './averaged-over-bursts';
 import { burstForCarrier } from './burst-for-carrier';
 import { burstMissed } from './burst-missed';
+import { coarsePoints } from './coarse-points';
+import { companyInTheFilter } from './company-in-the-filter';
 import { couplingLeftOut } from './coupling-left-out';
 import { couplingWrongSign } from './coupling-wrong-sign';
+import { deltaSign } from './delta-sign';
 import { densityForPower } from './density-for-power';
 import { densityNotDivided } from './density-not-divided';
 import { densityOverChannel } from './density-over-channel';
@@ -12,10 +15,12 @@ import { edgeFromWidth } from './edge-from-width';
 import { floorAsSignal } from './floor-as-signal';
 import { gainTakenOff } from './gain-taken-off';
 import { halfOrDouble } from './half-or-double';
+import { inTheSkirt } from './in-the-skirt';
 import { leadAtOtherPoint } from './lead-at-other-point';
 import { leadLeftOut } from './lead-left-out';
 import { leadTwice } from './lead-twice';
 import { leadWrongSign } from './lead-wrong-sign';
+import { levelForDifference } from './level-for-difference';
 import { levelForRatio } from './level-for-ratio';
 import { logAverage } from './log-average';
 import { logDensity } from './log-density';
@@ -25,7 +30,8 @@ import { markerOverResolution } from './marker-over-resolution';
 import { markersForBands } from './markers-for-bands';
 import { neighbourWidth } from './neighbour-width';
 import { noiseNotTakenOff } from './noise-not-taken-off';
-import { otherSideRead } from './other-side';
+import { notMeasured } from './not-measured';
+import { otherSide } from './other-side';
 import { overloaded } from './overloaded';
 import { ownNoise } from './own-noise';
 import { ownProducts } from './own-products';
@@ -35,12 +41,14 @@ import { pathLeftOut } from './path-left-out';
 import { peakOnNoise } from './peak-on-noise';
 import { periodForOnTime } from './period-for-on-time';
 import { silenceForOnTime } from './silence-for-on-time';
+import { sweepTooFast } from './sweep-too-fast';
 import { troughOnNoise } from './trough-on-noise';
 import { unitMixed } from './unit-mixed';
 import { wideResolution } from './wide-resolution';
 import { widthAtLevel } from './width-at-level';
 import { widthOfShare } from './width-of-share';
 import { windowTooWide } from './window-too-wide';
+import { wrongCarrier } from './wrong-carrier';
 import { wrongNeighbour } from './wrong-neighbour';
 import { wrongOffset } from './wrong-offset';
 import { wrongWidth } from './wrong-width';
@@ -49,8 +57,11 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	averagedOverBursts,
 	burstForCarrier,
 	burstMissed,
+	coarsePoints,
+	companyInTheFilter,
 	couplingLeftOut,
 	couplingWrongSign,
+	deltaSign,
 	densityForPower,
 	densityNotDivided,
 	densityOverChannel,
@@ -58,10 +69,12 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	floorAsSignal,
 	gainTakenOff,
 	halfOrDouble,
+	inTheSkirt,
 	leadAtOtherPoint,
 	leadLeftOut,
 	leadTwice,
 	leadWrongSign,
+	levelForDifference,
 	levelForRatio,
 	logAverage,
 	logDensity,
@@ -71,7 +84,8 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	markersForBands,
 	neighbourWidth,
 	noiseNotTakenOff,
-	otherSideRead,
+	notMeasured,
+	otherSide,
 	overloaded,
 	ownNoise,
 	ownProducts,
@@ -81,12 +95,14 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	peakOnNoise,
 	periodForOnTime,
 	silenceForOnTime,
+	sweepTooFast,
 	troughOnNoise,
 	unitMixed,
 	wideResolution,
 	widthAtLevel,
 	widthOfShare,
 	windowTooWide,
+	wrongCarrier,
 	wrongNeighbour,
 	wrongOffset,
 	wrongWidth
