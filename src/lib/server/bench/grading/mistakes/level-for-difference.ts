@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
-import { drawReceiverError } from '../../receiver/receiver-error';
+import { drawReceiverError } from '$lib/server/bench/receiver/receiver-error';
 import { displayedHz } from '../displayed';
 import { defineMistake, type Context } from '../mistake';
 import { lineDbm } from '../other-carrier';

@@ -31,7 +31,7 @@ import { markersForBands } from './markers-for-bands';
 import { neighbourWidth } from './neighbour-width';
 import { noiseNotTakenOff } from './noise-not-taken-off';
 import { notMeasured } from './not-measured';
-import { otherSide } from './other-side';
+import { otherSideRead } from './other-side';
 import { overloaded } from './overloaded';
 import { ownNoise } from './own-noise';
 import { ownProducts } from './own-products';
@@ -85,7 +85,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	neighbourWidth,
 	noiseNotTakenOff,
 	notMeasured,
-	otherSide,
+	otherSideRead,
 	overloaded,
 	ownNoise,
 	ownProducts,
