@@ -78,6 +78,20 @@ describe('figureMarks(requests, outcomes)', () => {
 			{ start: 450.017e6, stop: 450.033e6, figure: '−55.0' }
 		]));
 
+	it('tells readings of one kind and width apart by window and place', () => {
+		const share = { kind: 'occupied-bandwidth', percent: 99 } as const;
+		const channel = { kind: 'channel-power', widthHz: 25e3 } as const;
+		const names = (...requests: Parameters<typeof figureMarks>[0]) =>
+			figureMarks(requests, []).names.map((name) => name.replaceAll('\u00a0', ' '));
+		const [all, window] = names(share, { ...share, centreHz: 450e6, widthHz: 25e3 });
+		expect(all).toMatch(/ of all shown$/);
+		expect(window).toMatch(/ within 25 kHz$/);
+		expect(names({ ...channel, centreHz: 450e6 }, { ...channel, centreHz: 451e6 })).toEqual([
+			'Channel power, 25 kHz at 450 MHz',
+			'Channel power, 25 kHz at 451 MHz'
+		]);
+	});
+
 	it('names what gave no number and draws nothing of it', () =>
 		expect(figureMarks([{ kind: 'peak' }, { kind: 'marker', atHz: 1e6 }], [])).toEqual({
 			names: ['A, highest point', 'Marker B, 1\u00a0MHz'],

@@ -2,7 +2,7 @@
 import type { FigureOutcome } from '$lib/schemas/figure-view';
 import type { ReadingRequest } from '$lib/schemas/reading';
 import { formatFrequency } from '$lib/units/format-quantity';
-import { readingWords } from '../bench/readings/reading-words';
+import { readingPlace, readingWords } from '../bench/readings/reading-words';
 import { shownReading } from '../bench/shown-quantity';
 
 export interface FigureFlag {
@@ -63,11 +63,21 @@ export function figureMarks(
 				return;
 			}
 			default:
-				marks.names.push(readingWords(request));
+				marks.names.push(nameAmong(requests, request));
 				if (taken) marks.bands.push(...bandsOf(request, taken));
 		}
 	});
 	return marks;
+}
+
+/** A reading's words, with its window and place where they would else be another's too. */
+function nameAmong(requests: readonly ReadingRequest[], request: ReadingRequest): string {
+	const words = readingWords(request);
+	if (requests.filter((other) => readingWords(other) === words).length === 1) return words;
+	const centreHz = readingPlace(request);
+	const place = centreHz === undefined ? ' of all shown' : ` at ${formatFrequency(centreHz)}`;
+	const isWindow = request.kind === 'occupied-bandwidth' && request.widthHz !== undefined;
+	return words + (isWindow ? ` within ${formatFrequency(request.widthHz!)}` : place);
 }
 
 function markerName(letter: string, request: ReadingRequest): string {
