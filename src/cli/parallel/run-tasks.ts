@@ -27,7 +27,10 @@ export async function runTasks<T extends Task>(
 	}
 }
 
-const newWorker = (): Worker => new Worker(new URL('./worker.js', import.meta.url));
+const newWorker = (): Worker =>
+	new Worker(new URL('./worker.js', import.meta.url), {
+		workerData: { module: new URL('./work.ts', import.meta.url).href }
+	});
 
 /** What a worker answers: the result, or what it threw, field and all. */
 export type Reply = { result: unknown } | { fault: { message: string; field?: string } };

@@ -35,6 +35,19 @@ async function readPower(actor: Actor, attemptId: number, correctionDb: number) 
 	const asked = { rows: { from: 0, to: 15 }, trace: 1, request };
 	return (await takeReading(actor, attemptId, asked, now)).reading;
 }
+/** Starts to watch; the longest time that nothing else could be done on this thread, ms, once asked. */
+function longestStandstill(): () => number {
+	let last = performance.now();
+	let longest = 0;
+	const timer = setInterval(() => {
+		longest = Math.max(longest, performance.now() - last);
+		last = performance.now();
+	}, 5);
+	return () => {
+		clearInterval(timer);
+		return longest;
+	};
+}
 const typed = (text: string, unit = 'dBm', readingId?: number) => ({ text, unit, readingId });
 
 describe('handIn(actor, attemptId, {answers}, now)', () => {
@@ -110,6 +123,40 @@ describe('handIn(actor, attemptId, {answers}, now)', () => {
 		);
 		expect(all.filter(({ status }) => status === 'fulfilled')).toHaveLength(1);
 		expect(await counts(attempt.id)).toEqual([1, 1]);
+	});
+
+	it('grades thirty at once in threads of their own, while the server goes on answering', async () => {
+		const attempts = await Promise.all(Array.from({ length: 30 }, () => createAttempt()));
+		const answers = { power: typed('-23') };
+		const stoodStillMs = longestStandstill();
+		const all = await Promise.all(
+			attempts.map(({ actor, attempt }) => handIn(actor, attempt.id, { answers }, now))
+		);
+		expect(all.map(({ finding }) => finding.questions[0].yours?.value)).toEqual(attempts.map(() => -23));
+		const truths = await Promise.all(attempts.map(({ attempt }) => secretsOf(attempt.id)));
+		expect(all.map(({ finding }) => finding.questions[0].true.value)).toEqual(
+			truths.map(({ drawn }) => drawn.questions[0].truth)
+		);
+		expect(await Answer.count({ where: { attemptId: attempts.map(({ attempt }) => attempt.id) } })).toBe(30);
+		// One grading alone takes some hundred milliseconds: thirty on this thread would stand still for seconds.
+		expect(stoodStillMs()).toBeLessThan(1500);
+	});
+
+	it('grades what was read meanwhile, and nothing that is no longer so', async () => {
+		const { actor, attempt } = await createAttempt();
+		const { drawn } = await secretsOf(attempt.id);
+		const correctionDb = drawn.questions[0].leadDb;
+		await sweep(actor, attempt.id, { ...settings, correctionDb }, { sweeps: 16 });
+		await acknowledgeRows(actor, attempt.id, { row: 15 });
+		const answers = { power: typed(drawn.questions[0].truth.toFixed(2)) };
+		const request = { kind: 'channel-power' as const, centreHz: 450e6, widthHz: 200e3 };
+		const handing = handIn(actor, attempt.id, { answers }, now);
+		const reading = takeReading(actor, attempt.id, { rows: { from: 0, to: 15 }, trace: 1, request }, now);
+		const [handed, read] = await Promise.allSettled([handing, reading]);
+		if (handed.status === 'rejected') throw handed.reason;
+		const seen = handed.value.finding.log.some(({ text }) => text.startsWith('Reading: channel power'));
+		// Either it came before the end, and then it was graded with the rest, or it came too late.
+		expect(seen).toBe(read.status === 'fulfilled');
 	});
 
 	it('leaves the tables unchanged when it fails late', async () => {

@@ -1,37 +1,80 @@
 import type { Transaction } from 'sequelize';
 import type { AnswersRequest } from '$lib/schemas/attempt';
 import type { Finding as FindingDocument } from '$lib/schemas/finding';
-import type { GivenAnswer } from '$lib/server/bench/exercise/attempt-record';
-import { gradeAnswer } from '$lib/server/bench/grading/grade-answer';
+import type { AttemptRecord, GivenAnswer } from '$lib/server/bench/exercise/attempt-record';
 import { Answer } from '$lib/server/db/models/answer';
 import type { Attempt } from '$lib/server/db/models/attempt';
 import { Finding } from '$lib/server/db/models/finding';
 import { Reading } from '$lib/server/db/models/reading';
 import type { PlacedExercise } from '$lib/server/db/queries/find-exercise';
+import { inTransaction } from '$lib/server/db/transaction';
+import type { Actor } from '$lib/server/domain/role';
 import { attemptRecord } from './attempt-record';
-import { drawnFor } from './prepared-bench';
+import { lockOpenAttempt } from './get-attempt';
+import { gradeInWorker } from './grade-in-worker';
 import { setUpLog } from './set-up-log';
-import { signalSource } from './signal-source';
+import { exerciseOf } from './signal-source';
 
 /** What is handed in: as typed, and as numbers in the questions' own units. Both empty when the attempt is given up. */
 export interface HandedIn {
 	typed: AnswersRequest['answers'];
 	given: Record<string, GivenAnswer>;
 }
-
-/** Grades a locked, open attempt, keeps what the grader says of it, and closes it for good. */
-export async function closeAttempt(
+/** Checks what is handed in against a locked, open attempt. */
+export type CheckHandedIn = (
 	attempt: Attempt,
 	exercise: PlacedExercise,
+	transaction: Transaction
+) => Promise<HandedIn>;
+
+/** So often is grading done again when something was swept or read meanwhile; after that the attempt waits for it. */
+const MOST_SNAPSHOTS = 3;
+
+/**
+ * Grades an open attempt, keeps what the grader says of it, and closes it for good. Grading goes on in another thread and
+ * without a lock: what was graded is kept only if the attempt is still as it was then.
+ * @throws what `check` throws; DomainError `conflict` when it has been closed already
+ */
+export async function closeAttempt(
+	actor: Actor,
+	attemptId: number,
+	check: CheckHandedIn,
+	now: Date
+): Promise<FindingDocument> {
+	const look = async (transaction: Transaction) => {
+		const attempt = await lockOpenAttempt(actor, attemptId, transaction);
+		const exercise = await exerciseOf(attempt, transaction);
+		const handedIn = await check(attempt, exercise, transaction);
+		const log = await setUpLog(attemptId, transaction);
+		const readings = await Reading.findAll({ where: { attemptId }, order: [['id', 'ASC']], transaction });
+		const record = attemptRecord(log, readings, handedIn.given);
+		return { attempt, handedIn, job: { seed: attempt.seed, definition: exercise.definition, record } };
+	};
+	for (let snapshots = 1; ; snapshots++) {
+		const seen = await inTransaction(look);
+		const graded = await gradeInWorker(seen.job);
+		const kept = await inTransaction(async (transaction) => {
+			const { attempt, handedIn, job } = await look(transaction);
+			const isSame = isSameRecord(job.record, seen.job.record);
+			if (!isSame && snapshots < MOST_SNAPSHOTS) return null;
+			const finding = isSame ? graded : await gradeInWorker(job);
+			await keep(attempt, handedIn, finding, now, transaction);
+			return finding;
+		});
+		if (kept) return kept;
+	}
+}
+
+const isSameRecord = (a: AttemptRecord, b: AttemptRecord): boolean => JSON.stringify(a) === JSON.stringify(b);
+
+async function keep(
+	attempt: Attempt,
 	{ typed, given }: HandedIn,
+	finding: FindingDocument,
 	now: Date,
 	transaction: Transaction
-): Promise<FindingDocument> {
+): Promise<void> {
 	const { id: attemptId, engineVersion } = attempt;
-	const log = await setUpLog(attemptId, transaction);
-	const readings = await Reading.findAll({ where: { attemptId }, order: [['id', 'ASC']], transaction });
-	const drawn = drawnFor(signalSource(attempt, exercise));
-	const finding = gradeAnswer({ drawn, ...attemptRecord(log, readings, given) });
 	const rows = Object.entries(given).map(([question, { value }]) => {
 		const found = finding.questions.find(({ id }) => id === question);
 		const { text, unit, readingId } = typed[question];
@@ -47,5 +90,4 @@ export async function closeAttempt(
 		{ transaction }
 	);
 	await attempt.update({ closedAt: now, streamToken: null }, { transaction });
-	return finding;
 }
