@@ -31,7 +31,7 @@ describe('noise in a reading', () => {
 		const { drawn, question, setUp } = contextOf('weak-carrier-from-an-outstation');
 		const site = 10 ** ((drawn.parameters.siteNoiseDbmPerHz as number) / 10);
 		const own = ownDensityMwPerHz({ drawn, question }, setUp);
-		expect(noiseMw({ drawn, question }, setUp)).toBeCloseTo(106.4467 * (site + own), 16);
+		expect(noiseMw({ drawn, question }, setUp)).toBeCloseTo(319.3401 * (site + own), 16);
 		const padded = {
 			...setUp,
 			resolved: { ...setUp.resolved, input: { ...setUp.resolved.input, padDb: 20 } }

@@ -74,12 +74,13 @@ export function averagedDbm({ onDbm, offDbm, share }: ComingAndGoing, { resolved
 
 /**
  * How far such a mean strays, dB: bursts begun and not ended at either end (a third of one, 1/√12 at each), and in every burst
- * one sweep more or less.
+ * one sweep more or less, or where sweeps are rarer than that, none.
  */
 export function averagedSpreadDb(one: ComingAndGoing, { resolved, trace, sweeps }: SetUp): number {
 	const cycleS = resolved.sweepTimeS + RETRACE_S;
 	const bursts = (Math.min(trace.count, sweeps) * cycleS) / (one.gate.onS + one.gate.offS);
 	const hits = one.gate.onS / cycleS;
-	const relative = Math.hypot(0.4 / bursts, 0.5 / hits / Math.sqrt(bursts));
+	const oneMore = hits < 1 ? Math.sqrt(hits * (1 - hits)) : 0.5;
+	const relative = Math.hypot(0.4 / bursts, oneMore / hits / Math.sqrt(bursts));
 	return 4.34 * relative;
 }

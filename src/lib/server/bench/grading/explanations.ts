@@ -1,5 +1,6 @@
 import type { Evidence, Source } from './evidence';
 import { isMadeWith, type SetUp } from './mistake';
+import { readSpreadDb } from './noise-in-reading';
 import { ownError } from './own-error';
 import { copyingSpread, modelSpread } from './spreads';
 import { supports } from './supports';
@@ -73,7 +74,9 @@ function rightOnes(watched: readonly Watched[], evidence: Evidence): Candidate[]
 	}
 	if (evidence.attached) return [];
 	const value = evidence.question.truth + ownError(evidence);
-	return [{ watched: [], value, spread: modelSpread(evidence.question), setUp: evidence.setUps[0] }];
+	const [setUp] = evidence.setUps;
+	const noisy = evidence.question.noiseTakenOff && setUp ? readSpreadDb(evidence, setUp) : 0;
+	return [{ watched: [], value, spread: Math.hypot(modelSpread(evidence.question), noisy), setUp }];
 }
 
 function slipped(from: readonly Candidate[], watched: readonly Watched[], evidence: Evidence): Candidate[] {

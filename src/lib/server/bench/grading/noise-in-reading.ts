@@ -89,3 +89,11 @@ export function noiseSpreadDb({ question }: Context, setUp: SetUp): number {
 	if (familyOf(question.quantity.kind) === 'point') return pointSpreadDb(setUp);
 	return bandSpreadDb(setUp, widthHzOf(question.quantity) ?? DENSITY_SHARE * setUp.resolved.spanHz);
 }
+
+/** Standard deviation in dB of a signal's level as a set-up reads it in this noise: of a line, through what beats with it. */
+export function readSpreadDb(context: Context, setUp: SetUp): number {
+	const ratio = noiseMw(context, setUp) / dbmToMilliwatts(context.question.truth);
+	const isLine = familyOf(context.question.quantity.kind) === 'point';
+	const share = isLine ? Math.sqrt(2 * ratio + ratio ** 2) : Math.hypot(1 + ratio, ratio);
+	return noiseSpreadDb(context, setUp) * share;
+}

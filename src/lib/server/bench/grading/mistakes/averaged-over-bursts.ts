@@ -25,12 +25,18 @@ export const averagedOverBursts = defineMistake('averaged-over-bursts', z.strict
 	explain({ setUp, ...context }) {
 		const found = setUp ? comingAndGoing(context, setUp) : null;
 		const { truth, digits, unit } = context.question;
-		const shareDb = powerRatioToDb(found?.share ?? 1);
-		const on = figure(found?.onDbm ?? truth, digits);
+		const onDbm = found?.onDbm ?? truth;
+		const share = found?.share ?? 1;
+		const percent = figure(100 * share, 1);
+		const meanDbm = found && setUp ? averagedDbm(found, setUp) : truth;
+		const onPower = setUp?.resolved.scale === 'power';
+		const below = figure(onDbm - meanDbm, 1);
 		return {
 			title: 'A mean over on and off is neither',
-			text: `The trace averaged sweeps that met the burst with sweeps that met its silence. It is on for ${figure(100 * (found?.share ?? 1), 1)} % of the time, so its mean power stands ${figure(-shareDb, 1)} dB under its level while on, and covers what stands beneath it.`,
-			sum: `${on} + 10 log (${figure(found?.share ?? 1, 4)}) = ${figure((found?.onDbm ?? truth) + shareDb, digits)} ${unit}`,
+			text: `The trace averaged sweeps that met the burst with sweeps that met its silence. It is on for ${percent} % of the time, so ${onPower ? 'its mean power' : 'such a mean'} stands ${below} dB under its level while on, and hides what stands beneath it.`,
+			sum: onPower
+				? `${figure(onDbm, digits)} + 10 log (${figure(share, 4)}) = ${figure(onDbm + powerRatioToDb(share), digits)} ${unit}`
+				: `${percent} % of ${figure(onDbm, digits)} and the rest of ${figure(found?.offDbm ?? truth, digits)}: ${figure(meanDbm, digits)} ${unit}`,
 			part: 'averaged over on and off',
 			bad: { at: 'set-up', text: 'Here: trace average; hold the maximum or the minimum' }
 		};

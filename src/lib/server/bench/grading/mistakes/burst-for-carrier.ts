@@ -5,7 +5,7 @@ import { defineMistake } from '../mistake';
 import { withSettings, withSweeps } from '../spoil';
 import { modelSpread } from '../spreads';
 
-/** Sweeps enough to meet a burst however rarely it comes. */
+/** Sweeps enough to meet a burst however rarely it comes, as quick as the filter lets them be. */
 const PATIENT = 240;
 
 /** The level of what comes and goes reported as that of what stands beneath it all the time. */
@@ -26,14 +26,22 @@ export const burstForCarrier = defineMistake('burst-for-carrier', z.strictObject
 	explain({ setUp, yours, ...context }) {
 		const found = setUp ? comingAndGoing(context, setUp) : null;
 		const { digits, unit } = context.question;
+		const held = setUp?.trace.mode === 'max-hold';
 		const offDbm = found?.offDbm ?? context.question.truth;
 		return {
 			title: 'A held maximum shows who shouts',
-			text: 'The trace kept the highest level that was ever met, and that belongs to the carrier that comes and goes. What is there all the time is what is left at the least: hold the minimum.',
+			text: `${held ? 'The trace kept the highest level that was ever met' : 'The sweep passed while both were on'}, and what it shows belongs to the carrier that comes and goes. What is there all the time is what is left at the least: hold the minimum.`,
 			sum: `${figure(yours, digits)} ${unit} with both, ${figure(offDbm, digits)} ${unit} while the other is silent`,
 			part: 'the carrier that comes and goes',
-			bad: { at: 'set-up', text: 'Here: the trace holds its maximum; hold the minimum' }
+			bad: {
+				at: 'set-up',
+				text: `Here: the trace ${held ? 'holds its maximum' : 'is live'}; hold the minimum`
+			}
 		};
 	},
-	make: (steps) => withSweeps(withSettings(steps, { traces: [{ mode: 'max-hold' }] }), PATIENT)
+	make: (steps) =>
+		withSweeps(
+			withSettings(steps, { traces: [{ mode: 'max-hold' }], detector: 'positive-peak', sweepTimeS: 'auto' }),
+			PATIENT
+		)
 }));

@@ -1,8 +1,8 @@
 import { z } from 'zod';
-import { formatTime } from '$lib/units/format-quantity';
 import { figure } from '$lib/server/bench/exercise/figure';
 import { carrierSpreadDb, comingAndGoing, isBurst } from '../coming-and-going';
 import { defineMistake, type SetUp } from '../mistake';
+import { shortTime } from '../on-and-period';
 import { withSettings, withSweeps } from '../spoil';
 import { modelSpread } from '../spreads';
 
@@ -31,7 +31,7 @@ export const burstMissed = defineMistake('burst-missed', z.strictObject({}), () 
 		const sharePercent = figure(100 * (found?.share ?? 0), 0);
 		return {
 			title: 'One sweep is one moment',
-			text: `A live trace shows the last sweep only, and that one passed while the signal was off. ${gate ? `It is on for ${formatTime(gate.onS)} and silent for ${formatTime(gate.offS)}: one look in ${figure(1 / (found?.share ?? 1), 0)} meets it.` : ''} Hold the maximum over many quick sweeps.`.replaceAll(
+			text: `A live trace shows the last sweep only, and that one passed while the signal was off. ${gate ? `It is on for ${shortTime(gate.onS)} and silent for ${shortTime(gate.offS)}: one look in ${figure(1 / (found?.share ?? 1), 0)} meets it.` : ''} Hold the maximum over many quick sweeps.`.replaceAll(
 				'  ',
 				' '
 			),

@@ -56,7 +56,7 @@ export const peakOnNoise = defineMistake(
 					: 'Each point of your trace is the highest level met in its bucket';
 			return {
 				title: WORDS[by].title,
-				text: `A modulated carrier like this one rises and falls like noise. ${cause}, so the power added up is that of the crests, not the mean.`,
+				text: `A signal of this kind rises and falls like noise. ${cause}, so the power added up is that of the crests, not the mean.`,
 				sum: `${figure(yours, question.digits)} − ${figure(shownDb, 1)} = ${figure(yours - shownDb, question.digits)} ${question.unit}`,
 				note:
 					Math.abs(shownDb + change) < 0.05

@@ -1,6 +1,5 @@
 import { z } from 'zod';
-import { formatTime } from '$lib/units/format-quantity';
-import { onAndPeriodS } from '../on-and-period';
+import { onAndPeriodS, shortTime } from '../on-and-period';
 import { defineMistake } from '../mistake';
 import { withSum } from '../spoil';
 
@@ -17,8 +16,8 @@ export const periodForOnTime = defineMistake('period-for-on-time', z.strictObjec
 		const { onS, periodS } = onAndPeriodS(context);
 		return {
 			title: 'From start to start is the period',
-			text: `It starts every ${formatTime(periodS)}, and that is what you gave. It stays on for ${formatTime(onS)} of them, from a rise to the next fall.`,
-			sum: `${formatTime(yours)} − ${formatTime(periodS - onS)} of silence = ${formatTime(yours - periodS + onS)}`,
+			text: `It starts every ${shortTime(periodS)}, and that is what you gave. It stays on for ${shortTime(onS)} of them, from a rise to the next fall.`,
+			sum: `${shortTime(yours)} − ${shortTime(periodS - onS)} of silence = ${shortTime(yours - periodS + onS)}`,
 			part: 'the silence, counted in',
 			bad: { at: 'answer', text: 'Here: the period, not the time it is on' }
 		};

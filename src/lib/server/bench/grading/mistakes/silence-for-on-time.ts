@@ -1,6 +1,5 @@
 import { z } from 'zod';
-import { formatTime } from '$lib/units/format-quantity';
-import { onAndPeriodS } from '../on-and-period';
+import { onAndPeriodS, shortTime } from '../on-and-period';
 import { defineMistake } from '../mistake';
 import { withSum } from '../spoil';
 
@@ -17,8 +16,8 @@ export const silenceForOnTime = defineMistake('silence-for-on-time', z.strictObj
 		const { onS, periodS } = onAndPeriodS(context);
 		return {
 			title: 'That is how long it stays away',
-			text: `From a fall to the next rise nothing is on: ${formatTime(periodS - onS)}. It stays on from a rise to the next fall.`,
-			sum: `period ${formatTime(periodS)} − your ${formatTime(yours)} = ${formatTime(periodS - yours)} on`,
+			text: `From a fall to the next rise nothing is on: ${shortTime(periodS - onS)}. It stays on from a rise to the next fall.`,
+			sum: `period ${shortTime(periodS)} − your ${shortTime(yours)} = ${shortTime(periodS - yours)} on`,
 			part: 'the silence, taken for the burst',
 			bad: { at: 'answer', text: 'Here: the silence, not the time it is on' }
 		};
