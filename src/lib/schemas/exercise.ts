@@ -125,6 +125,17 @@ export const methodStep = z.discriminatedUnion('do', [
 	})
 ]);
 
+/** Lets anyone try one of the exercise's questions on the front page, turning nothing but the resolution. */
+const trial = z.strictObject({
+	question: slug,
+	/** The question in one short sentence: "How far apart are these two carriers?" */
+	text: line,
+	/** Offered from wide to narrow; the first is the one it starts with. */
+	resolutionsHz: z.array(z.number().positive()).min(2).max(8),
+	/** What else is set. */
+	settings: settingsTemplate
+});
+
 export const exercise = z.strictObject({
 	slug,
 	title: line,
@@ -151,7 +162,8 @@ export const exercise = z.strictObject({
 	method: z.array(methodStep).min(3).max(60),
 	/** Receiver time an attempt may use, s. */
 	benchTimeS: z.number().positive().max(86_400),
-	tries: z.int().min(1).max(20)
+	tries: z.int().min(1).max(20),
+	trial: trial.optional()
 });
 
 export type ParameterDraw = z.infer<typeof parameterDraw>;

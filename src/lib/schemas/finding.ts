@@ -7,7 +7,7 @@ import { answerUnits } from './exercise';
 import { scales, traceModes } from './settings';
 
 const unit = z.enum(answerUnits);
-const measured = z.strictObject({ value: z.number(), unit, digits: z.int() });
+export const measured = z.strictObject({ value: z.number(), unit, digits: z.int() });
 
 export const verdicts = ['right', 'right-but-method', 'wrong', 'unanswered'] as const;
 

@@ -71,18 +71,18 @@ function presentQuestion(
 	text: string,
 	{ unit, digits, tolerance }: ExerciseParts['written'][number]
 ): QuestionView {
-	return { id, text, unit, units: unitsFor(unit), digits, toleranceText: toleranceText(tolerance, unit) };
+	return { id, text, unit, units: presentUnits(unit), digits, toleranceText: presentTolerance(tolerance, unit) };
 }
 
 /** Every unit that an answer asked for in `unit` may be given in, that one first. */
-function unitsFor(unit: string): string[] {
+export function presentUnits(unit: string): string[] {
 	const dimension = dimensionOf(unit);
 	const others = dimension ? Object.keys(dimensionSpec(dimension).units) : [];
 	return [unit, ...others.filter((other) => other !== unit)];
 }
 
 /** From what the author wrote: a share of the true value must not be worked out here, it would tell the value. */
-function toleranceText(tolerance: Tolerance, unit: string): string {
+export function presentTolerance(tolerance: Tolerance, unit: string): string {
 	if ('relative' in tolerance) return `Right within ±${shortest(tolerance.relative * 100)} %`;
 	const { absolute } = tolerance;
 	if (unit === 'Hz') return `Right within ±${formatFrequency(absolute)}`;

@@ -1,0 +1,17 @@
+import type { TrialRowRequest, TrialSweep } from '$lib/schemas/trial';
+import { spendSweep } from './spend';
+import { openTrialBench, presentSweep, sweepTrial } from './trial-bench';
+
+/**
+ * One more sweep of a visitor's signal.
+ * @throws DomainError `conflict` for a token that opens nothing; `invalid` for a resolution not offered; `too_many`
+ */
+export async function takeTrialSweep(
+	{ token, choice, row }: TrialRowRequest,
+	address: string,
+	now: Date
+): Promise<TrialSweep> {
+	spendSweep(address, now);
+	const bench = await openTrialBench(token, now);
+	return presentSweep(choice, row, sweepTrial(bench, choice, row));
+}
