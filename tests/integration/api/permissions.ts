@@ -31,6 +31,9 @@ export const REACH: Record<string, Reach> = {
 	'action /sign-in?/default': everybody,
 	'POST /sign-out': everybody,
 	'POST /scheme': everybody,
+	'POST /api/trial': { ...everybody, absent: true },
+	'POST /api/trial/rows': { ...everybody, body: { token: 'none', choice: 0, row: 0 } },
+	'POST /api/trial/answers': everybody,
 
 	'load /account': signedIn,
 	'action /account?/name': signedIn,
