@@ -156,6 +156,29 @@ describe('parseExercise(data)', () => {
 			})
 		).toContain('scene.emitters'));
 
+	it.each([
+		['of a question that isn’t asked', { question: 'loudness' }, 'trial.question'],
+		[
+			'through a filter that the receiver hasn’t got',
+			{ resolutionsHz: [300, 500] },
+			'trial.resolutionsHz[1]'
+		],
+		[
+			'that tells what the learner isn’t told',
+			{ settings: { centreHz: '=carrierDbm' } },
+			'trial.settings.centreHz'
+		]
+	])('refuses a trial %s', (_, over, field) => {
+		const trial = {
+			question: 'channel-power',
+			text: 'How much?',
+			resolutionsHz: [300, 1000],
+			settings: {},
+			...over
+		};
+		expect(fields((draft: { trial?: object }) => void (draft.trial = trial))).toEqual([field]);
+	});
+
 	it('refuses a question that the method leaves out', () =>
 		expect(fields((d: { method: object[] }) => void d.method.pop())).toContain('method'));
 });

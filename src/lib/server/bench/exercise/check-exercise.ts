@@ -30,7 +30,8 @@ export function checkExercise(exercise: Exercise): ExerciseIssue[] {
 		...checkTexts(exercise),
 		...checkWhen(exercise),
 		...checkMethod(exercise),
-		...checkQuestions(exercise)
+		...checkQuestions(exercise),
+		...checkTrial(exercise)
 	];
 }
 
@@ -78,6 +79,7 @@ function checkNames(exercise: Exercise): ExerciseIssue[] {
 	check(exercise.start, 'start', shown, 'the learner sees this: list it in shown');
 	check(exercise.leads, 'leads', shown, 'the learner sees this: list it in shown');
 	check(exercise.mask, 'mask', shown, 'the learner sees this: list it in shown');
+	check(exercise.trial, 'trial', shown, 'the visitor sees this: list it in shown');
 	check(exercise.questions, 'questions', known);
 	known.add(DISPLAYED_PER_HZ);
 	exercise.method.forEach((step, i) => {
@@ -148,6 +150,22 @@ function checkMethod({ method, questions }: Exercise): ExerciseIssue[] {
 		if (answers !== 1)
 			issues.push({ field: 'method', message: `must answer ${id} once; it does ${answers} times` });
 	}
+	return issues;
+}
+
+/** What anyone may try on the front page: a question that is asked, through filters that the receiver has. */
+function checkTrial({ trial, questions, receiver }: Exercise): ExerciseIssue[] {
+	if (!trial) return [];
+	const issues: ExerciseIssue[] = [];
+	if (!questions.some(({ id }) => id === trial.question)) {
+		issues.push({ field: 'trial.question', message: `no question is called ${trial.question}` });
+	}
+	const { rbwHz } = typeof receiver === 'string' ? profileNamed(receiver) : receiver;
+	trial.resolutionsHz.forEach((hz, i) => {
+		const field = `trial.resolutionsHz[${i}]`;
+		if (!rbwHz.includes(hz)) issues.push({ field, message: `the receiver has no filter of ${hz} Hz` });
+		if (trial.resolutionsHz.indexOf(hz) !== i) issues.push({ field, message: 'is offered twice' });
+	});
 	return issues;
 }
 
