@@ -1,4 +1,5 @@
 /** Reads content/: courses as their authors write them. Whatever is broken stops it with file, line and field. */
+import { createHash } from 'node:crypto';
 import { readdirSync, readFileSync } from 'node:fs';
 import { join, relative } from 'node:path';
 import { marked, type Token, type Tokens } from 'marked';
@@ -11,6 +12,7 @@ import { ExerciseError } from '$lib/server/bench/exercise/exercise-error';
 import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
 import { issuesOf, pathOf } from '$lib/server/bench/exercise/zod-issues';
 import { parseFigureText } from '$lib/server/bench/figure/parse-figure';
+import { ENGINE_VERSION } from '$lib/server/bench/receiver/random';
 
 /** Something in content/ can't be published: "harbour/06-power/spread.yaml:12: questions[0].unit: …". */
 export class ContentError extends Error {
@@ -38,12 +40,33 @@ export interface CourseContent {
 	units: UnitContent[];
 }
 
+/** Exercises that have been checked before, by the hash of their file's text; what is read anew is added. */
+export type CheckedExercises = Map<string, Exercise>;
+
+/** Hash of a course's files as they stand, names and bytes; the engine's version with them, since checking draws scenes. */
+export function hashOfCourse(root: string, folder: string): string {
+	const hash = createHash('sha256').update(`course ${ENGINE_VERSION}`);
+	const files = readdirSync(join(root, folder), { recursive: true, withFileTypes: true })
+		.filter((entry) => entry.isFile())
+		.map((entry) => join(entry.parentPath, entry.name))
+		.sort();
+	for (const file of files) {
+		const bytes = readFileSync(file);
+		hash.update(`\n${relative(root, file)} ${bytes.length}\n`).update(bytes);
+	}
+	return hash.digest('hex');
+}
+
+const hashOfExercise = (text: string): string =>
+	createHash('sha256').update(`exercise ${ENGINE_VERSION}\n`).update(text).digest('hex');
+
 /**
  * Every course under `root`, in the order of their folders.
+ * @param checked exercises that need no checking again
  * @throws ContentError at the first fault
  */
-export function readContent(root: string): CourseContent[] {
-	const courses = foldersIn(root).map((folder) => readCourse(root, folder));
+export function readContent(root: string, checked: CheckedExercises = new Map()): CourseContent[] {
+	const courses = coursesIn(root).map((folder) => readCourse(root, folder, checked));
 	refuseTwins(courses, 'exercises', ({ units }) => units.flatMap(({ exercises }) => exercises));
 	refuseTwins(courses, 'units', ({ units }) => units);
 	return courses;
@@ -64,7 +87,7 @@ function refuseTwins(
 	}
 }
 
-function readCourse(root: string, folder: string): CourseContent {
+function readCourse(root: string, folder: string, checked: CheckedExercises): CourseContent {
 	const file = readYaml(root, join(folder, 'course.yaml'), courseFile);
 	const { slug, title, summary, units } = file.value;
 	if (slug !== folder) throw file.errorAt('slug', `must be the folder's name, ${folder}`);
@@ -75,11 +98,11 @@ function readCourse(root: string, folder: string): CourseContent {
 		slug,
 		title,
 		summary,
-		units: units.map((unit, index) => readUnit(root, join(folder, expected[index]), unit))
+		units: units.map((unit, index) => readUnit(root, join(folder, expected[index]), unit, checked))
 	};
 }
 
-function readUnit(root: string, folder: string, unit: CourseUnit): UnitContent {
+function readUnit(root: string, folder: string, unit: CourseUnit, checked: CheckedExercises): UnitContent {
 	const files = entriesIn(root, folder);
 	const expected = ['lesson.md', ...unit.exercises.map((slug) => `${slug}.yaml`)];
 	const missing = expected.find((name) => !files.includes(name));
@@ -89,7 +112,7 @@ function readUnit(root: string, folder: string, unit: CourseUnit): UnitContent {
 	return {
 		...unit,
 		...readLesson(root, join(folder, 'lesson.md')),
-		exercises: unit.exercises.map((slug) => readExercise(root, join(folder, `${slug}.yaml`), slug))
+		exercises: unit.exercises.map((slug) => readExercise(root, join(folder, `${slug}.yaml`), slug, checked))
 	};
 }
 
@@ -129,9 +152,12 @@ function readFigure(text: string, path: string, firstLine: number): Figure {
 	}
 }
 
-function readExercise(root: string, path: string, slug: string): Exercise {
+function readExercise(root: string, path: string, slug: string, checked: CheckedExercises): Exercise {
+	const text = readText(root, path);
+	const hash = hashOfExercise(text);
 	try {
-		const exercise = parseExerciseText(readText(root, path), path);
+		const exercise = checked.get(hash) ?? parseExerciseText(text, path);
+		checked.set(hash, exercise);
 		if (exercise.slug === slug) return exercise;
 	} catch (cause) {
 		if (!(cause instanceof ExerciseError)) throw cause;
@@ -176,6 +202,9 @@ function readText(root: string, path: string): string {
 		throw new ContentError(path, 1, '', 'is missing');
 	}
 }
+
+/** Folders of courses, in order. */
+export const coursesIn = (root: string): string[] => foldersIn(root);
 
 const foldersIn = (folder: string): string[] =>
 	readdirSync(folder, { withFileTypes: true })

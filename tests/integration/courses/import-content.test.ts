@@ -3,6 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { stringify } from 'yaml';
+import { CheckedContent } from '$lib/server/db/models/checked-content';
 import { Course } from '$lib/server/db/models/course';
 import { Edition } from '$lib/server/db/models/edition';
 import { Exercise } from '$lib/server/db/models/exercise';
@@ -83,6 +84,35 @@ describe('importContent({root, now})', () => {
 		await Promise.all([run(), run(), run()]);
 		expect(await run()).toEqual([{ slug, edition: 1, created: false }]);
 		expect(await editions()).toHaveLength(1);
+	});
+
+	it('looks at no exercise again while the files are the same, nor at those that are, in a course that changed', async () => {
+		await importContent({ root: 'content', now });
+		const startedAt = performance.now();
+		const again = await importContent({ root: 'content', now });
+		// Checking one exercise alone takes longer than this.
+		expect(performance.now() - startedAt).toBeLessThan(1000);
+		expect(again.every(({ created }) => !created)).toBe(true);
+
+		await run();
+		const own = (await CheckedContent.findAll()).find(
+			({ definition }) => definition?.slug === `spread-${made}`
+		);
+		// Were the file checked again, this title would not be there.
+		await own!.update({ definition: { ...own!.definition!, title: 'As it was checked' } });
+		change(LESSON, 'slice', 'part');
+		expect(await run()).toEqual([{ slug, edition: 2, created: true }]);
+		const second = (await editions())[1];
+		const [exercise] = await Exercise.findAll({ where: { editionId: second.id } });
+		expect(exercise.title).toBe('As it was checked');
+	});
+
+	it('publishes anew what goes back to what it was before the newest edition', async () => {
+		await run();
+		change(LESSON, 'slice', 'part');
+		await run();
+		change(LESSON, 'part', 'slice');
+		expect(await run()).toEqual([{ slug, edition: 3, created: true }]);
 	});
 
 	it.each([

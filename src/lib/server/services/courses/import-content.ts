@@ -1,11 +1,18 @@
 import { createHash } from 'node:crypto';
 import type { Transaction } from 'sequelize';
-import { readContent, type CourseContent, type UnitContent } from '$lib/server/content';
+import {
+	coursesIn,
+	hashOfCourse,
+	readContent,
+	type CourseContent,
+	type UnitContent
+} from '$lib/server/content';
 import { Course } from '$lib/server/db/models/course';
 import { Edition } from '$lib/server/db/models/edition';
 import { Exercise } from '$lib/server/db/models/exercise';
 import { Unit } from '$lib/server/db/models/unit';
 import { inTransaction } from '$lib/server/db/transaction';
+import { checkedExercises, noteCourse, noteExercises, publishedAlready } from './checked-content';
 import { renderLesson } from './render-lesson';
 import { renderMarkdownTemplate } from './render-markdown';
 
@@ -23,10 +30,20 @@ export interface ImportedCourse {
  * @throws ContentError with file, line and field at the first fault; nothing is published then
  */
 export async function importContent({ root, now }: { root: string; now: Date }): Promise<ImportedCourse[]> {
-	const courses = readContent(root);
+	const hashes = new Map(coursesIn(root).map((folder) => [folder, hashOfCourse(root, folder)]));
+	const unchanged = await publishedAlready([...hashes.values()]);
+	if (unchanged) return unchanged;
+	const checked = await checkedExercises();
+	const courses = readContent(root, checked);
 	return inTransaction(async (transaction) => {
 		const imported: ImportedCourse[] = [];
-		for (const course of courses) imported.push(await importCourse(course, now, transaction));
+		for (const course of courses) {
+			const published = await importCourse(course, now, transaction);
+			imported.push(published.course);
+			const hash = hashes.get(course.slug) as string;
+			await noteCourse(hash, published.editionId, now, transaction);
+		}
+		await noteExercises(checked, now, transaction);
 		return imported;
 	});
 }
@@ -35,7 +52,7 @@ async function importCourse(
 	content: CourseContent,
 	now: Date,
 	transaction: Transaction
-): Promise<ImportedCourse> {
+): Promise<{ course: ImportedCourse; editionId: number }> {
 	const course = await lockedCourse(content.slug, now, transaction);
 	const newest = await Edition.findOne({
 		where: { courseId: course.id },
@@ -44,7 +61,8 @@ async function importCourse(
 	});
 	const contentHash = createHash('sha256').update(JSON.stringify(content)).digest('hex');
 	if (newest?.contentHash === contentHash) {
-		return { slug: content.slug, edition: newest.number, created: false };
+		const { id: editionId, number: edition } = newest;
+		return { course: { slug: content.slug, edition, created: false }, editionId };
 	}
 	const number = (newest?.number ?? 0) + 1;
 	const { title, summary } = content;
@@ -53,7 +71,7 @@ async function importCourse(
 		{ transaction }
 	);
 	for (const unit of content.units) await createUnit(edition.id, unit, transaction);
-	return { slug: content.slug, edition: number, created: true };
+	return { course: { slug: content.slug, edition: number, created: true }, editionId: edition.id };
 }
 
 /** The course's row, made if need be and locked: whoever else imports this course waits here. */
