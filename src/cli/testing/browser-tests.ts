@@ -16,7 +16,13 @@ const BUILD_FOLDER = '.data/test/build';
 const HOST = '127.0.0.1';
 
 /** Builds the application, starts it on a database made for this run, and runs the browser tests against it. */
-export async function runBrowserTests(args: string[]): Promise<Count> {
+export const runBrowserTests = (args: string[]): Promise<Count> =>
+	withBuiltServer((origin, chromium) => runPlaywright(args, origin, chromium));
+
+/** Builds the application, starts it on a database made for this run, with demo people, and stops it after `use`. */
+export async function withBuiltServer<T>(
+	use: (origin: string, chromiumPath: string) => Promise<T>
+): Promise<T> {
 	const chromium = await step('Browser', () => ({ path: findChromium(), note: findChromium() }));
 	await step('Build', () => ensureBuild(BUILD_FOLDER));
 	await step('Database', openFreshDatabase);
@@ -26,9 +32,11 @@ export async function runBrowserTests(args: string[]): Promise<Count> {
 	const port = await anyFreePort(HOST);
 	const address = { host: HOST, port, origin: `http://${HOST}:${port}` };
 	const server = await step('Server', () => startBuilt(BUILD_FOLDER, address));
-	const count = await runPlaywright(args, address.origin, chromium.path);
-	await server.stop();
-	return count;
+	try {
+		return await use(address.origin, chromium.path);
+	} finally {
+		await server.stop();
+	}
 }
 
 const findChromium = (): string => process.env.CHROMIUM ?? requireProgram('chromium', 'chromium');

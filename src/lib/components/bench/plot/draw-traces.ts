@@ -67,7 +67,8 @@ function stroke(
 	for (let i = 2; i < line.length; i += 2) context.lineTo(line[i], line[i + 1]);
 	context.strokeStyle = colourOf(style.token);
 	context.lineWidth = style.widthPx;
-	context.lineJoin = 'round';
+	// A point a pixel: nobody sees how it joins, and the round way costs most of the stroke.
+	context.lineJoin = 'bevel';
 	context.lineCap = style.cap;
 	context.setLineDash([...style.dashPx]);
 	context.stroke();

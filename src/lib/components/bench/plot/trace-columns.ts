@@ -13,11 +13,14 @@ export function traceColumns(levelsDbm: ArrayLike<number>, frame: PlotFrame): Fl
 	const floorPx = frame.bottomPx;
 	const yOf = (levelDbm: number) => Math.min(floorPx, frame.y(levelDbm));
 	if (points <= 2 * widthPx) {
-		const line: number[] = [];
+		const line = new Float32Array(2 * points);
+		let used = 0;
 		for (let i = 0; i < points; i++) {
-			if (!Number.isNaN(levelsDbm[i])) line.push(frame.leftPx + i * stepPx, yOf(levelsDbm[i]));
+			if (Number.isNaN(levelsDbm[i])) continue;
+			line[used++] = frame.leftPx + i * stepPx;
+			line[used++] = yOf(levelsDbm[i]);
 		}
-		return Float32Array.from(line);
+		return line.subarray(0, used);
 	}
 	const line: number[] = [];
 	let column = -1;

@@ -116,9 +116,12 @@ export class Bench {
 		this.run.stop();
 	}
 
-	/** The level a trace shows at a place on the axis; undefined while it holds nothing there. */
+	/**
+	 * The level a trace shows at a place on the axis; undefined while it holds nothing there. As calm as the figures are:
+	 * flags stand where the readings were taken, and don't move with every sweep.
+	 */
 	levelAt(at: number, trace: number): number | undefined {
-		const drawn = this.traces.shown[trace - 1]?.drawnDbm;
+		const drawn = this.traces.read[trace - 1]?.drawnDbm;
 		if (!drawn || drawn.length < 2) return undefined;
 		const { start, stop } = this.axis;
 		const index = Math.round(((at - start) / (stop - start)) * (drawn.length - 1));
