@@ -89,7 +89,12 @@ export async function setUpAsTaught(page: Page): Promise<void> {
 	await averageTraceOne(page, 16);
 }
 
-export async function startReading(page: Page, kind: string, fields: Record<string, string>): Promise<void> {
+export async function startReading(
+	page: Page,
+	kind: string,
+	fields: Record<string, string>,
+	act = 'Start the reading'
+): Promise<void> {
 	await page.getByRole('button', { name: 'Reading', exact: true }).click();
 	await page
 		.getByRole('group', { name: 'Start a reading' })
@@ -98,7 +103,7 @@ export async function startReading(page: Page, kind: string, fields: Record<stri
 	const form = page.getByRole('group', { name: 'Start a reading' });
 	for (const [label, text] of Object.entries(fields))
 		await form.getByLabel(label, { exact: true }).fill(text);
-	await form.getByRole('button', { name: 'Start the reading' }).click();
+	await form.getByRole('button', { name: act, exact: true }).click();
 }
 
 export const readingRow = (page: Page, words: string | RegExp): Locator =>

@@ -88,6 +88,25 @@ test('an answer in the wrong unit is refused and what was typed stays', async ({
 	await expect(answerField(page, 2)).toHaveValue('-60');
 });
 
+test('markers stay over a reload, and a count that finds no line says so at its marker', async ({ page }) => {
+	const { channel } = await order(page);
+	await setUp(page, 'Centre', channel);
+	await setUp(page, 'Span', '100 kHz');
+	await page.getByRole('button', { name: 'Marker', exact: true }).click();
+	const kept = page.waitForResponse((response) => response.url().endsWith('/markings') && response.ok());
+	await page.getByLabel('Frequency of marker A').fill(channel);
+	await page.getByLabel('Frequency of marker A').press('Enter');
+	await kept;
+	await startReading(page, 'Frequency count', { Gate: '10 ms' }, 'Count');
+	await expect(readingRow(page, 'Frequency count')).toContainText(
+		/Nothing to count: no single line stands 20 dB/
+	);
+	await page.reload();
+	await expectSweeping(page);
+	const at = page.getByRole('slider', { name: 'Marker A' });
+	expect(Number(await at.getAttribute('aria-valuenow'))).toBeCloseTo(Number.parseFloat(channel) * 1e6, 0);
+});
+
 test('a bench left and opened again goes on at the next sweep', async ({ page }) => {
 	const sweep = async () => Number(/Sweep (\d+)/.exec(await page.getByText(/^Sweep \d+/).innerText())![1]);
 	await page.waitForTimeout(2000);

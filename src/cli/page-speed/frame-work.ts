@@ -24,7 +24,14 @@ export async function frameWorkMs(page: Page, ms: number): Promise<FrameWork> {
 	await session.send('Tracing.start', {
 		transferMode: 'ReportEvents',
 		traceConfig: {
-			includedCategories: ['toplevel', 'devtools.timeline', 'disabled-by-default-devtools.timeline']
+			includedCategories: [
+				'__metadata',
+				'disabled-by-default-devtools.timeline',
+				'disabled-by-default-devtools.timeline.frame',
+				'devtools.timeline',
+				'devtools.timeline.frame',
+				'toplevel'
+			]
 		}
 	});
 	await page.waitForTimeout(ms);
@@ -54,7 +61,7 @@ export function workPerFrame(events: readonly TraceEvent[]): FrameWork {
 		.filter((start) => threadOf(start) === busiest)
 		.map(({ ts }) => ts)
 		.sort((a, b) => a - b);
-	const tasks = events.filter((event) => /RunTask$/.test(event.name) && threadOf(event) === busiest);
+	const tasks = events.filter((event) => event.name === 'RunTask' && threadOf(event) === busiest);
 	const work: FrameWork = {
 		processorMs: times.slice(1).map(() => 0),
 		wallMs: times.slice(1).map(() => 0)

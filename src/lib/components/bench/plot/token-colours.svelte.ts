@@ -7,7 +7,14 @@ import type { TraceStyle } from './trace-style';
  * @returns `of(token)`: the colour in force; reading it in an effect re-runs the effect when the scheme changes
  */
 export function tokenColours(element: () => Element | undefined) {
-	const subscribe = createSubscriber((update) => {
+	// Reading a style makes the browser work styles out anew, and a plot asks many times a frame.
+	let known: Record<string, string> = {};
+	const subscribe = createSubscriber((changed) => {
+		const update = () => {
+			known = {};
+			changed();
+		};
+		known = {};
 		const night = matchMedia('(prefers-color-scheme: dark)');
 		night.addEventListener('change', update);
 		const choice = new MutationObserver(update);
@@ -21,7 +28,11 @@ export function tokenColours(element: () => Element | undefined) {
 		of(token: TraceStyle['token'] | 'ink'): string {
 			subscribe();
 			const target = element();
-			return target ? getComputedStyle(target).getPropertyValue(`--${token}`).trim() || 'currentColor' : '';
+			if (!target) return '';
+			const colour =
+				known[token] ?? (getComputedStyle(target).getPropertyValue(`--${token}`).trim() || 'currentColor');
+			known[token] = colour;
+			return colour;
 		}
 	};
 }
