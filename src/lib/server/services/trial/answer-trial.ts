@@ -39,6 +39,7 @@ export async function answerTrial(
 		true: finding.true,
 		difference,
 		mistakes,
-		remarks: remarks.map((remark) => remark.text)
+		// A wrong number's reason is its mistake; what else may be said of the markers would only stand in its way.
+		remarks: verdict === 'wrong' ? [] : remarks.map((remark) => remark.text)
 	};
 }
