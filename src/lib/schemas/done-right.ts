@@ -1,6 +1,6 @@
 /**
  * `GET /api/attempts/[id]/done-right`: the taught method on the learner's own seed, step by step, once the attempt is closed.
- * Its rows come as frames from `…/done-right/rows?from=&to=`; they are numbered on their own, from 0.
+ * The rows on show after a step come as frames from `…/done-right/rows?step=`; they are numbered on their own, from 0.
  */
 import { z } from 'zod';
 import { doneRightStep } from './finding';
@@ -17,7 +17,7 @@ export const playedStep = doneRightStep.extend({
 	do: z.enum(['set', 'sweep', 'read', 'answer']),
 	/** The receiver after this step. */
 	resolved: resolvedSettings,
-	/** The rows that its traces hold after this step: the first since they restarted, and the last. */
+	/** The rows that its traces hold after this step: the first since they restarted, and the last; null before the first. */
 	rows: z.strictObject({ from: rowNumber, to: rowNumber }).nullable(),
 	reading: z
 		.strictObject({
@@ -29,7 +29,17 @@ export const playedStep = doneRightStep.extend({
 		})
 		.optional()
 });
-export const doneRightResponse = z.strictObject({ steps: z.array(playedStep) });
+export const doneRightResponse = z.strictObject({
+	/** The receiver before the first step. */
+	start: resolvedSettings,
+	steps: z.array(playedStep)
+});
+
+/**
+ * Which step's rows are asked for, from 0: those its traces hold; where nothing has been swept yet with its set-up, the one
+ * sweep that would come next.
+ */
+export const stepQuery = z.strictObject({ step: z.coerce.number().pipe(z.int().min(0).max(59)) });
 
 export type ReadingMark = z.infer<typeof readingMark>;
 export type PlayedStepView = z.infer<typeof playedStep>;

@@ -73,6 +73,8 @@ const gets = { view, hint, finding, rows, setUps, doneRight, doneRightRows, aban
 	string,
 	Handler
 >;
+/** What those of them ask for that ask for something. */
+const queries: Record<string, string> = { rows: '?from=0&to=1', doneRightRows: '?step=0' };
 
 const post = (name: string, actor: Actor | null, id: string, body: unknown) =>
 	posts[name].handler(
@@ -213,8 +215,8 @@ describe('endpoints of attempts', () => {
 		for (const name of Object.keys(posts)) {
 			expect((await post(name, null, id, posts[name].good())).status).toBe(401);
 		}
-		for (const handler of Object.values(gets)) {
-			const response = await handler(createEvent(null, { id }, { query: '?from=0&to=1' }));
+		for (const [name, handler] of Object.entries(gets)) {
+			const response = await handler(createEvent(null, { id }, { query: queries[name] }));
 			expect(response.status).toBe(401);
 		}
 	});
@@ -229,14 +231,20 @@ describe('endpoints of attempts', () => {
 				expect(response.status).toBe(404);
 				answers.add(await response.text());
 			}
-			for (const handler of Object.values(gets)) {
-				const response = await handler(createEvent(stranger, { id: asked }, { query: '?from=0&to=1' }));
+			for (const [name, handler] of Object.entries(gets)) {
+				const response = await handler(createEvent(stranger, { id: asked }, { query: queries[name] }));
 				expect(response.status).toBe(404);
 				answers.add(await response.text());
 			}
 		}
 		expect([...answers]).toEqual(['{"message":"There is no such attempt."}']);
 		expect(await checksums()).toEqual(before);
+	});
+
+	it('doneRightRows: what is no step is refused', async () => {
+		for (const query of ['', '?step=x', '?step=-1', '?step=60', '?step=0.5', '?step=0&x=1']) {
+			await refused(await gets.doneRightRows(createEvent(actor, { id }, { query })));
+		}
 	});
 
 	it('rows: bad ranges are refused', async () => {

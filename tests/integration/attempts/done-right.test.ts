@@ -18,9 +18,9 @@ async function createClosed() {
 	return { actor, attempt, finding };
 }
 
-async function rowsOf(actor: Actor, attemptId: number, from: number, to: number): Promise<PieceFrame[]> {
+async function rowsOf(actor: Actor, attemptId: number, step: number): Promise<PieceFrame[]> {
 	const decoder = new FrameDecoder();
-	const stream = await streamDoneRightRows(actor, attemptId, { from, to });
+	const stream = await streamDoneRightRows(actor, attemptId, step);
 	const bytes = new Uint8Array(await new Response(stream).arrayBuffer());
 	return decoder.push(bytes).filter((frame) => frame.type === 'piece');
 }
@@ -43,7 +43,7 @@ describe('getDoneRight(actor, attemptId)', () => {
 	it('sends the rows that its readings were taken off', async () => {
 		const { actor, attempt } = await createClosed();
 		const { steps } = await getDoneRight(actor, attempt.id);
-		const pieces = await rowsOf(actor, attempt.id, 0, 19);
+		const pieces = await rowsOf(actor, attempt.id, 2);
 		expect(pieces.map(({ row }) => row)).toEqual(Array.from({ length: 20 }, (_, i) => i));
 		const { startHz, stopHz, rbwHz } = steps[2].resolved;
 		const levels = combineRows([pieces[19].levelsDbm], 'live', 1, 'power');
@@ -54,7 +54,21 @@ describe('getDoneRight(actor, attemptId)', () => {
 		}, 0);
 		const powerDbm = 10 * Math.log10((milliwatts * cell) / (1.0645 * rbwHz));
 		expect(powerDbm).toBeCloseTo(steps[2].value!.value, 1);
-		expect(await rowsOf(actor, attempt.id, 18, 99)).toHaveLength(2);
+	});
+
+	it('shows a set-up before its first sweep by the sweep that comes next', async () => {
+		const { actor, attempt } = await createClosed();
+		const [preview, ...more] = await rowsOf(actor, attempt.id, 0);
+		expect(more).toEqual([]);
+		expect(preview.levelsDbm).toEqual((await rowsOf(actor, attempt.id, 1))[0].levelsDbm);
+	});
+
+	it('has no rows for a step that the method hasn’t, naming the field', async () => {
+		const { actor, attempt } = await createClosed();
+		await expect(rowsOf(actor, attempt.id, 6)).rejects.toMatchObject({
+			code: 'invalid',
+			issues: [{ field: 'step' }]
+		});
 	});
 
 	it('says nothing while the attempt is open, to its owner or to anybody', async () => {
@@ -62,7 +76,7 @@ describe('getDoneRight(actor, attemptId)', () => {
 		const { actor: administrator } = await createUser('administrator');
 		for (const who of [actor, administrator]) {
 			await expect(getDoneRight(who, attempt.id)).rejects.toMatchObject({ code: 'conflict' });
-			const asked = streamDoneRightRows(who, attempt.id, { from: 0, to: 1 });
+			const asked = streamDoneRightRows(who, attempt.id, 0);
 			await expect(asked).rejects.toMatchObject({ code: 'conflict' });
 		}
 	});

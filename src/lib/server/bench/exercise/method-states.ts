@@ -11,6 +11,8 @@ export interface MethodState {
 	resolved: ResolvedSettings;
 	/** Rows that the traces hold: the first since they restarted, and the last; null before the first. */
 	rows: { from: number; to: number } | null;
+	/** The row that the next sweep would make. */
+	nextRow: number;
 }
 
 /** Set-up and rows after each step of a method, from the exercise's start settings; nothing is swept. */
@@ -33,6 +35,7 @@ export function methodStates(drawn: DrawnExercise, steps: readonly FilledStep[])
 		}
 		// A count takes a row number that nothing is swept with.
 		if (step.do === 'read' && step.reading.kind === 'count') nextRow += 1;
-		return { settings, resolved, rows: sweptTo >= restartRow ? { from: restartRow, to: sweptTo } : null };
+		const rows = sweptTo >= restartRow ? { from: restartRow, to: sweptTo } : null;
+		return { settings, resolved, rows, nextRow };
 	});
 }

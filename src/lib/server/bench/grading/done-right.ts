@@ -2,11 +2,13 @@ import type { PlayedStepView } from '$lib/schemas/done-right';
 import type { DoneRightStep } from '$lib/schemas/finding';
 import { unitOfPart } from '$lib/schemas/part';
 import type { Unit } from '$lib/units/unit';
+import type { ResolvedSettings } from '$lib/schemas/settings';
 import type { SweepWith } from '../exercise/bench-session';
 import { questionOf, type DrawnExercise } from '../exercise/drawn-exercise';
-import { methodStates } from '../exercise/method-states';
+import { methodStates, type MethodState } from '../exercise/method-states';
 import { runMethod, type PlayedStep } from '../exercise/run-method';
 import { partsOf } from './asked';
+import { resolveSettings } from '../receiver/resolve-settings';
 import { describeReading } from './describe-reading';
 import { describeSettings } from './describe-settings';
 import { readingMark } from './reading-mark';
@@ -52,7 +54,10 @@ export const doneRight = (drawn: DrawnExercise, sweepWith?: SweepWith): DoneRigh
 
 /** The taught method as it is played: each step in words, with the receiver and the rows it leaves behind. */
 export interface PlayedExercise {
+	start: ResolvedSettings;
 	steps: PlayedStepView[];
+	/** Where the bench stands after each step. */
+	states: MethodState[];
 	/** Which rows were swept with which settings: what it takes to sweep them again. */
 	log: ReturnType<typeof runMethod>['record']['log'];
 }
@@ -62,6 +67,8 @@ export function playDoneRight(drawn: DrawnExercise): PlayedExercise {
 	const { steps, record } = runMethod(drawn);
 	const states = methodStates(drawn, drawn.method);
 	return {
+		start: resolveSettings(drawn.brief.start, drawn.profile),
+		states,
 		steps: steps.map((played, i) => ({
 			...described(drawn, played),
 			do: played.step.do,

@@ -57,6 +57,13 @@ export function attemptWire(attemptId: AttemptView['id']): BenchWire {
 	};
 }
 
+/** The rows on show after one step of the taught method on a closed attempt's signal. */
+export const doneRightRows = async (
+	attemptId: AttemptView['id'],
+	step: number
+): Promise<AsyncIterable<Frame[]>> =>
+	framesOf(await answered(fetch(`/api/attempts/${attemptId}/done-right/rows?step=${step}`)));
+
 const savedSetUps: NonNullable<BenchWire['savedSetUps']> = {
 	list: async () => savedSetUpsResponse.parse(await (await answered(fetch('/api/set-ups'))).json()).setUps,
 	save: async (name, settings) => {

@@ -1,4 +1,4 @@
-import { rowsQuery } from '$lib/schemas/sweep-stream';
+import { stepQuery } from '$lib/schemas/done-right';
 import { requireActor } from '$lib/server/auth/require-actor';
 import { readId } from '$lib/server/read-id';
 import { parseWith } from '$lib/server/read-json';
@@ -10,8 +10,8 @@ export const GET: RequestHandler = ({ locals, params, url }) =>
 	respondWith(async () => {
 		const actor = requireActor(locals);
 		const attemptId = readId(params.id, 'attempt');
-		const query = parseWith(rowsQuery, Object.fromEntries(url.searchParams));
-		return new Response(await streamDoneRightRows(actor, attemptId, query), {
+		const { step } = parseWith(stepQuery, Object.fromEntries(url.searchParams));
+		return new Response(await streamDoneRightRows(actor, attemptId, step), {
 			headers: { 'content-type': 'application/octet-stream', 'cache-control': 'no-store' }
 		});
 	});
