@@ -19,7 +19,7 @@ export const findingMistake = z.strictObject({
 	text: z.string(),
 	/** "10 log (16 000/1 064.5) = 11.8 dB"; set in figures. */
 	sum: z.string().optional(),
-	/** Small print beside the sum: "less 1.1 dB of ripple and receiver error". */
+	/** Small print beside the sum: "less 1.1 dB of statistical scatter and receiver error". */
 	note: z.string().optional()
 });
 
@@ -53,6 +53,8 @@ export const findingPlot = z.strictObject({
 	band: z
 		.strictObject({ startHz: z.number(), stopHz: z.number(), value: z.number(), unit, text: z.string() })
 		.nullable(),
+	/** The true frequency that was asked for. */
+	at: z.strictObject({ frequencyHz: z.number(), text: z.string() }).nullish(),
 	point: z.strictObject({ frequencyHz: z.number(), levelDbm: z.number() }).nullable(),
 	/** The sweep to draw, that of the attached reading, else the last one: its rows, its trace (1…4), how they combine. */
 	trace: z

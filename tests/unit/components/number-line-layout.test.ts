@@ -43,3 +43,29 @@ describe('numberLineLayout(marks, width)', () => {
 	it('writes figures at round values only', () =>
 		expect(layout.ticks.flatMap(({ figure }) => figure ?? [])).toEqual(['−20', '−15', '−10']));
 });
+
+describe('numberLineLayout() with many mistakes close together', () => {
+	const crowd = [
+		mark(-20, 'yours', 'yours'),
+		mark(-19.6, 'true', 'true'),
+		...Array.from({ length: 7 }, (_, i) => mark(-20 + i * 0.1, `a mistake of some length ${i}`))
+	];
+
+	it.each([330, 412, 900])('lets no words overlap within %d px', (width) => {
+		const { marks: placed, above, below } = numberLineLayout(crowd, width);
+		for (const row of new Set(placed.map((one) => one.row))) {
+			const inRow = placed.filter((one) => one.row === row).sort((a, b) => a.labelX - b.labelX);
+			inRow.slice(1).forEach((one, i) => {
+				const room = ((one.label.length + inRow[i].label.length) * 6.4) / 2;
+				expect(one.labelX - inRow[i].labelX).toBeGreaterThan(room);
+			});
+			expect(row).toBeGreaterThanOrEqual(-above);
+			expect(row).toBeLessThanOrEqual(below);
+		}
+	});
+
+	it('takes no more rows than it needs', () => {
+		const { above, below } = numberLineLayout(marks, 900);
+		expect([above, below]).toEqual([1, 1]);
+	});
+});

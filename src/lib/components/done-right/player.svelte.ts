@@ -23,7 +23,7 @@ export class DoneRightPlayer {
 	/** The last of them that has been drawn. */
 	drawn = $state(0);
 	trouble = $state('');
-	readonly step: PlayedStepView = $derived(this.steps[this.at]);
+	readonly step: PlayedStepView = $derived.by(() => this.steps[this.at]);
 	readonly tracesDbm = $derived.by(() => {
 		const { rows, step, drawn } = this;
 		if (rows.length === 0) return [];

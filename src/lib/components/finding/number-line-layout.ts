@@ -11,12 +11,15 @@ export interface PlacedMark extends Mark {
 	x: number;
 	/** Middle of its words, px. */
 	labelX: number;
-	/** Row of its words: −1, −2 above the axis, 1, 2 below. */
-	row: -2 | -1 | 1 | 2;
+	/** Row of its words: −1, −2 … above the axis, 1, 2 … below. */
+	row: number;
 }
 
 export interface NumberLineLayout {
 	marks: PlacedMark[];
+	/** How many rows of words there are above and below the axis. */
+	above: number;
+	below: number;
 	ticks: { x: number; figure?: string }[];
 	start: number;
 	stop: number;
@@ -28,9 +31,13 @@ const sidePx = 14;
 const labelPx = ({ label, role, matched }: Mark) =>
 	label.length * (role === 'mistake' && !matched ? characterPx : characterPx * 1.1);
 
+const gapPx = 10;
+/** Rows that a mistake's words may stand in, the nearest first: below, then above the row of yours and true. */
+const rowsFor = [1, -2, 2, -3, 3, -4, 4, -5, 5] as const;
+
 /**
- * Lays marks out over `width` px. The learner's number and the truth stand in the row next above the axis; mistakes
- * alternate below and above; words keep clear of their neighbours in a row.
+ * Lays marks out over `width` px. The learner's number and the truth stand in the row next above the axis; a mistake's words
+ * in the nearest row where they have room under (or over) their own mark; words keep clear of their neighbours in a row.
  */
 export function numberLineLayout(marks: readonly Mark[], width: number): NumberLineLayout {
 	const values = marks.map((mark) => mark.value);
@@ -41,29 +48,42 @@ export function numberLineLayout(marks: readonly Mark[], width: number): NumberL
 	const start = low - margin;
 	const stop = high + margin;
 	const x = (value: number) => sidePx + ((value - start) / (stop - start)) * (width - 2 * sidePx);
-	const rows = rowsOf(marks);
+	const rows = rowsOf(marks, x, width);
 	const placed = marks.map((mark, i) => ({ ...mark, x: x(mark.value), labelX: 0, row: rows[i] }));
-	for (const row of [-2, -1, 1, 2] as const) {
+	for (const row of new Set(rows)) {
 		const members = placed.filter((mark) => mark.row === row);
 		const middles = spreadLabels(
 			members.map((mark) => ({ at: mark.x, size: labelPx(mark) })),
 			{ from: 0, to: width },
-			10
+			gapPx
 		);
 		members.forEach((mark, i) => (mark.labelX = middles[i]));
 	}
-	return { marks: placed, ticks: ticksOf(start, stop, x), start, stop };
+	const above = Math.max(1, -Math.min(...rows));
+	const below = Math.max(1, ...rows);
+	return { marks: placed, above, below, ticks: ticksOf(start, stop, x), start, stop };
 }
 
-/** Yours and true nearest above; the rest by turns, so that neighbours on the axis stand in different rows. */
-function rowsOf(marks: readonly Mark[]): PlacedMark['row'][] {
-	const turns = [1, -2, 2] as const;
+/** Yours and true nearest above; each of the rest where it has room, else in the row that is emptiest. */
+function rowsOf(marks: readonly Mark[], x: (value: number) => number, width: number): number[] {
+	const taken = new Map<number, { from: number; to: number }[]>();
 	const others = marks
 		.map((mark, i) => ({ mark, i }))
 		.filter(({ mark }) => mark.role === 'mistake')
-		.sort((a, b) => a.mark.value - b.mark.value);
-	const rows: PlacedMark['row'][] = marks.map(() => -1);
-	others.forEach(({ mark, i }, n) => (rows[i] = mark.matched ? 1 : turns[n % turns.length]));
+		.sort((a, b) => Number(b.mark.matched) - Number(a.mark.matched) || a.mark.value - b.mark.value);
+	const rows: number[] = marks.map(() => -1);
+	for (const { mark, i } of others) {
+		const half = labelPx(mark) / 2;
+		const middle = Math.min(width - half, Math.max(half, x(mark.value)));
+		const place = { from: middle - half - gapPx, to: middle + half + gapPx };
+		const free = rowsFor.find((row) =>
+			(taken.get(row) ?? []).every(({ from, to }) => to <= place.from + gapPx || from + gapPx >= place.to)
+		);
+		const emptiest = () =>
+			[...rowsFor].sort((a, b) => (taken.get(a)?.length ?? 0) - (taken.get(b)?.length ?? 0))[0];
+		rows[i] = free ?? emptiest();
+		taken.set(rows[i], [...(taken.get(rows[i]) ?? []), place]);
+	}
 	return rows;
 }
 

@@ -19,6 +19,7 @@ export function questionPlot({ evidence, source }: Judgement, log: readonly Sett
 	const pointHz = source?.family === 'point' ? placeHz(source.reading) : undefined;
 	return {
 		band: bandOf(question),
+		at: atOf(question),
 		point: pointHz === undefined || !source ? null : { frequencyHz: pointHz, levelDbm: source.reading.value },
 		trace: rows && resolved ? drawnTrace(rows, resolved, source?.trace ?? 1) : null,
 		signal: resolved ? signalLevels(drawn.scene, resolved) : null
@@ -38,6 +39,15 @@ function bandOf(question: DrawnQuestion): FindingPlot['band'] {
 		unit,
 		text: isWidth ? `true ${askedName(question)}` : `true ${askedName(question)}, ${formatFrequency(width)}`
 	};
+}
+
+/** The frequency asked for, where it is one on the axis: not a width, a deviation or a modulating frequency. */
+function atOf(question: DrawnQuestion): FindingPlot['at'] {
+	const { quantity, part, truth: frequencyHz, unit } = question;
+	const onAxis =
+		['count', 'peak', 'next-peak', 'marker'].includes(quantity.kind) ||
+		/^(lower|upper|frequency)Hz$/.test(part ?? '');
+	return unit === 'Hz' && onAxis ? { frequencyHz, text: `true ${askedName(question)}` } : null;
 }
 
 function drawnTrace(rows: { from: number; to: number }, resolved: ResolvedSettings, trace: number) {

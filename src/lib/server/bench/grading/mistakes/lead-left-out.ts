@@ -25,7 +25,7 @@ export const leadLeftOut = defineMistake('lead-left-out', leadLoss, ({ lossDb })
 		const set = source ? correctionWords(source.appliedDb, leadDb) : 'it was not added back';
 		return {
 			title: 'The lead stands between you and the answer',
-			text: `Your order asks for the level at ${drawn.brief.plane}. The lead loses ${lead} dB on the way to the receiver, and ${set}.`,
+			text: `Your order asks for the level at ${drawn.brief.plane}. The lead loses ${lead} dB on the way to the receiver, and ${set}. A loss is made good with a plus: Correction +${lead} dB.`,
 			sum: `${figure(yours, question.digits)} + ${lead} = ${figure(yours + leadDb, question.digits)} ${question.unit}`,
 			part: 'the lead, not added back',
 			bad: { at: 'answer', text: `Here: the answer is without the lead’s ${lead} dB` }

@@ -53,12 +53,12 @@ export const markerAsPower = defineMistake('marker-as-power', z.strictObject({})
 		const filters = Math.round(spreadHz / noiseWidthHz);
 		return {
 			title: 'A point is not a power',
-			text: `A marker says how much falls into your ${formatFrequency(rbwHz)} filter at one frequency. This signal is spread over ${formatFrequency(Math.round(spreadHz / 100) * 100)}, ${inWords(filters)} filters wide, so the marker misses most of it.`,
+			text: `A marker says how much falls into your ${formatFrequency(rbwHz)} filter at one frequency; to noise that filter is ${figure(noiseWidthHz, 1)} Hz wide, its noise bandwidth. This signal is spread over ${formatFrequency(Math.round(spreadHz / 100) * 100)}, ${inWords(filters)} filters wide, so the marker misses most of it.`,
 			sum: `10 log (${figure(spreadHz, 0)}/${figure(noiseWidthHz, 1)}) = ${figure(missedDb, 1)} dB`,
 			note:
 				Math.abs(restDb) < 0.05
 					? undefined
-					: `${restDb > 0 ? 'less' : 'and'} ${figure(Math.abs(restDb), 1)} dB of ripple and the receiver’s own error`,
+					: `${restDb > 0 ? 'less' : 'and'} ${figure(Math.abs(restDb), 1)} dB of statistical scatter and the receiver’s own error`,
 			part: `the rest of the signal, which the marker’s ${formatFrequency(rbwHz)} doesn’t hold`,
 			bad: { at: 'reading', text: 'Here: the order asks for a channel, so take channel power' }
 		};

@@ -25,7 +25,7 @@ export const markerNotDivided = defineMistake('marker-not-divided', z.strictObje
 		const noiseWidthHz = NOISE_BANDWIDTH * rbwHz;
 		return {
 			title: 'A marker reads a bandwidth, not a hertz',
-			text: `The marker shows what falls into your ${formatFrequency(rbwHz)} filter, whose noise bandwidth is ${figure(noiseWidthHz, 1)} Hz. For one hertz, take that many off.`,
+			text: `The marker shows what falls into your ${formatFrequency(rbwHz)} filter, whose noise bandwidth, the width of a flat filter that passes as much noise, is ${figure(noiseWidthHz, 1)} Hz. For one hertz, take that many off.`,
 			sum: `${figure(yours, 1)} − 10 log (${figure(noiseWidthHz, 1)}) = ${figure(yours - powerRatioToDb(noiseWidthHz), 1)} dBm/Hz`,
 			part: 'not divided by the noise bandwidth',
 			bad: { at: 'answer', text: 'Here: dBm is not dBm/Hz; read a density' }
