@@ -9,7 +9,13 @@ export const attemptLine = z.strictObject({
 	startedAt: z.iso.datetime(),
 	closedAt: z.iso.datetime().nullable(),
 	/** Null while it is open. */
-	passed: z.boolean().nullable()
+	passed: z.boolean().nullable(),
+	/** Questions it asked, answers handed in, and those of them that were right. */
+	questions: z.int(),
+	answered: z.int(),
+	rightAnswers: z.int(),
+	/** The best of them, which counts; none does before one is closed with a right answer. */
+	counts: z.boolean()
 });
 
 export const exerciseProgress = z.strictObject({

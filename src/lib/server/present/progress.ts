@@ -7,6 +7,9 @@ interface AttemptRecord {
 	closedAt: Date | null;
 	/** As the database says it; null while the attempt is open. */
 	passed: 0 | 1 | null;
+	questions: number;
+	answered: number;
+	rightAnswers: number;
 }
 
 /** An exercise with what this person has done at it. @param attempts theirs, oldest first */
@@ -15,6 +18,7 @@ export function presentProgress(
 	attempts: AttemptRecord[]
 ): ExerciseProgress {
 	const open = attempts.find(({ closedAt }) => closedAt === null);
+	const best = bestOf(attempts);
 	return {
 		slug: exercise.slug,
 		title: exercise.title,
@@ -23,8 +27,15 @@ export function presentProgress(
 		triesLeft: Math.max(0, exercise.tries - attempts.length),
 		standing: standingOf(attempts, open !== undefined),
 		openAttemptId: open?.id ?? null,
-		attempts: attempts.map(presentAttemptLine)
+		attempts: attempts.map((attempt) => presentAttemptLine(attempt, attempt === best))
 	};
+}
+
+/** The attempt that counts: the first passed, else the first with most answers right. */
+function bestOf(attempts: AttemptRecord[]): AttemptRecord | undefined {
+	const worth = ({ passed, rightAnswers }: AttemptRecord) => (passed === 1 ? Infinity : rightAnswers);
+	const most = Math.max(0, ...attempts.map(worth));
+	return most > 0 ? attempts.find((attempt) => worth(attempt) === most) : undefined;
 }
 
 function standingOf(attempts: AttemptRecord[], open: boolean): ExerciseProgress['standing'] {
@@ -33,11 +44,18 @@ function standingOf(attempts: AttemptRecord[], open: boolean): ExerciseProgress[
 	return attempts.length === 0 ? 'not-started' : 'not-passed';
 }
 
-const presentAttemptLine = ({ id, number, startedAt, closedAt, passed }: AttemptRecord): AttemptLineView => ({
-	id,
-	number,
-	state: closedAt ? 'closed' : 'open',
-	startedAt: startedAt.toISOString(),
-	closedAt: closedAt?.toISOString() ?? null,
-	passed: passed === null ? null : passed === 1
-});
+const presentAttemptLine = (attempt: AttemptRecord, counts: boolean): AttemptLineView => {
+	const { id, number, startedAt, closedAt, passed, questions, answered, rightAnswers } = attempt;
+	return {
+		id,
+		number,
+		state: closedAt ? 'closed' : 'open',
+		startedAt: startedAt.toISOString(),
+		closedAt: closedAt?.toISOString() ?? null,
+		passed: passed === null ? null : passed === 1,
+		questions,
+		answered,
+		rightAnswers,
+		counts
+	};
+};

@@ -46,7 +46,7 @@ function atOf(question: DrawnQuestion): FindingPlot['at'] {
 	const { quantity, part, truth: frequencyHz, unit } = question;
 	const onAxis =
 		['count', 'peak', 'next-peak', 'marker'].includes(quantity.kind) ||
-		/^(lower|upper|frequency)Hz$/.test(part ?? '');
+		(typeof part === 'string' && ['lowerHz', 'upperHz', 'frequencyHz'].includes(part));
 	return unit === 'Hz' && onAxis ? { frequencyHz, text: `true ${askedName(question)}` } : null;
 }
 

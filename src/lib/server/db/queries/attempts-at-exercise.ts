@@ -11,6 +11,10 @@ export interface AttemptLine {
 	closedAt: Date | null;
 	/** Null while it is open. */
 	passed: 0 | 1 | null;
+	/** Questions it asked, answers handed in, and those of them that were right. */
+	questions: number;
+	answered: number;
+	rightAnswers: number;
 }
 
 /** A person's attempts in a course, whatever its edition, oldest first; of one exercise if `slug` is given. */
@@ -21,7 +25,10 @@ export function listAttempts(
 	transaction?: Transaction
 ): Promise<AttemptLine[]> {
 	return sequelize.query<AttemptLine>(
-		`SELECT a.id, e.slug AS exerciseSlug, a.number, a.started_at AS startedAt, a.closed_at AS closedAt, f.passed
+		`SELECT a.id, e.slug AS exerciseSlug, a.number, a.started_at AS startedAt, a.closed_at AS closedAt, f.passed,
+			CAST(JSON_LENGTH(e.definition, '$.questions') AS INT) AS questions,
+			CAST((SELECT COUNT(*) FROM answers x WHERE x.attempt_id = a.id) AS INT) AS answered,
+			CAST((SELECT COUNT(*) FROM answers x WHERE x.attempt_id = a.id AND x.verdict LIKE 'right%') AS INT) AS rightAnswers
 		FROM attempts a
 		JOIN exercises e ON e.id = a.exercise_id
 		JOIN editions d ON d.id = e.edition_id
