@@ -46,6 +46,14 @@ export async function openBench(page: Page): Promise<void> {
 	await expectSweeping(page);
 }
 
+/** Opens another exercise by its address and starts it; waits until sweeps come. */
+export async function openExercise(page: Page, slug: string): Promise<void> {
+	await page.goto(`/learn/exercises/${slug}`);
+	await page.getByRole('button', { name: /^Start/ }).click();
+	await expect(page).toHaveURL(/\/learn\/attempts\/\d+$/);
+	await expectSweeping(page);
+}
+
 export async function expectSweeping(page: Page): Promise<void> {
 	await ready(page);
 	await expect(page.getByText(/^Sweep \d+/)).toBeVisible({ timeout: 20_000 });

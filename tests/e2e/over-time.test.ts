@@ -1,6 +1,6 @@
 import { readFile } from 'node:fs/promises';
 import { expect, test } from '@playwright/test';
-import { expectAccessible, openBench, order, setUp, setUpField, signIn } from './bench-page';
+import { expectAccessible, openExercise, setUp, setUpField, signIn } from './bench-page';
 
 test.setTimeout(90_000);
 test.use({ viewport: { width: 1440, height: 900 } });
@@ -9,9 +9,8 @@ test('sweeps stand over time, are played back and saved, and a set-up is recalle
 	page
 }) => {
 	await signIn(page, 'silas.arkle@tarnvale.example');
-	await openBench(page);
-	const { channel } = await order(page);
-	await setUp(page, 'Centre', channel);
+	await openExercise(page, 'power-of-a-spread-sensor');
+	await setUp(page, 'Span', '4 MHz');
 	await page.getByRole('button', { name: 'Marker', exact: true }).click();
 	await page.getByRole('button', { name: 'Over time' }).click();
 	const picture = page.getByRole('application', { name: /^Sweeps over time/ });
@@ -27,7 +26,7 @@ test('sweeps stand over time, are played back and saved, and a set-up is recalle
 	expect((await readFile(await image.path())).subarray(1, 4).toString()).toBe('PNG');
 	const [data] = await saved('Save the data');
 	expect(await readFile(await data.path(), 'utf8')).toMatch(
-		/^\uFEFFSweepwright,[^]*frequency_Hz,"1 Live, dBm"/
+		/^\uFEFFSweepwright,[^]*frequency_Hz,"1 Hold maximum, dBm"/
 	);
 	await page.getByLabel('Name for the set-up in force').fill('Wide');
 	await page.getByRole('button', { name: 'Keep this set-up' }).click();
@@ -39,7 +38,7 @@ test('sweeps stand over time, are played back and saved, and a set-up is recalle
 	await page.getByRole('button', { name: 'Wide', exact: true }).click();
 	await expect(page.getByText('“Wide” recalled.')).toBeVisible();
 	await page.keyboard.press('Escape');
-	await expect(setUpField(page, 'Span')).toHaveValue('2');
+	await expect(setUpField(page, 'Span')).toHaveValue('4');
 
 	await page.getByRole('button', { name: /^Sweep \d+/ }).click();
 	await page.getByRole('button', { name: /^Play back this set-up/ }).click();

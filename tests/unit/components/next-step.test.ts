@@ -8,7 +8,11 @@ const attempt = (number: number, passed: boolean | null, closedAt: string | null
 	state: closedAt === null ? ('open' as const) : ('closed' as const),
 	startedAt: '2026-03-02T09:00:00Z',
 	closedAt,
-	passed
+	passed,
+	questions: 2,
+	answered: closedAt === null ? 0 : 2,
+	rightAnswers: passed ? 2 : 0,
+	counts: passed === true
 });
 const exercise = (number: number, over: Partial<ExerciseProgress>) =>
 	({
