@@ -71,7 +71,14 @@ function presentQuestion(
 	text: string,
 	{ unit, digits, tolerance }: ExerciseParts['written'][number]
 ): QuestionView {
-	return { id, text, unit, units: presentUnits(unit), digits, toleranceText: presentTolerance(tolerance, unit) };
+	return {
+		id,
+		text,
+		unit,
+		units: presentUnits(unit),
+		digits,
+		toleranceText: presentTolerance(tolerance, unit)
+	};
 }
 
 /** Every unit that an answer asked for in `unit` may be given in, that one first. */

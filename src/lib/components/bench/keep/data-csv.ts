@@ -50,7 +50,9 @@ export function dataCsv(snapshot: BenchSnapshot, { who, at }: { who: string; at:
 			...traces.map(({ levelsDbm }) => numberCell(levelsDbm[i], 3))
 		].join(',')
 	);
-	return [...head.map((cells) => cells.map(textCell).join(',')), '', columns.join(','), ...lines, ''].join('\r\n');
+	return [...head.map((cells) => cells.map(textCell).join(',')), '', columns.join(','), ...lines, ''].join(
+		'\r\n'
+	);
 }
 
 /** Without the spaces and signs that only a page needs. */

@@ -14,6 +14,7 @@ import type { EdgeConditions } from './shared-edges';
 import { SteadyNoiseTable } from './steady-noise-table';
 import { TimedSources, touching, type Burst } from './timed-sources';
 import { WindowSampler, type WindowBurst } from './window-sampler';
+import { shifted } from './shifted-line';
 
 /** Windows followed in one bucket at most; the rest are taken to be like them. */
 const MOST_WINDOWS = 6;
@@ -294,18 +295,4 @@ export class LongBucketConditions {
 			if (t >= s.startS && t < s.stopS) v += s.variance(frame.startHz + frame.sweepHzPerS * t);
 		return { v, re: out[0], im: out[1] };
 	}
-}
-
-/** The same passage seen from a later start. */
-function shifted(line: PassingLine, byS: number): PassingLine {
-	const rate = line.passingHzPerS;
-	const psi = 2 * Math.PI * ((line.offsetHz * byS) % 1) - Math.PI * rate * byS * byS;
-	const cos = Math.cos(psi);
-	const sin = Math.sin(psi);
-	return {
-		re: line.re * cos - line.im * sin,
-		im: line.re * sin + line.im * cos,
-		offsetHz: line.offsetHz - rate * byS,
-		passingHzPerS: rate
-	};
 }

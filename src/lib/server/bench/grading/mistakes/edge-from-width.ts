@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { partOf } from '$lib/schemas/part';
-import { truth } from '../../truth/truth';
+import { truth } from '$lib/server/bench/truth/truth';
 import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import { defineMistake, type Context } from '../mistake';
 import { ownError } from '../own-error';

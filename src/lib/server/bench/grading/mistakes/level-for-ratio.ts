@@ -4,8 +4,8 @@ import { quantityFrequencyHz } from '$lib/server/bench/exercise/quantity-frequen
 import { askedOffset, neighbourHz } from '../adjacent';
 import { defineMistake, type Context } from '../mistake';
 import { bandSpreadDb } from '../noise-law';
-import { lossDbAt } from '../../exercise/loss-db-at';
-import { drawReceiverError } from '../../receiver/receiver-error';
+import { lossDbAt } from '$lib/server/bench/exercise/loss-db-at';
+import { drawReceiverError } from '$lib/server/bench/receiver/receiver-error';
 import { channelDbm } from '../scene-power';
 import { withReading } from '../spoil';
 import { modelSpread } from '../spreads';

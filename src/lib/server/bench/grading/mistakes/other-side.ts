@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { figure } from '$lib/server/bench/exercise/figure';
 import { partOf } from '$lib/schemas/part';
-import { truth } from '../../truth/truth';
+import { truth } from '$lib/server/bench/truth/truth';
 import { askedOffset, askedSide } from '../adjacent';
 import { defineMistake, type Context } from '../mistake';
 import { readStepOf, withReading } from '../spoil';

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { powerRatioToDb } from '$lib/units/decibel';
 import { figure } from '$lib/server/bench/exercise/figure';
-import type { FilledStep } from '../../exercise/drawn-exercise';
+import type { FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
 import { defineMistake, type SetUp } from '../mistake';
 import { shownPower } from '../noise-law';
 import { withSettings } from '../spoil';
