@@ -35,10 +35,24 @@ function hold(
 }
 
 function average(rows: readonly ArrayLike<number>[], scale: TraceScale): Float32Array {
+	return averageOfScaled(
+		rows.map((row) => scaledRow(row, scale)),
+		scale
+	);
+}
+
+/** A row's levels in dBm as values on a scale: what averages add up. Worth keeping, where the same row is averaged again and again. */
+export function scaledRow(row: ArrayLike<number>, scale: TraceScale): Float64Array {
+	return Float64Array.from(row, toScale[scale]);
+}
+
+/** The mean of rows that are on the scale already, one or more, of equal length; dBm. */
+export function averageOfScaled(rows: readonly Float64Array[], scale: TraceScale): Float32Array {
 	const points = rows[0].length;
 	const sums = new Float64Array(points);
-	const convert = toScale[scale];
-	for (const row of rows) for (let i = 0; i < points; i++) sums[i] += convert(row[i]);
+	for (const row of rows) for (let i = 0; i < points; i++) sums[i] += row[i];
 	const back = fromScale[scale];
-	return Float32Array.from(sums, (sum) => back(sum / rows.length));
+	const mean = new Float32Array(points);
+	for (let i = 0; i < points; i++) mean[i] = back(sums[i] / rows.length);
+	return mean;
 }

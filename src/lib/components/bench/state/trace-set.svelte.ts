@@ -2,7 +2,7 @@
  * The traces on show: rows as they come from the receiver, held and averaged as each trace asks.
  * Samples never become reactive; only the list of finished traces is replaced, once a frame.
  */
-import { combineRows } from '$lib/measure/combine-rows';
+import { averageOfScaled, combineRows, scaledRow } from '$lib/measure/combine-rows';
 import type { PieceFrame } from '$lib/schemas/frames';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 
@@ -56,6 +56,8 @@ export class TraceSet {
 	#piece: Float32Array | undefined;
 	#sweptPoints = 0;
 	#held: Partial<Record<TraceSetUp['mode'], ArrayLike<number>>> = {};
+	/** Rows on the scale that averages are made on. */
+	#onScale = new WeakMap<Float32Array, Float64Array>();
 	/** Traces kept as they were, by position. */
 	#kept: (ShownTrace | undefined)[] = [];
 
@@ -80,7 +82,10 @@ export class TraceSet {
 			else if (before && !this.#kept[i]) this.#kept[i] = { ...before, mode };
 		});
 		this.#setUps = resolved.traces;
-		if (this.#scale !== resolved.scale) this.#held = {};
+		if (this.#scale !== resolved.scale) {
+			this.#held = {};
+			this.#onScale = new WeakMap();
+		}
 		this.#scale = resolved.scale;
 	}
 
@@ -133,7 +138,10 @@ export class TraceSet {
 		}
 		if (setUp.mode === 'average') {
 			const covered = this.#rows.slice(-setUp.count);
-			const levelsDbm = combineRows(levelsOf(covered), 'average', setUp.count, this.#scale);
+			const levelsDbm = averageOfScaled(
+				covered.map((kept) => this.#scaled(kept)),
+				this.#scale
+			);
 			return { ...setUp, rows: { from: covered[0].row, to }, levelsDbm, drawnDbm: levelsDbm };
 		}
 		return {
@@ -142,6 +150,15 @@ export class TraceSet {
 			levelsDbm: last.levelsDbm,
 			drawnDbm: this.#overdrawn(last.levelsDbm)
 		};
+	}
+
+	/** Raising to powers of ten is most of the work of an average, so each row is put on the scale once. */
+	#scaled({ levelsDbm }: KeptRow): Float64Array {
+		const known = this.#onScale.get(levelsDbm);
+		if (known) return known;
+		const made = scaledRow(levelsDbm, this.#scale);
+		this.#onScale.set(levelsDbm, made);
+		return made;
 	}
 
 	#hold(mode: 'max-hold' | 'min-hold'): ArrayLike<number> {
