@@ -32,7 +32,7 @@ export const REACH: Record<string, Reach> = {
 	'POST /sign-out': everybody,
 	'POST /scheme': everybody,
 	'POST /api/trial': { ...everybody, absent: true },
-	'POST /api/trial/rows': { ...everybody, body: { token: 'none', choice: 0, row: 0 } },
+	'POST /api/trial/rows': { ...everybody, absent: true, body: { token: 'none', choice: 0, row: 0 } },
 	'POST /api/trial/answers': everybody,
 
 	'load /account': signedIn,
