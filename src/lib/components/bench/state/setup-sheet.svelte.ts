@@ -16,7 +16,6 @@ export class SetupSheet {
 	readonly #run: SweepRun;
 	/** The latest set-up asked for: changes made while one is on its way build on it. */
 	#wanted = $state.raw<Settings | undefined>();
-	#asked = 0;
 	#stepTimer: ReturnType<typeof setTimeout> | undefined;
 
 	constructor(run: SweepRun) {
@@ -65,7 +64,6 @@ export class SetupSheet {
 
 	async #ask(settings: Settings, field: string, text: string): Promise<void> {
 		clearTimeout(this.#stepTimer);
-		const asked = ++this.#asked;
 		this.#wanted = settings;
 		this.drop(field);
 		this.trouble = undefined;
@@ -76,7 +74,8 @@ export class SetupSheet {
 			if (error.issues.length === 0) this.trouble = error.message;
 			else this.refuse(field, text, reasonFor(field, error));
 		} finally {
-			if (asked === this.#asked) this.#wanted = undefined;
+			// A step typed while this was on its way is wanted still, though it has not been asked for yet.
+			if (this.#wanted === settings) this.#wanted = undefined;
 		}
 	}
 }
