@@ -55,7 +55,7 @@ test('a figure is turned by pointer and by arrow keys, keeps the earlier line, a
 	await expect(figure.getByRole('row', { name: /^300\s?Hz/ })).toBeVisible();
 	// Drag the pointer to the end of the rule.
 	const cells = control.locator('label');
-	const [from, to] = [await cells.nth(2).boundingBox(), await cells.nth(3).boundingBox()];
+	const [from, to] = [await cells.nth(1).boundingBox(), await cells.nth(2).boundingBox()];
 	if (!from || !to) throw new Error('The rule is not on the screen');
 	await page.mouse.move(from.x + from.width / 2, from.y + 10);
 	await page.mouse.down();
