@@ -60,6 +60,7 @@ test('anyone tries the bench: an answer that was not read is refused, a wrong on
 	await expectAccessible(page);
 
 	await page.getByRole('button', { name: 'Take another signal' }).click();
+	await expect(verdict).toBeHidden();
 	await page.getByRole('radio', { name: '1 kHz', exact: true }).check({ force: true });
 	await expect(page.getByText('now, through 1 kHz')).toBeVisible();
 	await markTheTwo(page);

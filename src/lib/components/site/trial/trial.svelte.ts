@@ -32,6 +32,8 @@ export class Trial {
 	#looks: { choice: number; sweeps: number }[] = [];
 	#rows = 1;
 	#touchedAtMs = -Infinity;
+	#turn: Promise<void> = Promise.resolve();
+	#waiting = 0;
 
 	constructor(view: TrialView, wire: TrialWire) {
 		this.#wire = wire;
@@ -95,9 +97,9 @@ export class Trial {
 
 	/** Looks through another resolution. */
 	async look(choice: number): Promise<void> {
-		if (choice === this.sweep.choice) return;
 		this.touch();
 		await this.#ask(async () => {
+			if (choice === this.sweep.choice) return;
 			const next = await this.#wire.sweep(this.view.token, choice, this.#rows);
 			this.before = this.sweep;
 			this.#looks.push({ choice, sweeps: 1 });
@@ -137,15 +139,20 @@ export class Trial {
 		this.#rows = sweep.row + 1;
 	}
 
-	async #ask(work: () => Promise<void>): Promise<void> {
+	/** One thing after another, so that a choice made while a new signal is on its way is made on that one. */
+	#ask(work: () => Promise<void>): Promise<void> {
 		this.busy = true;
 		this.problem = undefined;
-		try {
-			await work();
-		} catch (error) {
-			this.problem = error instanceof Error ? error.message : String(error);
-		} finally {
-			this.busy = false;
-		}
+		this.#waiting += 1;
+		this.#turn = this.#turn
+			.then(work)
+			.catch((error: unknown) => {
+				this.problem = error instanceof Error ? error.message : String(error);
+			})
+			.finally(() => {
+				this.#waiting -= 1;
+				this.busy = this.#waiting > 0;
+			});
+		return this.#turn;
 	}
 }
