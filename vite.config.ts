@@ -1,6 +1,7 @@
 import { sveltekit } from '@sveltejs/kit/vite';
 import { svelte } from '@sveltejs/vite-plugin-svelte';
 import tailwindcss from '@tailwindcss/vite';
+import { availableParallelism } from 'node:os';
 import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
 
@@ -11,6 +12,8 @@ export default defineConfig({
 	plugins: process.env.VITEST ? [] : [tailwindcss(), sveltekit()],
 	test: {
 		expect: { requireAssertions: true },
+		// Vitest leaves a core free, which on two cores is half of them.
+		maxWorkers: Math.max(2, availableParallelism() - 1),
 		coverage: {
 			provider: 'v8',
 			include: pureRooms.map((room) => `src/lib/${room}/**/*.ts`),

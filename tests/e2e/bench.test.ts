@@ -12,7 +12,7 @@ import {
 	startReading
 } from './bench-page';
 
-test.setTimeout(120_000);
+test.setTimeout(240_000);
 test.use({ viewport: { width: 1440, height: 900 } });
 
 test.beforeEach(async ({ page }) => {

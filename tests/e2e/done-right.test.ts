@@ -2,7 +2,7 @@ import { expect, test } from '@playwright/test';
 import { answerField, expectAccessible, handIn, openExercise, signIn } from './bench-page';
 import { ready } from './ready';
 
-test.setTimeout(90_000);
+test.setTimeout(240_000);
 test.use({ viewport: { width: 1440, height: 900 } });
 
 test('after a wrong answer the method is played on the same signal, and the report is one page', async ({

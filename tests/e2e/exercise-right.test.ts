@@ -16,7 +16,7 @@ import {
 } from './bench-page';
 import { ready } from './ready';
 
-test.setTimeout(180_000);
+test.setTimeout(300_000);
 test.use({ viewport: { width: 1440, height: 900 } });
 
 test('an exercise done as taught is right, and the next step is the course', async ({ page }) => {

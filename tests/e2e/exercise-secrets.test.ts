@@ -69,7 +69,7 @@ async function seedOf(attemptId: string): Promise<string> {
 }
 
 test('neither seed nor scene nor truths reach the browser before the attempt closes', async ({ page }) => {
-	test.setTimeout(180_000);
+	test.setTimeout(300_000);
 	const { bodies, settled } = await record(page);
 	await signIn(page, 'bridget.hale@tarnvale.example');
 	await openBench(page);

@@ -14,7 +14,7 @@ import {
 	startReading
 } from './bench-page';
 
-test.setTimeout(180_000);
+test.setTimeout(300_000);
 test.use({ viewport: { width: 1440, height: 900 } });
 const email = 'ewan.brack@skerrycoast.example';
 

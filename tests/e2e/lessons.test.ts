@@ -2,7 +2,7 @@ import { expect, test, type Locator } from '@playwright/test';
 import { collectFaults, expectAccessible, signIn } from './bench-page';
 import { ready } from './ready';
 
-test.setTimeout(180_000);
+test.setTimeout(300_000);
 
 /** What a figure shows: its lines and its readings. */
 const shown = (figure: Locator): Promise<string> =>

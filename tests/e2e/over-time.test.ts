@@ -2,7 +2,7 @@ import { readFile } from 'node:fs/promises';
 import { expect, test } from '@playwright/test';
 import { expectAccessible, openExercise, setUp, setUpField, signIn } from './bench-page';
 
-test.setTimeout(90_000);
+test.setTimeout(240_000);
 test.use({ viewport: { width: 1440, height: 900 } });
 
 test('sweeps stand over time, are played back and saved, and a set-up is recalled by its name', async ({

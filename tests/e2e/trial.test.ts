@@ -3,6 +3,8 @@ import { expect, test, type Locator, type Page } from '@playwright/test';
 import { collectFaults, expectAccessible } from './bench-page';
 import { ready } from './ready';
 
+test.setTimeout(240_000);
+
 /** What the plot says of the distance between the markers, kHz. */
 async function distanceKHz(page: Page): Promise<number> {
 	const words = await page.getByRole('group', { name: /Spectrum around/ }).getAttribute('aria-label');
