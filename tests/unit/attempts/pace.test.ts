@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { LeastRecentlyUsed } from '$lib/server/services/attempts/least-recently-used';
+import { LeastRecentlyUsed } from '$lib/server/services/process/least-recently-used';
 import { Pace } from '$lib/server/services/attempts/pace';
 
 const never = new AbortController().signal;

@@ -12,6 +12,16 @@ export const withSettings = (steps: readonly FilledStep[], changes: Settings): F
 		step.do === 'set' ? { ...step, settings: patchSettings(step.settings, changes) } : step
 	);
 
+/** The method with its trace held, and let run for longer than an average takes, because a hold fills slowly. */
+export const heldLonger = (
+	steps: readonly FilledStep[],
+	mode: 'max-hold' | 'min-hold',
+	detector: Settings['detector']
+): FilledStep[] =>
+	withSettings(steps, { traces: [{ mode }], detector }).map((step) =>
+		step.do === 'sweep' ? { ...step, sweeps: 2 * step.sweeps } : step
+	);
+
 type AnswerStep = Extract<FilledStep, { do: 'answer' }>;
 type ReadStep = Extract<FilledStep, { do: 'read' }>;
 const isAnswer = (step: FilledStep, questionId: string): step is AnswerStep =>

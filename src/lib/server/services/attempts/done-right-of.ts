@@ -3,7 +3,7 @@ import { may } from '$lib/server/domain/policy';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 import { getAttempt } from './get-attempt';
-import { LeastRecentlyUsed } from './least-recently-used';
+import { LeastRecentlyUsed } from '../process/least-recently-used';
 import { drawnFor, refuseOtherEngine, type SignalSource } from './prepared-bench';
 import { exerciseOf, signalSource } from './signal-source';
 

@@ -8,7 +8,7 @@ import { resolveSettings } from '$lib/server/bench/receiver/resolve-settings';
 import { prepareSweep } from '$lib/server/bench/receiver/sweep';
 import type { SweepPlan } from '$lib/server/bench/receiver/sweep-plan';
 import { DomainError } from '$lib/server/errors';
-import { LeastRecentlyUsed } from './least-recently-used';
+import { LeastRecentlyUsed } from '../process/least-recently-used';
 import { RowClock } from './row-clock';
 
 /** What names the signal of an attempt and nothing else. */

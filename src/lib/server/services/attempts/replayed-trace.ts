@@ -1,7 +1,7 @@
 import { combineRows } from '$lib/measure/combine-rows';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import { countRows, type DrawnRows } from './drawn-rows';
-import { LeastRecentlyUsed } from './least-recently-used';
+import { LeastRecentlyUsed } from '../process/least-recently-used';
 import type { SignalSource } from './prepared-bench';
 import { replayRows } from './replay-rows';
 

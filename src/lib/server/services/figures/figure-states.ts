@@ -2,7 +2,7 @@ import type { Figure, FigureChoice } from '$lib/schemas/figure';
 import type { FigureState } from '$lib/schemas/figure-view';
 import { startValues } from '$lib/server/bench/figure/choices';
 import { computeFigure } from '$lib/server/bench/figure/compute-figure';
-import { LeastRecentlyUsed } from '../attempts/least-recently-used';
+import { LeastRecentlyUsed } from '../process/least-recently-used';
 
 /** A figure of a unit. Editions never change, so these two names say all. */
 export interface PlacedFigure {

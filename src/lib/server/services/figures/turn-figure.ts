@@ -1,19 +1,17 @@
 import type { Figure, FigureChoice } from '$lib/schemas/figure';
 import type { FigureRequest, FigureState } from '$lib/schemas/figure-view';
 import { Unit } from '$lib/server/db/models/unit';
-import { addressBlock } from '$lib/server/domain/address-block';
 import { may } from '$lib/server/domain/policy';
 import type { Actor } from '$lib/server/domain/role';
-import { takeTry, type Bucket, type Limit } from '$lib/server/domain/sign-in-limit';
+import type { Limit } from '$lib/server/domain/sign-in-limit';
 import { DomainError, type Issue } from '$lib/server/errors';
-import { LeastRecentlyUsed } from '../attempts/least-recently-used';
+import { ShareByAddress } from '../process/share-by-address';
 import { figureState } from './figure-states';
 
-/** Figures made for one address, behind which a whole training room may sit. What is made already costs nothing. */
+/** Figures made for one address. What is made already costs nothing. */
 export const FIGURE_LIMIT: Limit = { capacity: 120, drainS: 0.5 };
 
-// Of this process: it is this process's time that is shared out.
-const buckets = new LeastRecentlyUsed<string, Bucket>(10_000);
+const figuresMade = new ShareByAddress('figures', FIGURE_LIMIT);
 
 /**
  * A lesson's figure with its controls where the reader put them.
@@ -32,7 +30,7 @@ export async function turnFigure(
 	const unit = await Unit.findByPk(unitId, { attributes: ['id', 'figures'] });
 	const figure = unit?.figures.find(({ id }) => id === figureId);
 	if (!figure) throw new DomainError('not_found', 'There is no such figure.');
-	return figureState({ unitId, figure }, chosen(figure, values), () => count(address, now));
+	return figureState({ unitId, figure }, chosen(figure, values), () => figuresMade.spend(address, now));
 }
 
 /** One choice for each control, as asked; @throws DomainError for one that isn't offered */
@@ -51,16 +49,4 @@ function chosen({ controls }: Figure, values: FigureRequest['values']): FigureCh
 	];
 	if (issues.length > 0) throw new DomainError('invalid', 'The figure can’t be set like that.', { issues });
 	return controls.map(({ setting }) => values[setting]);
-}
-
-function count(address: string, now: Date): void {
-	const name = addressBlock(address);
-	const empty = (): Bucket => ({ level: 0, updatedAt: now });
-	const { retryAfterS, bucket } = takeTry(buckets.get(name, empty), FIGURE_LIMIT, now);
-	if (retryAfterS > 0) {
-		const message = `Too many figures at once. The next one is possible in ${retryAfterS} s.`;
-		throw new DomainError('too_many', message, { retryAfterS });
-	}
-	buckets.forget(name);
-	buckets.get(name, () => bucket);
 }

@@ -5,7 +5,7 @@ import { explainQuestion } from '$lib/server/bench/grading/question-finding';
 import { trialRecord } from '$lib/server/bench/trial/trial-record';
 import { DomainError } from '$lib/server/errors';
 import { parseAnswers } from '../attempts/parse-answers';
-import { spendAnswer } from './spend';
+import { trialAnswers } from './trial-limits';
 import { openTrialBench, sweepTrial } from './trial-bench';
 
 /**
@@ -17,7 +17,7 @@ export async function answerTrial(
 	address: string,
 	now: Date
 ): Promise<TrialFinding> {
-	spendAnswer(address, now);
+	trialAnswers.spend(address, now);
 	const { token, looks, row, fromHz, toHz, text, unit } = request;
 	const bench = await openTrialBench(token, now);
 	const { drawn } = bench;

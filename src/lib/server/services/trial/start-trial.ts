@@ -3,7 +3,7 @@ import type { TrialView } from '$lib/schemas/trial';
 import { resolveSettings } from '$lib/server/bench/receiver/resolve-settings';
 import { trialSetUp } from '$lib/server/bench/trial/trial-set-up';
 import { presentTolerance, presentUnits } from '$lib/server/present/exercise';
-import { spendSweep } from './spend';
+import { trialSweeps } from './trial-limits';
 import { newTrialBench, presentSweep, sweepTrial, trialExercise } from './trial-bench';
 
 /**
@@ -11,7 +11,7 @@ import { newTrialBench, presentSweep, sweepTrial, trialExercise } from './trial-
  * @throws DomainError `not_found` when nothing is open to trial; `too_many`
  */
 export async function startTrial(address: string, now: Date): Promise<TrialView> {
-	spendSweep(address, now);
+	trialSweeps.spend(address, now);
 	const exercise = await trialExercise();
 	const { token, bench } = await newTrialBench(exercise, randomBytes(16).toString('hex'), now);
 	const { trial, questions, slug, title } = exercise.definition;

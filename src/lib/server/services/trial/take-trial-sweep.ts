@@ -1,5 +1,5 @@
 import type { TrialRowRequest, TrialSweep } from '$lib/schemas/trial';
-import { spendSweep } from './spend';
+import { trialSweeps } from './trial-limits';
 import { openTrialBench, presentSweep, sweepTrial } from './trial-bench';
 
 /**
@@ -11,7 +11,7 @@ export async function takeTrialSweep(
 	address: string,
 	now: Date
 ): Promise<TrialSweep> {
-	spendSweep(address, now);
+	trialSweeps.spend(address, now);
 	const bench = await openTrialBench(token, now);
 	return presentSweep(choice, row, sweepTrial(bench, choice, row));
 }

@@ -10,7 +10,7 @@ import { trialSetUp } from '$lib/server/bench/trial/trial-set-up';
 import { Exercise } from '$lib/server/db/models/exercise';
 import { findTrialId } from '$lib/server/db/queries/find-trial';
 import { DomainError } from '$lib/server/errors';
-import { LeastRecentlyUsed } from '../attempts/least-recently-used';
+import { LeastRecentlyUsed } from '../process/least-recently-used';
 
 const PURPOSE = 'trial';
 /** A visitor may think for as long as this. */

@@ -1,10 +1,9 @@
 import { powerRatioToDb } from '$lib/units/decibel';
 import { z } from 'zod';
-import type { FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
 import { figure } from '$lib/server/bench/exercise/figure';
 import { defineMistake, type SetUp } from '../mistake';
 import { shownPower } from '../noise-law';
-import { withSettings } from '../spoil';
+import { heldLonger, withSettings } from '../spoil';
 
 const WORDS = {
 	detector: {
@@ -23,12 +22,6 @@ const WORDS = {
 
 const picksCrests = ({ trace, resolved }: SetUp, by: keyof typeof WORDS): boolean =>
 	by === 'hold' ? trace.mode === 'max-hold' : resolved.detector === 'positive-peak';
-
-/** A hold with the detector left to itself, and let run for longer: it is still filling. */
-const held = (steps: readonly FilledStep[]): FilledStep[] =>
-	withSettings(steps, { traces: [{ mode: 'max-hold' }], detector: 'auto' }).map((step) =>
-		step.do === 'sweep' ? { ...step, sweeps: 2 * step.sweeps } : step
-	);
 
 /** A signal that looks like noise read through a positive-peak detector, or off a held maximum: the power of its crests. */
 export const peakOnNoise = defineMistake(
@@ -66,6 +59,9 @@ export const peakOnNoise = defineMistake(
 				bad: { at: 'set-up', text: WORDS[by].bad }
 			};
 		},
-		make: (steps) => (by === 'hold' ? held(steps) : withSettings(steps, { detector: 'positive-peak' }))
+		make: (steps) =>
+			by === 'hold'
+				? heldLonger(steps, 'max-hold', 'auto')
+				: withSettings(steps, { detector: 'positive-peak' })
 	})
 );

@@ -1,10 +1,9 @@
 import { z } from 'zod';
 import { powerRatioToDb } from '$lib/units/decibel';
 import { figure } from '$lib/server/bench/exercise/figure';
-import type { FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
 import { defineMistake, type SetUp } from '../mistake';
 import { shownPower } from '../noise-law';
-import { withSettings } from '../spoil';
+import { heldLonger, withSettings } from '../spoil';
 
 const WORDS = {
 	detector: {
@@ -25,12 +24,6 @@ const WORDS = {
 
 const picksTroughs = ({ trace, resolved }: SetUp, by: keyof typeof WORDS): boolean =>
 	by === 'hold' ? trace.mode === 'min-hold' : resolved.detector === 'negative-peak';
-
-/** A hold left to run for longer than an average takes. */
-const held = (steps: readonly FilledStep[]): FilledStep[] =>
-	withSettings(steps, { traces: [{ mode: 'min-hold' }], detector: 'sample' }).map((step) =>
-		step.do === 'sweep' ? { ...step, sweeps: 2 * step.sweeps } : step
-	);
 
 /** A signal that looks like noise read through a minimum detector, or off a held minimum: the power of its troughs. */
 export const troughOnNoise = defineMistake(
@@ -60,6 +53,9 @@ export const troughOnNoise = defineMistake(
 				bad: { at: 'set-up', text: WORDS[by].bad }
 			};
 		},
-		make: (steps) => (by === 'hold' ? held(steps) : withSettings(steps, { detector: 'negative-peak' }))
+		make: (steps) =>
+			by === 'hold'
+				? heldLonger(steps, 'min-hold', 'sample')
+				: withSettings(steps, { detector: 'negative-peak' })
 	})
 );
