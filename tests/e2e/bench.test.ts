@@ -35,6 +35,24 @@ test('a blank takes what people type, steps with the arrow keys, and shows what 
 	expect(faults).toEqual([]);
 });
 
+test('a figure that coupling changes under the cursor is replaced by what is typed next', async ({
+	page
+}) => {
+	await setUp(page, 'Span', '100 kHz');
+	await page.getByLabel('Resolution bandwidth: automatic').check({ force: true });
+	await expect(setUpField(page, 'Resolution bandwidth')).toHaveValue('1');
+	await page.route('**/sweeps', async (route) => {
+		await expect(setUpField(page, 'Resolution bandwidth')).toBeFocused();
+		await route.continue();
+	});
+	await setUpField(page, 'Span').press('ArrowUp');
+	await setUpField(page, 'Resolution bandwidth').focus();
+	await expect(setUpField(page, 'Resolution bandwidth')).toHaveValue('3');
+	await page.keyboard.type('300 Hz');
+	await page.keyboard.press('Enter');
+	await expect(setUpField(page, 'Resolution bandwidth')).toHaveValue('300');
+});
+
 test('a refused value stays as it was typed, says why, and goes away on Escape', async ({ page }) => {
 	const field = setUpField(page, 'Resolution bandwidth');
 	const before = await field.inputValue();
