@@ -38,7 +38,7 @@ export const ROOMS: Room[] = [
 		path: 'src/lib/server/services',
 		mayImport: [
 			...server('present', 'domain', 'bench', 'db', 'mail', 'payments', 'files', 'jobs'),
-			...server('auth', 'content.ts', 'errors.ts', 'env.ts'),
+			...server('auth', 'content', 'errors.ts', 'env.ts'),
 			...lib('measure', 'units', 'schemas')
 		],
 		packages: ['*']
@@ -60,7 +60,7 @@ export const ROOMS: Room[] = [
 		mayImport: [...server('db', 'domain', 'errors.ts', 'env.ts'), ...lib('schemas')],
 		packages: ['*']
 	})),
-	{ path: 'src/lib/server/content.ts', mayImport: [...lib('schemas'), ...server('bench')], packages: ['*'] },
+	{ path: 'src/lib/server/content', mayImport: [...lib('schemas'), ...server('bench')], packages: ['*'] },
 	{ path: 'src/lib/server/env.ts', mayImport: [], packages: ['zod'] },
 	{ path: 'src/lib/server/errors.ts', mayImport: lib('schemas'), packages: [] },
 	{

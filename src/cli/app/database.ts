@@ -62,7 +62,9 @@ export async function importCourses(): Promise<string> {
 	const published = courses
 		.filter(({ created }) => created)
 		.map(({ slug, edition }) => `${slug}, edition ${edition}`);
-	return published.length === 0 ? `${courses.length}, unchanged` : `published ${published.join('; ')}`;
+	const atDesk = courses.filter(({ writtenAtDesk }) => writtenAtDesk).map(({ slug }) => slug);
+	const note = published.length === 0 ? `${courses.length}, unchanged` : `published ${published.join('; ')}`;
+	return atDesk.length === 0 ? note : `${note}; written at the desk, so left alone: ${atDesk.join(', ')}`;
 }
 
 /** Whether nobody is known here yet. */

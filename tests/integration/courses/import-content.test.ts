@@ -5,11 +5,14 @@ import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { stringify } from 'yaml';
 import { CheckedContent } from '$lib/server/db/models/checked-content';
 import { Course } from '$lib/server/db/models/course';
+import { EditionFile } from '$lib/server/db/models/edition-file';
+import { FileContent } from '$lib/server/db/models/file-content';
 import { Edition } from '$lib/server/db/models/edition';
 import { Exercise } from '$lib/server/db/models/exercise';
 import { Unit } from '$lib/server/db/models/unit';
 import { importContent } from '$lib/server/services/courses/import-content';
 import { exerciseDefinition } from '../../factories/exercise';
+import { createUser } from '../../factories/user';
 import { figureBlock, writtenFigure } from '../../factories/figure';
 
 const now = new Date('2026-03-02T09:00:00Z');
@@ -57,7 +60,7 @@ describe('importContent({root, now})', () => {
 	});
 
 	it('publishes a course with its units, lessons and exercises', async () => {
-		expect(await run()).toEqual([{ slug, edition: 1, created: true }]);
+		expect(await run()).toEqual([{ slug, edition: 1, created: true, writtenAtDesk: false }]);
 		const [edition] = await editions();
 		expect(edition).toMatchObject({ number: 1, title: 'Harbour', summary: 'From the quay.', createdAt: now });
 		const [unit] = await Unit.findAll({ where: { editionId: edition.id } });
@@ -82,7 +85,7 @@ describe('importContent({root, now})', () => {
 
 	it('makes no edition when nothing has changed, however often and by however many it is run', async () => {
 		await Promise.all([run(), run(), run()]);
-		expect(await run()).toEqual([{ slug, edition: 1, created: false }]);
+		expect(await run()).toEqual([{ slug, edition: 1, created: false, writtenAtDesk: false }]);
 		expect(await editions()).toHaveLength(1);
 	});
 
@@ -101,10 +104,45 @@ describe('importContent({root, now})', () => {
 		// Were the file checked again, this title would not be there.
 		await own!.update({ definition: { ...own!.definition!, title: 'As it was checked' } });
 		change(LESSON, 'slice', 'part');
-		expect(await run()).toEqual([{ slug, edition: 2, created: true }]);
+		expect(await run()).toEqual([{ slug, edition: 2, created: true, writtenAtDesk: false }]);
 		const second = (await editions())[1];
 		const [exercise] = await Exercise.findAll({ where: { editionId: second.id } });
 		expect(exercise.title).toBe('As it was checked');
+	});
+
+	it('keeps the files an edition was made of, byte for byte, and fills them in for an edition that has none', async () => {
+		await run();
+		const [edition] = await editions();
+		const filesOf = async () => {
+			const files = await EditionFile.findAll({ where: { editionId: edition.id }, order: ['path'] });
+			const contents = await FileContent.findAll({ where: { hash: files.map(({ hash }) => hash) } });
+			return files.map(({ path: name, hash }) => [name, contents.find((one) => one.hash === hash)!.bytes]);
+		};
+		const asWritten = [LESSON, exerciseFile(), 'course.yaml'].map((name) => [name, readFileSync(path(name))]);
+		expect(await filesOf()).toEqual(asWritten);
+		await EditionFile.destroy({ where: { editionId: edition.id } });
+		expect(await run()).toEqual([{ slug, edition: 1, created: false, writtenAtDesk: false }]);
+		expect(await filesOf()).toEqual(asWritten);
+	});
+
+	it('leaves a course alone that somebody has published at the desk since', async () => {
+		await run();
+		const [edition] = await editions();
+		const { user } = await createUser('instructor');
+		const { courseId, title, summary } = edition;
+		const contentHash = '0'.repeat(64);
+		await Edition.create({
+			courseId,
+			number: 2,
+			title,
+			summary,
+			contentHash,
+			createdAt: now,
+			publishedBy: user.id
+		});
+		change(LESSON, 'slice', 'part');
+		expect(await run()).toEqual([{ slug, edition: 2, created: false, writtenAtDesk: true }]);
+		expect(await editions()).toHaveLength(2);
 	});
 
 	it('publishes anew what goes back to what it was before the newest edition', async () => {
@@ -112,7 +150,7 @@ describe('importContent({root, now})', () => {
 		change(LESSON, 'slice', 'part');
 		await run();
 		change(LESSON, 'part', 'slice');
-		expect(await run()).toEqual([{ slug, edition: 3, created: true }]);
+		expect(await run()).toEqual([{ slug, edition: 3, created: true, writtenAtDesk: false }]);
 	});
 
 	it.each([
@@ -127,7 +165,7 @@ describe('importContent({root, now})', () => {
 			const [before] = await editions();
 			const old = await Exercise.findAll({ where: { editionId: before.id } });
 			change(name || exerciseFile(), from, to);
-			expect(await run()).toEqual([{ slug, edition: 2, created: true }]);
+			expect(await run()).toEqual([{ slug, edition: 2, created: true, writtenAtDesk: false }]);
 			const [first, second] = await editions();
 			expect(first.get()).toEqual(before.get());
 			expect(second.contentHash).not.toBe(first.contentHash);
@@ -208,7 +246,7 @@ describe('importContent({root, now})', () => {
 		],
 		[
 			'a folder that is no unit',
-			() => mkdirSync(path('07-nothing')),
+			() => cpSync(path('06-spread'), path('07-nothing'), { recursive: true }),
 			() => /course.yaml:4: units: the folder 07-nothing/
 		]
 	];

@@ -2,7 +2,7 @@
 import { describe, expect, it } from 'vitest';
 import { computeFigure } from '$lib/server/bench/figure/compute-figure';
 import type { FigureChoice } from '$lib/schemas/figure';
-import { readContent } from '$lib/server/content';
+import { readContent } from '$lib/server/content/read-content';
 
 const units = readContent('content').flatMap((course) => course.units);
 const unit = (slug: string) => units.find((one) => one.slug === slug)!;

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { startValues } from '$lib/server/bench/figure/choices';
 import { computeFigure } from '$lib/server/bench/figure/compute-figure';
-import { readContent } from '$lib/server/content';
+import { readContent } from '$lib/server/content/read-content';
 
 const figures = readContent('content').flatMap(({ units }) =>
 	units.flatMap(({ number, figures }) => figures.map((figure) => ({ unit: number, id: figure.id, figure })))

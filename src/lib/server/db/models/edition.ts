@@ -20,6 +20,8 @@ export class Edition extends Model<InferAttributes<Edition>, InferCreationAttrib
 	/** SHA-256 of the content it was made of. */
 	declare contentHash: string;
 	declare createdAt: Date;
+	/** Who published it at the desk; null where it came from content/. */
+	declare publishedBy: CreationOptional<number | null>;
 	declare course?: NonAttribute<Course>;
 }
 
@@ -31,7 +33,8 @@ Edition.init(
 		title: DataTypes.STRING(300),
 		summary: DataTypes.STRING(300),
 		contentHash: DataTypes.CHAR(64),
-		createdAt: DataTypes.DATE(3)
+		createdAt: DataTypes.DATE(3),
+		publishedBy: { type: DataTypes.BIGINT.UNSIGNED, allowNull: true }
 	},
 	{ sequelize, tableName: 'editions', timestamps: false }
 );

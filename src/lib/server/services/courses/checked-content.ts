@@ -1,6 +1,6 @@
 /** What of content/ needs no checking again, because nothing in its files has changed. */
 import { QueryTypes, type Transaction } from 'sequelize';
-import type { CheckedExercises } from '$lib/server/content';
+import type { CheckedExercises } from '$lib/server/content/read-exercise';
 import { sequelize } from '$lib/server/db/connection';
 import { CheckedContent } from '$lib/server/db/models/checked-content';
 import type { ImportedCourse } from './import-content';
@@ -8,18 +8,29 @@ import type { ImportedCourse } from './import-content';
 /** Each course's newest edition, when every one of these hashes is that of a course as it stands there; else null. */
 export async function publishedAlready(hashes: string[]): Promise<ImportedCourse[] | null> {
 	if (hashes.length === 0) return [];
-	const rows = await sequelize.query<{ hash: string; slug: string; edition: number }>(
-		`SELECT checked_content.hash, courses.slug, editions.number AS edition
+	const rows = await sequelize.query<{
+		hash: string;
+		slug: string;
+		edition: number;
+		publishedBy: number | null;
+	}>(
+		`SELECT checked_content.hash, courses.slug, editions.number AS edition, editions.published_by AS publishedBy
 		FROM checked_content
 		JOIN editions ON editions.id = checked_content.edition_id
 		JOIN courses ON courses.id = editions.course_id
 		WHERE checked_content.hash IN (:hashes)
+			AND EXISTS (SELECT 1 FROM edition_files WHERE edition_files.edition_id = editions.id)
 			AND editions.number = (SELECT MAX(number) FROM editions AS others WHERE others.course_id = courses.id)`,
 		{ replacements: { hashes }, type: QueryTypes.SELECT }
 	);
 	const found = hashes.map((hash) => rows.find((row) => row.hash === hash));
 	if (found.includes(undefined)) return null;
-	return found.map((row) => ({ slug: row!.slug, edition: row!.edition, created: false }));
+	return found.map((row) => ({
+		slug: row!.slug,
+		edition: row!.edition,
+		created: false,
+		writtenAtDesk: row!.publishedBy !== null
+	}));
 }
 
 /** Every exercise checked before, by the hash of its file. */

@@ -1,6 +1,6 @@
 import { marked, type Token, type Tokens, type TokensList } from 'marked';
 import type { Lesson, LessonPart } from '$lib/schemas/lesson';
-import { isFigureBlock } from '$lib/server/content';
+import { isFigureBlock } from '$lib/server/content/read-lesson';
 import { sanitised } from './render-markdown';
 
 /**

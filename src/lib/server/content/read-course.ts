@@ -1,0 +1,70 @@
+import { courseFile, type CourseUnit } from '$lib/schemas/course-file';
+import { ContentError } from './content-error';
+import { addressIn, filesUnder, foldersIn, type ContentTree } from './content-tree';
+import type { CourseContent, UnitContent } from './course-content';
+import { readExercise, type CheckedExercises } from './read-exercise';
+import { readLesson } from './read-lesson';
+import { readYaml } from './read-yaml';
+
+/** A unit's folder: its number in two digits, and its slug. */
+export const folderOf = ({ number, slug }: Pick<CourseUnit, 'number' | 'slug'>): string =>
+	`${String(number).padStart(2, '0')}-${slug}`;
+
+/**
+ * A course whose files have all been read and checked.
+ * @param onFault is told of each fault in turn; it throws where one is enough
+ * @returns null when there was a fault and `onFault` went on
+ */
+export function readCourse(
+	tree: ContentTree,
+	checked: CheckedExercises,
+	onFault: (fault: ContentError) => void = (fault) => {
+		throw fault;
+	}
+): CourseContent | null {
+	let faulty = false;
+	/** What `read` gives; null when it has a fault. */
+	const tried = <T>(read: () => T): T | null => {
+		try {
+			return read();
+		} catch (cause) {
+			if (!(cause instanceof ContentError)) throw cause;
+			faulty = true;
+			onFault(cause);
+			return null;
+		}
+	};
+	const outline = tried(() => readOutline(tree));
+	if (!outline) return null;
+	const units = outline.units.map((unit) => {
+		const folder = folderOf(unit);
+		tried(() => refuseStrays(tree, unit));
+		const lesson = tried(() => readLesson(tree, `${folder}/lesson.md`));
+		const exercises = unit.exercises.map((slug) =>
+			tried(() => readExercise(tree, `${folder}/${slug}.yaml`, slug, checked))
+		);
+		return { ...unit, ...lesson, exercises } as UnitContent;
+	});
+	const { slug, title, summary } = outline;
+	return faulty ? null : { slug, title, summary, units };
+}
+
+/** What course.yaml says. @throws ContentError */
+export function readOutline(tree: ContentTree) {
+	const { value, errorAt } = readYaml(tree, 'course.yaml', courseFile);
+	if (value.slug !== tree.name) throw errorAt('slug', `must be the folder's name, ${tree.name}`);
+	const expected = value.units.map(folderOf);
+	const stray = foldersIn(tree).find((name) => !expected.includes(name));
+	if (stray) throw errorAt('units', `the folder ${stray} is no unit of this course`);
+	const other = tree.paths.find((path) => !path.includes('/') && path !== 'course.yaml');
+	if (other) throw new ContentError(addressIn(tree, other), 1, '', 'belongs to no unit');
+	return value;
+}
+
+function refuseStrays(tree: ContentTree, unit: CourseUnit): void {
+	const folder = folderOf(unit);
+	const expected = ['lesson.md', ...unit.exercises.map((slug) => `${slug}.yaml`)];
+	const stray = filesUnder(tree, folder).find((name) => !expected.includes(name));
+	if (stray)
+		throw new ContentError(addressIn(tree, `${folder}/${stray}`), 1, '', 'is not named in course.yaml');
+}
