@@ -11,10 +11,12 @@ import { deltaSign } from './delta-sign';
 import { densityForPower } from './density-for-power';
 import { densityNotDivided } from './density-not-divided';
 import { densityOverChannel } from './density-over-channel';
+import { differenceNotHalved } from './difference-not-halved';
 import { edgeFromWidth } from './edge-from-width';
 import { floorAsSignal } from './floor-as-signal';
 import { gainTakenOff } from './gain-taken-off';
 import { halfOrDouble } from './half-or-double';
+import { harmonicLevelForRatio } from './harmonic-level-for-ratio';
 import { inTheSkirt } from './in-the-skirt';
 import { leadAtOtherPoint } from './lead-at-other-point';
 import { leadLeftOut } from './lead-left-out';
@@ -31,6 +33,7 @@ import { markersForBands } from './markers-for-bands';
 import { neighbourWidth } from './neighbour-width';
 import { noiseNotTakenOff } from './noise-not-taken-off';
 import { notMeasured } from './not-measured';
+import { otherHarmonic } from './other-harmonic';
 import { otherSideRead } from './other-side';
 import { overloaded } from './overloaded';
 import { ownNoise } from './own-noise';
@@ -40,10 +43,13 @@ import { padTwice } from './pad-twice';
 import { pathLeftOut } from './path-left-out';
 import { peakOnNoise } from './peak-on-noise';
 import { periodForOnTime } from './period-for-on-time';
+import { powerForVoltage } from './power-for-voltage';
 import { silenceForOnTime } from './silence-for-on-time';
+import { strongestAlone } from './strongest-alone';
 import { sweepTooFast } from './sweep-too-fast';
 import { troughOnNoise } from './trough-on-noise';
 import { unitMixed } from './unit-mixed';
+import { untestedProducts } from './untested-products';
 import { wideResolution } from './wide-resolution';
 import { widthAtLevel } from './width-at-level';
 import { widthOfShare } from './width-of-share';
@@ -65,10 +71,12 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	densityForPower,
 	densityNotDivided,
 	densityOverChannel,
+	differenceNotHalved,
 	edgeFromWidth,
 	floorAsSignal,
 	gainTakenOff,
 	halfOrDouble,
+	harmonicLevelForRatio,
 	inTheSkirt,
 	leadAtOtherPoint,
 	leadLeftOut,
@@ -85,6 +93,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	neighbourWidth,
 	noiseNotTakenOff,
 	notMeasured,
+	otherHarmonic,
 	otherSideRead,
 	overloaded,
 	ownNoise,
@@ -94,10 +103,13 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	pathLeftOut,
 	peakOnNoise,
 	periodForOnTime,
+	powerForVoltage,
 	silenceForOnTime,
+	strongestAlone,
 	sweepTooFast,
 	troughOnNoise,
 	unitMixed,
+	untestedProducts,
 	wideResolution,
 	widthAtLevel,
 	widthOfShare,
