@@ -28,6 +28,8 @@ export default defineConfig({
 					name: 'unit',
 					environment: 'node',
 					include: ['tests/unit/**/*.test.ts', 'tests/*.test.ts'],
+					// These rooms keep nothing but what is the same for everyone, so that files may share what they import.
+					isolate: false,
 					// what reads the whole tree or proves a law takes its time on a busy machine
 					testTimeout: 60_000
 				}
@@ -38,6 +40,7 @@ export default defineConfig({
 					name: 'reference',
 					environment: 'node',
 					include: ['tests/reference/**/*.test.ts'],
+					isolate: false,
 					testTimeout: 60_000
 				}
 			},

@@ -4,6 +4,7 @@
  */
 import { z } from 'zod';
 import { doneRightStep } from './finding';
+import { digits } from './number';
 import { resolvedSettings } from './settings';
 import { rowNumber } from './sweep-stream';
 
@@ -39,7 +40,7 @@ export const doneRightResponse = z.strictObject({
  * Which step's rows are asked for, from 0: those its traces hold; where nothing has been swept yet with its set-up, the one
  * sweep that would come next.
  */
-export const stepQuery = z.strictObject({ step: z.coerce.number().pipe(z.int().min(0).max(59)) });
+export const stepQuery = z.strictObject({ step: digits.pipe(z.int().min(0).max(59)) });
 
 export type ReadingMark = z.infer<typeof readingMark>;
 export type PlayedStepView = z.infer<typeof playedStep>;

@@ -3,6 +3,7 @@
  * A stream is: one `state`, pieces of rows, one `end`. A stream that stops without an `end` was cut: ask again with `from`.
  */
 import { z } from 'zod';
+import { digits } from './number';
 import { settings, type ResolvedSettings } from './settings';
 
 export const rowNumber = z
@@ -75,7 +76,7 @@ export const sweepsConflict = z.strictObject({ message: z.string(), nextRow: row
 
 /** `GET /api/attempts/[id]/rows?from=&to=`: rows already drawn, as the same frames, at once and free of receiver time. */
 export const rowsQuery = z
-	.strictObject({ from: z.coerce.number().pipe(rowNumber), to: z.coerce.number().pipe(rowNumber) })
+	.strictObject({ from: digits.pipe(rowNumber), to: digits.pipe(rowNumber) })
 	.refine((q) => q.to >= q.from, { message: 'to must not be less than from', path: ['to'] });
 
 export const acknowledgementRequest = z.strictObject({

@@ -6,9 +6,12 @@ const MAX_BODY_BYTES = 64 * 1024;
 
 /**
  * The request's JSON body, checked against `schema`.
- * Throws DomainError: `malformed` when it isn't JSON or longer than 64 kB, `invalid` with one issue for each field that is wrong.
+ * Throws DomainError: `malformed` when it isn't JSON, isn't called so or is longer than 64 kB, `invalid` with one issue for
+ * each field that is wrong.
  */
 export async function readJson<S extends z.ZodType>(request: Request, schema: S): Promise<z.output<S>> {
+	if (!/^application\/json\s*(;|$)/i.test(request.headers.get('content-type') ?? ''))
+		throw new DomainError('malformed', 'The body must be JSON, and its content-type application/json.');
 	let body: unknown;
 	try {
 		body = JSON.parse(await readText(request));
@@ -36,6 +39,13 @@ async function readText(request: Request): Promise<string> {
 export function parseWith<S extends z.ZodType>(schema: S, value: unknown): z.output<S> {
 	const parsed = schema.safeParse(value);
 	if (parsed.success) return parsed.data;
-	const issues = parsed.error.issues.map(({ path, message }) => ({ field: path.join('.'), message }));
+	const issues = parsed.error.issues.flatMap((issue) =>
+		issue.code === 'unrecognized_keys'
+			? issue.keys.map((key) => ({
+					field: [...issue.path, key].join('.'),
+					message: 'nothing of this name is asked for'
+				}))
+			: [{ field: issue.path.join('.'), message: issue.message }]
+	);
 	throw new DomainError('invalid', 'Some of what was sent is not right.', { issues });
 }

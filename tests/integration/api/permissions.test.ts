@@ -2,90 +2,29 @@
  * Every load, action and endpoint, asked by every role and by nobody, against one table. A route that the table
  * doesn't name fails it: say there who may use it.
  */
-import { isActionFailure, isHttpError, isRedirect, type Cookies, type RequestEvent } from '@sveltejs/kit';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { roles, type Actor, type Role } from '$lib/server/domain/role';
 import { startAttempt } from '$lib/server/services/attempts/start-attempt';
 import { createCourse } from '../../factories/course';
 import { createUser } from '../../factories/user';
+import { askAt, doors } from './doors';
 import { REACH, type Reach } from './permissions';
-
-type Handler = (event: RequestEvent) => unknown;
-type Module = Record<string, Handler | Record<string, Handler> | undefined>;
-
-const modules = import.meta.glob<Module>('/src/routes/**/+{page,layout,}{.,}server.ts', { eager: true });
-
-/** "POST /api/attempts", "load /learn", "action /account?/name" with what stands behind it. */
-const doors = new Map<string, Handler>();
-for (const [file, module] of Object.entries(modules)) {
-	const path =
-		file
-			.replace(/^\/src\/routes/, '')
-			.replace(/\/\([^)]+\)/g, '')
-			.replace(/\/[^/]*$/, '') || '/';
-	const what = file.includes('+layout') ? 'layout' : 'load';
-	for (const [name, value] of Object.entries(module)) {
-		if (name === 'actions')
-			for (const [action, handler] of Object.entries(value as Record<string, Handler>))
-				doors.set(`action ${path}?/${action}`, handler);
-		else if (typeof value === 'function') doors.set(`${name === 'load' ? what : name} ${path}`, value);
-	}
-}
-
-function cookieJar(): Cookies {
-	const kept = new Map<string, string>();
-	return {
-		get: (name: string) => kept.get(name),
-		getAll: () => [],
-		set: (name: string, value: string) => void kept.set(name, value),
-		delete: (name: string) => void kept.delete(name),
-		serialize: () => ''
-	} as unknown as Cookies;
-}
-
-function createEvent(door: string, actor: Actor | null, params: Record<string, string>): RequestEvent {
-	const [verb, path] = door.split(' ');
-	const { body, query = '' } = REACH[door];
-	const isAction = verb === 'action';
-	const method = isAction ? 'POST' : verb === 'load' || verb === 'layout' ? 'GET' : verb;
-	const url = new URL(
-		`http://bench.example${path.replace(/\[(\w+)\]/g, (_, name: string) => params[name])}${query}`
-	);
-	const request = new Request(url, {
-		method,
-		body: isAction ? new URLSearchParams() : method === 'GET' ? undefined : JSON.stringify(body ?? {}),
-		headers: isAction ? {} : { 'content-type': 'application/json' }
-	});
-	return {
-		locals: { actor, person: null, origin: url.origin, secureCookies: false },
-		params,
-		url,
-		request,
-		cookies: cookieJar(),
-		getClientAddress: () => '192.0.2.1',
-		setHeaders: () => undefined
-	} as unknown as RequestEvent;
-}
 
 type Outcome = 'in' | 'sign in' | 'not for you' | 'no such thing';
 
-const outcomeOf = (status: number): Outcome =>
-	status === 401 ? 'sign in' : status === 403 ? 'not for you' : status === 404 ? 'no such thing' : 'in';
-
 /** What became of it. Refused input is no refusal of the person. */
 async function ask(door: string, actor: Actor | null, params: Record<string, string>): Promise<Outcome> {
-	try {
-		const result = await doors.get(door)?.(createEvent(door, actor, params));
-		if (isActionFailure(result)) return outcomeOf(result.status);
-		if (!(result instanceof Response)) return 'in';
-		await result.body?.cancel();
-		expect(result.status, door).toBeLessThan(500);
-		return outcomeOf(result.status);
-	} catch (cause) {
-		if (isRedirect(cause)) return cause.location.startsWith('/sign-in?next=') ? 'sign in' : 'in';
-		if (!isHttpError(cause)) throw cause;
-		return outcomeOf(cause.status);
-	}
+	const isAction = door.startsWith('action');
+	const { body = {}, query } = REACH[door];
+	const { status, location } = await askAt(door, actor, {
+		params,
+		query,
+		body: isAction ? new URLSearchParams() : JSON.stringify(body),
+		headers: isAction ? {} : { 'content-type': 'application/json' }
+	});
+	expect(status, door).toBeLessThan(500);
+	if (location?.startsWith('/sign-in?next=') || status === 401) return 'sign in';
+	return status === 403 ? 'not for you' : status === 404 ? 'no such thing' : 'in';
 }
 
 const expected = (who: Reach['who'], role: Role | null): 'in' | 'out' =>

@@ -12,6 +12,8 @@ export interface Reach {
 	absent?: boolean;
 	/** A body that is read without complaint, so that the refusal is one of the person. */
 	body?: unknown;
+	/** The same where a form is sent. */
+	form?: Record<string, string>;
 	query?: string;
 }
 
@@ -22,23 +24,62 @@ const learners: Reach = { who: ['apprentice', 'instructor', 'administrator'] };
 const owner: Reach = { who: [], thing: 'attempt' };
 /** Also whoever may read everybody's attempts. */
 const readable: Reach = { who: ['administrator'], thing: 'attempt' };
-const settings = { centreHz: 450e6, spanHz: 1e6, rbwHz: 30e3, points: 101 };
+const settings = {
+	centreHz: 450e6,
+	spanHz: 1e6,
+	rbwHz: 30e3,
+	vbwHz: 'auto',
+	points: 101,
+	detector: 'average',
+	scale: 'power',
+	referenceDbm: -10,
+	attenuationDb: 10,
+	preamp: false,
+	correctionDb: [{ frequencyHz: 450e6, db: 4.7 }],
+	input: { connected: true, padDb: 10, dcBlock: true },
+	traces: [{ mode: 'average', count: 4 }]
+};
+const markings = {
+	markers: [{ letter: 'A', at: 450e6, trace: 1 }],
+	selected: 'A',
+	readings: [
+		{
+			request: { kind: 'channel-power', centreHz: 450e6, widthHz: 2e5 },
+			trace: 1,
+			values: { centreHz: 450e6 }
+		}
+	],
+	levelUnit: 'dBm',
+	antenna: [{ frequencyHz: 450e6, dbPerM: 18.4 }]
+};
+const trialAnswer = {
+	token: 'none',
+	text: '-23',
+	unit: 'dBm',
+	looks: [{ choice: 0, sweeps: 1 }],
+	row: 0,
+	fromHz: 450e6,
+	toHz: 450.1e6
+};
 
 export const REACH: Record<string, Reach> = {
 	'layout /': everybody,
 	'load /': everybody,
 	'load /sign-in': everybody,
-	'action /sign-in?/default': everybody,
+	'action /sign-in?/default': { ...everybody, form: { email: 'nobody@tarnvale.example', password: 'none' } },
 	'POST /sign-out': everybody,
-	'POST /scheme': everybody,
+	'POST /scheme': { ...everybody, form: { scheme: 'night' } },
 	'POST /api/trial': { ...everybody, absent: true },
 	'POST /api/trial/rows': { ...everybody, absent: true, body: { token: 'none', choice: 0, row: 0 } },
-	'POST /api/trial/answers': everybody,
+	'POST /api/trial/answers': { ...everybody, absent: true, body: trialAnswer },
 
 	'load /account': signedIn,
-	'action /account?/name': signedIn,
-	'action /account?/password': signedIn,
-	'action /account?/end': signedIn,
+	'action /account?/name': { ...signedIn, form: { displayName: 'Anna' } },
+	'action /account?/password': {
+		...signedIn,
+		form: { presentPassword: 'none', newPassword: 'six steady sweeps', newPasswordAgain: 'six steady sweeps' }
+	},
+	'action /account?/end': { ...signedIn, form: { session: '999999' } },
 	'action /account?/endOthers': signedIn,
 	'action /account?/endAll': signedIn,
 
@@ -52,7 +93,7 @@ export const REACH: Record<string, Reach> = {
 	'action /learn/exercises/[slug]?/start': learners,
 	'load /learn/units/[slug]': { ...learners, absent: true },
 	'POST /api/attempts': { ...learners, body: { exercise: 'spread-carrier-1' } },
-	'POST /api/figures/[unitId]/[figureId]': { ...learners, absent: true, body: { values: {} } },
+	'POST /api/figures/[unitId]/[figureId]': { ...learners, absent: true, body: { values: { rbwHz: 1000 } } },
 	'GET /api/set-ups': learners,
 	'POST /api/set-ups': { ...learners, body: { name: 'narrow', settings } },
 	'DELETE /api/set-ups/[id]': { ...learners, absent: true },
@@ -75,10 +116,7 @@ export const REACH: Record<string, Reach> = {
 		body: { answers: { power: { text: '-23', unit: 'dBm', readingId: null } } }
 	},
 	'POST /api/attempts/[id]/hints': owner,
-	'PUT /api/attempts/[id]/markings': {
-		...owner,
-		body: { markings: { markers: [], selected: null, readings: [], levelUnit: 'dBm', antenna: null } }
-	},
+	'PUT /api/attempts/[id]/markings': { ...owner, body: { markings } },
 	'POST /api/attempts/[id]/readings': {
 		...owner,
 		body: { rows: { from: 0, to: 1 }, trace: 1, request: { kind: 'peak' } }

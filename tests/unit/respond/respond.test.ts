@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { DomainError, type DomainErrorCode } from '$lib/server/errors';
 import { reportError } from '$lib/server/hooks/report-error';
 import { readForm } from '$lib/server/read-form';
-import { readJson } from '$lib/server/read-json';
+import { parseWith, readJson } from '$lib/server/read-json';
 import { refusalOf, respond, respondJson, respondWith } from '$lib/server/respond';
 
 const refuse = (error: unknown) => () => {
@@ -58,7 +58,11 @@ describe('respond', () => {
 
 describe('readJson(request, schema)', () => {
 	const schema = z.object({ settings: z.object({ spanHz: z.number().positive('must be positive') }) });
-	const send = (body: string) => readJson(new Request('http://a.example', { method: 'POST', body }), schema);
+	const send = (body: string, type = 'application/json') =>
+		readJson(
+			new Request('http://a.example', { method: 'POST', body, headers: { 'content-type': type } }),
+			schema
+		);
 
 	it('gives what fits', async () => {
 		expect(await send('{"settings":{"spanHz":5},"more":1}')).toEqual({ settings: { spanHz: 5 } });
@@ -66,6 +70,23 @@ describe('readJson(request, schema)', () => {
 
 	it.each(['', '{', 'undefined', '{"a":1}}', '<p>'])('refuses %j as malformed', async (body) => {
 		await expect(send(body)).rejects.toMatchObject({ code: 'malformed' });
+	});
+
+	it('takes only what is called JSON', async () => {
+		const body = '{"settings":{"spanHz":5}}';
+		await expect(send(body, 'application/json; charset=utf-8')).resolves.toBeDefined();
+		for (const type of ['text/plain', 'application/jsonp', '']) {
+			await expect(send(body, type)).rejects.toMatchObject({ code: 'malformed' });
+		}
+	});
+
+	it('names a field that nothing asks for', async () => {
+		const strict = z.strictObject({ input: z.strictObject({ padDb: z.number() }) });
+		expect(() => parseWith(strict, { input: { padDb: 1, pads: 2 }, more: 1 })).toThrow(
+			expect.objectContaining({
+				issues: [expect.objectContaining({ field: 'input.pads' }), expect.objectContaining({ field: 'more' })]
+			})
+		);
 	});
 
 	it('names the field that is wrong', async () => {
