@@ -43,7 +43,10 @@ function average(rows: readonly ArrayLike<number>[], scale: TraceScale): Float32
 
 /** A row's levels in dBm as values on a scale: what averages add up. Worth keeping, where the same row is averaged again and again. */
 export function scaledRow(row: ArrayLike<number>, scale: TraceScale): Float64Array {
-	return Float64Array.from(row, toScale[scale]);
+	const convert = toScale[scale];
+	const values = new Float64Array(row.length);
+	for (let i = 0; i < values.length; i++) values[i] = convert(row[i]);
+	return values;
 }
 
 /** The mean of rows that are on the scale already, one or more, of equal length; dBm. */

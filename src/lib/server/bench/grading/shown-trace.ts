@@ -63,6 +63,9 @@ function makeTrace({ scene, seed }: Drawn, profile: ReceiverProfile, resolved: R
 	};
 }
 
+/** Standard deviations of the filter beyond which its gain is no number any more. */
+const NOTHING_BEYOND = 39;
+
 /** Lines through the filter, mW; a mean over the point's bucket where the detector averages. */
 function linesMw(
 	{ lines }: Incident,
@@ -72,15 +75,17 @@ function linesMw(
 ): number {
 	const sigmaHz = 1 / (2 * Math.sqrt(gaussianConstant(rbwHz)));
 	const share = (offsetHz: number): number => {
+		if (offsetHz - stepHz > NOTHING_BEYOND * sigmaHz) return 0;
 		if (detector !== 'average') return Math.exp(-0.5 * (offsetHz / sigmaHz) ** 2);
-		const [low, high] = [-0.5, 0.5].map((half) => (offsetHz + half * stepHz) / sigmaHz);
+		const low = (offsetHz - 0.5 * stepHz) / sigmaHz;
+		const high = (offsetHz + 0.5 * stepHz) / sigmaHz;
 		const bellHz = Math.sqrt(2 * Math.PI) * sigmaHz;
 		return (bellHz / stepHz) * (normalIntegral(high) - normalIntegral(low));
 	};
-	return lines.reduce(
-		(sum, line) => sum + (line.re ** 2 + line.im ** 2) * share(Math.abs(frequencyHz - line.frequencyHz)),
-		0
-	);
+	let sum = 0;
+	for (const line of lines)
+		sum += (line.re ** 2 + line.im ** 2) * share(Math.abs(frequencyHz - line.frequencyHz));
+	return sum;
 }
 
 /** How often the filter is halved at most until everything modulated is a density to it. */

@@ -20,8 +20,13 @@ export function memoSweeps(sweepWith: SweepWith): SweepWith {
 
 function memoRows(sweeper: Sweeper): Sweeper {
 	const rows = new Map<string, ArrayLike<number>>();
+	const durations = new Map<number, number>();
 	return {
-		durationS: (n) => sweeper.durationS(n),
+		durationS(n) {
+			const durationS = durations.get(n) ?? sweeper.durationS(n);
+			durations.set(n, durationS);
+			return durationS;
+		},
 		row(n, clockS) {
 			const key = `${n} ${clockS}`;
 			const row = rows.get(key) ?? sweeper.row(n, clockS);

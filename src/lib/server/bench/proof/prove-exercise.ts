@@ -1,7 +1,6 @@
 import type { Exercise } from '$lib/schemas/exercise';
 import type { SweepWith } from '../exercise/bench-session';
 import { drawExercise } from '../exercise/draw-exercise';
-import { prepareSweep } from '../receiver/sweep';
 import { proofTable, type ProofTable } from './proof-table';
 import { proveSeed, type SeedProof } from './prove-seed';
 
@@ -17,7 +16,7 @@ export interface ProofOptions {
 
 /** What each of `seeds` seeds from `fromSeed` says. @throws BenchError when one can't be drawn */
 export function proveSeeds(exercise: Exercise, options: ProofOptions): SeedProof[] {
-	const { seeds, fromSeed, onProgress, sweepWith = prepareSweep } = options;
+	const { seeds, fromSeed, onProgress, sweepWith } = options;
 	return Array.from({ length: seeds }, (_, i) => {
 		const proof = proveSeed(exercise, fromSeed + i, sweepWith);
 		onProgress?.(i + 1);

@@ -11,6 +11,7 @@ import { greatestOwnError, ownError } from '../grading/own-error';
 import { modelSpread } from '../grading/spreads';
 import { predictMistake } from '../grading/predict-mistake';
 import { watchedMistakes, type Watched } from '../grading/watched-mistakes';
+import { sharingSweeps } from '../receiver/sharing-sweeps';
 import { memoSweeps } from './memo-sweeps';
 
 /** What one seed says of one way to answer one question. */
@@ -101,10 +102,19 @@ function outcome(
 	return { ...base, error, bias, spread, passes: Math.abs(error) <= question.tolerance, named };
 }
 
-/** Does the taught method and makes every mistake, with one seed, on the bench. */
-export function proveSeed(exercise: Exercise, seed: number, sweepWith: SweepWith): SeedProof {
+/** The receiver as it is, each thing that several set-ups have in common made once. */
+function sharing({ scene, profile, seed }: DrawnExercise): SweepWith {
+	const prepare = sharingSweeps(scene, profile, seed);
+	return (_scene, _profile, resolved) => prepare(resolved);
+}
+
+/**
+ * Does the taught method and makes every mistake, with one seed, on the bench.
+ * @param sweepWith the receiver with a fault planted in it; absent: as it is
+ */
+export function proveSeed(exercise: Exercise, seed: number, sweepWith?: SweepWith): SeedProof {
 	const drawn = drawExercise(exercise, seed);
-	const sweeps = memoSweeps(sweepWith);
+	const sweeps = memoSweeps(sweepWith ?? sharing(drawn));
 	const leave = EVIDENCE[seed % EVIDENCE.length];
 	const proof: SeedProof = { seed, redraws: drawn.redraws, outcomes: [], nearest: [], tooTight: [] };
 	for (const question of drawn.questions) {

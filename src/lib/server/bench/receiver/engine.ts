@@ -1,5 +1,4 @@
 /** Chooses how a sweep's rows are made: sample by sample, from the laws of long buckets, or by chunks through a narrow video filter. */
-import type { ResolvedSettings } from '$lib/schemas/settings';
 import { ChunkSweep } from './chunk-sweep';
 import type { Contribution, RowContext } from './contribution';
 import { EnvelopeContribution } from './envelope-contribution';
@@ -15,6 +14,7 @@ import { SampledSweep } from './sampled-sweep';
 import { SETTLED, SettledVideoSweep } from './settled-video-sweep';
 import { SkirtContribution } from './skirt-contribution';
 import { skirtShows } from './skirt-shows';
+import type { SweptSettings } from './swept-settings';
 import { videoKind } from './video';
 
 /** Buckets longer than this (in 1/B) follow the laws. */
@@ -29,7 +29,7 @@ export interface Engine {
 
 export function makeEngine(
 	incident: Incident,
-	settings: ResolvedSettings,
+	settings: SweptSettings,
 	frequencyError: number,
 	seed: Seed
 ): Engine {

@@ -3,8 +3,8 @@
  * sample n stands at n·stepS from the sweep's start, n = 0 at the start of the first bucket;
  * bucket b owns samples b·perBucket … (b+1)·perBucket, both ends included, and its point is the middle one.
  */
-import type { ResolvedSettings } from '$lib/schemas/settings';
 import { chirpFactor, gaussianConstant } from './resolution-filter';
+import type { SweptSettings } from './swept-settings';
 
 export interface Frame {
 	points: number;
@@ -33,13 +33,13 @@ export const samplesPerBucket = (rbwHz: number, bucketS: number, peaks: boolean)
 	2 * Math.max(1, Math.ceil((peaks ? 4 : 3) * rbwHz * bucketS));
 
 /** Seconds a bucket lasts: T/(points − 1). */
-export const bucketSeconds = (settings: ResolvedSettings): number =>
-	settings.sweepTimeS / (settings.points - 1);
+export const bucketSeconds = ({ sweepTimeS, points }: Pick<SweptSettings, 'sweepTimeS' | 'points'>): number =>
+	sweepTimeS / (points - 1);
 
 /**
  * @param frequencyError the receiver's reference error ε: it shows true·(1+ε), so it is tuned to shown/(1+ε)
  */
-export function makeFrame(settings: ResolvedSettings, frequencyError: number, perBucket: number): Frame {
+export function makeFrame(settings: SweptSettings, frequencyError: number, perBucket: number): Frame {
 	const bucketS = bucketSeconds(settings);
 	const stepS = bucketS / perBucket;
 	const spanHz = settings.spanHz / (1 + frequencyError);

@@ -17,7 +17,7 @@ export class SteadyNoise implements Contribution {
 		private readonly stream: string
 	) {
 		this.process = new GaussianProcess(noise.ownWidthHz ?? frame.rbwHz, frame.stepS, frame.total);
-		this.amplitude = amplitudes(noise, frame);
+		this.amplitude = steadyAmplitudes(noise, frame);
 	}
 
 	addTo(row: RowContext, _frame: Frame, re: Float64Array, im: Float64Array): void {
@@ -79,10 +79,23 @@ export class TimedNoise implements Contribution {
 	}
 }
 
+const steady = new WeakMap<IncidentNoise, Map<string, Float64Array>>();
+
+/** Amplitudes of a process over a frame's lattice, made once: sweeps that detect it in other ways share them. */
+function steadyAmplitudes(noise: IncidentNoise, frame: Frame): Float64Array {
+	const known = steady.get(noise) ?? new Map<string, Float64Array>();
+	steady.set(noise, known);
+	const key = `${frame.startHz} ${frame.sweepHzPerS} ${frame.stepS} ${frame.lead} ${frame.total}`;
+	const made = known.get(key) ?? amplitudes(noise, frame);
+	known.set(key, made);
+	return made;
+}
+
 function amplitudes(noise: IncidentNoise, frame: Frame, shiftHz = 0): Float64Array {
-	return Float64Array.from({ length: frame.total }, (_, i) =>
-		Math.sqrt(Math.max(0, noise.variance(tunedHz(frame, i) - shiftHz)) / 2)
-	);
+	const list = new Float64Array(frame.total);
+	for (let i = 0; i < list.length; i++)
+		list[i] = Math.sqrt(Math.max(0, noise.variance(tunedHz(frame, i) - shiftHz)) / 2);
+	return list;
 }
 
 /**

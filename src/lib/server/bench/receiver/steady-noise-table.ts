@@ -14,6 +14,8 @@ export class SteadyNoiseTable {
 	private readonly stepS: number;
 	/** ln of the variance at steps of stepS from the sweep's start. */
 	private readonly logs: Float64Array;
+	/** Pieces of each bucket asked for before: the same in every row. */
+	private readonly made: Piece[][] = [];
 
 	constructor(
 		private readonly frame: Frame,
@@ -24,12 +26,13 @@ export class SteadyNoiseTable {
 		this.nodes = Math.min(MOST_NODES, Math.max(1, Math.ceil((4 * widths) / frame.points)));
 		const steps = Math.max(1, Math.min(frame.points * this.nodes, Math.ceil(STEPS_PER_RBW * widths)));
 		this.stepS = lengthS / steps;
-		this.logs = Float64Array.from({ length: steps + 2 }, (_, i) => {
+		this.logs = new Float64Array(steps + 2);
+		for (let i = 0; i < this.logs.length; i++) {
 			const tuned = frame.startHz + frame.sweepHzPerS * i * this.stepS;
 			let sum = 0;
 			for (const noise of noises) sum += noise.variance(tuned);
-			return Math.log(sum);
-		});
+			this.logs[i] = Math.log(sum);
+		}
 		this.least = Math.exp(this.logs.reduce((a, b) => Math.min(a, b), Infinity));
 	}
 
@@ -40,8 +43,13 @@ export class SteadyNoiseTable {
 		return Math.exp(this.logs[i] + (place - i) * (this.logs[i + 1] - this.logs[i]));
 	}
 
-	/** Pieces of bucket b; one if its variance moves by less than 1 %. */
+	/** Pieces of bucket b, the caller's to change; one if its variance moves by less than 1 %. */
 	pieces(b: number): Piece[] {
+		const made = (this.made[b] ??= this.makePieces(b));
+		return made.map(({ share, v, p }) => ({ share, v, p }));
+	}
+
+	private makePieces(b: number): Piece[] {
 		const { nodes } = this;
 		const { bucketS } = this.frame;
 		const middle = this.at((b + 0.5) * bucketS);

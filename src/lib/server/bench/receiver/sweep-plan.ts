@@ -5,6 +5,7 @@ import { makeEngine } from './engine';
 import type { Incident } from './incident';
 import { Random, type Seed } from './random';
 import type { ReceiverError } from './receiver-error';
+import type { SweptSettings } from './swept-settings';
 import { tableDb } from './table-db';
 import { scaleToDbm } from './video';
 
@@ -28,24 +29,45 @@ export interface SweepPlan {
 
 const RETRACE_S = 0.01;
 
-/** A sweep of what reaches the filter. */
+/** What row n of a sweep that starts at a bench clock detects: one value per point on the scale, the caller's until the next row. */
+export type DetectedRows = (n: number, clockS: number) => Float64Array;
+
+/** The rows of what reaches the filter, before anything is added to show them. */
+export function detectedRows(
+	incident: Incident,
+	settings: SweptSettings,
+	frequencyError: number,
+	seed: Seed
+): DetectedRows {
+	const engine = makeEngine(incident, settings, frequencyError, seed);
+	const values = new Float64Array(settings.points);
+	return (n, clockS) => {
+		engine.row({ clockS, random: (stream) => new Random(seed, n, stream) }, values);
+		return values;
+	};
+}
+
+/**
+ * A sweep of what reaches the filter.
+ * @param makeRows what detects its rows; sweeps that are only shown in other ways may share it
+ */
 export function planSweep(
 	incident: Incident,
 	settings: ResolvedSettings,
 	error: ReceiverError,
-	seed: Seed
+	seed: Seed,
+	makeRows: () => DetectedRows = () => detectedRows(incident, settings, error.frequency, seed)
 ): SweepPlan {
 	const isProtected = incident.protection !== undefined;
-	const engine = isProtected ? undefined : makeEngine(incident, settings, error.frequency, seed);
+	const detected = isProtected ? undefined : makeRows();
 	const shownDb = shownOffsets(settings, error);
-	const values = new Float64Array(settings.points);
 	return {
 		settings,
 		flags: sweepFlags(incident, settings),
 		isProtected,
 		row(n, clockS) {
-			if (!engine) throw new RangeError('the input has protected itself: no sweep can be made');
-			engine.row({ clockS, random: (stream) => new Random(seed, n, stream) }, values);
+			if (!detected) throw new RangeError('the input has protected itself: no sweep can be made');
+			const values = detected(n, clockS);
 			const levels = new Float32Array(values.length);
 			for (let i = 0; i < levels.length; i++) levels[i] = scaleToDbm(values[i], settings.scale) + shownDb[i];
 			return levels;

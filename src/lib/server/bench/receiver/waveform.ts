@@ -16,7 +16,7 @@ export interface Waveform {
 /** Linear modulation: Σ symbol_k · pulse(t − k/R). */
 export function digitalWaveform(emitter: EmitterOf<'digital'>, hash: SymbolHash): Waveform {
 	const { re: pointRe, im: pointIm } = constellation(emitter.order);
-	const { perSymbol, halfSymbols, taps } = rrcPulse(emitter.rollOff);
+	const { perSymbol, halfSymbols, byPhase } = rrcPulse(emitter.rollOff);
 	const rate = emitter.symbolRateHz;
 	const mask = emitter.order - 1;
 	return {
@@ -33,21 +33,23 @@ export function digitalWaveform(emitter: EmitterOf<'digital'>, hash: SymbolHash)
 			}
 			const fraction = startS * rate - Math.floor(startS * rate);
 			const last = 2 * halfSymbols;
+			const width = last + 1;
 			for (let i = 0; i < count; i++) {
 				// position in symbols after the first that reaches this sample
 				const u = fraction + i * stepS * rate;
 				const whole = Math.floor(u);
-				// table index of the pulse's value for symbol whole + j: (u − whole + halfSymbols − j)·perSymbol from its left end
+				// place of the pulse's value for symbol whole + j: (u − whole + halfSymbols − j)·perSymbol from its left end
 				const at = (u - whole + last) * perSymbol;
 				// rounding must not carry the position past the pulse's end
 				const cell = Math.min(Math.floor(at), (last + 1) * perSymbol - 1);
 				const blend = at - cell;
+				const here = (cell - last * perSymbol) * width;
+				const next = here + width;
 				let x = 0;
 				let y = 0;
 				// symbol 0 lies beyond the pulse's support
 				for (let j = 1; j <= last; j++) {
-					const index = cell - j * perSymbol;
-					const g = taps[index] + blend * (taps[index + 1] - taps[index]);
+					const g = byPhase[here + j] + blend * (byPhase[next + j] - byPhase[here + j]);
 					x += g * sx[whole + j];
 					y += g * sy[whole + j];
 				}

@@ -38,25 +38,33 @@ export function gmskSpectrum(bt: number): UnitSpectrum {
 		density[m] = Math.max(0, 2 * stepBits * cosines[2 * m]);
 		above[m] = (stepBits / Math.PI) * (Math.PI * m * step * correlation[0] - sines[2 * m + 1]);
 	}
-	/** Cubic through the areas at both ends with the densities as its slopes, `s` of the way: value, slope. */
-	const at = (m: number, s: number): [number, number] => {
+	const last = density.length - 1;
+	/** Cubic through the areas at both ends of a step with the densities as its slopes: its value. */
+	const areaAt = (frequencyPerRate: number): number => {
+		const x = Math.abs(frequencyPerRate) / step;
+		const m = Math.floor(x);
+		if (m >= last) return 0.5;
+		const s = x - m;
 		const rise = above[m + 1] - above[m];
 		const a = step * density[m] - rise;
 		const b = rise - step * density[m + 1];
-		return [
-			above[m] + s * rise + s * (1 - s) * (a * (1 - s) + b * s),
-			(rise + (1 - 2 * s) * (a * (1 - s) + b * s) + s * (1 - s) * (b - a)) / step
-		];
+		return above[m] + s * rise + s * (1 - s) * (a * (1 - s) + b * s);
 	};
-	const lookUp = (frequencyPerRate: number): [number, number] => {
+	/** Its slope. */
+	const slopeAt = (frequencyPerRate: number): number => {
 		const x = Math.abs(frequencyPerRate) / step;
 		const m = Math.floor(x);
-		return m >= density.length - 1 ? [0.5, 0] : at(m, x - m);
+		if (m >= last) return 0;
+		const s = x - m;
+		const rise = above[m + 1] - above[m];
+		const a = step * density[m] - rise;
+		const b = rise - step * density[m + 1];
+		return (rise + (1 - 2 * s) * (a * (1 - s) + b * s) + s * (1 - s) * (b - a)) / step;
 	};
 	return {
-		density: (frequencyPerRate) => Math.max(0, lookUp(frequencyPerRate)[1]),
+		density: (frequencyPerRate) => Math.max(0, slopeAt(frequencyPerRate)),
 		below: (frequencyPerRate) => {
-			const half = Math.min(0.5, lookUp(frequencyPerRate)[0]);
+			const half = Math.min(0.5, areaAt(frequencyPerRate));
 			return frequencyPerRate >= 0 ? 0.5 + half : 0.5 - half;
 		},
 		reachPerBit: REACH

@@ -6,6 +6,8 @@ export interface RrcPulse {
 	halfSymbols: number;
 	/** Pulse at (i − perSymbol·halfSymbols)/perSymbol symbols. Unit-power symbols through it have mean power 1. */
 	taps: Float64Array;
+	/** The same by phase: at phase·(2·halfSymbols + 1) + j the tap that symbol j of those reached counts with, phase 0 … perSymbol. */
+	byPhase: Float64Array;
 }
 
 const PER_SYMBOL = 256;
@@ -26,7 +28,17 @@ export function rrcPulse(rollOff: number): RrcPulse {
 	}
 	const scale = Math.sqrt(PER_SYMBOL / energy);
 	for (let i = 0; i < taps.length; i++) taps[i] *= scale;
-	return { perSymbol: PER_SYMBOL, halfSymbols: HALF_SYMBOLS, taps };
+	return { perSymbol: PER_SYMBOL, halfSymbols: HALF_SYMBOLS, taps, byPhase: tapsByPhase(taps) };
+}
+
+/** Taps that meet in one sum side by side: a symbol apart in the pulse, they would each be fetched from elsewhere in memory. */
+function tapsByPhase(taps: Float64Array): Float64Array {
+	const width = 2 * HALF_SYMBOLS + 1;
+	const byPhase = new Float64Array((PER_SYMBOL + 1) * width);
+	for (let phase = 0; phase <= PER_SYMBOL; phase++)
+		for (let j = 0; j < width; j++)
+			byPhase[phase * width + j] = taps[(width - 1 - j) * PER_SYMBOL + phase] ?? 0;
+	return byPhase;
 }
 
 function taper(symbols: number): number {

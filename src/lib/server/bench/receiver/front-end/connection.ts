@@ -1,7 +1,7 @@
 import type { Scene } from '$lib/schemas/scene';
-import type { ResolvedSettings } from '$lib/schemas/settings';
 import { dbToPowerRatio } from '$lib/units/decibel';
 import { tableDb } from '../table-db';
+import type { FrontEndSettings } from './front-end-settings';
 
 /** Power gain, linear, against frequency. */
 export interface Connection {
@@ -14,7 +14,7 @@ export interface Connection {
  * Power gain, linear, from the reference plane to the connector against frequency: the scene's path and the pad.
  * The pad is part of what is connected: what it takes off is put back on the screen only by a stated correction.
  */
-export function connectionGain(scene: Scene, settings: ResolvedSettings): Connection {
+export function connectionGain(scene: Scene, settings: FrontEndSettings): Connection {
 	const { padDb } = settings.input;
 	const path = scene.path?.map(({ frequencyHz, lossDb }) => ({ frequencyHz, db: lossDb }));
 	if (!path || path.length === 1) {

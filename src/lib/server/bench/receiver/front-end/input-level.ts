@@ -1,11 +1,11 @@
 /** Levels that harm or overload the receiver, judged on totals. */
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { Emitter, Scene } from '$lib/schemas/scene';
-import type { ResolvedSettings } from '$lib/schemas/settings';
 import { kindOf } from '$lib/server/bench/signal/kinds';
 import { milliwattsToDbm } from '$lib/units/decibel';
 import { voltsToDbm } from '$lib/units/level';
 import type { Incident } from '../incident';
+import type { FrontEndSettings } from './front-end-settings';
 
 /** Direct voltage that the input stands without a block, V: an offset, not a supply. */
 export const SAFE_DC_VOLTS = 0.05;
@@ -50,7 +50,7 @@ export const isOverload = (mixerDbm: number, profile: ReceiverProfile): boolean 
  */
 export function inputProtection(
 	scene: Scene,
-	settings: ResolvedSettings,
+	settings: FrontEndSettings,
 	profile: ReceiverProfile,
 	connectorMw: number
 ): Incident['protection'] {

@@ -1,9 +1,9 @@
 /** Lines that the receiver makes itself. */
 import type { ReceiverProfile } from '$lib/schemas/receiver';
-import type { ResolvedSettings } from '$lib/schemas/settings';
 import { lineOf } from '$lib/server/bench/signal/comb';
 import { dbmToMilliwatts } from '$lib/units/decibel';
 import { Random, type Seed } from '../random';
+import type { FrontEndSettings } from './front-end-settings';
 import type { ArrivedLine } from './incident-lines';
 import type { PhaseNoise } from './skirt-shape';
 
@@ -13,7 +13,7 @@ import type { PhaseNoise } from './skirt-shape';
  */
 export function ownLines(
 	profile: ReceiverProfile,
-	settings: ResolvedSettings,
+	settings: FrontEndSettings,
 	receiver: PhaseNoise | null,
 	seed: Seed
 ): ArrivedLine[] {

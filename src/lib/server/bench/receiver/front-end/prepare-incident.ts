@@ -1,7 +1,6 @@
 /** The receiver's front end: from a scene to what reaches the resolution filter. */
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { Scene } from '$lib/schemas/scene';
-import type { ResolvedSettings } from '$lib/schemas/settings';
 import { dbToPowerRatio, milliwattsToDbm } from '$lib/units/decibel';
 import type { Incident } from '../incident';
 import { chirpFactor } from '../resolution-filter';
@@ -11,6 +10,7 @@ import { carriedFrom, type Carried } from './carried';
 import { amplify, connect } from './connect';
 import { connectionGain, type Connection } from './connection';
 import { THERMAL_MW_PER_HZ } from './floor';
+import type { FrontEndSettings } from './front-end-settings';
 import { incidentEnvelopes } from './incident-envelopes';
 import { incidentLines } from './incident-lines';
 import { incidentNoises } from './incident-noises';
@@ -35,7 +35,7 @@ const SIGHT_RBW = 40;
 export function prepareIncident(
 	scene: Scene,
 	profile: ReceiverProfile,
-	settings: ResolvedSettings,
+	settings: FrontEndSettings,
 	seed: Seed
 ): Incident {
 	const connected: Scene = settings.input.connected ? scene : { emitters: [] };
@@ -57,14 +57,14 @@ export function prepareIncident(
 }
 
 /** From connector to mixer, dB. */
-const mixerGainDb = (profile: ReceiverProfile, settings: ResolvedSettings): number =>
+const mixerGainDb = (profile: ReceiverProfile, settings: FrontEndSettings): number =>
 	(settings.preamp && profile.preamp ? profile.preamp.gainDb : 0) - settings.attenuationDb;
 
 /** The scene behind device and mixer, referred back to the connector. */
 function distorted(
 	scene: Scene,
 	profile: ReceiverProfile,
-	settings: ResolvedSettings,
+	settings: FrontEndSettings,
 	connection: Connection,
 	seed: Seed
 ): Carried {
@@ -82,7 +82,7 @@ function distorted(
 }
 
 /** True frequencies that the sweep can see anything at, the receiver's reference error included. */
-function bandOf(profile: ReceiverProfile, settings: ResolvedSettings) {
+function bandOf(profile: ReceiverProfile, settings: FrontEndSettings) {
 	const { startHz, stopHz, spanHz, rbwHz, sweepTimeS, points } = settings;
 	const k = chirpFactor(rbwHz, spanHz / sweepTimeS);
 	const sightHz =

@@ -1,9 +1,9 @@
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import { NOISE_PER_RBW } from '$lib/measure/resolution-filter';
-import type { ResolvedSettings } from '$lib/schemas/settings';
-import { FilteredSkirt } from './filtered-skirt';
+import type { FilteredSkirt } from './filtered-skirt';
 import { floorDensity } from './floor';
-import { phaseNoiseSkirt, type PhaseNoise } from './skirt-shape';
+import type { FrontEndSettings } from './front-end-settings';
+import { filteredSkirtOf, phaseNoiseSkirt, type PhaseNoise } from './skirt-shape';
 
 /** How the receiver looks at what reaches it. */
 export interface View {
@@ -21,12 +21,11 @@ export interface View {
 	filteredSkirt(noise: PhaseNoise): FilteredSkirt;
 }
 
-export function viewOf(profile: ReceiverProfile, settings: ResolvedSettings): View {
+export function viewOf(profile: ReceiverProfile, settings: FrontEndSettings): View {
 	const { rbwHz, startHz, stopHz, centreHz, spanHz, points } = settings;
 	const density = floorDensity(profile, settings);
 	const noiseBandwidthHz = NOISE_PER_RBW * rbwHz;
 	const floorMw = (frequencyHz: number) => noiseBandwidthHz * density(frequencyHz);
-	const tables = new Map<PhaseNoise, FilteredSkirt>();
 	return {
 		rbwHz,
 		startHz,
@@ -34,10 +33,6 @@ export function viewOf(profile: ReceiverProfile, settings: ResolvedSettings): Vi
 		floorMw,
 		leastFloorMw: Math.min(...[startHz, centreHz, stopHz].map(floorMw)),
 		receiver: profile.phaseNoise && phaseNoiseSkirt(profile.phaseNoise, 'receiver.phaseNoise'),
-		filteredSkirt(noise) {
-			const table = tables.get(noise) ?? new FilteredSkirt(noise, rbwHz);
-			tables.set(noise, table);
-			return table;
-		}
+		filteredSkirt: (noise) => filteredSkirtOf(noise, rbwHz)
 	};
 }
