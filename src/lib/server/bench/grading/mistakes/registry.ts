@@ -7,6 +7,7 @@ import { coarsePoints } from './coarse-points';
 import { companyInTheFilter } from './company-in-the-filter';
 import { couplingLeftOut } from './coupling-left-out';
 import { couplingWrongSign } from './coupling-wrong-sign';
+import { crestForCarrier } from './crest-for-carrier';
 import { deltaSign } from './delta-sign';
 import { densityForPower } from './density-for-power';
 import { densityNotDivided } from './density-not-divided';
@@ -30,10 +31,13 @@ import { markerAsPower } from './marker-as-power';
 import { markerNotDivided } from './marker-not-divided';
 import { markerOverResolution } from './marker-over-resolution';
 import { markersForBands } from './markers-for-bands';
+import { narrowForDepth } from './narrow-for-depth';
 import { neighbourWidth } from './neighbour-width';
 import { noiseNotTakenOff } from './noise-not-taken-off';
 import { notMeasured } from './not-measured';
+import { oneLineForAll } from './one-line-for-all';
 import { otherHarmonic } from './other-harmonic';
+import { otherNull } from './other-null';
 import { otherSideRead } from './other-side';
 import { overloaded } from './overloaded';
 import { ownNoise } from './own-noise';
@@ -45,6 +49,7 @@ import { peakOnNoise } from './peak-on-noise';
 import { periodForOnTime } from './period-for-on-time';
 import { powerForVoltage } from './power-for-voltage';
 import { silenceForOnTime } from './silence-for-on-time';
+import { smallIndexRule } from './small-index-rule';
 import { strongestAlone } from './strongest-alone';
 import { sweepTooFast } from './sweep-too-fast';
 import { troughOnNoise } from './trough-on-noise';
@@ -52,6 +57,7 @@ import { unitMixed } from './unit-mixed';
 import { untestedProducts } from './untested-products';
 import { wideResolution } from './wide-resolution';
 import { widthAtLevel } from './width-at-level';
+import { widthForDeviation } from './width-for-deviation';
 import { widthOfShare } from './width-of-share';
 import { windowTooWide } from './window-too-wide';
 import { wrongCarrier } from './wrong-carrier';
@@ -67,6 +73,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	companyInTheFilter,
 	couplingLeftOut,
 	couplingWrongSign,
+	crestForCarrier,
 	deltaSign,
 	densityForPower,
 	densityNotDivided,
@@ -90,10 +97,13 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	markerNotDivided,
 	markerOverResolution,
 	markersForBands,
+	narrowForDepth,
 	neighbourWidth,
 	noiseNotTakenOff,
 	notMeasured,
+	oneLineForAll,
 	otherHarmonic,
+	otherNull,
 	otherSideRead,
 	overloaded,
 	ownNoise,
@@ -105,6 +115,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	periodForOnTime,
 	powerForVoltage,
 	silenceForOnTime,
+	smallIndexRule,
 	strongestAlone,
 	sweepTooFast,
 	troughOnNoise,
@@ -112,6 +123,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	untestedProducts,
 	wideResolution,
 	widthAtLevel,
+	widthForDeviation,
 	widthOfShare,
 	windowTooWide,
 	wrongCarrier,
