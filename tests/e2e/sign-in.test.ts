@@ -53,7 +53,7 @@ test('a room that is not for one’s role says so, with a way back', async ({ pa
 	await page.goto('/sign-in?next=/admin');
 	await signIn(page, 'tobin.garth@tarnvale.example');
 	await expect(page.getByRole('heading', { name: 'Not for your role' })).toBeVisible();
-	await page.getByRole('link', { name: 'To office' }).click();
+	await page.getByRole('link', { name: 'Back to Office' }).click();
 	await expect(page).toHaveURL('/office');
 });
 

@@ -3,6 +3,7 @@ import { SweepRun } from '$lib/components/bench/state/sweep-run.svelte';
 import { TraceSet } from '$lib/components/bench/state/trace-set.svelte';
 import { Refusal, type BenchWire } from '$lib/components/bench/state/bench-wire';
 import type { AttemptView, BenchView } from '$lib/schemas/attempt';
+import type { Frame } from '$lib/schemas/frames';
 import { resolved } from './resolved-settings';
 import { waiting, wireOf } from './bench-wire-of';
 
@@ -51,5 +52,46 @@ describe('SweepRun.start()', () => {
 		});
 		await run.start();
 		expect([run.closed, run.running]).toEqual([true, false]);
+	});
+});
+
+describe('SweepRun.change()', () => {
+	async function* takenOver(): AsyncIterable<Frame[]> {
+		await Promise.resolve();
+		const json = { reason: 'taken-over', message: 'Another page has it.', nextRow: 0, benchTimeUsedS: 1 };
+		yield [{ type: 'end', json } as Frame];
+	}
+	async function* silent(signal: AbortSignal): AsyncIterable<Frame[]> {
+		await new Promise((then) => signal.addEventListener('abort', then));
+		yield [];
+	}
+
+	it('takes the receiver back from a request of its own that was given up and came late', async () => {
+		const asked: unknown[] = [];
+		const run = runWith({
+			sweeps: ({ settings }, signal) => {
+				asked.push(settings.spanHz);
+				// The first is given up before it is answered; the second loses the receiver to it.
+				if (asked.length === 1) return new Promise(() => {});
+				return Promise.resolve(asked.length === 2 ? takenOver() : silent(signal));
+			}
+		});
+		run.running = true;
+		void run.change({ spanHz: 1 });
+		await run.change({ spanHz: 2 });
+		await vi.waitFor(() => expect(asked).toEqual([1, 2, 2]));
+		expect([run.running, run.ended]).toEqual([true, undefined]);
+		run.stop();
+	});
+
+	it('leaves the receiver to another page that has taken it', async () => {
+		const asked: unknown[] = [];
+		const run = runWith({
+			sweeps: ({ settings }) => (asked.push(settings.spanHz), Promise.resolve(takenOver()))
+		});
+		run.running = true;
+		await run.change({ spanHz: 2 });
+		await vi.waitFor(() => expect(run.ended?.reason).toBe('taken-over'));
+		expect([asked, run.running]).toEqual([[2], false]);
 	});
 });

@@ -1,5 +1,6 @@
 /** The plot as a picture to keep: axis, traces, markers, brackets, and a title block like a drawing's. */
 import { bandGeometry } from '../plot/band-geometry';
+import { bandStacks } from '../plot/band-stacks';
 import { drawTraces, type ColourOf } from '../plot/draw-traces';
 import { flagPx, placeFlags } from '../plot/flag-layout';
 import { frequencyAxis } from '../plot/frequency-axis';
@@ -106,9 +107,13 @@ function haloed(context: Pen, text: string, x: number, y: number, fill: string, 
 	context.fillText(text, x, y);
 }
 
+/** How wide a band’s figure and what stands under it may be. */
+const figureWidthPx = 140;
+
 function drawBands(context: Pen, frame: PlotFrame, { bands }: BenchSnapshot, colour: TokenColour) {
+	const stacks = bandStacks(bands, frame, figureWidthPx);
 	bands.forEach((band, i) => {
-		const geometry = bandGeometry(band, frame, i, 140);
+		const geometry = bandGeometry(band, frame, stacks[i], figureWidthPx);
 		if (!geometry) return;
 		const { x0, x1, startInside, stopInside, dimensionY: y, figureX } = geometry;
 		const edges = [...(startInside ? [x0] : []), ...(stopInside ? [x1] : [])];

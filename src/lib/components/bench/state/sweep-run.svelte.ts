@@ -4,15 +4,16 @@ import type { Frame } from '$lib/schemas/frames';
 import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 import { streamEnd, streamState, type ReceiverFlag, type StreamEndReason } from '$lib/schemas/sweep-stream';
 import { Refusal, type BenchWire } from './bench-wire';
+import { Askings } from './askings';
+import { DrawnRows } from './drawn-rows';
 import type { TraceSet } from './trace-set.svelte';
+import { withProtection } from './with-protection';
 
 /** Resolves when the browser has painted; a hidden page does not paint, so its receiver waits. */
 const nextPaint = () => new Promise<void>((resolve) => requestAnimationFrame(() => resolve()));
 const pause = (ms: number) => new Promise<void>((resolve) => setTimeout(resolve, ms));
 /** Waits before asking again after a lost connection, ms. */
 const retryAfterMs = [300, 1000, 2000, 4000, 8000];
-/** Drawn rows are told to the server at most this often, ms. */
-const acknowledgeEveryMs = 1000;
 
 export class SweepRun {
 	/** Sweeps are wanted. */
@@ -34,19 +35,17 @@ export class SweepRun {
 	readonly #wire: BenchWire;
 	readonly #traces: TraceSet;
 	#stream: AbortController | undefined;
+	readonly #askings = new Askings();
 	#nextRow: number;
 	/** Sweeps of the run under way; without end when undefined. */
 	#wanted: number | undefined;
-	#drawnTo: number | undefined;
-	#acknowledgedTo: number | undefined;
-	#acknowledgedAtMs = 0;
-	/** The last telling of what was drawn: they go one after another, so that none arrives late. */
-	#telling: Promise<void> = Promise.resolve();
+	readonly #drawn: DrawnRows;
 	#clock: { clockS: number; usedS: number };
 
 	constructor(bench: BenchView, traces: TraceSet, wire: BenchWire) {
 		this.#wire = wire;
 		this.#traces = traces;
+		this.#drawn = new DrawnRows((row) => (this.closed ? Promise.resolve() : wire.acknowledge(row)));
 		this.settings = bench.settings;
 		this.resolved = bench.resolved;
 		this.flags = bench.protectionTripped ? withProtection(bench.flags) : bench.flags;
@@ -77,9 +76,9 @@ export class SweepRun {
 	stop(): void {
 		this.running = false;
 		this.lost = false;
-		this.#stream?.abort();
+		this.#giveUp();
 		this.#traces.settle();
-		this.#acknowledge(true);
+		this.#acknowledge();
 	}
 
 	/**
@@ -106,20 +105,11 @@ export class SweepRun {
 	 * @param row waits until this row, which stands in a trace already, has been painted too
 	 */
 	async settleAcknowledgement(row?: number): Promise<void> {
-		if (row !== undefined && row > (this.#drawnTo ?? -1)) {
+		if (row !== undefined && this.#drawn.isNew(row)) {
 			await nextPaint();
-			this.#drawnTo = Math.max(row, this.#drawnTo ?? 0);
+			this.#drawn.upTo(row);
 		}
-		const told = this.#telling.then(() => this.#tell());
-		this.#telling = told.catch(() => undefined);
-		return told;
-	}
-
-	async #tell(): Promise<void> {
-		const drawnTo = this.#drawnTo;
-		if (this.closed || drawnTo === undefined || drawnTo === this.#acknowledgedTo) return;
-		await this.#wire.acknowledge(drawnTo);
-		this.#acknowledgedTo = drawnTo;
+		return this.#drawn.tell();
 	}
 
 	/**
@@ -141,11 +131,23 @@ export class SweepRun {
 		}
 	}
 
+	#acknowledge(): void {
+		this.settleAcknowledgement().catch((error) =>
+			console.warn('Could not tell the server what was drawn.', error)
+		);
+	}
+
+	#giveUp(): void {
+		this.#askings.givenUp();
+		this.#stream?.abort();
+	}
+
 	/** Resolves once the stream has begun; what follows comes in on its own. */
 	async #ask(settings: Settings, sweeps: number | undefined, resetProtection?: boolean): Promise<void> {
-		this.#stream?.abort();
+		this.#giveUp();
 		const stream = new AbortController();
 		this.#stream = stream;
+		this.#askings.asked();
 		const request = {
 			settings,
 			from: this.#nextRow,
@@ -158,11 +160,14 @@ export class SweepRun {
 		} catch (error) {
 			if (stream.signal.aborted) return;
 			if (error instanceof Refusal && error.status === 409) return this.#catchUp(settings, sweeps, error);
+			this.#askings.answered();
 			if (error instanceof Refusal) throw error;
 			this.settings = settings;
 			void this.#seek(settings, sweeps, stream.signal);
 			return;
 		}
+		if (stream.signal.aborted) return;
+		this.#askings.answered();
 		this.settings = settings;
 		this.ended = undefined;
 		this.lost = false;
@@ -185,12 +190,12 @@ export class SweepRun {
 				this.#traces.show();
 				const shownTo = this.#traces.lastRow;
 				await nextPaint();
-				this.#drawnTo = shownTo ?? this.#drawnTo;
+				this.#drawn.upTo(shownTo);
 				if (signal.aborted) return;
-				this.#acknowledge(false);
+				if (this.#drawn.isDue()) this.#acknowledge();
 				if (this.ended) {
 					this.#traces.settle();
-					this.#acknowledge(true);
+					this.#acknowledge();
 					return;
 				}
 			}
@@ -198,7 +203,25 @@ export class SweepRun {
 			if (signal.aborted) return;
 			console.warn('The sweep stream broke off.', error);
 		}
-		if (!signal.aborted) void this.#seek(this.settings, left, signal);
+		if (signal.aborted) return;
+		if (this.#askings.mayComeLate()) void this.#retake(left);
+		else void this.#seek(this.settings, left, signal);
+	}
+
+	/** Asks for the receiver again, once, after a late request of this page's own has taken it. */
+	async #retake(sweeps: number | undefined): Promise<void> {
+		this.#askings.forget();
+		try {
+			await this.#ask(this.settings, sweeps);
+		} catch (error) {
+			this.#refuse(error as Error);
+		}
+	}
+
+	#refuse({ message }: Error): void {
+		this.running = false;
+		this.lost = false;
+		this.ended = { reason: 'refused', message };
 	}
 
 	#receive(frame: Frame): number | undefined {
@@ -229,6 +252,7 @@ export class SweepRun {
 		const end = streamEnd.parse(json);
 		this.benchTimeUsedS = end.benchTimeUsedS;
 		if (end.reason === 'server-stopping') return;
+		if (end.reason === 'taken-over' && this.#askings.mayComeLate()) return;
 		this.ended = { reason: end.reason, message: end.message };
 		this.running = false;
 		if (end.reason === 'closed') this.closed = true;
@@ -267,25 +291,8 @@ export class SweepRun {
 				this.lost = false;
 				return void this.#take(frames, sweeps, signal);
 			} catch (error) {
-				if (error instanceof Refusal) {
-					this.running = false;
-					this.lost = false;
-					this.ended = { reason: 'refused', message: error.message };
-					return;
-				}
+				if (error instanceof Refusal) return this.#refuse(error);
 			}
 		}
 	}
-
-	#acknowledge(now: boolean): void {
-		if (!now && performance.now() - this.#acknowledgedAtMs < acknowledgeEveryMs) return;
-		this.#acknowledgedAtMs = performance.now();
-		this.settleAcknowledgement().catch((error) =>
-			console.warn('Could not tell the server what was drawn.', error)
-		);
-	}
 }
-
-/** The protection stays open until it is reset, whatever the set-up. */
-const withProtection = (flags: readonly ReceiverFlag[]): readonly ReceiverFlag[] =>
-	flags.some(({ kind }) => kind === 'input-protection') ? flags : [...flags, { kind: 'input-protection' }];
