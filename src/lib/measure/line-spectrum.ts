@@ -7,16 +7,27 @@ import { noiseBiasDb } from './scale';
 import type { Trace } from './trace';
 
 /** A quarter of all points lie below this: for a spectrum of lines, the noise between them. */
-export function floorDbm(trace: Trace): number {
+export function floorDbm(trace: Pick<Trace, 'levelsDbm'>): number {
 	const sorted = Float64Array.from(trace.levelsDbm).sort();
 	return sorted[sorted.length >> 2];
 }
 
+/**
+ * What a peak must exceed so that it is no crest of the noise. The largest of a thousand single values of noise lies 14 dB
+ * over the quarter mark: 18 dB leaves it out, and less where points are averages or extremes. Rise-fall shows minima on odd
+ * points, which say nothing about crests.
+ */
+export function aboveNoiseDbm(trace: Trace): number {
+	const levelsDbm =
+		trace.detector === 'rise-fall'
+			? Float64Array.from({ length: (trace.levelsDbm.length + 1) >> 1 }, (_, i) => trace.levelsDbm[2 * i])
+			: trace.levelsDbm;
+	return floorDbm({ levelsDbm }) + 3 + 2.7 * pointSpreadDb(trace);
+}
+
 /** Lines that stand out of the noise, by frequency, none weaker than `reachDb` below the strongest. */
 export function linesOf(trace: Trace, reachDb = 60): SpectralLine[] {
-	// The largest of a thousand single values of noise lies 14 dB over the quarter mark: 18 dB leaves it out.
-	const aboveNoiseDbm = floorDbm(trace) + 3 + 2.7 * pointSpreadDb(trace);
-	const lines = findPeaks(trace.levelsDbm, { thresholdDbm: aboveNoiseDbm }).map((index) =>
+	const lines = findPeaks(trace.levelsDbm, { thresholdDbm: aboveNoiseDbm(trace) }).map((index) =>
 		lineAt(trace, index)
 	);
 	const strongestDbm = Math.max(...lines.map(({ levelDbm }) => levelDbm));

@@ -22,7 +22,7 @@ export type ReadingRequest =
 			kind: 'next-peak';
 			fromHz: number;
 			side: Side;
-			/** Peaks below this don't count; absent: none is too low. */
+			/** Peaks below this don't count; absent: crests of the noise don't. */
 			thresholdDbm?: number;
 			/** How far the trace must fall on both sides of a peak, dB; absent: 6. */
 			excursionDb?: number;

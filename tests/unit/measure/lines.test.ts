@@ -28,7 +28,8 @@ describe('linesOf(trace)', () => {
 			expect(levelDbm).toBeCloseTo(-40, 4);
 		});
 		for (const rows of [1, 30])
-			expect(linesOf(buildNoise('no lines', { rbwHz: 10e3, rows }, -140))).toEqual([]);
+			for (const detector of ['sample', 'rise-fall'] as const)
+				expect(linesOf(buildNoise('no lines', { rbwHz: 10e3, rows, detector }, -140))).toEqual([]);
 	});
 });
 

@@ -101,6 +101,27 @@ describe('peak, next-peak and minimum', () => {
 			'lower side'
 		);
 	});
+	it.each([
+		{ detector: 'sample' },
+		{ detector: 'rise-fall' },
+		{ detector: 'positive-peak' },
+		{ detector: 'rise-fall', mode: 'max-hold', rows: 10 },
+		{ detector: 'sample', mode: 'average', rows: 10 }
+	] as const)('go past crests of the noise to the next line, for %o', (look) => {
+		const nearby = (frequencyHz: number) => (Math.abs(frequencyHz - 100.3e6) < 600 ? -65 : -300);
+		for (const seed of ['a', 'b', 'c', 'd']) {
+			const noisy = buildNoise(`crests ${seed}`, { rbwHz: 10e3, ...look }, -140, nearby);
+			const next = readOff(noisy, { kind: 'next-peak', fromHz: 99.7e6, side: 'upper' });
+			expect(next.parts?.frequencyHz).toBeCloseTo(100.3e6, -4);
+			const none = problemOf(noisy, { kind: 'next-peak', fromHz: 99.7e6, side: 'lower' });
+			expect(none.problem).toContain('out of the trace and its noise');
+		}
+	});
+	it('find crests of the noise too where the threshold lets them', () => {
+		const noise = buildNoise('crests', { rbwHz: 10e3 }, -140);
+		const request = { kind: 'next-peak', fromHz: 100e6, side: 'upper', thresholdDbm: -200 } as const;
+		expect(Math.abs(readOff(noise, request).parts!.frequencyHz! - 100e6)).toBeLessThan(50e3);
+	});
 	it('warn when the highest point is at the end of the trace', () => {
 		const edge = buildLines({ rbwHz: 10e3 }, [{ frequencyHz: 100.5e6, levelDbm: -30 }]);
 		expect(codesOf(readOff(edge, { kind: 'peak' }))).toContain('peak-at-edge');

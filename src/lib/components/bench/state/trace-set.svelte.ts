@@ -43,11 +43,15 @@ export class TraceSet {
 	read = $state.raw<readonly ShownTrace[]>([]);
 	/** Last whole row in the traces; undefined before the first. */
 	lastRow = $state<number | undefined>();
+	/** Last whole row in `read`. */
+	readRow = $state<number | undefined>();
 	/** Where holds and averages start. */
 	restartRow = $state(0);
 	/** Share of the sweep in progress that has come, 0 to 1; undefined between sweeps. */
 	progress = $state<number | undefined>();
-	readonly rowCount = $derived(this.lastRow === undefined ? 0 : this.lastRow - this.restartRow + 1);
+	readonly rowCount = $derived(this.#countTo(this.lastRow));
+	/** Rows since the restart in `read`. */
+	readonly readCount = $derived(this.#countTo(this.readRow));
 
 	#setUps: readonly TraceSetUp[] = [];
 	#scale: ResolvedSettings['scale'] = 'log';
@@ -111,7 +115,12 @@ export class TraceSet {
 	/** Lets readings see the traces as they stand now. */
 	settle(): void {
 		this.read = this.shown;
+		this.readRow = this.lastRow;
 		this.#readAtMs = performance.now();
+	}
+
+	#countTo(row: number | undefined): number {
+		return row === undefined ? 0 : row - this.restartRow + 1;
 	}
 
 	#add(kept: KeptRow): void {

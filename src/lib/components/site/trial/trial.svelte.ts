@@ -12,9 +12,6 @@ export interface TrialWire {
 }
 
 export type TrialMarker = 'A' | 'B';
-/** A peak stands out of the middle of the trace by this much: the crests of noise are some 10 dB over its middle, dB. */
-const aboveNoiseDb = 15;
-const median = (values: readonly number[]) => [...values].sort((a, b) => a - b)[values.length >> 1];
 /** The receiver rests when nobody has touched anything for as long as this, ms. */
 const restAfterMs = 45_000;
 
@@ -92,8 +89,7 @@ export class Trial {
 		const { levelsDbm } = this.sweep;
 		const setUp = { detector: 'rise-fall', scale: 'log', mode: 'live', count: 1 } as const;
 		const trace = { ...setUp, startHz, stopHz, rbwHz, levelsDbm };
-		const thresholdDbm = median(levelsDbm) + aboveNoiseDb;
-		const outcome = takeReading(trace, { kind: 'next-peak', fromHz: this.at[marker], side, thresholdDbm });
+		const outcome = takeReading(trace, { kind: 'next-peak', fromHz: this.at[marker], side });
 		if (isProblem(outcome)) return;
 		const { frequencyHz } = outcome.parts as { frequencyHz: number };
 		this.move(marker, frequencyHz);
