@@ -90,7 +90,7 @@ export const ROOMS: Room[] = [
 	{
 		path: 'src/routes',
 		mayImport: [
-			...lib('components', 'schemas'),
+			...lib('components', 'schemas', 'units'),
 			...server('services', 'auth', 'respond.ts', 'read-json.ts', 'read-form.ts', 'read-id.ts'),
 			'src/app.css'
 		],

@@ -17,7 +17,7 @@ export const readingId = z.int().min(1);
 const questionId = z.string().min(1).max(60);
 
 /** `POST /api/attempts`: 201 with a fresh attempt, 200 with the one of this exercise that is still open. */
-export const startAttemptRequest = z.strictObject({ exercise: slug });
+export const startAttemptRequest = z.strictObject({ exercise: slug, practice: z.boolean().default(false) });
 
 /** A number as the person typed it, in which unit, resting on which reading. */
 export const typedAnswer = z.strictObject({
@@ -119,6 +119,8 @@ export const attemptView = z.strictObject({
 	id: attemptId,
 	/** The first, second … attempt of this person at this exercise. */
 	number: z.int(),
+	/** It takes no try and never counts. */
+	practice: z.boolean(),
 	triesLeft: z.int(),
 	state: z.enum(['open', 'closed']),
 	startedAt: z.iso.datetime(),

@@ -11,14 +11,33 @@ export const courseUnit = z.strictObject({
 	title: line,
 	summary: line,
 	/** Slugs of its exercises, in teaching order: files <slug>.yaml in the unit's folder. */
-	exercises: z.array(slug).max(20)
+	exercises: z.array(slug).max(20),
+	/** Slugs of the units that a learner does first; all of them stand before this one. */
+	needs: z.array(slug).max(20).optional(),
+	/** So many of its exercises right, and the unit is done; all of them unless it says so. */
+	doneWith: z.int().min(1).max(20).optional()
 });
-export const courseFile = z.strictObject({
-	slug,
-	title: line,
-	summary: line,
-	units: z.array(courseUnit).min(1).max(40)
-});
+export const courseFile = z
+	.strictObject({
+		slug,
+		title: line,
+		summary: line,
+		units: z.array(courseUnit).min(1).max(40)
+	})
+	.superRefine(({ units }, context) => {
+		units.forEach(({ needs = [], doneWith, exercises }, index) => {
+			const refuse = (path: (string | number)[], message: string) =>
+				context.addIssue({ code: 'custom', path: ['units', index, ...path], message });
+			if (doneWith !== undefined && doneWith > exercises.length)
+				refuse(['doneWith'], `the unit has only ${exercises.length} exercises`);
+			needs.forEach((name, place) => {
+				const needed = units.slice(0, index).find((unit) => unit.slug === name);
+				if (!needed) refuse(['needs', place], `${name} is no unit that stands before this one`);
+				else if (needed.exercises.length === 0)
+					refuse(['needs', place], `${name} has no exercise, so it can’t be done`);
+			});
+		});
+	});
 
 export type CourseUnit = z.infer<typeof courseUnit>;
 export type CourseFile = z.infer<typeof courseFile>;

@@ -79,6 +79,8 @@ const watchedMistake = z.looseObject({ kind: slug });
 export const exerciseQuestion = z.strictObject({
 	id: slug,
 	text: line,
+	/** The skill it shows, by the slug of the unit that teaches it; the exercise's own unit unless it says so. */
+	skill: slug.optional(),
 	quantity: quantityTemplate,
 	/** Asks for a part of the quantity in place of its value: the distance of a delta, one neighbour of several. */
 	part: partTemplate.optional(),

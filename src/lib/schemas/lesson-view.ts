@@ -1,6 +1,6 @@
 /** A unit's lesson as a page shows it, with what stands around it. */
 import { z } from 'zod';
-import { exerciseProgress } from './course-view';
+import { exerciseProgress, lockView } from './course-view';
 import { figureView } from './figure-view';
 
 const unitLine = z.strictObject({ number: z.int(), slug: z.string(), title: z.string() });
@@ -14,6 +14,8 @@ export const lessonPartView = z.discriminatedUnion('kind', [
 export const lessonView = z.strictObject({
 	course: z.strictObject({ slug: z.string(), title: z.string() }),
 	unit: z.strictObject({ id: z.int(), ...unitLine.shape, summary: z.string() }),
+	/** Null when its exercises are open to this person; the lesson always is. */
+	lock: lockView.nullable(),
 	title: z.string(),
 	words: z.int(),
 	parts: z.array(lessonPartView),

@@ -91,6 +91,8 @@ export const REACH: Record<string, Reach> = {
 
 	'load /learn/exercises/[slug]': learners,
 	'action /learn/exercises/[slug]?/start': learners,
+	'action /learn/exercises/[slug]?/practise': learners,
+	'load /learn/skills': learners,
 	'load /learn/units/[slug]': { ...learners, absent: true },
 	'POST /api/attempts': { ...learners, body: { exercise: 'spread-carrier-1' } },
 	'POST /api/figures/[unitId]/[figureId]': { ...learners, absent: true, body: { values: { rbwHz: 1000 } } },

@@ -22,7 +22,7 @@ describe('getLesson(actor, slug)', () => {
 		const { actor } = await createUser('apprentice');
 		const { exercise, slug } = await course();
 		await startAttempt(actor, exercise.slug, now);
-		const lesson = await getLesson(actor, slug);
+		const lesson = await getLesson(actor, slug, now);
 		expect(lessonView.parse(lesson)).toEqual(lesson);
 		expect(lesson).toMatchObject({ title: 'Why a marker misleads', before: null, after: null });
 		expect(lesson.exercises).toMatchObject([{ slug: exercise.slug, standing: 'open' }]);
@@ -46,7 +46,7 @@ describe('getLesson(actor, slug)', () => {
 				slug: `${slug}-${number}`,
 				title: `T${number}`
 			});
-		expect(await getLesson(actor, slug)).toMatchObject({
+		expect(await getLesson(actor, slug, now)).toMatchObject({
 			before: { number: 5, title: 'T5' },
 			after: { number: 7, title: 'T7' }
 		});
@@ -55,10 +55,12 @@ describe('getLesson(actor, slug)', () => {
 	it('is open to instructors, closed to those who learn nothing here, and knows no unit that is gone', async () => {
 		const as = async (role: Parameters<typeof createUser>[0]) => (await createUser(role)).actor;
 		const { course: parent, slug } = await course();
-		expect((await getLesson(await as('instructor'), slug)).unit.slug).toBe(slug);
-		await expect(getLesson(await as('coordinator'), slug)).rejects.toMatchObject({ code: 'forbidden' });
-		await expect(getLesson(await as('apprentice'), 'nothing')).rejects.toMatchObject({ code: 'not_found' });
+		expect((await getLesson(await as('instructor'), slug, now)).unit.slug).toBe(slug);
+		await expect(getLesson(await as('coordinator'), slug, now)).rejects.toMatchObject({ code: 'forbidden' });
+		await expect(getLesson(await as('apprentice'), 'nothing', now)).rejects.toMatchObject({
+			code: 'not_found'
+		});
 		await createEdition(parent, 2, { slug: `later-${slug}` });
-		await expect(getLesson(await as('apprentice'), slug)).rejects.toMatchObject({ code: 'not_found' });
+		await expect(getLesson(await as('apprentice'), slug, now)).rejects.toMatchObject({ code: 'not_found' });
 	});
 });

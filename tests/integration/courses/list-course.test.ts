@@ -21,7 +21,7 @@ describe('listCourse(actor, slug)', () => {
 		const { actor } = await createUser('apprentice');
 		const { course, exercise } = await createCourse();
 		const standing = async () => {
-			const view = await listCourse(actor, course.slug);
+			const view = await listCourse(actor, course.slug, now);
 			expect(courseProgress.parse(view)).toEqual(view);
 			return view.units[0].exercises[0];
 		};
@@ -46,7 +46,7 @@ describe('listCourse(actor, slug)', () => {
 		const { actor: other } = await createUser('apprentice');
 		const { course, exercise } = await createCourse();
 		await startAttempt(other, exercise.slug, now);
-		const { units } = await listCourse(actor, course.slug);
+		const { units } = await listCourse(actor, course.slug, now);
 		expect(units[0].exercises[0]).toMatchObject({ standing: 'not-started', attempts: [] });
 	});
 
@@ -55,7 +55,7 @@ describe('listCourse(actor, slug)', () => {
 		const { course, exercise } = await createCourse();
 		await startAttempt(actor, exercise.slug, now);
 		await createEdition(course, 2, { slug: exercise.slug, title: 'Renamed' });
-		const view = (await listCourses(actor)).find(({ slug }) => slug === course.slug);
+		const view = (await listCourses(actor, now)).find(({ slug }) => slug === course.slug);
 		expect(view).toMatchObject({
 			edition: 2,
 			units: [{ exercises: [{ title: 'Renamed', standing: 'open' }] }]
@@ -66,9 +66,9 @@ describe('listCourse(actor, slug)', () => {
 		const { actor } = await createUser('apprentice');
 		const { actor: coordinator } = await createUser('coordinator');
 		const { course } = await createCourse();
-		await expect(listCourse(actor, 'no-such-course')).rejects.toMatchObject({ code: 'not_found' });
-		await expect(listCourse(coordinator, course.slug)).rejects.toMatchObject({ code: 'forbidden' });
-		await expect(listCourses(coordinator)).rejects.toMatchObject({ code: 'forbidden' });
+		await expect(listCourse(actor, 'no-such-course', now)).rejects.toMatchObject({ code: 'not_found' });
+		await expect(listCourse(coordinator, course.slug, now)).rejects.toMatchObject({ code: 'forbidden' });
+		await expect(listCourses(coordinator, now)).rejects.toMatchObject({ code: 'forbidden' });
 	});
 });
 
@@ -76,7 +76,7 @@ describe('getExerciseBrief(actor, slug)', () => {
 	it('says what the exercise is, and nothing that a seed decides', async () => {
 		const { actor } = await createUser('apprentice');
 		const { exercise } = await createCourse();
-		const brief = await getExerciseBrief(actor, exercise.slug);
+		const brief = await getExerciseBrief(actor, exercise.slug, now);
 		expect(exerciseBrief.parse(brief)).toEqual(brief);
 		expect(brief).toMatchObject({
 			client: 'Northmoor Telemetry',
@@ -90,6 +90,6 @@ describe('getExerciseBrief(actor, slug)', () => {
 
 	it('knows no exercise that is not published', async () => {
 		const { actor } = await createUser('apprentice');
-		await expect(getExerciseBrief(actor, 'nothing')).rejects.toMatchObject({ code: 'not_found' });
+		await expect(getExerciseBrief(actor, 'nothing', now)).rejects.toMatchObject({ code: 'not_found' });
 	});
 });

@@ -34,6 +34,7 @@ const table: Record<Action, [string[], string[], string[], string[], string[]]> 
 	'profile.read': [mine, mine, mine, mine, any],
 	'profile.change': [mine, mine, mine, mine, any],
 	'lesson.read': [any, any, [], [], any],
+	'unit.open-any': [[], any, [], [], any],
 	'attempt.start': [mine, mine, [], [], mine],
 	'attempt.work': [mine, mine, [], [], mine],
 	'saved-set-up.keep': [mine, mine, [], [], mine],

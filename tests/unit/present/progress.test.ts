@@ -5,10 +5,10 @@ const exercise = { slug: 'x', title: 'X', number: 1, tries: 5 };
 const at = new Date('2026-03-02T10:00:00Z');
 const attempt = (id: number, rightAnswers: number, passed: 0 | 1 | null = 0) => ({
 	...{ id, number: id, startedAt: at, closedAt: passed === null ? null : at, passed },
-	...{ questions: 3, answered: 3, rightAnswers }
+	...{ questions: 3, answered: 3, rightAnswers, cleanAnswers: rightAnswers, practice: 0 as 0 | 1 }
 });
 const counting = (...attempts: ReturnType<typeof attempt>[]) =>
-	presentProgress(exercise, attempts)
+	presentProgress(exercise, attempts, at)
 		.attempts.filter(({ counts }) => counts)
 		.map(({ id }) => id);
 

@@ -1,6 +1,6 @@
 /** The state of an exercise for one person, in words and a mark: never in colour alone. */
 import type { ExerciseProgress } from '$lib/schemas/course-view';
-import { ordinal } from './ordinal';
+import { ordinal } from '$lib/units/ordinal';
 
 export interface Standing {
 	mark: 'dot' | 'half' | 'check' | 'cross';
@@ -17,8 +17,8 @@ export function standingOf(
 		case 'open':
 			return { mark: 'half', words: `${ordinal(attempts.length)} attempt open` };
 		case 'passed': {
-			const passed = attempts.findIndex((attempt) => attempt.passed === true);
-			return { mark: 'check', words: `right at the ${ordinal(attempts[passed]?.number ?? 1)} attempt` };
+			const first = attempts.find(({ passed, practice }) => passed === true && !practice);
+			return { mark: 'check', words: `right at the ${ordinal(first?.number ?? 1)} attempt` };
 		}
 		case 'not-passed':
 			return {

@@ -1,6 +1,6 @@
 import { courseFile, type CourseUnit } from '$lib/schemas/course-file';
 import { ContentError } from './content-error';
-import { addressIn, filesUnder, foldersIn, type ContentTree } from './content-tree';
+import { addressIn, filesUnder, foldersIn, textIn, type ContentTree } from './content-tree';
 import type { CourseContent, UnitContent } from './course-content';
 import { readExercise, type CheckedExercises } from './read-exercise';
 import { readLesson } from './read-lesson';
@@ -45,6 +45,7 @@ export function readCourse(
 		);
 		return { ...unit, ...lesson, exercises } as UnitContent;
 	});
+	if (!faulty) tried(() => refuseUnknownSkills(tree, units));
 	const { slug, title, summary } = outline;
 	return faulty ? null : { slug, title, summary, units };
 }
@@ -67,4 +68,23 @@ function refuseStrays(tree: ContentTree, unit: CourseUnit): void {
 	const stray = filesUnder(tree, folder).find((name) => !expected.includes(name));
 	if (stray)
 		throw new ContentError(addressIn(tree, `${folder}/${stray}`), 1, '', 'is not named in course.yaml');
+}
+
+/** A skill is what a unit of this course teaches. */
+function refuseUnknownSkills(tree: ContentTree, units: readonly UnitContent[]): void {
+	for (const unit of units)
+		for (const exercise of unit.exercises)
+			exercise.questions.forEach(({ skill }, index) => {
+				if (skill === undefined || units.some(({ slug }) => slug === skill)) return;
+				const path = `${folderOf(unit)}/${exercise.slug}.yaml`;
+				const line = textIn(tree, path)
+					.split('\n')
+					.findIndex((text) => text.trim() === `skill: ${skill}`);
+				throw new ContentError(
+					addressIn(tree, path),
+					line + 1 || 1,
+					`questions[${index}].skill`,
+					`${skill} is no unit of this course`
+				);
+			});
 }

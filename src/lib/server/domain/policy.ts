@@ -10,6 +10,7 @@ export type Action =
 	| 'profile.read'
 	| 'profile.change'
 	| 'lesson.read' // with its live figures
+	| 'unit.open-any' // exercises of a unit before what it needs is done
 	| 'attempt.start'
 	| 'attempt.work' // settings, sweeps, readings, drafts, hints, answers
 	| 'attempt.read'
@@ -61,6 +62,7 @@ export const PERMISSIONS: Record<Action, Partial<Record<Role, readonly Reach[]>>
 	'profile.read': THEIR_OWN,
 	'profile.change': THEIR_OWN,
 	'lesson.read': { apprentice: ANY, instructor: ANY, administrator: ANY },
+	'unit.open-any': { instructor: ANY, administrator: ANY },
 	// Whoever works on an attempt is told the truth at its end, so these go with 'answer-key.read'.
 	'attempt.start': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
 	'attempt.work': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },

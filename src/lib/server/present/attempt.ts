@@ -6,7 +6,14 @@ import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 
 /** What an attempt view is made of. The record holds the seed; only what stands here goes out. */
 export interface AttemptParts {
-	attempt: { id: number; number: number; startedAt: Date; closedAt: Date | null; hintsRevealed: number };
+	attempt: {
+		id: number;
+		number: number;
+		practice: boolean;
+		startedAt: Date;
+		closedAt: Date | null;
+		hintsRevealed: number;
+	};
 	triesLeft: number;
 	exercise: ExerciseView;
 	/** Every hint, shown or not. */
@@ -22,6 +29,7 @@ export function presentAttempt(parts: AttemptParts): AttemptView {
 	return {
 		id: attempt.id,
 		number: attempt.number,
+		practice: attempt.practice,
 		triesLeft: parts.triesLeft,
 		state: attempt.closedAt ? 'closed' : 'open',
 		startedAt: attempt.startedAt.toISOString(),

@@ -1,4 +1,5 @@
-import type { AttemptLineView, ExerciseProgress } from '$lib/schemas/course-view';
+import type { AttemptLineView, ExerciseProgress, RepeatView } from '$lib/schemas/course-view';
+import { GAPS_DAYS, isDue, repeatOf } from '$lib/server/domain/progress/repeats';
 
 interface AttemptRecord {
 	id: number;
@@ -10,25 +11,54 @@ interface AttemptRecord {
 	questions: number;
 	answered: number;
 	rightAnswers: number;
+	/** Of those, the ones whose method was right too. */
+	cleanAnswers: number;
+	practice: 0 | 1;
 }
 
 /** An exercise with what this person has done at it. @param attempts theirs, oldest first */
 export function presentProgress(
 	exercise: { slug: string; title: string; number: number; tries: number },
-	attempts: AttemptRecord[]
+	attempts: AttemptRecord[],
+	now: Date
 ): ExerciseProgress {
 	const open = attempts.find(({ closedAt }) => closedAt === null);
-	const best = bestOf(attempts);
+	const counted = attempts.filter(({ practice }) => practice === 0);
+	const best = bestOf(counted);
 	return {
 		slug: exercise.slug,
 		title: exercise.title,
 		number: exercise.number,
 		tries: exercise.tries,
-		triesLeft: Math.max(0, exercise.tries - attempts.length),
-		standing: standingOf(attempts, open !== undefined),
+		triesLeft: triesLeft(exercise, attempts),
+		standing: standingOf(counted),
 		openAttemptId: open?.id ?? null,
+		repeat: presentRepeat(attempts, now),
 		attempts: attempts.map((attempt) => presentAttemptLine(attempt, attempt === best))
 	};
+}
+
+/** Practice takes no try. */
+export const triesLeft = (
+	{ tries }: { tries: number },
+	attempts: readonly Pick<AttemptRecord, 'practice'>[]
+): number => Math.max(0, tries - attempts.filter(({ practice }) => practice === 0).length);
+
+/** What comes back of it, and when; null for nothing. Practice moves it like any other attempt. */
+function presentRepeat(attempts: readonly AttemptRecord[], now: Date): RepeatView | null {
+	const closed = attempts.flatMap(({ closedAt, passed, questions, cleanAnswers }) =>
+		closedAt && passed !== null ? [{ closedAt, missed: cleanAnswers < questions }] : []
+	);
+	const repeat = repeatOf(closed.sort((a, b) => a.closedAt.getTime() - b.closedAt.getTime()));
+	return (
+		repeat && {
+			missedAt: repeat.missedAt.toISOString(),
+			dueAt: repeat.dueAt.toISOString(),
+			due: isDue(repeat, now),
+			number: repeat.step + 1,
+			of: GAPS_DAYS.length
+		}
+	);
 }
 
 /** The attempt that counts: the first passed, else the first with most answers right. */
@@ -38,14 +68,14 @@ function bestOf(attempts: AttemptRecord[]): AttemptRecord | undefined {
 	return most > 0 ? attempts.find((attempt) => worth(attempt) === most) : undefined;
 }
 
-function standingOf(attempts: AttemptRecord[], open: boolean): ExerciseProgress['standing'] {
+function standingOf(attempts: AttemptRecord[]): ExerciseProgress['standing'] {
 	if (attempts.some(({ passed }) => passed === 1)) return 'passed';
-	if (open) return 'open';
+	if (attempts.some(({ closedAt }) => closedAt === null)) return 'open';
 	return attempts.length === 0 ? 'not-started' : 'not-passed';
 }
 
 const presentAttemptLine = (attempt: AttemptRecord, counts: boolean): AttemptLineView => {
-	const { id, number, startedAt, closedAt, passed, questions, answered, rightAnswers } = attempt;
+	const { id, number, startedAt, closedAt, passed, questions, answered, rightAnswers, practice } = attempt;
 	return {
 		id,
 		number,
@@ -56,6 +86,7 @@ const presentAttemptLine = (attempt: AttemptRecord, counts: boolean): AttemptLin
 		questions,
 		answered,
 		rightAnswers,
-		counts
+		counts,
+		practice: practice === 1
 	};
 };

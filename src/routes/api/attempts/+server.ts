@@ -9,7 +9,7 @@ import type { RequestHandler } from './$types';
 export const POST: RequestHandler = ({ locals, request }) =>
 	respondWith(async () => {
 		const actor = requireActor(locals);
-		const { exercise } = await readJson(request, startAttemptRequest);
-		const { attempt, created } = await startAttempt(actor, exercise, new Date());
+		const { exercise, practice } = await readJson(request, startAttemptRequest);
+		const { attempt, created } = await startAttempt(actor, exercise, new Date(), practice);
 		return json({ attempt }, { status: created ? 201 : 200 });
 	});

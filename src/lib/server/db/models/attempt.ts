@@ -17,6 +17,8 @@ export class Attempt extends Model<InferAttributes<Attempt>, InferCreationAttrib
 	declare exerciseId: number;
 	/** 1, 2, … of this person at this exercise. */
 	declare number: number;
+	/** Takes no try and never counts. */
+	declare practice: CreationOptional<boolean>;
 	/** 128 random bits in hexadecimal. Leaves the server only when the attempt has closed. */
 	declare seed: string;
 	/** The sweep's arithmetic that this attempt was swept with. */
@@ -46,6 +48,7 @@ Attempt.init(
 		editionId: DataTypes.BIGINT.UNSIGNED,
 		exerciseId: DataTypes.BIGINT.UNSIGNED,
 		number: DataTypes.INTEGER.UNSIGNED,
+		practice: { type: DataTypes.BOOLEAN, defaultValue: false },
 		seed: DataTypes.CHAR(32),
 		engineVersion: DataTypes.INTEGER.UNSIGNED,
 		nextRow: { type: DataTypes.INTEGER.UNSIGNED, defaultValue: 0 },

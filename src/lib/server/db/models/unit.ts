@@ -20,6 +20,10 @@ export class Unit extends Model<InferAttributes<Unit>, InferCreationAttributes<U
 	declare slug: string;
 	declare title: string;
 	declare summary: string;
+	/** Slugs of the units that a learner does first. */
+	declare needs: CreationOptional<string[]>;
+	/** So many of its exercises right, and it is done; null for all of them. */
+	declare doneWith: CreationOptional<number | null>;
 	declare lesson: Lesson;
 	/** As the author wrote them, checked at import. */
 	declare figures: Figure[];
@@ -34,6 +38,8 @@ Unit.init(
 		slug: DataTypes.STRING(80),
 		title: DataTypes.STRING(300),
 		summary: DataTypes.STRING(300),
+		needs: { type: DataTypes.JSON, defaultValue: [] },
+		doneWith: { type: DataTypes.INTEGER.UNSIGNED, allowNull: true },
 		lesson: DataTypes.JSON,
 		figures: DataTypes.JSON
 	},

@@ -15,6 +15,9 @@ export interface AttemptLine {
 	questions: number;
 	answered: number;
 	rightAnswers: number;
+	/** Of those, the ones whose method was right too. */
+	cleanAnswers: number;
+	practice: 0 | 1;
 }
 
 /** A person's attempts in a course, whatever its edition, oldest first; of one exercise if `slug` is given. */
@@ -28,7 +31,9 @@ export function listAttempts(
 		`SELECT a.id, e.slug AS exerciseSlug, a.number, a.started_at AS startedAt, a.closed_at AS closedAt, f.passed,
 			CAST(JSON_LENGTH(e.definition, '$.questions') AS INT) AS questions,
 			CAST((SELECT COUNT(*) FROM answers x WHERE x.attempt_id = a.id) AS INT) AS answered,
-			CAST((SELECT COUNT(*) FROM answers x WHERE x.attempt_id = a.id AND x.verdict LIKE 'right%') AS INT) AS rightAnswers
+			CAST((SELECT COUNT(*) FROM answers x WHERE x.attempt_id = a.id AND x.verdict LIKE 'right%') AS INT) AS rightAnswers,
+			CAST((SELECT COUNT(*) FROM answers x WHERE x.attempt_id = a.id AND x.verdict = 'right') AS INT) AS cleanAnswers,
+			a.practice
 		FROM attempts a
 		JOIN exercises e ON e.id = a.exercise_id
 		JOIN editions d ON d.id = e.edition_id

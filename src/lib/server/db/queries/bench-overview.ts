@@ -1,7 +1,7 @@
 import { QueryTypes } from 'sequelize';
 import { sequelize } from '../connection';
 
-/** How an exercise of a course goes, over everybody and every edition. */
+/** How an exercise of a course goes, over everybody and every edition, practice apart. */
 export interface ExerciseFigures {
 	courseId: number;
 	slug: string;
@@ -20,6 +20,7 @@ export const exerciseFigures = (): Promise<ExerciseFigures[]> =>
 		JOIN exercises e ON e.id = a.exercise_id
 		JOIN editions d ON d.id = e.edition_id
 		LEFT JOIN findings f ON f.attempt_id = a.id
+		WHERE NOT a.practice
 		GROUP BY d.course_id, e.slug`,
 		{ type: QueryTypes.SELECT }
 	);

@@ -11,7 +11,7 @@ export interface PersonLine {
 	disabledAt: Date | null;
 	lastSignInAt: Date | null;
 	attempts: number;
-	/** Different exercises with at least one attempt passed. */
+	/** Different exercises with at least one attempt passed that counts. */
 	passed: number;
 }
 
@@ -25,7 +25,7 @@ export const listPeople = (): Promise<PersonLine[]> =>
 			(SELECT GROUP_CONCAT(r.role ORDER BY r.role) FROM user_roles r WHERE r.user_id = u.id) AS roles,
 			(SELECT COUNT(*) FROM attempts a WHERE a.user_id = u.id) AS attempts,
 			(SELECT COUNT(DISTINCT e.slug) FROM attempts a JOIN exercises e ON e.id = a.exercise_id
-				JOIN findings f ON f.attempt_id = a.id AND f.passed WHERE a.user_id = u.id) AS passed
+				JOIN findings f ON f.attempt_id = a.id AND f.passed WHERE a.user_id = u.id AND NOT a.practice) AS passed
 		FROM users u
 		ORDER BY u.display_name, u.id
 		LIMIT ${MOST}`,

@@ -11,6 +11,7 @@ import { attemptsAtExercise } from '$lib/server/db/queries/attempts-at-exercise'
 import type { PlacedExercise } from '$lib/server/db/queries/find-exercise';
 import { presentAttempt, presentBench, presentFlag } from '$lib/server/present/attempt';
 import { presentExercise } from '$lib/server/present/exercise';
+import { triesLeft } from '$lib/server/present/progress';
 import { presentReading } from '$lib/server/present/reading';
 import { drawnFor, preparedBench, resolvedFor, type SignalSource } from './prepared-bench';
 import { setUpLog } from './set-up-log';
@@ -29,7 +30,7 @@ export async function viewAttempt(attempt: Attempt, transaction?: Transaction): 
 	});
 	return presentAttempt({
 		attempt,
-		triesLeft: Math.max(0, exercise.tries - attempts.length),
+		triesLeft: triesLeft(exercise, attempts),
 		exercise: viewExercise(exercise, source),
 		hints: drawnFor(source).brief.hints,
 		bench: await viewBench(attempt, source, transaction),

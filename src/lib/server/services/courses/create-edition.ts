@@ -41,14 +41,15 @@ export async function createEdition(
 }
 
 async function createUnit(editionId: number, content: UnitContent, transaction: Transaction): Promise<void> {
-	const { number, slug, title, summary, lessonMarkdown, figures, exercises } = content;
+	const { number, slug, title, summary, needs, doneWith = null } = content;
+	const { lessonMarkdown, figures, exercises } = content;
 	const lesson = renderLesson(
 		lessonMarkdown,
 		figures.map(({ id }) => id),
 		title
 	);
 	const unit = await Unit.create(
-		{ editionId, number, slug, title, summary, lesson, figures },
+		{ editionId, number, slug, title, summary, needs, doneWith, lesson, figures },
 		{ transaction }
 	);
 	const rows = exercises.map((definition, index) => ({

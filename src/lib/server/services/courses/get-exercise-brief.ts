@@ -7,9 +7,10 @@ import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 import { presentReceiver } from '$lib/server/present/exercise';
 import { presentProgress } from '$lib/server/present/progress';
+import { findLocks } from '../progress/find-locks';
 
 /** What an exercise is, before it is started: nothing that a seed decides. @throws DomainError `not_found` */
-export async function getExerciseBrief(actor: Actor, slug: string): Promise<ExerciseBrief> {
+export async function getExerciseBrief(actor: Actor, slug: string, now: Date): Promise<ExerciseBrief> {
 	if (!may(actor, 'learn.enter'))
 		throw new DomainError('forbidden', 'This part of the site is not for your role.');
 	const exercise = await findPublishedExercise(slug);
@@ -19,7 +20,8 @@ export async function getExerciseBrief(actor: Actor, slug: string): Promise<Exer
 	return {
 		course: { slug: edition.course.slug, title: edition.title },
 		unit: { number: unit.number, slug: unit.slug, title: unit.title },
-		exercise: presentProgress(exercise, await attemptsAtExercise(actor.id, exercise)),
+		lock: (await findLocks(actor, edition)).get(unit.slug) ?? null,
+		exercise: presentProgress(exercise, await attemptsAtExercise(actor.id, exercise), now),
 		client: definition.client,
 		receiver: presentReceiver(typeof receiver === 'string' ? profileNamed(receiver) : receiver),
 		questions: definition.questions.length,

@@ -10,9 +10,10 @@ import { DomainError } from '$lib/server/errors';
 import { presentFigure } from '$lib/server/present/figure';
 import { presentProgress } from '$lib/server/present/progress';
 import { firstState } from '../figures/figure-states';
+import { findLocks } from '../progress/find-locks';
 
 /** The lesson of a unit as published now, with what this person has done of its exercises. @throws DomainError `not_found` */
-export async function getLesson(actor: Actor, slug: string): Promise<LessonView> {
+export async function getLesson(actor: Actor, slug: string, now: Date): Promise<LessonView> {
 	if (!may(actor, 'lesson.read'))
 		throw new DomainError('forbidden', 'This part of the site is not for your role.');
 	const unit = await findPublishedUnit(slug);
@@ -27,13 +28,15 @@ export async function getLesson(actor: Actor, slug: string): Promise<LessonView>
 	return {
 		course: { slug: edition.course.slug, title: edition.title },
 		unit: { id, number, slug, title, summary },
+		lock: (await findLocks(actor, edition)).get(slug) ?? null,
 		title: lesson.title,
 		words: lesson.words,
 		parts: lesson.parts.map((part) => presentPart(unit, part)),
 		exercises: exercises.map((exercise) =>
 			presentProgress(
 				exercise,
-				attempts.filter(({ exerciseSlug }) => exerciseSlug === exercise.slug)
+				attempts.filter(({ exerciseSlug }) => exerciseSlug === exercise.slug),
+				now
 			)
 		),
 		...(await around(unit))

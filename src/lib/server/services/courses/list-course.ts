@@ -7,19 +7,20 @@ import { may } from '$lib/server/domain/policy';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 import { presentProgress } from '$lib/server/present/progress';
+import { findLocks } from '../progress/find-locks';
 
 /** Every course as published now, with what this person has done in it. */
-export async function listCourses(actor: Actor): Promise<CourseProgress[]> {
+export async function listCourses(actor: Actor, now: Date): Promise<CourseProgress[]> {
 	refuseStrangers(actor);
-	return Promise.all((await newestEditions()).map((course) => courseWithProgress(actor, course)));
+	return Promise.all((await newestEditions()).map((course) => courseWithProgress(actor, course, now)));
 }
 
 /** One course as published now, with what this person has done in it. @throws DomainError `not_found` */
-export async function listCourse(actor: Actor, slug: string): Promise<CourseProgress> {
+export async function listCourse(actor: Actor, slug: string, now: Date): Promise<CourseProgress> {
 	refuseStrangers(actor);
 	const course = (await newestEditions()).find((candidate) => candidate.slug === slug);
 	if (!course) throw new DomainError('not_found', 'There is no such course.');
-	return courseWithProgress(actor, course);
+	return courseWithProgress(actor, course, now);
 }
 
 function refuseStrangers(actor: Actor): void {
@@ -27,7 +28,7 @@ function refuseStrangers(actor: Actor): void {
 		throw new DomainError('forbidden', 'This part of the site is not for your role.');
 }
 
-async function courseWithProgress(actor: Actor, course: PublishedCourse): Promise<CourseProgress> {
+async function courseWithProgress(actor: Actor, course: PublishedCourse, now: Date): Promise<CourseProgress> {
 	const { courseId, editionId, slug, edition, title, summary } = course;
 	const units = await Unit.findAll({
 		where: { editionId },
@@ -40,6 +41,7 @@ async function courseWithProgress(actor: Actor, course: PublishedCourse): Promis
 		order: [['number', 'ASC']]
 	});
 	const attempts = groupedBy(await listAttempts(actor.id, courseId, null), (line) => line.exerciseSlug);
+	const locks = await findLocks(actor, { id: editionId, courseId });
 	const inUnit = groupedBy(exercises, (exercise) => exercise.unitId);
 	return {
 		slug,
@@ -51,8 +53,9 @@ async function courseWithProgress(actor: Actor, course: PublishedCourse): Promis
 			slug: unit.slug,
 			title: unit.title,
 			summary: unit.summary,
+			lock: locks.get(unit.slug) ?? null,
 			exercises: (inUnit.get(unit.id) ?? []).map((exercise) =>
-				presentProgress(exercise, attempts.get(exercise.slug) ?? [])
+				presentProgress(exercise, attempts.get(exercise.slug) ?? [], now)
 			)
 		}))
 	};

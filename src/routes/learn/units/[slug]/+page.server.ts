@@ -5,5 +5,5 @@ import type { PageServerLoad } from './$types';
 
 export const load: PageServerLoad = async (event) => {
 	const actor = requireUser(event);
-	return { lesson: await respond(() => getLesson(actor, event.params.slug)) };
+	return { lesson: await respond(() => getLesson(actor, event.params.slug, new Date())) };
 };
