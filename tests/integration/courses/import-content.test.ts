@@ -59,6 +59,21 @@ describe('importContent({root, now})', () => {
 		expect(imported.every(({ edition, created }) => edition === 1 && created)).toBe(true);
 	});
 
+	it('keeps what a unit needs, and refuses a skill that no unit teaches', async () => {
+		change('course.yaml', 'summary: Wide.', 'summary: Wide.\n    doneWith: 1');
+		await run();
+		const [edition] = await editions();
+		const unit = await Unit.findOne({ where: { editionId: edition.id }, rejectOnEmpty: true });
+		expect(unit).toMatchObject({ needs: [], doneWith: 1 });
+		change(exerciseFile(), '  - id: power', '  - skill: nothing\n    id: power');
+		await expect(run()).rejects.toMatchObject({
+			file: `${slug}/${exerciseFile()}`,
+			field: 'questions[0].skill',
+			reason: 'nothing is no unit of this course'
+		});
+		expect(await editions()).toHaveLength(1);
+	});
+
 	it('publishes a course with its units, lessons and exercises', async () => {
 		expect(await run()).toEqual([{ slug, edition: 1, created: true, writtenAtDesk: false }]);
 		const [edition] = await editions();

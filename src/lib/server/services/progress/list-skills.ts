@@ -35,7 +35,11 @@ export async function listSkills(actor: Actor, now: Date): Promise<CourseSkills[
 }
 
 const raiseText = ({ answers, level }: NonNullable<Mastery['raise']>): string =>
-	answers === 1 ? `One more answer right: ${level}.` : `${answers} answers right in a row: ${level}.`;
+	level === 'begun'
+		? 'Its first answer begins it.'
+		: answers === 1
+			? `One more answer right: ${level}.`
+			: `${answers} answers right in a row: ${level}.`;
 
 /** Where to answer such a question: an exercise not yet right with a try left, else one to practise, the least recent first. */
 function exerciseFor(course: CourseProgress, slugs: readonly string[]): SkillView['exercise'] {
