@@ -1,15 +1,13 @@
 import { describe, expect, it } from 'vitest';
-import { FrameDecoder, type PieceFrame } from '$lib/schemas/frames';
+import { type PieceFrame } from '$lib/schemas/frames';
 import type { Settings } from '$lib/schemas/settings';
 import { Attempt } from '$lib/server/db/models/attempt';
 import { SetUp } from '$lib/server/db/models/set-up';
 import { prepareSweep } from '$lib/server/bench/receiver/sweep';
 import { resolveSettings } from '$lib/server/bench/receiver/resolve-settings';
-import { acknowledgeRows } from '$lib/server/services/attempts/acknowledge-rows';
 import { countStreams, endStreams } from '$lib/server/services/attempts/open-streams';
-import { streamRows } from '$lib/server/services/attempts/stream-rows';
 import { streamSweeps } from '$lib/server/services/attempts/stream-sweeps';
-import { createAttempt, readStream, secretsOf, sweep, wholeRows } from '../../factories/attempt';
+import { createAttempt, readStream, secretsOf, sweep } from '../../factories/attempt';
 import { createUser } from '../../factories/user';
 
 const now = new Date('2026-03-02T10:00:00Z');
@@ -267,108 +265,6 @@ describe('streamSweeps(actor, attemptId, request, now)', () => {
 	});
 });
 
-describe('input protection', () => {
-	const hot = { parameters: hotParameters() };
-
-	it('trips, is kept with the attempt, and needs a pad and a reset', async () => {
-		const { actor, attempt } = await createAttempt(hot);
-		const bare = { ...settings, referenceDbm: 20 };
-		const tripped = await sweep(actor, attempt.id, bare);
-		expect(tripped.rows.size).toBe(0);
-		expect(tripped.end?.reason).toBe('input-protection');
-		expect(tripped.state.flags).toContainEqual({ kind: 'input-protection' });
-		expect(await stored(attempt.id)).toMatchObject({
-			protectionTripped: true,
-			protectionTrips: 1,
-			clockS: 0
-		});
-		await expect(open(actor, attempt.id, bare)).rejects.toMatchObject({ code: 'conflict' });
-		const padded = { ...bare, input: { padDb: 30 as const } };
-		const waiting = await sweep(actor, attempt.id, padded);
-		expect(waiting).toMatchObject({
-			state: { resolved: { input: { padDb: 30 } } },
-			end: { reason: 'input-protection' }
-		});
-		expect(await stored(attempt.id)).toMatchObject({
-			protectionTripped: true,
-			protectionTrips: 1,
-			clockS: 0
-		});
-		const again = await sweep(actor, attempt.id, bare, { resetProtection: true });
-		expect(again.end?.reason).toBe('input-protection');
-		const safe = await sweep(actor, attempt.id, padded, { resetProtection: true, sweeps: 2 });
-		expect([...safe.rows.keys()]).toEqual([0, 1]);
-		expect(await stored(attempt.id)).toMatchObject({ protectionTripped: false, protectionTrips: 2 });
-	});
-});
-
-describe('acknowledgeRows(actor, attemptId, {row})', () => {
-	it('marks a row and the earlier ones of its set-up as drawn, and takes nothing back', async () => {
-		const { actor, attempt } = await createAttempt();
-		await sweep(actor, attempt.id, settings, { sweeps: 6 });
-		expect(await acknowledgeRows(actor, attempt.id, { row: 4 })).toEqual({ drawnTo: 4 });
-		expect(await acknowledgeRows(actor, attempt.id, { row: 2 })).toEqual({ drawnTo: 4 });
-	});
-
-	it('refuses rows that were not swept, or not to their end', async () => {
-		const { actor, attempt } = await createAttempt();
-		const refused = (row: number) =>
-			expect(acknowledgeRows(actor, attempt.id, { row })).rejects.toMatchObject({
-				code: 'invalid',
-				issues: [{ field: 'row' }]
-			});
-		await refused(0);
-		await readStream(await open(actor, attempt.id, longOne), (got) => got.length >= 3);
-		await refused(0);
-		await sweep(actor, attempt.id, settings, { sweeps: 1 });
-		await refused(0);
-		expect(await acknowledgeRows(actor, attempt.id, { row: 1 })).toEqual({ drawnTo: 1 });
-	});
-});
-
-describe('streamRows(actor, attemptId, {from, to})', () => {
-	it('gives the drawn rows again at once, over set-ups, and none that nobody drew', async () => {
-		const { actor, attempt } = await createAttempt();
-		const first = await sweep(actor, attempt.id, settings, { sweeps: 8 });
-		const second = await sweep(actor, attempt.id, other, { from: 5, sweeps: 3 });
-		await acknowledgeRows(actor, attempt.id, { row: 9 });
-		const { clockS } = await stored(attempt.id);
-		const { pieces } = await readRows(await streamRows(actor, attempt.id, { from: 2, to: 99 }));
-		const rows = wholeRows(pieces);
-		expect([...rows.keys()]).toEqual([2, 3, 4, 8, 9]);
-		expect(rows.get(3)).toEqual(first.rows.get(3));
-		expect(rows.get(9)).toEqual(second.rows.get(9));
-		expect((await stored(attempt.id)).clockS).toBe(clockS);
-	});
-});
-
-it('a bench clock stands in the database to its last bit', async () => {
-	const { attempt } = await createAttempt();
-	for (const clockS of [0.1 + 0.2, 1 / 3, 12345.678901234567, 5e-324, 1e15 / 7]) {
-		await Attempt.update({ clockS }, { where: { id: attempt.id } });
-		expect((await stored(attempt.id)).clockS).toBe(clockS);
-	}
-});
-
 /** The points that had come of a row cut short. */
 const wholeStart = (pieces: PieceFrame[]): Float32Array =>
 	Float32Array.from(pieces.flatMap(({ levelsDbm }) => [...levelsDbm]));
-
-/** A stream of rows alone, without state or end. */
-async function readRows(stream: ReadableStream<Uint8Array>): Promise<{ pieces: PieceFrame[] }> {
-	const decoder = new FrameDecoder();
-	const pieces: PieceFrame[] = [];
-	for await (const chunk of stream) {
-		for (const frame of decoder.push(chunk)) if (frame.type === 'piece') pieces.push(frame);
-	}
-	return { pieces };
-}
-
-function hotParameters() {
-	return {
-		carrierDbm: { draw: 'uniform', from: 34, to: 35 },
-		leadLossDb: { draw: 'step', from: 1, to: 2, step: 0.1 },
-		rateHz: { draw: 'uniform', from: 90e3, to: 110e3 },
-		neighbour: { draw: 'choice', of: ['none', 'carrier'] }
-	};
-}
