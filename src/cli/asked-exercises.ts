@@ -13,7 +13,7 @@ export interface AskedExercise {
 }
 
 /** Every exercise under content/, in order. */
-const exerciseFiles = (): string[] =>
+export const exerciseFiles = (): string[] =>
 	readdirSync(CONTENT, { recursive: true, encoding: 'utf8' })
 		.filter((path) => path.endsWith('.yaml') && basename(path) !== 'course.yaml')
 		.sort()

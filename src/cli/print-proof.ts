@@ -17,12 +17,15 @@ const cells = (row: ProofRow): string[] => [
 	row.failures.length > 0 ? 'FAILS' : 'ok'
 ];
 
-/** A proof as a table of text: how often each way of doing it passes and is named, and what failed. */
-export function printProof(table: ProofTable): string {
+/**
+ * A proof as a table of text: how often each way of doing it passes and is named, and what failed.
+ * @param cpuS processor time that it took, s
+ */
+export function printProof(table: ProofTable, cpuS: number): string {
 	const lines = [HEADS, ...table.rows.map(cells)];
 	const last = table.fromSeed + table.seeds - 1;
 	return [
-		`${table.exercise}: seeds ${table.fromSeed} to ${last}, ${table.redraws} draws turned down`,
+		`${table.exercise}: seeds ${table.fromSeed} to ${last}, ${table.redraws} draws turned down, ${cpuS.toFixed(1)} s of one core`,
 		...printColumns(lines, 2),
 		`mistakes four spreads apart on ${percent(table.apartShare)} of the seeds`,
 		...table.failures.map((failure) => `FAILS ${failure}`),

@@ -12,9 +12,15 @@ const files = readdirSync(ROOT, { recursive: true, encoding: 'utf8' })
 
 export const contentSlugs = files.map((file) => basename(file, '.yaml'));
 
-/** @throws ExerciseError with file, line and field when its author got it wrong */
-export function contentExercise(slug: string): Exercise {
+/** Where an exercise stands. */
+export function contentFile(slug: string): string {
 	const file = files.find((path) => basename(path, '.yaml') === slug);
 	if (!file) throw new Error(`No exercise of content/ is called ${slug}`);
+	return file;
+}
+
+/** @throws ExerciseError with file, line and field when its author got it wrong */
+export function contentExercise(slug: string): Exercise {
+	const file = contentFile(slug);
 	return parseExerciseText(readFileSync(file, 'utf8'), file);
 }

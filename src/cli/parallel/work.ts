@@ -8,6 +8,7 @@ import { makeAnswers } from '$lib/server/bench/proof/misdiagnosis/make-answers';
 import { proveSeeds } from '$lib/server/bench/proof/prove-exercise';
 import type { Reply } from './run-tasks';
 import type { Task } from './task';
+import { threadSeconds } from './thread-seconds';
 
 const exercises = new Map<string, Exercise>();
 
@@ -20,10 +21,12 @@ function exerciseOf(file: string): Exercise {
 }
 
 function answer(task: Task): Reply {
+	const startedS = threadSeconds();
+	const cpuS = () => threadSeconds() - startedS;
 	try {
 		const exercise = exerciseOf(task.file);
-		if (task.do === 'prove') return { result: proveSeeds(exercise, task) };
-		return { result: makeAnswers(exercise, task) };
+		if (task.do === 'prove') return { result: proveSeeds(exercise, task), cpuS: cpuS() };
+		return { result: makeAnswers(exercise, task), cpuS: cpuS() };
 	} catch (cause) {
 		if (cause instanceof BenchError) return { fault: { message: cause.message, field: cause.field } };
 		return { fault: { message: cause instanceof Error ? (cause.stack ?? cause.message) : String(cause) } };
