@@ -189,8 +189,8 @@ function checkQuestions({ questions, receiver }: Exercise): ExerciseIssue[] {
 		if (isAbsoluteLevel(question.unit) && 'relative' in tolerance) {
 			issues.push({ field: `${field}.tolerance`, message: 'a level’s tolerance is absolute, in dB' });
 		}
-		if (question.noiseTakenOff && !isAbsoluteLevel(question.unit)) {
-			const message = `noise is taken off levels and densities, in dBm or dBm/Hz; this is in ${question.unit}`;
+		if (question.noiseTakenOff && !isAbsoluteLevel(question.unit) && question.unit !== 'dBc/Hz') {
+			const message = `noise is taken off levels and densities, in dBm, dBm/Hz or dBc/Hz; this is in ${question.unit}`;
 			issues.push({ field: `${field}.noiseTakenOff`, message });
 		}
 		const seen = new Set<string>();

@@ -14,6 +14,17 @@ const PLACES = [
 	'toHz'
 ];
 
+/** A reading asked for on a scale that shows `perHz` for each true hertz, with its places as they truly are. */
+export function onTrueScale<T extends { kind: string }>(asked: T, perHz: number): T {
+	const fields = Object.entries(asked).map(([key, value]) => [
+		key,
+		(PLACES.includes(key) || key === 'fromHz') && typeof value === 'number'
+			? value / perHz
+			: (value as unknown)
+	]);
+	return Object.fromEntries(fields) as T;
+}
+
 /** The same asked `byHz` farther up; of a difference, its second marker alone. */
 export function moved<T extends { kind: string }>(asked: T, byHz: number): T {
 	const fields = Object.entries(asked).map(([key, value]) => [

@@ -15,6 +15,7 @@ import {
 } from './noise-law';
 import type { Context, SetUp } from './mistake';
 import { widthHzOf } from './read-width';
+import { skirtTakenOff } from './own-phase-noise';
 import { setUpOf } from './set-up-of';
 
 /** Density of the receiver's own noise where a question asks, mW/Hz brought to the reference plane through pad and lead. */
@@ -75,6 +76,7 @@ export function noiseTakenOff(
 	errorDb: number
 ): number {
 	if (!setUp.resolved.input.connected) return NaN;
+	if (request.kind === 'phase-noise') return skirtTakenOff(context, setUp, planeValue);
 	const averagedDb = averagesDecibels(setUp) && request.kind !== 'noise-density' ? LOG_AVERAGE_DB : 0;
 	const shown = shownPower(setUp) * dbToPowerRatio(errorDb - averagedDb);
 	const noise = shown * noiseMw(context, setUp, family, widthHzOf(request));

@@ -8,19 +8,25 @@ import { takeReading } from '$lib/measure/take-reading';
 import type { Trace } from '$lib/measure/trace';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import { givenBy } from './asked';
+import { displayedHz } from './displayed';
 import type { Context, Prediction, SetUp } from './mistake';
+import { onTrueScale } from './move-request';
 import { bandSpreadDb, pointSpreadDb } from './noise-law';
 import { shownTrace } from './shown-trace';
 import { modelSpread } from './spreads';
 
-/** What `request` gives to the question on the mean trace of a set-up; null where the trace has no such number. */
+/**
+ * What `request`, its places as this receiver displays them, gives to the question on the mean trace of a set-up; null where the
+ * trace has no such number.
+ */
 export function shownReading(
 	{ drawn, question }: Context,
 	{ resolved }: SetUp,
 	request: ReadingRequest,
 	profile: ReceiverProfile = drawn.profile
 ): number | null {
-	const reading = takeReading(shownTrace(drawn, profile, resolved), request);
+	const truly = onTrueScale(request, displayedHz({ drawn }, 1));
+	const reading = takeReading(shownTrace(drawn, profile, resolved), truly);
 	return isProblem(reading) ? null : givenBy(reading, question);
 }
 

@@ -61,6 +61,14 @@ export const withSum = (
 		isAnswer(step, questionId) ? { ...step, value: (scope: Scope) => sum(step.value(scope)) } : step
 	);
 
+/** The method with one answer given as its reading reads, no sum done. */
+export function withoutSum(steps: readonly FilledStep[], questionId: string): FilledStep[] {
+	const { as } = readStepOf(steps, questionId);
+	return steps.map((step) =>
+		isAnswer(step, questionId) ? { ...step, value: (scope: Scope) => scope[as] as number } : step
+	);
+}
+
 /** The method with `changeDb` more added back for what is lost on the way: in the correction, where it is typed on the bench, else in the sum. */
 export function withLoss(steps: readonly FilledStep[], questionId: string, changeDb: number): FilledStep[] {
 	if (!correctsOnBench(steps)) return withSum(steps, questionId, (value) => value + changeDb);

@@ -15,6 +15,7 @@ import { densityOverChannel } from './density-over-channel';
 import { differenceNotHalved } from './difference-not-halved';
 import { edgeFromWidth } from './edge-from-width';
 import { floorAsSignal } from './floor-as-signal';
+import { floorInRatio } from './floor-in-ratio';
 import { gainTakenOff } from './gain-taken-off';
 import { halfOrDouble } from './half-or-double';
 import { harmonicLevelForRatio } from './harmonic-level-for-ratio';
@@ -35,12 +36,15 @@ import { narrowForDepth } from './narrow-for-depth';
 import { neighbourWidth } from './neighbour-width';
 import { noiseNotTakenOff } from './noise-not-taken-off';
 import { notMeasured } from './not-measured';
+import { notPerWidth } from './not-per-width';
 import { oneLineForAll } from './one-line-for-all';
 import { otherHarmonic } from './other-harmonic';
+import { otherNoiseWidth } from './other-noise-width';
 import { otherNull } from './other-null';
 import { otherSideRead } from './other-side';
 import { overloaded } from './overloaded';
 import { ownNoise } from './own-noise';
+import { ownPhaseNoise } from './own-phase-noise';
 import { ownProducts } from './own-products';
 import { padLeftOut } from './pad-left-out';
 import { padTwice } from './pad-twice';
@@ -49,7 +53,9 @@ import { peakOnNoise } from './peak-on-noise';
 import { periodForOnTime } from './period-for-on-time';
 import { powerForVoltage } from './power-for-voltage';
 import { silenceForOnTime } from './silence-for-on-time';
+import { skirtOfTheFilter } from './skirt-of-the-filter';
 import { smallIndexRule } from './small-index-rule';
+import { spurUnderSkirt } from './spur-under-skirt';
 import { strongestAlone } from './strongest-alone';
 import { sweepTooFast } from './sweep-too-fast';
 import { troughOnNoise } from './trough-on-noise';
@@ -81,6 +87,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	differenceNotHalved,
 	edgeFromWidth,
 	floorAsSignal,
+	floorInRatio,
 	gainTakenOff,
 	halfOrDouble,
 	harmonicLevelForRatio,
@@ -101,12 +108,15 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	neighbourWidth,
 	noiseNotTakenOff,
 	notMeasured,
+	notPerWidth,
 	oneLineForAll,
 	otherHarmonic,
+	otherNoiseWidth,
 	otherNull,
 	otherSideRead,
 	overloaded,
 	ownNoise,
+	ownPhaseNoise,
 	ownProducts,
 	padLeftOut,
 	padTwice,
@@ -115,7 +125,9 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	periodForOnTime,
 	powerForVoltage,
 	silenceForOnTime,
+	skirtOfTheFilter,
 	smallIndexRule,
+	spurUnderSkirt,
 	strongestAlone,
 	sweepTooFast,
 	troughOnNoise,
