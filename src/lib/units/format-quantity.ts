@@ -1,6 +1,7 @@
 /** Quantities as shown: a true minus, fixed decimals, a thin space every three decimals of a frequency. */
 
-const THIN_SPACE = '\u2009';
+/** Narrow, and a figure never breaks at it. */
+const THIN_SPACE = '\u202f';
 const NO_BREAK_SPACE = '\u00a0';
 
 /** A figure and its unit, apart, because the unit is set smaller. */

@@ -12,11 +12,11 @@ describe('frequencies in a column', () => {
 	const column = frequencyColumn(450.075e6, 100);
 	it('stand in one unit, decimals in threes down to one point of the trace', () => {
 		expect(column).toEqual({ unit: 'MHz', decimals: 6 });
-		expect(frequencyFigure(450.0225e6, column)).toBe('450.022\u2009500');
+		expect(frequencyFigure(450.0225e6, column)).toBe('450.022\u202f500');
 	});
 	it('carry a sign when they are differences', () => {
-		expect(frequencyFigure(33e3, column, true)).toBe('+0.033\u2009000');
-		expect(frequencyFigure(-33e3, column, true)).toBe('−0.033\u2009000');
+		expect(frequencyFigure(33e3, column, true)).toBe('+0.033\u202f000');
+		expect(frequencyFigure(-33e3, column, true)).toBe('−0.033\u202f000');
 	});
 });
 
@@ -25,7 +25,7 @@ describe('values', () => {
 		expect(shownReading(-11.74, 'dBm')).toEqual({ figure: '−11.7', unit: 'dBm' }));
 	it('of a count go down to a digit of its spread', () =>
 		expect(shownReading(450_012_345.678, 'Hz', 0.02)).toEqual({
-			figure: '450.012\u2009345\u200968',
+			figure: '450.012\u202f345\u202f68',
 			unit: 'MHz'
 		}));
 	it('come in the unit that suits them when they are widths', () =>

@@ -3,7 +3,7 @@ import type { BenchRequest } from '$lib/schemas/reading';
 import { describeReading } from '$lib/server/bench/grading/describe-reading';
 import { describeSettings } from '$lib/server/bench/grading/describe-settings';
 
-const plain = (text: string) => text.replace(/[\u00a0\u2009]/g, ' ');
+const plain = (text: string) => text.replace(/[\u00a0\u202f]/g, ' ');
 
 describe('describeSettings(before, after)', () => {
 	it('says what is not ordinary in a first set-up', () =>

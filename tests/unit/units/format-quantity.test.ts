@@ -26,7 +26,7 @@ describe('formatQuantity(value, unit, {digits})', () => {
 
 describe('showFrequency(frequencyHz, digits)', () => {
 	it('parts figure and unit, with thin spaces every three decimals', () =>
-		expect(showFrequency(1_234_567)).toEqual({ figure: '1.234\u2009567', unit: 'MHz' }));
+		expect(showFrequency(1_234_567)).toEqual({ figure: '1.234\u202f567', unit: 'MHz' }));
 	it.each([
 		[0, '0\u00a0Hz'],
 		[999, '999\u00a0Hz'],
@@ -34,10 +34,10 @@ describe('showFrequency(frequencyHz, digits)', () => {
 		[2.4e9, '2.4\u00a0GHz'],
 		[433_920_000, '433.92\u00a0MHz'],
 		[-1500, '−1.5\u00a0kHz'],
-		[1e9 + 1, '1.000\u2009000\u2009001\u00a0GHz']
+		[1e9 + 1, '1.000\u202f000\u202f001\u00a0GHz']
 	])('shows %d Hz as %s', (frequencyHz, text) => expect(formatFrequency(frequencyHz)).toBe(text));
 	it('holds the decimals it is told to, so that a column lines up', () =>
-		expect(formatFrequency(433_920_000, 4)).toBe('433.920\u20090\u00a0MHz'));
+		expect(formatFrequency(433_920_000, 4)).toBe('433.920\u202f0\u00a0MHz'));
 });
 
 describe('formatTime(timeS, digits)', () => {

@@ -1,7 +1,7 @@
 /** How the bench writes quantities: figure and unit apart, columns of frequencies on one unit, spreads to a fitting digit. */
 import { formatFigure, showFrequency, showTime, type Shown } from '$lib/units/format-quantity';
 
-const thinSpace = '\u2009';
+const thinSpace = '\u202f';
 const frequencySizes = { GHz: 1e9, MHz: 1e6, kHz: 1e3, Hz: 1 };
 export type FrequencyUnit = keyof typeof frequencySizes;
 

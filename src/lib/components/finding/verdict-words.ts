@@ -3,7 +3,7 @@ import type { Verdict } from '$lib/schemas/finding';
 
 export const verdictWords: Record<Verdict, string> = {
 	right: 'right',
-	'right-but-method': 'right, but by luck',
+	'right-but-method': 'right, but see how',
 	wrong: 'wrong',
 	unanswered: 'not answered'
 };

@@ -56,4 +56,4 @@ export function dataCsv(snapshot: BenchSnapshot, { who, at }: { who: string; at:
 }
 
 /** Without the spaces and signs that only a page needs. */
-const plain = (text: string): string => text.replaceAll(/[\u00a0\u2009]/g, ' ').replaceAll('−', '-');
+const plain = (text: string): string => text.replaceAll(/[\u00a0\u202f]/g, ' ').replaceAll('−', '-');

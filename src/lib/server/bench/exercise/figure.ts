@@ -1,6 +1,6 @@
 import { formatFigure } from '$lib/units/format-quantity';
 
-const THIN_SPACE = '\u2009';
+const THIN_SPACE = '\u202f';
 
 /** A number for people: fixed decimals, thin spaces every three digits from 10 000 up, a true minus: −16 000.0 */
 export function figure(value: number, digits: number): string {

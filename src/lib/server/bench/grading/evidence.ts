@@ -34,6 +34,8 @@ export interface Evidence {
 	attached: Source | undefined;
 	/** What the answer may rest on: the reading attached, else every reading taken. */
 	pool: Source[];
+	/** Every reading taken, attached or not. */
+	taken: Source[];
 	/** Every set-up that swept, newest first. */
 	setUps: SetUp[];
 }
@@ -92,6 +94,7 @@ export function evidenceFor(drawn: DrawnExercise, question: DrawnQuestion, recor
 		answer,
 		attached,
 		pool: attached ? [attached] : sources,
+		taken: sources,
 		setUps: swept.map(({ settings, sweeps }) => {
 			const resolved = resolveSettings(settings, drawn.profile);
 			return { resolved, trace: resolved.traces[0], sweeps };

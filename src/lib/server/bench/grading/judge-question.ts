@@ -4,6 +4,7 @@ import type { DrawnExercise, DrawnQuestion } from '../exercise/drawn-exercise';
 import { evidenceFor, type Evidence, type Source } from './evidence';
 import { fromSource, type Candidate } from './explanations';
 import { matchMistakes } from './match-mistakes';
+import { betweenMarkers } from './between-markers';
 import { copyingReach } from './spreads';
 import { supports } from './supports';
 import { watchedMistakes, type Watched } from './watched-mistakes';
@@ -62,6 +63,13 @@ function judgeMethod(
 	const giving = pool.filter((source) => gives(source, value, question));
 	const source = giving.find(sound) ?? attached ?? giving[0];
 	const remarks = readingRemarks(source);
+	if (!(source && gives(source, value, question)) && betweenMarkers(evidence, value)) {
+		remarks.push({
+			code: 'between-markers',
+			text: 'Two markers of yours give this difference, and the sum is sound. But each was read on its own, perhaps from another sweep. Read one marker from the other, and both come from one trace, with the difference as one reading that others can repeat.'
+		});
+		return { verdict: 'right-but-method', matched: null, source, remarks };
+	}
 	if (!source) {
 		remarks.push({
 			code: 'no-evidence',

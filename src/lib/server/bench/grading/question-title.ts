@@ -16,6 +16,8 @@ export function questionTitle({ verdict, matched, difference, evidence, remarks 
 			return 'Right, and by a method that can support it.';
 		case 'right-but-method':
 			if (phrases) return `The number is right, but you ${phrases}.`;
+			if (remarks.some(({ code }) => code === 'between-markers'))
+				return 'The number is right, worked out between two markers.';
 			return `The number is right, but its evidence is not. ${remarks.at(-1)?.text ?? ''}`.trim();
 		case 'wrong': {
 			if (phrases) return `You ${phrases}.`;

@@ -14,7 +14,8 @@ type Fields = Record<string, number | undefined>;
 /** Distance between two points of the trace. */
 const stepHz = ({ setUp: { resolved } }: Source): number => resolved.spanHz / (resolved.points - 1);
 /** How near to a line a marker must stand to be on it. */
-const onLineHz = (source: Source): number => Math.max(source.setUp.resolved.rbwHz, 1.5 * stepHz(source));
+export const onLineHz = (source: Source): number =>
+	Math.max(source.setUp.resolved.rbwHz, 1.5 * stepHz(source));
 const near = (a: number | undefined, b: number | undefined, withinHz: number): boolean =>
 	a === undefined || b === undefined || Math.abs(a - b) <= withinHz;
 const fieldsOf = (asked: object): Fields => asked as Fields;
