@@ -55,3 +55,16 @@ describe('twoLines(label)', () => {
 		expect(twoLines('to the old antenna')).toEqual(['to the old', 'antenna']));
 	it('leaves one word whole', () => expect(twoLines('Transmitter')).toEqual(['Transmitter']));
 });
+
+describe('the words of a branch', () => {
+	const branchAt = (parts: ChainPart[]) => {
+		const box = chainLayout(parts, 336).parts.find((part) => part.part === 'box' && part.branch);
+		return box?.part === 'box' ? box.branch?.end : undefined;
+	};
+
+	it('stand before the box, but after it where the reference plane stands before it', () => {
+		const [transmitter, coupler, plane, ...rest] = chain;
+		expect(branchAt(chain)).toBe('end');
+		expect(branchAt([transmitter, plane, coupler, ...rest])).toBe('start');
+	});
+});

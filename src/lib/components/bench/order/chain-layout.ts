@@ -70,7 +70,7 @@ function place(
 	const wires: ChainLayout['wires'] = [];
 	let x = 0;
 	let solid = 0;
-	for (const part of chain) {
+	for (const [i, part] of chain.entries()) {
 		if (part.part === 'plane') {
 			const at = solid === 0 ? x : x - gapPx / 2;
 			const half = textPx(part.label) / 2;
@@ -85,7 +85,7 @@ function place(
 		const partWidth = widths[solid];
 		const lines = broken ? twoLines(part.label) : [part.label];
 		if (part.part === 'box') {
-			const branch = part.branch && branchOf(part.branch, x + partWidth / 2);
+			const branch = part.branch && branchOf(part.branch, x + partWidth / 2, chain[i - 1]?.part === 'plane');
 			parts.push({ part: 'box', x, width: partWidth, lines, ...(branch && { branch }) });
 		} else parts.push({ part: part.part, x, width: partWidth, lines });
 		solid += 1;
@@ -95,9 +95,13 @@ function place(
 	return { parts, wires };
 }
 
-/** A branch's words stand where there is more room: before the box's middle, else after it. */
-function branchOf(label: string, boxMiddle: number): { label: string; x: number; end: 'start' | 'end' } {
-	return boxMiddle > textPx(label) + 30
+/** A branch's words stand where there is more room: before the box's middle, else after it; never across a plane before the box. */
+function branchOf(
+	label: string,
+	boxMiddle: number,
+	afterPlane: boolean
+): { label: string; x: number; end: 'start' | 'end' } {
+	return !afterPlane && boxMiddle > textPx(label) + 30
 		? { label, x: boxMiddle - 28, end: 'end' }
 		: { label, x: boxMiddle + 28, end: 'start' };
 }
