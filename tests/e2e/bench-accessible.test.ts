@@ -20,6 +20,7 @@ test('every page of an exercise is without violations of accessibility or of the
 	const faults = await collectFaults(page);
 	await page.emulateMedia({ reducedMotion: 'reduce' });
 	await signIn(page, 'greta.scarth@tarnvale.example');
+	await page.goto('/learn');
 	await expectAccessible(page);
 	await page.getByRole('link', { name: /Channel power of a telemetry carrier/ }).click();
 	await expect(page.getByRole('button', { name: /^Start/ })).toBeVisible();

@@ -127,7 +127,7 @@ test('markers stay over a reload, and a count that finds no line says so at its 
 
 test('a bench left and opened again goes on at the next sweep', async ({ page }) => {
 	const sweep = async () => Number(/Sweep (\d+)/.exec(await page.getByText(/^Sweep \d+/).innerText())![1]);
-	await page.waitForTimeout(2000);
+	await expect.poll(sweep).toBeGreaterThan(3);
 	const before = await sweep();
 	await page.reload();
 	await expectSweeping(page);

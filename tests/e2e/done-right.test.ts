@@ -1,5 +1,5 @@
 import { expect, test } from '@playwright/test';
-import { answerField, expectAccessible, handIn, openExercise, signIn } from './bench-page';
+import { answerField, expectAccessible, handIn, openBench, signIn } from './bench-page';
 import { ready } from './ready';
 
 test.setTimeout(240_000);
@@ -13,7 +13,7 @@ test('after a wrong answer the method is played on the same signal, and the repo
 		if (response.status() === 409) refused.push(response.url());
 	});
 	await signIn(page, 'bridget.hale@tarnvale.example');
-	await openExercise(page, 'power-of-a-spread-sensor');
+	await openBench(page, 'power-of-a-spread-sensor');
 	await answerField(page, 1).fill('-40');
 	await answerField(page, 2).fill('-80');
 	await handIn(page);

@@ -1,4 +1,4 @@
-import { expect, test, type Locator, type Page } from '@playwright/test';
+import { expect, test } from '@playwright/test';
 import {
 	answerField,
 	attach,
@@ -6,7 +6,7 @@ import {
 	expectAveraged,
 	figure,
 	handIn,
-	openBench,
+	expectSweeping,
 	order,
 	readingRow,
 	setUp,
@@ -14,7 +14,7 @@ import {
 	signIn,
 	startReading
 } from './bench-page';
-import { ready } from './ready';
+import { ready, tabTo } from './ready';
 
 test.setTimeout(300_000);
 test.use({ viewport: { width: 1440, height: 900 } });
@@ -22,7 +22,10 @@ test.use({ viewport: { width: 1440, height: 900 } });
 test('an exercise done as taught is right, and the next step is the course', async ({ page }) => {
 	const faults = await collectFaults(page);
 	await signIn(page, 'ailsa.tyson@northmoor.example');
-	await openBench(page);
+	await page.goto('/learn');
+	await page.getByRole('link', { name: /Channel power of a telemetry carrier/ }).click();
+	await page.getByRole('button', { name: /^Start/ }).click();
+	await expectSweeping(page);
 	const { channel, leadDb } = await order(page);
 	await setUpAsTaught(page);
 	await setUp(page, 'Correction', `${leadDb} dB`);
@@ -41,15 +44,6 @@ test('an exercise done as taught is right, and the next step is the course', asy
 	await expect(page.getByText('right at the first attempt')).toBeVisible();
 	expect(faults).toEqual([]);
 });
-
-/** Goes on by Tab, as a person without a pointer does, until `target` has the focus. */
-async function tabTo(page: Page, target: Locator, most = 90): Promise<void> {
-	for (let i = 0; i < most; i++) {
-		if (await target.evaluate((element) => element === document.activeElement)) return;
-		await page.keyboard.press('Tab');
-	}
-	throw new Error('Tab never reached it');
-}
 
 test('an exercise can be done on the keyboard alone', async ({ page }) => {
 	await signIn(page, 'owen.mell@tarnvale.example');

@@ -1,8 +1,11 @@
 import { expect, test } from '@playwright/test';
+import type { ReadingResponse } from '$lib/schemas/attempt';
 import {
 	answerField,
+	ask,
 	attach,
 	expectAveraged,
+	expectSweeping,
 	figure,
 	handIn,
 	openBench,
@@ -11,6 +14,8 @@ import {
 	setUp,
 	setUpAsTaught,
 	signIn,
+	startAttempt,
+	sweepAsTaught,
 	startReading
 } from './bench-page';
 
@@ -49,19 +54,29 @@ test('a marker read as the power is named, with the sum in own numbers', async (
 
 test('a lead left out is named, and a fresh attempt starts from the finding', async ({ page }) => {
 	await signIn(page, email);
-	await openBench(page);
-	const { channel } = await order(page);
-	await setUpAsTaught(page);
-	await startReading(page, 'Channel power', { Centre: channel, Width: '25 kHz' });
-	await startReading(page, 'Power density', { Centre: channel, Width: '4 kHz' });
-	await expectAveraged(page, 16);
-	const power = await attach(page, readingRow(page, 'Channel power, 25'), 1);
-	const density = await attach(page, readingRow(page, 'Power density, 4'), 2);
-	await answerField(page, 1).fill(figure(power));
-	await answerField(page, 2).fill(figure(density));
+	// What the readings rest on is done beforehand; what is marked and said of it, on the page.
+	const { id: attemptId, exercise } = await startAttempt(page);
+	const centreHz = Math.round(Number(/channel at ([\d.]+) MHz/.exec(exercise.situationHtml)?.[1]) * 1e6);
+	await sweepAsTaught(page, attemptId, centreHz);
+	const answers: Record<string, { text: string; unit: string; readingId: number }> = {};
+	const requests = [
+		{ kind: 'channel-power', centreHz, widthHz: 25e3 },
+		{ kind: 'power-density', centreHz, widthHz: 4e3 }
+	];
+	for (const [i, request] of requests.entries()) {
+		const rows = { from: 0, to: 15 };
+		const taken = { rows, trace: 1, request };
+		const { reading } = await ask<ReadingResponse>(page, `/api/attempts/${attemptId}/readings`, taken);
+		const { id, unit } = exercise.questions[i];
+		answers[id] = { text: reading.value.toFixed(1), unit, readingId: reading.id };
+	}
+	await ask(page, `/api/attempts/${attemptId}/drafts`, { answers }, 'PUT');
+	await page.goto(`/learn/attempts/${attemptId}`);
+	await expectSweeping(page);
+	await expect(page.getByText('attached to 2')).toBeVisible();
 	await handIn(page);
 	await expect(page.getByRole('heading', { level: 1 })).toContainText(/lead/i);
-	await page.getByRole('button', { name: 'Third attempt, fresh signal' }).click();
+	await page.getByRole('button', { name: /attempt, fresh signal$/ }).click();
 	await expect(page).toHaveURL(/\/learn\/attempts\/\d+$/);
-	await expect(page.getByText('third attempt')).toBeVisible();
+	await expect(page.getByText(/^Work order 6\.1, (second|third) attempt/)).toBeVisible();
 });

@@ -17,6 +17,7 @@ test('every lesson opens from the outline, and each of its figures follows a set
 	page
 }) => {
 	await signIn(page, 'ailsa.tyson@northmoor.example');
+	await page.goto('/learn');
 	const links = page.getByRole('link', { name: /^Read the lesson/ });
 	const lessons = await links.evaluateAll((all) => all.map((link) => link.getAttribute('href') ?? ''));
 	expect(lessons.length).toBeGreaterThan(0);

@@ -1,6 +1,6 @@
 import { readFile } from 'node:fs/promises';
 import { expect, test } from '@playwright/test';
-import { expectAccessible, openExercise, setUp, setUpField, signIn } from './bench-page';
+import { expectAccessible, openBench, setUp, setUpField, signIn } from './bench-page';
 
 test.setTimeout(240_000);
 test.use({ viewport: { width: 1440, height: 900 } });
@@ -9,7 +9,7 @@ test('sweeps stand over time, are played back and saved, and a set-up is recalle
 	page
 }) => {
 	await signIn(page, 'silas.arkle@tarnvale.example');
-	await openExercise(page, 'power-of-a-spread-sensor');
+	await openBench(page, 'power-of-a-spread-sensor');
 	await setUp(page, 'Span', '4 MHz');
 	await page.getByRole('button', { name: 'Marker', exact: true }).click();
 	await page.getByRole('button', { name: 'Over time' }).click();

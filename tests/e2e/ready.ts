@@ -7,3 +7,17 @@ export const ready = async (page: Page): Promise<void> => {
 
 /** The button that opens the menu under the person's name. */
 export const personMenu = (page: Page): Locator => page.locator('[data-person-menu]');
+
+/** Goes on by Tab, or back by Shift and Tab if that is nearer, as a person without a pointer does, until `target` has the focus. */
+export async function tabTo(page: Page, target: Locator): Promise<void> {
+	const key = await target.evaluate((element) => {
+		const all = [...document.querySelectorAll('a[href], button, input, select, textarea, [tabindex="0"]')];
+		const steps = all.indexOf(element) - all.indexOf(document.activeElement ?? element);
+		return (steps + all.length) % all.length <= all.length / 2 ? 'Tab' : 'Shift+Tab';
+	});
+	for (let i = 0; i < 90; i++) {
+		if (await target.evaluate((element) => element === document.activeElement)) return;
+		await page.keyboard.press(key);
+	}
+	throw new Error('Tab never reached it');
+}
