@@ -81,7 +81,8 @@ function repetition(
 ): number | undefined {
 	if (shape === 'continuous') return undefined;
 	const gaps = peaks.slice(1).map(({ frequencyHz }, i) => frequencyHz - peaks[i].frequencyHz);
-	const toleranceHz = Math.max(stepHz(trace), trace.rbwHz / 10);
+	// A spike stands where the sweep was when its pulse came, to a point, however wide the filter.
+	const toleranceHz = shape === 'pulses' ? stepHz(trace) : Math.max(stepHz(trace), trace.rbwHz / 10);
 	const spacingHz = lineSpacing(peaks, carrierHz, toleranceHz)?.spacingHz ?? median(gaps);
 	return shape === 'lines' ? spacingHz : spanHz(trace) / sweepTimeS(trace) / spacingHz;
 }

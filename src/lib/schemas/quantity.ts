@@ -61,6 +61,8 @@ export const quantity = z.discriminatedUnion('kind', [
 	quantityOf('am-depth', { carrierHz: frequency }),
 	quantityOf('fm-deviation', { carrierHz: frequency }),
 	quantityOf('pulse', { carrierHz: frequency }),
+	/** Level during the pulse, as a filter that lets all of it through would show it. */
+	quantityOf('pulse-level', { carrierHz: frequency }),
 	quantityOf('time', {}),
 	quantityOf('mask', {
 		limits: z.array(limit).min(1).max(100),

@@ -8,9 +8,9 @@ const cases: [slug: string, seed: number, question: string, mistake: string, way
 	['harmonics-of-a-harbour-transmitter', 2, 'second', 'harmonic-level-for-ratio', 'low'],
 	['harmonics-of-a-harbour-transmitter', 2, 'distortion', 'power-for-voltage', 'low'],
 	['harmonics-of-a-harbour-transmitter', 2, 'distortion', 'strongest-alone', 'low'],
-	['intercept-of-a-mast-amplifier', 3, 'intercept', 'untested-products 10', 'low'],
+	['intercept-of-a-mast-amplifier', 3, 'intercept', 'untested-products 20', 'low'],
 	['intercept-of-a-mast-amplifier', 3, 'intercept', 'difference-not-halved', 'high'],
-	['intercept-of-a-mast-amplifier', 3, 'product', 'untested-products 10', 'high']
+	['intercept-of-a-mast-amplifier', 3, 'product', 'untested-products 20', 'high']
 ];
 
 describe.each(cases)('%s, seed %d, %s: %s', (slug, seed, question, mistake, way) => {

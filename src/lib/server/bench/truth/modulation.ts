@@ -63,6 +63,12 @@ export const pulse: TruthOf<'pulse'> = ({ emitters }, { carrierHz }) => {
 	return { value: widthS, unit: 's', parts: { widthS, repetitionHz: 1 / periodS } };
 };
 
+/** Level during a pulse, dBm: what its mean power would be if it stayed on. */
+export const pulseLevel: TruthOf<'pulse-level'> = ({ emitters }, { carrierHz }) => ({
+	value: nearest(emitters, ['pulsed'], carrierHz).levelDbm,
+	unit: 'dBm'
+});
+
 /** How long what comes and goes stays, s: a gate's on time, a dwell, a pulse. */
 export const time: TruthOf<'time'> = ({ emitters }) => {
 	for (const { emitter } of emitters) {

@@ -5,7 +5,7 @@ import { adjacentChannel } from './adjacent-channel';
 import { harmonics, thd } from './harmonics';
 import { count, delta, marker, nextPeak, peak } from './levels';
 import { mask } from './mask';
-import { amDepth, fmDeviation, intercept, phaseNoise, pulse, time } from './modulation';
+import { amDepth, fmDeviation, intercept, phaseNoise, pulse, pulseLevel, time } from './modulation';
 import { occupiedBandwidth } from './occupied-bandwidth';
 import { placeEmitters } from './place-emitters';
 import { bandPower, carrierToNoise, channelPower, noiseDensity, powerDensity } from './powers';
@@ -34,6 +34,7 @@ const kinds: { [K in QuantityKind]: TruthOf<K> } = {
 	'am-depth': amDepth,
 	'fm-deviation': fmDeviation,
 	pulse,
+	'pulse-level': pulseLevel,
 	time,
 	mask
 };

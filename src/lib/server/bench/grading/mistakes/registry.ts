@@ -33,6 +33,7 @@ import { markerNotDivided } from './marker-not-divided';
 import { markerOverResolution } from './marker-over-resolution';
 import { markersForBands } from './markers-for-bands';
 import { narrowForDepth } from './narrow-for-depth';
+import { narrowForPulse } from './narrow-for-pulse';
 import { neighbourWidth } from './neighbour-width';
 import { noiseNotTakenOff } from './noise-not-taken-off';
 import { notMeasured } from './not-measured';
@@ -52,9 +53,11 @@ import { pathLeftOut } from './path-left-out';
 import { peakOnNoise } from './peak-on-noise';
 import { periodForOnTime } from './period-for-on-time';
 import { powerForVoltage } from './power-for-voltage';
+import { pulseDesensitised } from './pulse-desensitised';
 import { silenceForOnTime } from './silence-for-on-time';
 import { skirtOfTheFilter } from './skirt-of-the-filter';
 import { smallIndexRule } from './small-index-rule';
+import { spikesForLines } from './spikes-for-lines';
 import { spurUnderSkirt } from './spur-under-skirt';
 import { strongestAlone } from './strongest-alone';
 import { sweepTooFast } from './sweep-too-fast';
@@ -105,6 +108,7 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	markerOverResolution,
 	markersForBands,
 	narrowForDepth,
+	narrowForPulse,
 	neighbourWidth,
 	noiseNotTakenOff,
 	notMeasured,
@@ -124,9 +128,11 @@ export const mistakeKinds: readonly MistakeKind[] = [
 	peakOnNoise,
 	periodForOnTime,
 	powerForVoltage,
+	pulseDesensitised,
 	silenceForOnTime,
 	skirtOfTheFilter,
 	smallIndexRule,
+	spikesForLines,
 	spurUnderSkirt,
 	strongestAlone,
 	sweepTooFast,
