@@ -1,4 +1,3 @@
-import { combineRows } from '$lib/measure/combine-rows';
 import { isProblem } from '$lib/measure/reading';
 import { takeReading } from '$lib/measure/take-reading';
 import type { Trace } from '$lib/measure/trace';
@@ -12,6 +11,7 @@ import type { Seed } from '../receiver/random';
 import { resolveSettings } from '../receiver/resolve-settings';
 import { restartsTraces } from '../receiver/restarts-traces';
 import type { BenchReading, SettingsLogEntry, TakenReading } from './attempt-record';
+import { keptTrace } from './kept-traces';
 import { patchSettings } from './patch-settings';
 
 /** What sweeps: row after row of detected levels, and how long each takes on the bench clock. */
@@ -110,7 +110,7 @@ export class BenchSession {
 		const rows = this.rows.slice(-last);
 		if (rows.length === 0) throw new BenchError('sweep', 'nothing has been swept with this set-up');
 		const { startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb } = resolved;
-		const levelsDbm = combineRows(rows, shown.mode, shown.count, scale);
+		const levelsDbm = keptTrace(rows, shown.mode, shown.count, scale);
 		const setUp = { startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb };
 		return {
 			trace: { ...setUp, mode: shown.mode, count: rows.length, levelsDbm },

@@ -2,7 +2,7 @@
  * Phase noise close to its carrier: conjugate sidebands in quadrature with the line, so that inside the filter they turn its phase
  * and leave its level. Followed within 3.5 B of the line; farther out the skirt is a density (the front end's business).
  */
-import FFT from 'fft.js';
+import type FFT from 'fft.js';
 import type { PhaseNoisePoint } from '$lib/schemas/scene';
 import { integratedPhaseNoise, phaseNoiseIntegral } from '../signal/phase-noise';
 import { reachIndexes, type Contribution, type RowContext } from './contribution';
@@ -12,6 +12,7 @@ import { GaussianFir } from './gaussian-fir';
 import type { IncidentLine } from './incident';
 import { passing } from './line-contribution';
 import type { PassingLine } from './line-response';
+import { sharedTransform } from './shared-transform';
 
 /** The lattice carries what the filter sees from 3.5 B away without folding: 12 samples per 1/B. */
 const PER_RBW = 12;
@@ -124,7 +125,7 @@ export class SkirtContribution implements Contribution {
 			from,
 			to,
 			count,
-			fft: new FFT(size),
+			fft: sharedTransform(size).fft,
 			size,
 			bins,
 			spectrum: new Array<number>(2 * size).fill(0),
