@@ -50,11 +50,15 @@ function parse(args: string[]): { exercises: AskedExercise[]; answers: number; f
 	if (positionals.length > 1)
 		throw new BenchError('exercise', `exercise: name one, or none for all. ${USAGE}`);
 	return {
-		exercises: askedExercises(positionals.at(0)),
+		exercises: askedExercises(positionals.at(0)).filter(asksNumbers),
 		answers: wholeNumber(values.answers ?? String(DEFAULT_ANSWERS), 'answers', 1, 1_000_000),
 		fromAnswer: wholeNumber(values['from-answer'] ?? '0', 'from-answer', 0, 2 ** 40)
 	};
 }
+
+/** Of numbers alone is it asked which mistake they come from. */
+const asksNumbers = ({ exercise }: AskedExercise): boolean =>
+	exercise.questions.some(({ type }) => type === 'number');
 
 async function diagnose(
 	exercises: AskedExercise[],

@@ -10,10 +10,14 @@ const cells = (row: ProofRow): string[] => [
 	row.mistake ?? 'taught method',
 	percent(row.passShare),
 	row.mistake === null ? 'faultless '.concat(percent(row.namedShare)) : percent(row.namedShare),
-	brief(row.meanError),
-	row.mistake === null ? brief(row.bias) : '',
-	brief(row.scatter),
-	brief(row.edgeError),
+	...(row.numbers === 0
+		? ['', '', '', '']
+		: [
+				brief(row.meanError),
+				row.mistake === null ? brief(row.bias) : '',
+				brief(row.scatter),
+				brief(row.edgeError)
+			]),
 	row.failures.length > 0 ? 'FAILS' : 'ok'
 ];
 

@@ -10,7 +10,7 @@ import {
 	type SweepsRequest
 } from '$lib/schemas/sweep-stream';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
-import type { DrawnExercise } from '$lib/server/bench/exercise/drawn-exercise';
+import { numberQuestions, type DrawnExercise } from '$lib/server/bench/exercise/drawn-exercise';
 import { Attempt } from '$lib/server/db/models/attempt';
 import { findExercise } from '$lib/server/db/queries/find-exercise';
 import type { Actor } from '$lib/server/domain/role';
@@ -99,7 +99,7 @@ export async function secretsOf(
 	const drawn = drawExercise(exercise.definition, attempt.seed);
 	const numbers = [
 		...numbersIn(drawn.scene.emitters),
-		...drawn.questions.map(({ truth }) => truth),
+		...numberQuestions(drawn).map(({ truth }) => truth),
 		...Object.entries(drawn.parameters).flatMap(([name, value]) =>
 			exercise.definition.shown.includes(name) ? [] : [value]
 		)

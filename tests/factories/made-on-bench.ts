@@ -1,9 +1,9 @@
 /** A mistake watched on a question of content/, made on the bench with one seed, beside what theory says of it. */
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import type { AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
+import { numberAnswers, type AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
-import type { DrawnExercise } from '$lib/server/bench/exercise/drawn-exercise';
+import { numberQuestions, type DrawnExercise } from '$lib/server/bench/exercise/drawn-exercise';
 import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { judgeQuestion } from '$lib/server/bench/grading/judge-question';
@@ -20,11 +20,11 @@ export function drawnFrom(slug: string, seed: number): DrawnExercise {
 }
 
 export function madeOnBench(drawn: DrawnExercise, questionId: string, id: string) {
-	const question = drawn.questions.find((one) => one.id === questionId)!;
+	const question = numberQuestions(drawn).find((one) => one.id === questionId)!;
 	const context = { drawn, question };
 	const watched = watchedMistakes(question).find((one) => one.id === id)!;
 	const { record } = runMethod(drawn, watched.mistake.make(drawn.method, context));
-	const { value, readingId } = record.answers[questionId];
+	const { value, readingId } = numberAnswers(record)[questionId];
 	const named = (left: AttemptRecord) =>
 		judgeQuestion(drawn, question, left).matched?.watched.map((one) => one.id) ?? [];
 	const answers = { [questionId]: { value } };

@@ -1,5 +1,6 @@
 /** Everything that crosses the wire about an attempt, both ways, but the sweeps themselves (schemas/sweep-stream.ts). */
 import { z } from 'zod';
+import { readingId, typedAnswer, typedAnswers } from './answer';
 import { exerciseView } from './exercise-view';
 import { finding } from './finding';
 import { markings } from './markings';
@@ -13,21 +14,9 @@ export const slug = z
 	.max(80)
 	.regex(/^[a-z0-9]+(-[a-z0-9]+)*$/, 'small letters, digits and single hyphens');
 export const attemptId = z.int().min(1);
-export const readingId = z.int().min(1);
-const questionId = z.string().min(1).max(60);
 
 /** `POST /api/attempts`: 201 with a fresh attempt, 200 with the one of this exercise that is still open. */
 export const startAttemptRequest = z.strictObject({ exercise: slug, practice: z.boolean().default(false) });
-
-/** A number as the person typed it, in which unit, resting on which reading. */
-export const typedAnswer = z.strictObject({
-	text: z.string().max(60),
-	unit: z.string().min(1).max(16),
-	readingId: readingId.nullish()
-});
-const typedAnswers = z
-	.record(questionId, typedAnswer)
-	.refine((answers) => Object.keys(answers).length <= 50, { message: 'no exercise asks so many questions' });
 
 /** `PUT /api/attempts/[id]/drafts`: what is typed so far, right or wrong. Replaces the earlier draft. */
 export const draftsRequest = z.strictObject({ answers: typedAnswers });
@@ -142,7 +131,6 @@ export const problemResponse = z.object({
 });
 
 export type StartAttemptRequest = z.infer<typeof startAttemptRequest>;
-export type TypedAnswer = z.infer<typeof typedAnswer>;
 export type DraftsRequest = z.infer<typeof draftsRequest>;
 export type DraftsResponse = z.infer<typeof draftsResponse>;
 export type AnswersRequest = z.infer<typeof answersRequest>;

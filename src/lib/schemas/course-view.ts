@@ -1,6 +1,7 @@
 /** What a learner is shown of a course and of an exercise before starting it. */
 import { z } from 'zod';
 import { receiverView } from './exercise-view';
+import { questionTypes } from './questions/question';
 
 export const attemptLine = z.strictObject({
 	id: z.int(),
@@ -104,7 +105,8 @@ export const exerciseBrief = z.strictObject({
 	exercise: exerciseProgress,
 	client: z.string(),
 	receiver: receiverView,
-	questions: z.int(),
+	/** What each question asks for, in order. */
+	questions: z.array(z.enum(questionTypes)),
 	hints: z.int(),
 	/** Receiver time the exercise allows, s of bench clock. */
 	benchTimeS: z.number()

@@ -1,6 +1,7 @@
 /** What a learner is shown of an exercise: nothing here may hold a scene, a seed, a truth or a mistake watched for. */
 import { z } from 'zod';
-import { answerUnits, chainPart } from './exercise';
+import { chainPart } from './exercise';
+import { questionView } from './questions/view';
 import { maskLimits } from './reading';
 import { lossTable } from './scene';
 import { settings } from './settings';
@@ -17,18 +18,6 @@ export const receiverView = z.strictObject({
 	maxSafeInputDbm: z.number(),
 	levelErrorDb: z.number(),
 	referencePpm: z.number()
-});
-
-export const questionView = z.strictObject({
-	id: z.string(),
-	text: z.string(),
-	/** The unit asked for, and every unit the answer may be given in (that one first). */
-	unit: z.enum(answerUnits),
-	units: z.array(z.string()),
-	/** Decimals the answer is asked to. */
-	digits: z.int(),
-	/** For example "Right within ±0.7 dB". */
-	toleranceText: z.string()
 });
 
 export const exerciseView = z.strictObject({
@@ -60,5 +49,4 @@ export const exerciseView = z.strictObject({
 });
 
 export type ReceiverView = z.infer<typeof receiverView>;
-export type QuestionView = z.infer<typeof questionView>;
 export type ExerciseView = z.infer<typeof exerciseView>;

@@ -4,22 +4,14 @@
  * Texts may hold {name} or {expression | digits}, over the values listed in `shown` and nothing else.
  */
 import { z } from 'zod';
-import { units } from '$lib/units/unit';
 import { part } from './part';
-import { quantity } from './quantity';
+import { exerciseQuestion } from './questions/question';
+import { line, slug, text, truthful, valueName, when } from './questions/words';
 import { benchRequest, maskLimits } from './reading';
 import { receiverProfile } from './receiver';
 import { device, emitter, lossTable } from './scene';
 import { settings } from './settings';
 import { expression, numberOrExpression, templateObject, templateOf } from './template';
-
-const slug = z.string().regex(/^[a-z0-9]+(-[a-z0-9]+)*$/, 'lower-case words joined by hyphens');
-/** Names of values: letters and digits, a letter first; units in the name (leadLossDb). */
-export const valueName = z
-	.string()
-	.regex(/^[a-zA-Z][a-zA-Z0-9]{0,39}$/, 'letters and digits, a letter first');
-const text = z.string().trim().min(1).max(4000);
-const line = z.string().trim().min(1).max(300);
 
 /** How a parameter is drawn from the attempt's seed. `step` draws from … to inclusive on a grid. */
 export const parameterDraw = z.discriminatedUnion('draw', [
@@ -41,10 +33,6 @@ export const parameterDraw = z.discriminatedUnion('draw', [
 	})
 ]);
 
-const choiceValue = z.union([z.number(), z.string()]);
-/** Present only when each named parameter has (one of) the given value(s). */
-const when = z.record(valueName, z.union([choiceValue, z.array(choiceValue).min(1)]));
-
 const emitterTemplates = emitter.options.map((option) =>
 	templateObject(option as z.ZodObject).extend({ when: when.optional() })
 );
@@ -58,7 +46,6 @@ export const sceneTemplate = z.strictObject({
 });
 export const settingsTemplate = templateOf(settings);
 
-const quantityTemplate = templateOf(quantity);
 const partTemplate = templateOf(part);
 const readingTemplate = templateOf(benchRequest);
 
@@ -69,39 +56,6 @@ export const chainPart = z.discriminatedUnion('part', [
 	z.strictObject({ part: z.literal('pad'), label: line }),
 	z.strictObject({ part: z.literal('plane'), label: line })
 ]);
-
-/** Units that answers are kept in; what people may type instead follows from the unit's dimension. */
-export const answerUnits = units;
-
-/** A mistake watched on a question: its kind, and the parameters that the kind asks for (checked by the bench by name). */
-const watchedMistake = z.looseObject({ kind: slug });
-
-export const exerciseQuestion = z.strictObject({
-	id: slug,
-	text: line,
-	/** The skill it shows, by the slug of the unit that teaches it; the exercise's own unit unless it says so. */
-	skill: slug.optional(),
-	quantity: quantityTemplate,
-	/** Asks for a part of the quantity in place of its value: the distance of a delta, one neighbour of several. */
-	part: partTemplate.optional(),
-	/**
-	 * Asks for a level or density without the noise it stands in: the receiver's own, and beside a line the scene's too.
-	 * An answer may then be a reading with that noise taken off as power.
-	 */
-	noiseTakenOff: z.boolean().default(false),
-	unit: z.enum(answerUnits),
-	/** Half width of what counts as right: in the question's unit, or as a share of the true value. */
-	tolerance: z.union(
-		[
-			z.strictObject({ absolute: z.number().positive() }),
-			z.strictObject({ relative: z.number().positive().max(1) })
-		],
-		{ error: 'give either absolute or relative, greater than 0' }
-	),
-	/** Decimals, in that unit. */
-	digits: z.int().min(0).max(9),
-	mistakes: z.array(watchedMistake).min(1).max(20)
-});
 
 const why = line.optional();
 /** The taught method, step by step; settings are changes to what was set before. */
@@ -120,9 +74,11 @@ export const methodStep = z.discriminatedUnion('do', [
 	z.strictObject({
 		do: z.literal('answer'),
 		question: slug,
-		value: expression,
-		/** The reading handed in as evidence, by the name given to it. */
-		reading: valueName,
+		/** A number: its value, and the reading handed in as evidence, by the name given to it. */
+		value: expression.optional(),
+		reading: valueName.optional(),
+		/** A choice: whether each option is chosen, as the readings say; one left out isn't. A set-up needs nothing. */
+		chosen: z.record(slug, truthful).optional(),
 		why
 	})
 ]);
@@ -170,9 +126,5 @@ export const exercise = z.strictObject({
 
 export type ParameterDraw = z.infer<typeof parameterDraw>;
 export type ChainPart = z.infer<typeof chainPart>;
-export type AnswerUnit = (typeof answerUnits)[number];
-export type Tolerance = z.infer<typeof exerciseQuestion>['tolerance'];
-export type WatchedMistake = z.infer<typeof watchedMistake>;
-export type ExerciseQuestion = z.infer<typeof exerciseQuestion>;
 export type MethodStep = z.infer<typeof methodStep>;
 export type Exercise = z.infer<typeof exercise>;

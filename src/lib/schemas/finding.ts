@@ -3,99 +3,7 @@
  * Levels and frequencies are plain numbers with their unit beside them; the page formats them.
  */
 import { z } from 'zod';
-import { answerUnits } from './exercise';
-import { scales, traceModes } from './settings';
-
-const unit = z.enum(answerUnits);
-export const measured = z.strictObject({ value: z.number(), unit, digits: z.int() });
-
-export const verdicts = ['right', 'right-but-method', 'wrong', 'unanswered'] as const;
-
-/** One mistake found (or, for `right-but-method`, one fault of the method): words and the sum in the learner's own numbers. */
-export const findingMistake = z.strictObject({
-	kind: z.string(),
-	/** "A point is not a power" */
-	title: z.string(),
-	text: z.string(),
-	/** "10 log (16 000/1 064.5) = 11.8 dB"; set in figures. */
-	sum: z.string().optional(),
-	/** Small print beside the sum: "less 1.1 dB of statistical scatter and receiver error". */
-	note: z.string().optional()
-});
-
-/** Steps from the learner's number up (or down) to the true one, in the question's unit. */
-export const findingLadder = z.strictObject({
-	unit,
-	yours: z.number(),
-	true: z.number(),
-	/** In order from yours; their `change`s add up to true − yours. */
-	parts: z.array(z.strictObject({ from: z.number(), to: z.number(), change: z.number(), text: z.string() })),
-	/** Named levels worth a dotted line: "channel power at the receiver". */
-	levels: z.array(z.strictObject({ value: z.number(), text: z.string() }))
-});
-
-/** What each watched mistake would have given on this signal. */
-export const findingNumberLine = z.strictObject({
-	unit,
-	marks: z.array(
-		z.strictObject({
-			value: z.number(),
-			label: z.string(),
-			role: z.enum(['yours', 'true', 'mistake']),
-			/** The mistake that was matched. */
-			matched: z.boolean()
-		})
-	)
-});
-
-/** What the plot draws for a question: the band asked for at its true level, and the point that was read. */
-export const findingPlot = z.strictObject({
-	band: z
-		.strictObject({ startHz: z.number(), stopHz: z.number(), value: z.number(), unit, text: z.string() })
-		.nullable(),
-	/** The true frequency that was asked for. */
-	at: z.strictObject({ frequencyHz: z.number(), text: z.string() }).nullish(),
-	point: z.strictObject({ frequencyHz: z.number(), levelDbm: z.number() }).nullable(),
-	/** The sweep to draw, that of the attached reading, else the last one: its rows, its trace (1…4), how they combine. */
-	trace: z
-		.strictObject({
-			fromRow: z.int(),
-			toRow: z.int(),
-			trace: z.int(),
-			mode: z.enum(traceModes),
-			count: z.int(),
-			scale: z.enum(scales)
-		})
-		.nullable(),
-	/** The signal itself at the reference plane, through the resolution bandwidth of that sweep, noise-free. */
-	signal: z
-		.strictObject({
-			startHz: z.number(),
-			stopHz: z.number(),
-			rbwHz: z.number(),
-			levelsDbm: z.array(z.number())
-		})
-		.nullable()
-});
-
-export const questionFinding = z.strictObject({
-	id: z.string(),
-	text: z.string(),
-	verdict: z.enum(verdicts),
-	/** One sentence: "You read one point of the hump, and left the lead out." */
-	title: z.string(),
-	yours: measured.nullable(),
-	true: measured,
-	/** yours − true, in the question's unit; null when unanswered. */
-	difference: z.number().nullable(),
-	/** Half width of what counts as right, in the question's unit. */
-	tolerance: z.number(),
-	mistakes: z.array(findingMistake),
-	remarks: z.array(z.strictObject({ code: z.string(), text: z.string() })),
-	ladder: findingLadder.nullable(),
-	numberLine: findingNumberLine,
-	plot: findingPlot
-});
+import { measured, questionFinding } from './questions/finding';
 
 /** One line of what was done. `at` is the wall time handed in with the log; `bad` says what was wrong with the step. */
 export const findingLogStep = z.strictObject({
@@ -109,6 +17,8 @@ export const findingLogStep = z.strictObject({
 export const doneRightStep = z.strictObject({
 	text: z.string(),
 	value: measured.optional(),
+	/** What was answered, in words, where that is no number. */
+	answer: z.string().optional(),
 	why: z.string().optional()
 });
 
@@ -120,13 +30,6 @@ export const finding = z.strictObject({
 	passed: z.boolean()
 });
 
-export type Verdict = (typeof verdicts)[number];
-export type Measured = z.infer<typeof measured>;
-export type FindingMistake = z.infer<typeof findingMistake>;
-export type FindingLadder = z.infer<typeof findingLadder>;
-export type FindingNumberLine = z.infer<typeof findingNumberLine>;
-export type FindingPlot = z.infer<typeof findingPlot>;
-export type QuestionFinding = z.infer<typeof questionFinding>;
 export type FindingLogStep = z.infer<typeof findingLogStep>;
 export type DoneRightStep = z.infer<typeof doneRightStep>;
 export type Finding = z.infer<typeof finding>;

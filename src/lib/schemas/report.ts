@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { readingView } from './attempt';
 import { readingMark } from './done-right';
 import { exerciseView } from './exercise-view';
-import { measured, verdicts } from './finding';
+import { measured, verdicts } from './questions/finding';
 import { resolvedSettings, traceModes } from './settings';
 import { rowNumber } from './sweep-stream';
 
@@ -48,7 +48,10 @@ export const reportView = z.strictObject({
 		z.strictObject({
 			id: z.string(),
 			text: z.string(),
+			/** A number; null when it is none, or none was given. */
 			yours: measured.nullable(),
+			/** What was answered, in words. */
+			answer: z.string().nullable(),
 			verdict: z.enum(verdicts),
 			toleranceText: z.string(),
 			readingId: z.int().nullable()

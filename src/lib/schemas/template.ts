@@ -26,6 +26,15 @@ export type Template<T> = T extends number
 			? Template<U>[]
 			: { [K in keyof T]: Template<T[K]> };
 
+/** A template when its numbers are in place. */
+export type Filled<T> = T extends Expression
+	? number
+	: T extends string | number | boolean | null | undefined
+		? T
+		: T extends (infer U)[]
+			? Filled<U>[]
+			: { [K in keyof T]: Filled<T[K]> };
+
 /** The template of a schema made of objects, arrays, unions, literals and numbers; unknown keys stay refused by name. */
 export function templateOf<S extends z.ZodType>(schema: S): z.ZodType<Template<z.infer<S>>> {
 	return rebuilt(schema) as unknown as z.ZodType<Template<z.infer<S>>>;

@@ -1,6 +1,6 @@
 /** The bench on the front page, which needs no account: what it shows, and what it asks the server. */
 import { z } from 'zod';
-import { findingMistake, measured, verdicts } from './finding';
+import { findingMistake, measured, verdicts } from './questions/finding';
 import { frequency } from './number';
 
 const token = z.string().min(1).max(400);

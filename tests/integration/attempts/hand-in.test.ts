@@ -1,3 +1,5 @@
+import { numberFindings } from '../../factories/number-findings';
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { finding as findingSchema } from '$lib/schemas/finding';
 import type { Settings } from '$lib/schemas/settings';
@@ -48,18 +50,23 @@ function longestStandstill(): () => number {
 		return longest;
 	};
 }
-const typed = (text: string, unit = 'dBm', readingId?: number) => ({ text, unit, readingId });
+const typed = (text: string, unit = 'dBm', readingId?: number) => ({
+	type: 'number' as const,
+	text,
+	unit,
+	readingId
+});
 
 describe('handIn(actor, attemptId, {answers}, now)', () => {
 	it('finds a right answer right, keeps what it found, and closes the attempt', async () => {
 		const { actor, attempt } = await createAttempt();
 		const { drawn } = await secretsOf(attempt.id);
-		const { id, value } = await readPower(actor, attempt.id, drawn.questions[0].leadDb);
+		const { id, value } = await readPower(actor, attempt.id, numberQuestions(drawn)[0].leadDb);
 		const power = typed(`${value.toFixed(2)} dBm`, 'dBm', id);
 		const { finding } = await handIn(actor, attempt.id, { answers: { power } }, now);
 		expect(findingSchema.parse(finding)).toEqual(finding);
 		expect(finding.questions[0]).toMatchObject({ id: 'power', verdict: 'right' });
-		expect(finding.questions[0].true.value).toBe(drawn.questions[0].truth);
+		expect(numberFindings(finding)[0].true.value).toBe(numberQuestions(drawn)[0].truth);
 		expect(finding.questions[1]).toMatchObject({ id: 'width', verdict: 'unanswered' });
 		expect(await Attempt.findByPk(attempt.id)).toMatchObject({ closedAt: now, streamToken: null });
 		const [answer] = await Answer.findAll({ where: { attemptId: attempt.id } });
@@ -132,10 +139,12 @@ describe('handIn(actor, attemptId, {answers}, now)', () => {
 		const all = await Promise.all(
 			attempts.map(({ actor, attempt }) => handIn(actor, attempt.id, { answers }, now))
 		);
-		expect(all.map(({ finding }) => finding.questions[0].yours?.value)).toEqual(attempts.map(() => -23));
+		expect(all.map(({ finding }) => numberFindings(finding)[0].yours?.value)).toEqual(
+			attempts.map(() => -23)
+		);
 		const truths = await Promise.all(attempts.map(({ attempt }) => secretsOf(attempt.id)));
-		expect(all.map(({ finding }) => finding.questions[0].true.value)).toEqual(
-			truths.map(({ drawn }) => drawn.questions[0].truth)
+		expect(all.map(({ finding }) => numberFindings(finding)[0].true.value)).toEqual(
+			truths.map(({ drawn }) => numberQuestions(drawn)[0].truth)
 		);
 		expect(await Answer.count({ where: { attemptId: attempts.map(({ attempt }) => attempt.id) } })).toBe(30);
 		// One grading alone takes some hundred milliseconds: thirty on this thread would stand still for seconds.
@@ -145,10 +154,10 @@ describe('handIn(actor, attemptId, {answers}, now)', () => {
 	it('grades what was read meanwhile, and nothing that is no longer so', async () => {
 		const { actor, attempt } = await createAttempt();
 		const { drawn } = await secretsOf(attempt.id);
-		const correctionDb = drawn.questions[0].leadDb;
+		const correctionDb = numberQuestions(drawn)[0].leadDb;
 		await sweep(actor, attempt.id, { ...settings, correctionDb }, { sweeps: 16 });
 		await acknowledgeRows(actor, attempt.id, { row: 15 });
-		const answers = { power: typed(drawn.questions[0].truth.toFixed(2)) };
+		const answers = { power: typed(numberQuestions(drawn)[0].truth.toFixed(2)) };
 		const request = { kind: 'channel-power' as const, centreHz: 450e6, widthHz: 200e3 };
 		const handing = handIn(actor, attempt.id, { answers }, now);
 		const reading = takeReading(actor, attempt.id, { rows: { from: 0, to: 15 }, trace: 1, request }, now);

@@ -30,7 +30,12 @@ async function createMeasured() {
 		now
 	);
 	await sweep(actor, attempt.id, { ...settings, rbwHz: 30e3 }, { from: 8, sweeps: 1 });
-	const power = { text: reading.value.toFixed(1), unit: 'dBm', readingId: reading.id };
+	const power = {
+		type: 'number' as const,
+		text: reading.value.toFixed(1),
+		unit: 'dBm',
+		readingId: reading.id
+	};
 	await handIn(actor, attempt.id, { answers: { power } }, now);
 	return { actor, attempt, reading, swept };
 }

@@ -31,7 +31,7 @@ const markings: Markings = {
 	levelUnit: 'dBµV/m',
 	antenna: [{ frequencyHz: 450e6, dbPerM: 18.4 }]
 };
-const power = { text: '-23,', unit: 'dBm' };
+const power = { type: 'number' as const, text: '-23,', unit: 'dBm' };
 
 describe('getAttemptView(actor, attemptId)', () => {
 	it('shows the start settings before anything was swept', async () => {
@@ -125,11 +125,21 @@ describe('getAttemptView(actor, attemptId)', () => {
 describe('saveDrafts(actor, attemptId, {answers}, now)', () => {
 	it('keeps whatever is typed, in place of what was kept before', async () => {
 		const { actor, attempt } = await createAttempt();
-		await saveDrafts(actor, attempt.id, { answers: { power, width: { text: '12 px', unit: 'Hz' } } }, now);
+		await saveDrafts(
+			actor,
+			attempt.id,
+			{ answers: { power, width: { type: 'number', text: '12 px', unit: 'Hz' } } },
+			now
+		);
 		const later = new Date('2026-03-02T10:00:05.250Z');
-		await saveDrafts(actor, attempt.id, { answers: { power: { text: '', unit: 'dBm' } } }, later);
+		await saveDrafts(
+			actor,
+			attempt.id,
+			{ answers: { power: { type: 'number', text: '', unit: 'dBm' } } },
+			later
+		);
 		expect(await Draft.findByPk(attempt.id)).toMatchObject({
-			answers: { power: { text: '', unit: 'dBm' } },
+			answers: { power: { type: 'number', text: '', unit: 'dBm' } },
 			savedAt: later
 		});
 	});

@@ -5,6 +5,7 @@ import { waiting, wireOf } from './bench-wire-of';
 
 const questions = [
 	{
+		type: 'number' as const,
 		id: 'power',
 		text: 'Power',
 		unit: 'dBm' as const,

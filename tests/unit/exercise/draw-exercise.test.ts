@@ -1,3 +1,4 @@
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
 import { drawParameters } from '$lib/server/bench/exercise/draw-parameters';
@@ -67,7 +68,8 @@ describe('drawExercise(exercise, seed)', () => {
 
 	it('has the carrier’s own level as the true channel power, at the plane and not at the receiver', () => {
 		for (const seed of seeds) {
-			const { questions, parameters } = drawExercise(firstExercise, seed);
+			const drawn = drawExercise(firstExercise, seed);
+			const [questions, { parameters }] = [numberQuestions(drawn), drawn];
 			// All of a root-raised-cosine carrier lies within (1 + roll-off) × symbol rate, here under 25 kHz.
 			expect(questions[0].truth).toBeCloseTo(parameters.carrierDbm as number, 4);
 			expect(questions[0].leadDb).toBe(parameters.leadLossDb);
@@ -75,7 +77,8 @@ describe('drawExercise(exercise, seed)', () => {
 	});
 
 	it('has power over symbol rate as the true density in the middle', () => {
-		const { questions, parameters } = drawExercise(firstExercise, 3);
+		const drawn = drawExercise(firstExercise, 3);
+		const [questions, { parameters }] = [numberQuestions(drawn), drawn];
 		const { carrierDbm, symbolRateHz } = parameters as Record<string, number>;
 		expect(questions[1].truth).toBeCloseTo(carrierDbm - 10 * Math.log10(symbolRateHz), 1);
 	});

@@ -1,3 +1,6 @@
+import { numberFindings } from '../../factories/number-findings';
+import { numberAnswers } from '$lib/server/bench/exercise/attempt-record';
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { finding as findingSchema } from '$lib/schemas/finding';
 import type { AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
@@ -10,7 +13,7 @@ import { watchedMistakes } from '$lib/server/bench/grading/watched-mistakes';
 import { firstExercise } from '../../factories/first-exercise';
 
 const drawn = drawExercise(firstExercise, 11);
-const [power, density] = drawn.questions;
+const [power, density] = numberQuestions(drawn);
 const taught = runMethod(drawn);
 const lead = power.leadDb;
 
@@ -45,8 +48,8 @@ describe('gradeAnswer on the taught method', () => {
 
 	it('plays the taught method on the learner’s own seed', () => {
 		const readings = finding.doneRight.flatMap(({ value }) => value?.value ?? []);
-		expect(readings).toContain(taught.record.answers[power.id].value);
-		expect(readings).toContain(taught.record.answers[density.id].value);
+		expect(readings).toContain(numberAnswers(taught.record)[power.id].value);
+		expect(readings).toContain(numberAnswers(taught.record)[density.id].value);
 	});
 
 	it('draws the signal itself at the plane: a flat hump at its density times the noise bandwidth', () => {
@@ -59,7 +62,7 @@ describe('gradeAnswer on the taught method', () => {
 	});
 });
 
-describe.each(drawn.questions.map((question) => ({ question })))(
+describe.each(numberQuestions(drawn).map((question) => ({ question })))(
 	'mistakes on $question.id',
 	({ question }) => {
 		it.each(watchedMistakes(question).map(({ id }) => id))(
@@ -80,7 +83,7 @@ describe.each(drawn.questions.map((question) => ({ question })))(
 		it.each(watchedMistakes(question).map(({ id }) => id))(
 			'%s: the ladder leads from the answer to the truth',
 			(id) => {
-				const finding = grade(making(id, question)).questions.find((one) => one.id === question.id)!;
+				const finding = numberFindings(grade(making(id, question))).find((one) => one.id === question.id)!;
 				const { parts, yours } = finding.ladder!;
 				const end = parts.reduce((level, { change }) => level + change, yours);
 				expect(end).toBeCloseTo(question.truth, 6);
@@ -92,7 +95,7 @@ describe.each(drawn.questions.map((question) => ({ question })))(
 			'%s: named without any reading, from the log alone',
 			(id) => {
 				const record = making(id, question);
-				const { value } = record.answers[question.id];
+				const { value } = numberAnswers(record)[question.id];
 				expect(named({ ...record, readings: [], answers: { [question.id]: { value } } }, question)).toEqual([
 					id
 				]);
@@ -103,7 +106,7 @@ describe.each(drawn.questions.map((question) => ({ question })))(
 
 describe('gradeAnswer on a marker read as the power', () => {
 	const record = making('marker-as-power');
-	const [finding] = grade(record).questions;
+	const [finding] = numberFindings(grade(record));
 
 	it('explains it with the learner’s own bandwidth', () => {
 		const symbolRateHz = drawn.parameters.symbolRateHz as number;
@@ -114,8 +117,8 @@ describe('gradeAnswer on a marker read as the power', () => {
 	});
 
 	it('names two mistakes when the lead is left out as well', () => {
-		const { value, readingId } = record.answers[power.id];
-		const both = grade(answering(record, value - lead, readingId)).questions[0];
+		const { value, readingId } = numberAnswers(record)[power.id];
+		const both = numberFindings(grade(answering(record, value - lead, readingId)))[0];
 		expect(both.title).toBe('You read one point of the hump, and left the lead out.');
 		expect(both.mistakes.map(({ kind }) => kind)).toEqual(['marker-as-power', 'lead-left-out']);
 		expect(both.ladder!.parts.map(({ change }) => change)[1]).toBeCloseTo(lead, 9);
@@ -128,7 +131,7 @@ describe('gradeAnswer on a marker read as the power', () => {
 			{ settings: wide, firstRow: 0, sweeps: 1, clockS: 0 },
 			...record.log.map((entry) => ({ ...entry, firstRow: entry.firstRow + 1 }))
 		];
-		const { value } = record.answers[power.id];
+		const { value } = numberAnswers(record)[power.id];
 		expect(named({ log, readings: [], answers: { [power.id]: { value: value - lead } } })).toEqual([
 			'marker-as-power',
 			'lead-left-out'
@@ -136,8 +139,8 @@ describe('gradeAnswer on a marker read as the power', () => {
 	});
 
 	it('is ruled out for whoever read channel power', () => {
-		const marked = record.answers[power.id].value;
-		const attached = taught.record.answers[power.id].readingId;
+		const marked = numberAnswers(record)[power.id].value;
+		const attached = numberAnswers(taught.record)[power.id].readingId;
 		expect(named(answering(taught.record, marked, attached))).not.toContain('marker-as-power');
 	});
 
@@ -159,13 +162,13 @@ describe('gradeAnswer on a marker read as the power', () => {
 
 describe('gradeAnswer on the lead', () => {
 	const uncorrected = runMethod(drawn, withSettings(drawn.method, { correctionDb: 0 })).record;
-	const { value, readingId } = uncorrected.answers[power.id];
+	const { value, readingId } = numberAnswers(uncorrected)[power.id];
 
 	it('takes a loss added by hand for as good as one set as Correction', () =>
 		expect(grade(answering(uncorrected, value + lead, readingId)).questions[0].verdict).toBe('right'));
 
 	it('names the loss left out, and says what Correction was', () => {
-		const [finding] = grade(answering(uncorrected, value, readingId)).questions;
+		const [finding] = numberFindings(grade(answering(uncorrected, value, readingId)));
 		expect(finding.title).toBe('You left the lead out.');
 		expect(finding.mistakes[0].text).toContain('Correction was still at 0 dB');
 	});
@@ -180,7 +183,10 @@ describe('the lead added twice', () => {
 
 	it('is named when Correction holds the loss and it is added by hand once more', () => {
 		const record = runMethod(drawn, twice.mistake.make(drawn.method, { drawn, question })).record;
-		expect(record.answers[power.id].value - taught.record.answers[power.id].value).toBeCloseTo(lead, 9);
+		expect(numberAnswers(record)[power.id].value - numberAnswers(taught.record)[power.id].value).toBeCloseTo(
+			lead,
+			9
+		);
 		expect(judgeQuestion(drawn, question, record).matched?.watched.map(({ id }) => id)).toEqual([
 			'lead-twice'
 		]);
@@ -204,32 +210,36 @@ describe('gradeAnswer on density', () => {
 describe('gradeAnswer on a right number', () => {
 	it('says so when it rests on decibels averaged', () => {
 		const record = making('log-average');
-		const { readingId } = record.answers[power.id];
+		const { readingId } = numberAnswers(record)[power.id];
 		// The level error of this receiver and half a decibel of luck bring it within the tolerance.
 		const lucky = answering(record, power.truth - 0.9, readingId);
-		const [finding] = grade(lucky).questions;
+		const [finding] = numberFindings(grade(lucky));
 		expect(finding.verdict).toBe('right-but-method');
 	});
 
 	it('says so when the reading attached is of something else', () => {
 		const record = making('marker-as-power');
-		const [finding] = grade(answering(record, power.truth, record.answers[power.id].readingId)).questions;
+		const [finding] = numberFindings(
+			grade(answering(record, power.truth, numberAnswers(record)[power.id].readingId))
+		);
 		expect(finding.verdict).toBe('right-but-method');
 		expect(finding.remarks.map(({ code }) => code)).toContain('not-from-evidence');
 	});
 
 	it('says so when nothing was read at all', () => {
-		const [finding] = grade({
-			...taught.record,
-			readings: [],
-			answers: { [power.id]: { value: power.truth } }
-		}).questions;
+		const [finding] = numberFindings(
+			grade({
+				...taught.record,
+				readings: [],
+				answers: { [power.id]: { value: power.truth } }
+			})
+		);
 		expect(finding.verdict).toBe('right-but-method');
 		expect(finding.remarks.map(({ code }) => code)).toEqual(['no-evidence']);
 	});
 
 	it('finds the reading itself when none was attached', () => {
-		const { value } = taught.record.answers[power.id];
+		const { value } = numberAnswers(taught.record)[power.id];
 		expect(grade(answering(taught.record, value)).questions[0].verdict).toBe('right');
 	});
 });
@@ -242,7 +252,7 @@ describe('gradeAnswer on everything else', () => {
 	});
 
 	it('names nothing when no mistake gives the number', () => {
-		const [finding] = grade(answering(taught.record, power.truth + 30, undefined)).questions;
+		const [finding] = numberFindings(grade(answering(taught.record, power.truth + 30, undefined)));
 		expect(finding.verdict).toBe('wrong');
 		expect(finding.mistakes).toEqual([]);
 		expect(finding.title).toContain('30.0 dB too high');
@@ -252,7 +262,7 @@ describe('gradeAnswer on everything else', () => {
 	});
 
 	it('takes no reading of rows that nobody swept for evidence', () => {
-		const [finding] = grade({ ...taught.record, log: [] }).questions;
+		const [finding] = numberFindings(grade({ ...taught.record, log: [] }));
 		expect(finding.remarks.map(({ code }) => code)).toEqual(['no-evidence']);
 	});
 

@@ -1,3 +1,5 @@
+import { numberAnswers } from '$lib/server/bench/exercise/attempt-record';
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
@@ -10,7 +12,7 @@ import { contentExercise } from '../../factories/content-exercise';
 
 const contextOf = (slug: string, seed = 1) => {
 	const drawn = drawExercise(contentExercise(slug), seed);
-	const [question] = drawn.questions;
+	const [question] = numberQuestions(drawn);
 	return { drawn, question, setUp: setUpOf(drawn, drawn.method, question.id) };
 };
 
@@ -64,13 +66,13 @@ describe('an answer with the noise taken off', () => {
 		const { verdict, source, remarks } = judge(taught.record);
 		expect(verdict).toBe('right');
 		expect(remarks).toEqual([]);
-		expect(Math.abs(source!.cleanValue - taught.record.answers[question.id].value)).toBeLessThan(0.5);
+		expect(Math.abs(source!.cleanValue - numberAnswers(taught.record)[question.id].value)).toBeLessThan(0.5);
 		expect(source!.planeValue - source!.cleanValue).toBeGreaterThan(1.5);
 	});
 
 	it('rests on nothing when the reading attached is that of the matched load', () => {
 		const [, load] = taught.record.readings;
-		const { value } = taught.record.answers[question.id];
+		const { value } = numberAnswers(taught.record)[question.id];
 		const swapped = { ...taught.record, answers: { [question.id]: { value, readingId: load.id } } };
 		expect(judge(swapped).verdict).toBe('right-but-method');
 	});

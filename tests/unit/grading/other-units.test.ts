@@ -1,3 +1,6 @@
+import { numberFindings } from '../../factories/number-findings';
+import { numberAnswers } from '$lib/server/bench/exercise/attempt-record';
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { finding as findingSchema } from '$lib/schemas/finding';
 import type { BenchRequest } from '$lib/schemas/reading';
@@ -14,7 +17,7 @@ import { twoCarriers } from '../../factories/two-carriers';
 const drawn = drawExercise(twoCarriers, 3);
 const { lowHz, highHz, apartHz } = drawn.parameters as Record<string, number>;
 const played = runMethod(drawn);
-const question = (id: string) => drawn.questions.find((one) => one.id === id)!;
+const question = (id: string) => numberQuestions(drawn).find((one) => one.id === id)!;
 
 /** The verdict on `value` for a question, from one reading taken with the taught set-up and these changes. */
 function verdict(
@@ -71,7 +74,7 @@ describe('a question about a frequency', () => {
 	const marker: BenchRequest = { kind: 'marker', atHz: lowHz };
 
 	it('is off by the receiver’s own reference when counted: true × (1 + ε)', () => {
-		const { value } = played.record.answers.where;
+		const { value } = numberAnswers(played.record).where;
 		const { frequency } = drawReceiverError(drawn.profile, drawn.seed);
 		expect(value).toBeCloseTo(lowHz * (1 + frequency), 0);
 	});
@@ -148,7 +151,7 @@ describe('gradeAnswer on what isn’t a level', () => {
 
 	it('shows no digit that the tolerance swallows', () =>
 		// 600 Hz allowed: tens of hertz.
-		expect(finding.questions[0].true.digits).toBe(-1));
+		expect(numberFindings(finding)[0].true.digits).toBe(-1));
 });
 
 describe('spreads of a question', () => {

@@ -1,4 +1,6 @@
 /** What theory says of a mistake is what the bench gives when it is made there: the exercises of units 4 and 5. */
+import { numberAnswers } from '$lib/server/bench/exercise/attempt-record';
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
@@ -20,7 +22,7 @@ const made = slugs.flatMap((slug) => {
 	const exercise = contentExercise(slug);
 	return SEEDS.flatMap((seed) => {
 		const drawn = drawExercise(exercise, seed);
-		return drawn.questions.flatMap((question) =>
+		return numberQuestions(drawn).flatMap((question) =>
 			watchedMistakes(question).map((watched) => ({ slug, seed, drawn, question, watched }))
 		);
 	});
@@ -35,7 +37,7 @@ describe.each(kinds)('%s', (kind) => {
 			const context = { drawn, question };
 			const predicted = predictMistake(watched, context)!;
 			const { record } = runMethod(drawn, watched.mistake.make(drawn.method, context));
-			const off = record.answers[question.id].value - ownError(context) - predicted.value;
+			const off = numberAnswers(record)[question.id].value - ownError(context) - predicted.value;
 			expect(Math.abs(off), `${slug}, ${question.id}, seed ${seed}`).toBeLessThan(3 * predicted.spread);
 		}
 	});

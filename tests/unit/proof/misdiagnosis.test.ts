@@ -1,3 +1,4 @@
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
 import { evidences, type MadeAnswer } from '$lib/server/bench/proof/misdiagnosis/made-answer';
@@ -29,7 +30,7 @@ describe('makeAnswers(exercise, range)', () => {
 
 describe('varyMethod(steps, …)', () => {
 	const drawn = drawExercise(firstExercise, 2);
-	const [question] = drawn.questions;
+	const [question] = numberQuestions(drawn);
 	const variants = Array.from({ length: 30 }, (_, n) =>
 		varyMethod(drawn.method, drawn, question, new Random('vary', n, 'test'), true)
 	);

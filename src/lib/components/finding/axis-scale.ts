@@ -1,5 +1,5 @@
 /** The unit a number line is drawn in: kHz, MHz, ms … where the base unit would give long figures. */
-import type { FindingNumberLine } from '$lib/schemas/finding';
+import type { FindingNumberLine } from '$lib/schemas/questions/finding';
 import { showFrequency, showTime } from '$lib/units/format-quantity';
 
 /** @returns the unit, and what its base unit's values are divided by */

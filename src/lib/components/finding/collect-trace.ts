@@ -1,6 +1,6 @@
 /** The trace that an answer rested on, made again from the rows the server keeps. */
 import { combineRows } from '$lib/measure/combine-rows';
-import type { FindingPlot } from '$lib/schemas/finding';
+import type { FindingPlot } from '$lib/schemas/questions/finding';
 import type { Frame } from '$lib/schemas/frames';
 
 /**

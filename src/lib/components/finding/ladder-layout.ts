@@ -1,5 +1,5 @@
 /** The ladder at the edge of a finding's plot: from the learner's number up (or down) to the true one. */
-import type { FindingLadder } from '$lib/schemas/finding';
+import type { FindingLadder } from '$lib/schemas/questions/finding';
 import { spreadLabels } from './spread-labels';
 
 export interface Rung {

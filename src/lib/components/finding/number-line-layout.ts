@@ -1,5 +1,5 @@
 /** The number line of a finding: what each mistake would have given, on one axis, with words above and below it. */
-import type { FindingNumberLine } from '$lib/schemas/finding';
+import type { FindingNumberLine } from '$lib/schemas/questions/finding';
 import { niceStep } from '../bench/plot/frequency-axis';
 import { formatFigure } from '$lib/units/format-quantity';
 import { spreadLabels } from './spread-labels';

@@ -1,5 +1,5 @@
 /** What each verdict is called. */
-import type { Verdict } from '$lib/schemas/finding';
+import type { Verdict } from '$lib/schemas/questions/finding';
 
 export const verdictWords: Record<Verdict, string> = {
 	right: 'right',

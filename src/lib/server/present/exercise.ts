@@ -1,11 +1,11 @@
-import type { ChainPart, ExerciseQuestion, Tolerance } from '$lib/schemas/exercise';
-import type { ExerciseView, QuestionView, ReceiverView } from '$lib/schemas/exercise-view';
+import type { ChainPart } from '$lib/schemas/exercise';
+import type { ExerciseQuestion } from '$lib/schemas/questions/question';
+import type { ExerciseView, ReceiverView } from '$lib/schemas/exercise-view';
+import { presentQuestion, type AskedQuestion } from './question';
 import type { MaskLimits } from '$lib/schemas/reading';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { LossTable } from '$lib/schemas/scene';
 import type { Settings } from '$lib/schemas/settings';
-import { dimensionOf, dimensionSpec } from '$lib/units/dimension';
-import { formatFigure, formatFrequency, formatTime } from '$lib/units/format-quantity';
 
 /** What an exercise view is made of. The records hold more; only what stands here goes out. */
 export interface ExerciseParts {
@@ -26,8 +26,8 @@ export interface ExerciseParts {
 	};
 	profile: ReceiverProfile;
 	/** As asked in this attempt, and as the author wrote them, in the same order. */
-	questions: { id: string; text: string }[];
-	written: Pick<ExerciseQuestion, 'unit' | 'digits' | 'tolerance'>[];
+	questions: AskedQuestion[];
+	written: ExerciseQuestion[];
 }
 
 export function presentExercise(parts: ExerciseParts): ExerciseView {
@@ -47,7 +47,7 @@ export function presentExercise(parts: ExerciseParts): ExerciseView {
 		...(brief.mask && { mask: brief.mask }),
 		receiver: presentReceiver(parts.profile),
 		start: brief.start,
-		questions: parts.questions.map(({ id, text }, i) => presentQuestion(id, text, parts.written[i])),
+		questions: parts.questions.map((asked, i) => presentQuestion(asked, parts.written[i])),
 		benchTimeS: parts.benchTimeS,
 		tries: exercise.tries
 	};
@@ -65,38 +65,3 @@ export const presentReceiver = (profile: ReceiverProfile): ReceiverView => ({
 	levelErrorDb: profile.levelErrorDb,
 	referencePpm: profile.referencePpm
 });
-
-function presentQuestion(
-	id: string,
-	text: string,
-	{ unit, digits, tolerance }: ExerciseParts['written'][number]
-): QuestionView {
-	return {
-		id,
-		text,
-		unit,
-		units: presentUnits(unit),
-		digits,
-		toleranceText: presentTolerance(tolerance, unit)
-	};
-}
-
-/** Every unit that an answer asked for in `unit` may be given in, that one first. */
-export function presentUnits(unit: string): string[] {
-	const dimension = dimensionOf(unit);
-	const others = dimension ? Object.keys(dimensionSpec(dimension).units) : [];
-	return [unit, ...others.filter((other) => other !== unit)];
-}
-
-/** From what the author wrote: a share of the true value must not be worked out here, it would tell the value. */
-export function presentTolerance(tolerance: Tolerance, unit: string): string {
-	if ('relative' in tolerance) return `Right within ±${shortest(tolerance.relative * 100)} %`;
-	const { absolute } = tolerance;
-	if (unit === 'Hz') return `Right within ±${formatFrequency(absolute)}`;
-	if (unit === 's') return `Right within ±${formatTime(absolute)}`;
-	if (unit === '%') return `Right within ±${shortest(absolute)} percentage points`;
-	return `Right within ±${shortest(absolute)}${unit === '1' ? '' : ' dB'}`;
-}
-
-const shortest = (value: number): string =>
-	formatFigure(Number(value.toPrecision(6)), 6).replace(/\.?0+$/, '');

@@ -1,8 +1,13 @@
 /** Mistakes that any unit may watch, made on the bench: two carriers side by side, and a width. */
+import { numberAnswers } from '$lib/server/bench/exercise/attempt-record';
 import { describe, expect, it } from 'vitest';
-import type { WatchedMistake } from '$lib/schemas/exercise';
+import type { WatchedMistake } from '$lib/schemas/questions/number';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
-import type { DrawnQuestion, FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
+import {
+	numberQuestions,
+	type FilledStep,
+	type NumberQuestion
+} from '$lib/server/bench/exercise/drawn-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { accountFor } from '$lib/server/bench/grading/account-for';
 import { judgeQuestion } from '$lib/server/bench/grading/judge-question';
@@ -13,8 +18,8 @@ import { twoCarriers } from '../../../factories/two-carriers';
 
 const drawn = drawExercise(twoCarriers, 5);
 const { lowHz, highHz, lowDbm, lessDb } = drawn.parameters as Record<string, number>;
-const asked = (id: string, over: Partial<DrawnQuestion> = {}): DrawnQuestion => ({
-	...drawn.questions.find((one) => one.id === id)!,
+const asked = (id: string, over: Partial<NumberQuestion> = {}): NumberQuestion => ({
+	...numberQuestions(drawn).find((one) => one.id === id)!,
 	...over
 });
 const level = asked('where', {
@@ -34,13 +39,13 @@ const byMarker = drawn.method.map((step): FilledStep => {
 });
 
 /** The mistake made on the bench: what it gives, what theory says, and what the finding names, with and without its reading. */
-function made(question: DrawnQuestion, watched: WatchedMistake) {
+function made(question: NumberQuestion, watched: WatchedMistake) {
 	const own = { ...question, mistakes: [watched] };
 	const context = { drawn, question: own };
 	const [one] = watchedMistakes(own);
 	const method = question.unit === 'dBm' ? byMarker : drawn.method;
 	const { record } = runMethod({ ...drawn, method }, one.mistake.make(method, context));
-	const { value } = record.answers[question.id];
+	const { value } = numberAnswers(record)[question.id];
 	const judged = (left: typeof record) => judgeQuestion(drawn, own, left);
 	const names = (left: typeof record) => judged(left).matched?.watched.map(({ kind }) => kind) ?? [];
 	const judgement = judged(record);
@@ -53,7 +58,7 @@ function made(question: DrawnQuestion, watched: WatchedMistake) {
 	};
 }
 
-describe.each<[string, DrawnQuestion, WatchedMistake, number]>([
+describe.each<[string, NumberQuestion, WatchedMistake, number]>([
 	['wrong-neighbour, by its frequency', asked('where'), { kind: 'wrong-neighbour', atHz: highHz }, highHz],
 	['wrong-neighbour, by its level', level, { kind: 'wrong-neighbour', atHz: highHz }, lowDbm - lessDb],
 	[

@@ -1,4 +1,5 @@
 /** Every mistake watched in units 1 to 3: what theory says of it is what the bench gives when it is made there, and it is named. */
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { gradeAnswer } from '$lib/server/bench/grading/grade-answer';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
@@ -18,7 +19,7 @@ const slugs = [
 ];
 const drawnOnes = slugs.flatMap((slug) => SEEDS.map((seed) => drawnFrom(slug, seed)));
 const watchedOnes = drawnOnes.flatMap((drawn) =>
-	drawn.questions.flatMap((question) =>
+	numberQuestions(drawn).flatMap((question) =>
 		watchedMistakes(question).map((watched) => ({ drawn, question, watched }))
 	)
 );

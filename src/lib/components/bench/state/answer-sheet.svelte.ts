@@ -1,6 +1,8 @@
 /** What is typed as answers: kept on the server as it is typed, right or wrong, and handed in once. */
-import type { DraftsView, TypedAnswer } from '$lib/schemas/attempt';
-import type { QuestionView } from '$lib/schemas/exercise-view';
+import type { TypedAnswer, TypedAs } from '$lib/schemas/answer';
+import type { DraftsView } from '$lib/schemas/attempt';
+import type { QuestionView } from '$lib/schemas/questions/view';
+import { blankAnswer, isBlank } from './blank-answer';
 import { Refusal, type BenchWire } from './bench-wire';
 
 /** How long the keys must rest before what was typed is kept, ms. */
@@ -20,7 +22,7 @@ export class AnswerSheet {
 	/** Handed in, here or elsewhere. */
 	closed = $state(false);
 	readonly answered: number = $derived(
-		Object.values(this.answers).filter((answer) => answer.text.trim() !== '').length
+		Object.values(this.answers).filter((answer) => !isBlank(answer)).length
 	);
 	readonly #wire: BenchWire;
 	readonly #questions: readonly QuestionView[];
@@ -32,37 +34,57 @@ export class AnswerSheet {
 		this.#wire = wire;
 		this.#questions = questions;
 		this.savedAt = drafts.savedAt;
-		for (const { id, unit } of questions) this.answers[id] = drafts.answers[id] ?? { text: '', unit };
+		for (const question of questions) {
+			const kept = drafts.answers[question.id];
+			this.answers[question.id] = kept?.type === question.type ? kept : blankAnswer(question);
+		}
+	}
+
+	/** The answer to a question that asks for a number. @throws Error for any other question */
+	number(id: string): TypedAs<'number'> {
+		const answer = this.answers[id];
+		if (answer?.type !== 'number') throw new Error(`Question ${id} asks for no number`);
+		return answer;
 	}
 
 	type(id: string, text: string): void {
-		this.answers[id].text = text;
+		this.number(id).text = text;
 		this.#touched(id);
 	}
 
 	chooseUnit(id: string, unit: string): void {
-		this.answers[id].unit = unit;
+		this.number(id).unit = unit;
 		this.#touched(id);
 	}
 
 	attach(id: string, readingId: number | null): void {
-		this.answers[id].readingId = readingId;
+		this.number(id).readingId = readingId;
+		this.#touched(id);
+	}
+
+	/** Answers with what is no number, whole. */
+	give(id: string, answer: TypedAnswer): void {
+		this.answers[id] = answer;
 		this.#touched(id);
 	}
 
 	/** Names of the questions (by position, from 1) that a reading is attached to. */
 	attachedTo(readingId: number): number[] {
-		return this.#questions.flatMap(({ id }, i) => (this.answers[id].readingId === readingId ? [i + 1] : []));
+		return this.#positions((answer) => answer.type === 'number' && answer.readingId === readingId);
 	}
 
-	/** Questions with nothing typed. */
+	/** Questions with nothing answered. */
 	get open(): string[] {
-		return this.#questions.filter(({ id }) => this.answers[id].text.trim() === '').map(({ id }) => id);
+		return this.#questions.filter(({ id }) => isBlank(this.answers[id])).map(({ id }) => id);
 	}
 
-	/** Answers (by position, from 1) that no reading is attached to. */
+	/** Numbers (by position, from 1) that no reading is attached to. */
 	get bare(): number[] {
-		return this.#questions.flatMap(({ id }, i) => (this.answers[id].readingId ? [] : [i + 1]));
+		return this.#positions((answer) => answer.type === 'number' && !answer.readingId);
+	}
+
+	#positions(is: (answer: TypedAnswer) => boolean): number[] {
+		return this.#questions.flatMap(({ id }, i) => (is(this.answers[id]) ? [i + 1] : []));
 	}
 
 	refuse(id: string, message: string): void {

@@ -1,11 +1,6 @@
 /** What the bench asks of the server. The page gives the real thing; nothing in here fetches. */
-import type {
-	AttemptView,
-	HintResponse,
-	ReadingView,
-	TakeReadingRequest,
-	TypedAnswer
-} from '$lib/schemas/attempt';
+import type { TypedAnswer } from '$lib/schemas/answer';
+import type { AttemptView, HintResponse, ReadingView, TakeReadingRequest } from '$lib/schemas/attempt';
 import type { Frame } from '$lib/schemas/frames';
 import type { SavedSetUpView } from '$lib/schemas/saved-set-up';
 import type { LoggedSetUp } from '$lib/schemas/set-up-log';

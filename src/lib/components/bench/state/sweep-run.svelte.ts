@@ -22,6 +22,8 @@ export class SweepRun {
 	lost = $state(false);
 	/** Why the receiver stopped by itself. */
 	ended = $state<{ reason: StreamEndReason | 'refused'; message: string } | undefined>();
+	/** Number of the set-up in force in the attempt's log, from 0; null before the first sweep. */
+	setUp = $state<number | null>(null);
 	settings = $state.raw<Settings>({});
 	resolved = $state.raw<ResolvedSettings>() as ResolvedSettings;
 	flags = $state.raw<readonly ReceiverFlag[]>([]);
@@ -47,6 +49,7 @@ export class SweepRun {
 		this.#traces = traces;
 		this.#drawn = new DrawnRows((row) => (this.closed ? Promise.resolve() : wire.acknowledge(row)));
 		this.settings = bench.settings;
+		this.setUp = bench.setUp;
 		this.resolved = bench.resolved;
 		this.flags = bench.protectionTripped ? withProtection(bench.flags) : bench.flags;
 		this.benchTimeUsedS = bench.benchTimeUsedS;
@@ -239,6 +242,7 @@ export class SweepRun {
 	#begin(json: unknown): void {
 		const state = streamState.parse(json);
 		this.resolved = state.resolved;
+		this.setUp = state.setUp;
 		this.flags = state.flags;
 		this.speedUp = state.speedUp;
 		this.#clock = { clockS: state.clockS, usedS: state.benchTimeUsedS };

@@ -32,12 +32,22 @@ export interface TakenReading {
 	at?: string;
 }
 
-export interface GivenAnswer {
+/** An answer as the grader takes it; its question says of which type it is. */
+export interface NumberAnswer {
 	/** In the question's unit. */
 	value: number;
 	/** The reading it is said to rest on. */
 	readingId?: string;
 }
+/** Keys of the options chosen. */
+export interface ChoiceAnswer {
+	chosen: string[];
+}
+/** Which entry of the log is handed in. */
+export interface SetUpAnswer {
+	entry: number;
+}
+export type GivenAnswer = NumberAnswer | ChoiceAnswer | SetUpAnswer;
 
 export interface AttemptRecord {
 	log: SettingsLogEntry[];
@@ -45,3 +55,9 @@ export interface AttemptRecord {
 	/** By question; a question left out is unanswered. */
 	answers: Record<string, GivenAnswer>;
 }
+
+/** The answers of a record that are numbers, by question. */
+export const numberAnswers = ({ answers }: Pick<AttemptRecord, 'answers'>): Record<string, NumberAnswer> =>
+	Object.fromEntries(
+		Object.entries(answers).flatMap(([question, answer]) => ('value' in answer ? [[question, answer]] : []))
+	);

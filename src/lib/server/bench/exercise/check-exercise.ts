@@ -1,26 +1,15 @@
 import type { Exercise } from '$lib/schemas/exercise';
-import { bindMistake } from '../grading/watched-mistakes';
-import { isAbsoluteLevel } from '../grading/asked';
+import type { ExerciseQuestion } from '$lib/schemas/questions/question';
+import { checkAnswer, checkQuestion } from '../grading/questions/registry';
 import { profileNamed } from '../receiver/profiles';
 import { BenchError } from '../bench-error';
-import type { ExerciseIssue } from './exercise-error';
+import { refusalsOf, type ExerciseIssue } from './exercise-error';
 import { parseExpression } from './expression';
 import { DISPLAYED_PER_HZ } from './displayed-per-hz';
-import { eachExpression, fillTemplate } from './fill-template';
+import { eachExpression } from './fill-template';
 import { namesInText } from './fill-text';
 
 const LEAST_PARAMETERS = 4;
-
-/** Runs `check`, turning a refusal into an issue. */
-function issuesOf(check: () => void): ExerciseIssue[] {
-	try {
-		check();
-		return [];
-	} catch (error) {
-		if (error instanceof BenchError) return [{ field: error.field, message: error.message }];
-		throw error;
-	}
-}
 
 /** What no schema can say: names that exist, answers that are given, texts that tell nothing hidden. */
 export function checkExercise(exercise: Exercise): ExerciseIssue[] {
@@ -63,7 +52,7 @@ function checkNames(exercise: Exercise): ExerciseIssue[] {
 	) => {
 		eachExpression(template, field, (text, place) => {
 			issues.push(
-				...issuesOf(() => {
+				...refusalsOf(() => {
 					const stranger = parseExpression(text, place).names.find((name) => !names.has(name));
 					if (stranger) throw new BenchError(place, `${stranger}: ${why}`);
 				})
@@ -80,7 +69,10 @@ function checkNames(exercise: Exercise): ExerciseIssue[] {
 	check(exercise.leads, 'leads', shown, 'the learner sees this: list it in shown');
 	check(exercise.mask, 'mask', shown, 'the learner sees this: list it in shown');
 	check(exercise.trial, 'trial', shown, 'the visitor sees this: list it in shown');
-	check(exercise.questions, 'questions', known);
+	exercise.questions.forEach((question, i) => {
+		const truths = 'truths' in question ? Object.keys(question.truths) : [];
+		check(question, `questions[${i}]`, new Set([...known, ...truths]));
+	});
 	known.add(DISPLAYED_PER_HZ);
 	exercise.method.forEach((step, i) => {
 		check(step, `method[${i}]`, known);
@@ -92,6 +84,15 @@ function checkNames(exercise: Exercise): ExerciseIssue[] {
 			issues.push({ field: `shown[${i}]`, message: `${name} is neither drawn nor derived` });
 	});
 	return issues;
+}
+
+/** What of a question the learner reads while the attempt is open. */
+function textsOf(question: ExerciseQuestion, field: string): [string, string][] {
+	const options = question.type === 'choice' ? question.options : [];
+	return [
+		[`${field}.text`, question.text],
+		...options.map(({ text }, i): [string, string] => [`${field}.options[${i}].text`, text])
+	];
 }
 
 /** Texts may tell what is shown, and nothing else of the draw. */
@@ -106,10 +107,10 @@ function checkTexts(exercise: Exercise): ExerciseIssue[] {
 		...exercise.leads.map(({ label }, i): [string, string] => [`leads[${i}].label`, label]),
 		...exercise.cautions.map((text, i): [string, string] => [`cautions[${i}]`, text]),
 		...exercise.hints.map((text, i): [string, string] => [`hints[${i}]`, text]),
-		...exercise.questions.map(({ text }, i): [string, string] => [`questions[${i}].text`, text])
+		...exercise.questions.flatMap((question, i) => textsOf(question, `questions[${i}]`))
 	];
 	return texts.flatMap(([field, text]) =>
-		issuesOf(() => {
+		refusalsOf(() => {
 			const stranger = namesInText(text ?? '', field).find((name) => !exercise.shown.includes(name));
 			if (stranger) throw new BenchError(field, `${stranger} is not listed in shown, so no text may tell it`);
 		})
@@ -138,10 +139,10 @@ function checkMethod({ method, questions }: Exercise): ExerciseIssue[] {
 			taken.add(step.as);
 		}
 		if (step.do !== 'answer') return;
-		if (!questions.some(({ id }) => id === step.question)) {
-			issues.push({ field: `method[${i}].question`, message: `no question is called ${step.question}` });
-		}
-		if (!taken.has(step.reading)) {
+		const asked = questions.find(({ id }) => id === step.question);
+		if (asked) issues.push(...checkAnswer(asked, step, `method[${i}]`));
+		else issues.push({ field: `method[${i}].question`, message: `no question is called ${step.question}` });
+		if (step.reading !== undefined && !taken.has(step.reading)) {
 			issues.push({ field: `method[${i}].reading`, message: `nothing was read as ${step.reading} before` });
 		}
 	});
@@ -157,8 +158,10 @@ function checkMethod({ method, questions }: Exercise): ExerciseIssue[] {
 function checkTrial({ trial, questions, receiver }: Exercise): ExerciseIssue[] {
 	if (!trial) return [];
 	const issues: ExerciseIssue[] = [];
-	if (!questions.some(({ id }) => id === trial.question)) {
-		issues.push({ field: 'trial.question', message: `no question is called ${trial.question}` });
+	const asked = questions.find(({ id }) => id === trial.question);
+	if (asked?.type !== 'number') {
+		const message = asked ? 'only a number is asked of visitors' : `no question is called ${trial.question}`;
+		issues.push({ field: 'trial.question', message });
 	}
 	const { rbwHz } = typeof receiver === 'string' ? profileNamed(receiver) : receiver;
 	trial.resolutionsHz.forEach((hz, i) => {
@@ -169,49 +172,14 @@ function checkTrial({ trial, questions, receiver }: Exercise): ExerciseIssue[] {
 	return issues;
 }
 
-function checkQuestions({ questions, receiver }: Exercise): ExerciseIssue[] {
-	const profile = typeof receiver === 'string' ? profileNamed(receiver) : receiver;
+function checkQuestions(exercise: Exercise): ExerciseIssue[] {
+	const { questions } = exercise;
 	return questions.flatMap((question, i) => {
 		const field = `questions[${i}]`;
-		const issues: ExerciseIssue[] = [];
+		const issues = checkQuestion(question, field, exercise);
 		if (questions.findIndex(({ id }) => id === question.id) !== i) {
 			issues.push({ field: `${field}.id`, message: `${question.id} is asked twice` });
 		}
-		const { tolerance } = question;
-		if (
-			isAbsoluteLevel(question.unit) &&
-			'absolute' in tolerance &&
-			tolerance.absolute < profile.levelErrorDb
-		) {
-			const message = `must be at least the receiver’s level error, ${profile.levelErrorDb} dB, plus three spreads; given ${tolerance.absolute}`;
-			issues.push({ field: `${field}.tolerance.absolute`, message });
-		}
-		if (isAbsoluteLevel(question.unit) && 'relative' in tolerance) {
-			issues.push({ field: `${field}.tolerance`, message: 'a level’s tolerance is absolute, in dB' });
-		}
-		if (question.noiseTakenOff && !isAbsoluteLevel(question.unit) && question.unit !== 'dBc/Hz') {
-			const message = `noise is taken off levels and densities, in dBm, dBm/Hz or dBc/Hz; this is in ${question.unit}`;
-			issues.push({ field: `${field}.noiseTakenOff`, message });
-		}
-		const seen = new Set<string>();
-		question.mistakes.forEach((mistake, j) => {
-			const place = `${field}.mistakes[${j}]`;
-			// Parameters given as expressions are checked when a draw fills them in; 1 stands for any of them here.
-			issues.push(...issuesOf(() => void bindMistake(plain(mistake, place) as typeof mistake, place)));
-			const key = JSON.stringify(mistake);
-			if (seen.has(key)) issues.push({ field: place, message: 'is watched twice' });
-			seen.add(key);
-		});
 		return issues;
 	});
 }
-
-/** A template with 1 in the place of every expression. */
-const plain = (template: unknown, field: string): unknown =>
-	fillTemplate(
-		JSON.parse(JSON.stringify(template), (_, value) =>
-			typeof value === 'string' && value.startsWith('=') ? 1 : (value as unknown)
-		),
-		{},
-		field
-	);

@@ -1,15 +1,22 @@
 /** An exercise with one seed's numbers in it. It holds the scene and the truths: it never leaves the server. */
-import type { AnswerUnit, ChainPart, Exercise, WatchedMistake } from '$lib/schemas/exercise';
+import type { AnswerUnit, WatchedMistake } from '$lib/schemas/questions/number';
+import type { ChainPart, Exercise } from '$lib/schemas/exercise';
 import type { Part } from '$lib/schemas/part';
 import type { Quantity } from '$lib/schemas/quantity';
+import type { Condition } from '$lib/schemas/questions/condition';
+import type { Foreseen } from '$lib/schemas/questions/words';
+import type { Filled } from '$lib/schemas/template';
 import type { BenchRequest, MaskLimits } from '$lib/schemas/reading';
 import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { LossTable, Scene } from '$lib/schemas/scene';
 import type { Settings } from '$lib/schemas/settings';
 import type { Seed } from '../receiver/random';
+import type { GivenAnswer } from './attempt-record';
 import type { Scope } from './expression';
 
-export interface DrawnQuestion {
+/** Asks for a number with its unit. */
+export interface NumberQuestion {
+	type: 'number';
 	id: string;
 	text: string;
 	quantity: Quantity;
@@ -30,13 +37,54 @@ export interface DrawnQuestion {
 	mistakes: WatchedMistake[];
 }
 
+/** An option as one attempt offers it. */
+export interface DrawnOption {
+	/** What the page knows it by: its place among those offered, as a letter. */
+	key: string;
+	id: string;
+	text: string;
+	right: boolean;
+	/** What choosing it, or leaving it out, says where that is wrong. */
+	chosen?: Foreseen;
+	leftOut?: Foreseen;
+}
+export interface ChoiceQuestion {
+	type: 'choice';
+	id: string;
+	text: string;
+	pick: 'one' | 'several';
+	/** In the order offered. */
+	options: DrawnOption[];
+	looked: { conditions: DrawnCondition[]; missing: string }[];
+}
+
+/** A condition with its numbers in place, and its name among the others. */
+export type DrawnCondition = Filled<Condition> & { id: string };
+export interface SetUpQuestion {
+	type: 'set-up';
+	id: string;
+	text: string;
+	conditions: DrawnCondition[];
+	mistakes: { id: string; settings: Settings; breaks: string[] }[];
+}
+
+export type DrawnQuestion = NumberQuestion | ChoiceQuestion | SetUpQuestion;
+export type DrawnAs<T extends DrawnQuestion['type']> = Extract<DrawnQuestion, { type: T }>;
+
+/** What an answer that is no number may follow from: the values read so far, and the set-up in force. */
+export interface AnsweredFrom {
+	values: Scope;
+	/** The last entry of the log. */
+	entry: number;
+}
 /** A step of the taught method with its numbers in place. */
 export type FilledStep =
 	| { do: 'set'; settings: Settings; why?: string }
 	| { do: 'sweep'; sweeps: number; why?: string }
 	/** Named is the part of the reading, where one is given, else its value. */
 	| { do: 'read'; reading: BenchRequest; part?: Part; trace: number; as: string; why?: string }
-	| { do: 'answer'; question: string; value: (scope: Scope) => number; reading: string; why?: string };
+	| { do: 'answer'; question: string; value: (scope: Scope) => number; reading: string; why?: string }
+	| { do: 'answer'; question: string; gives: (from: AnsweredFrom) => GivenAnswer; why?: string };
 
 /** What the learner is told, placeholders filled in. */
 export interface Brief {
@@ -70,3 +118,7 @@ export function questionOf(drawn: DrawnExercise, id: string): DrawnQuestion {
 	if (!question) throw new Error(`${drawn.exercise.slug} asks no question ${id}`);
 	return question;
 }
+
+/** Those of its questions that ask for a number. */
+export const numberQuestions = ({ questions }: DrawnExercise): NumberQuestion[] =>
+	questions.filter((question) => question.type === 'number');

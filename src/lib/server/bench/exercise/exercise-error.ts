@@ -20,3 +20,15 @@ export class ExerciseError extends BenchError {
 		this.issues = issues;
 	}
 }
+
+/** Runs `check`, turning a refusal into issues. */
+export function refusalsOf(check: () => void): ExerciseIssue[] {
+	try {
+		check();
+		return [];
+	} catch (error) {
+		if (error instanceof ExerciseError) return [...error.issues];
+		if (error instanceof BenchError) return [{ field: error.field, message: error.message }];
+		throw error;
+	}
+}

@@ -28,7 +28,12 @@ const OPERATORS: ReadonlyMap<string, (a: number, b: number) => number> = new Map
 	['divide', (a, b) => a / b],
 	['pow', (a, b) => a ** b],
 	['unaryMinus', (a) => -a],
-	['unaryPlus', (a) => a]
+	['unaryPlus', (a) => a],
+	// Comparisons give 1 for yes and 0 for no.
+	['larger', (a, b) => Number(a > b)],
+	['largerEq', (a, b) => Number(a >= b)],
+	['smaller', (a, b) => Number(a < b)],
+	['smallerEq', (a, b) => Number(a <= b)]
 ] as [string, (a: number, b: number) => number][]);
 
 const MAX_LENGTH = 200;

@@ -1,36 +1,21 @@
-import { lossDbAt } from './loss-db-at';
-import { part as partSchema, partOf, unitOfPart, type Part } from '$lib/schemas/part';
+import { part as partSchema } from '$lib/schemas/part';
 import { benchRequest, maskLimits } from '$lib/schemas/reading';
 import { scene as sceneSchema, lossTable, type Scene } from '$lib/schemas/scene';
 import { settings as settingsSchema, type Settings } from '$lib/schemas/settings';
-import type { Exercise, ExerciseQuestion, MethodStep, WatchedMistake } from '$lib/schemas/exercise';
-import { quantity as quantitySchema, type Quantity } from '$lib/schemas/quantity';
-import type { Unit } from '$lib/units/unit';
-import type { z } from 'zod';
+import type { Exercise, MethodStep } from '$lib/schemas/exercise';
+import type { When } from '$lib/schemas/questions/words';
+import { fillAnswer, fillQuestion } from '../grading/questions/registry';
 import { profileNamed } from '../receiver/profiles';
 import type { Seed } from '../receiver/random';
 import { drawReceiverError } from '../receiver/receiver-error';
-import { mistakeId } from '../grading/watched-mistakes';
-import { truth } from '../truth/truth';
 import type { Brief, DrawnExercise, DrawnQuestion, FilledStep } from './drawn-exercise';
 import { ExerciseError } from './exercise-error';
-import { parseExpression, type Scope } from './expression';
+import type { Scope } from './expression';
 import { fillTemplate } from './fill-template';
 import { fillText } from './fill-text';
+import { filled } from './filled';
 import { DISPLAYED_PER_HZ } from './displayed-per-hz';
-import { quantityFrequencyHz } from './quantity-frequency';
-import { issuesOf } from './zod-issues';
-
-/** A template filled in and checked against the schema it stands for. @throws ExerciseError by field */
-function filled<T>(schema: z.ZodType<T>, template: unknown, scope: Scope, field: string): T {
-	const parsed = schema.safeParse(fillTemplate(template, scope, field));
-	if (!parsed.success) throw new ExerciseError(issuesOf(parsed.error, field));
-	return parsed.data;
-}
-
-type When = Record<string, string | number | (string | number)[]>;
-const holds = (when: When | undefined, scope: Scope): boolean =>
-	Object.entries(when ?? {}).every(([name, wanted]) => [wanted].flat().includes(scope[name]));
+import { holds } from './truthful';
 
 /** The scene of one draw: emitters whose `when` holds, numbers in place. */
 function fillScene(exercise: Exercise, scope: Scope): Scene {
@@ -67,58 +52,12 @@ function fillBrief(exercise: Exercise, scope: Scope): Brief {
 	};
 }
 
-/** What a question asks of the scene: the value of its quantity or a part of it, and where that stands. */
-function asked(
-	scene: Scene,
-	quantity: Quantity,
-	question: ExerciseQuestion,
+function fillStep(
+	step: MethodStep,
+	questions: readonly DrawnQuestion[],
 	scope: Scope,
 	field: string
-): { part?: Part; value: number; unit: Unit; placeHz: number } {
-	const whole = truth(scene, quantity);
-	const [low, high] = [partOf(whole.parts, 'lowerHz'), partOf(whole.parts, 'upperHz')];
-	const middleHz = low !== undefined && high !== undefined ? (low + high) / 2 : undefined;
-	const placeHz = partOf(whole.parts, 'frequencyHz') ?? middleHz ?? 0;
-	if (question.part === undefined) return { value: whole.value, unit: whole.unit, placeHz };
-	const part = filled(partSchema, question.part, scope, `${field}.part`);
-	const value = partOf(whole.parts, part);
-	if (value === undefined) {
-		throw new ExerciseError([{ field: `${field}.part`, message: `${quantity.kind} has no such part here` }]);
-	}
-	return { part, value, unit: unitOfPart(part), placeHz };
-}
-
-function fillQuestion(question: ExerciseQuestion, scene: Scene, scope: Scope, field: string): DrawnQuestion {
-	const quantity = filled(quantitySchema, question.quantity, scope, `${field}.quantity`);
-	const { part, value, unit, placeHz } = asked(scene, quantity, question, scope, field);
-	if (unit !== question.unit) {
-		const what = part === undefined ? quantity.kind : `this part of ${quantity.kind}`;
-		throw new ExerciseError([
-			{ field: `${field}.unit`, message: `${what} is in ${unit}, not ${question.unit}` }
-		]);
-	}
-	const { tolerance } = question;
-	const frequencyHz = quantityFrequencyHz(quantity) || placeHz;
-	return {
-		id: question.id,
-		text: fillText(question.text, scope, `${field}.text`),
-		quantity,
-		...(part !== undefined && { part }),
-		noiseTakenOff: question.noiseTakenOff,
-		unit,
-		digits: question.digits,
-		truth: value,
-		tolerance: 'absolute' in tolerance ? tolerance.absolute : Math.abs(value) * tolerance.relative,
-		frequencyHz,
-		leadDb: scene.path ? lossDbAt(scene.path, frequencyHz) : 0,
-		mistakes: question.mistakes.map((mistake, i) => ({
-			...(fillTemplate(mistake, scope, `${field}.mistakes[${i}]`) as WatchedMistake),
-			id: mistakeId(mistake)
-		}))
-	};
-}
-
-function fillStep(step: MethodStep, scope: Scope, field: string): FilledStep {
+): FilledStep {
 	switch (step.do) {
 		case 'set':
 			return {
@@ -133,8 +72,13 @@ function fillStep(step: MethodStep, scope: Scope, field: string): FilledStep {
 			return { ...step, reading: filled(benchRequest, step.reading, scope, `${field}.reading`), part };
 		}
 		case 'answer': {
-			const value = parseExpression(step.value, `${field}.value`);
-			return { ...step, value: (readings) => value.evaluate({ ...scope, ...readings }) };
+			const asked = questions.find(({ id }) => id === step.question);
+			if (!asked) {
+				const message = `no question is called ${step.question}`;
+				throw new ExerciseError([{ field: `${field}.question`, message }]);
+			}
+			const { question, why } = step;
+			return { do: 'answer', question, why, ...fillAnswer(asked, step, scope, field) };
 		}
 	}
 }
@@ -146,6 +90,8 @@ function fillStep(step: MethodStep, scope: Scope, field: string): FilledStep {
 export function fillExercise(exercise: Exercise, scope: Scope, seed: Seed, redraws: number): DrawnExercise {
 	const scene = fillScene(exercise, scope);
 	const profile = typeof exercise.receiver === 'string' ? profileNamed(exercise.receiver) : exercise.receiver;
+	const draw = { scene, scope, seed, profile };
+	const questions = exercise.questions.map((q, i) => fillQuestion(q, draw, `questions[${i}]`));
 	const onScreen = { ...scope, [DISPLAYED_PER_HZ]: 1 + drawReceiverError(profile, seed).frequency };
 	return {
 		exercise,
@@ -155,7 +101,7 @@ export function fillExercise(exercise: Exercise, scope: Scope, seed: Seed, redra
 		parameters: scope,
 		scene,
 		brief: fillBrief(exercise, scope),
-		questions: exercise.questions.map((q, i) => fillQuestion(q, scene, scope, `questions[${i}]`)),
-		method: exercise.method.map((step, i) => fillStep(step, onScreen, `method[${i}]`))
+		questions,
+		method: exercise.method.map((step, i) => fillStep(step, questions, onScreen, `method[${i}]`))
 	};
 }

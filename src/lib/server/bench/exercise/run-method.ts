@@ -5,7 +5,7 @@ import type { AttemptRecord, TakenReading } from './attempt-record';
 import { BenchSession, type SweepWith } from './bench-session';
 import type { DrawnExercise, FilledStep } from './drawn-exercise';
 
-/** A step as it was done: the reading taken, and the number it named or answered. */
+/** A step as it was done: the reading taken, and the number it named or answered with. */
 export interface PlayedStep {
 	step: FilledStep;
 	taken?: TakenReading;
@@ -14,7 +14,7 @@ export interface PlayedStep {
 export interface PlayedMethod {
 	record: AttemptRecord;
 	steps: PlayedStep[];
-	/** By question: the reading handed in with the answer. */
+	/** By question: the reading handed in with a number. */
 	evidence: Record<string, TakenReading>;
 }
 
@@ -49,6 +49,10 @@ export function runMethod(
 				return { step, taken, value: values[step.as] };
 			}
 			case 'answer': {
+				if ('gives' in step) {
+					record.answers[step.question] = step.gives({ values, entry: bench.log.length - 1 });
+					return { step };
+				}
 				const value = step.value(values);
 				const taken = byName.get(step.reading);
 				record.answers[step.question] = { value, readingId: taken?.id };

@@ -1,7 +1,7 @@
 /** What a question asks for: the value of its quantity, or one part of it. */
 import { partOf, type Part } from '$lib/schemas/part';
 import type { BenchReading } from '../exercise/attempt-record';
-import type { DrawnQuestion } from '../exercise/drawn-exercise';
+import type { NumberQuestion } from '../exercise/drawn-exercise';
 
 const LEVELS = ['dBm', 'dBm/Hz'];
 /** Whether a unit is an absolute level, which lead and correction shift. */
@@ -10,7 +10,7 @@ export const isAbsoluteLevel = (unit: string): boolean => LEVELS.includes(unit);
 /** Parts that say where something stands, and not how far apart or how wide. */
 const PLACES: Part[] = ['carrierHz', 'lowerHz', 'upperHz'];
 
-type Asked = Pick<DrawnQuestion, 'quantity' | 'part' | 'unit'>;
+type Asked = Pick<NumberQuestion, 'quantity' | 'part' | 'unit'>;
 
 /** Whether a frequency is asked for: where a signal stands. */
 export const asksPlace = ({ quantity, part }: Asked): boolean =>

@@ -2,7 +2,7 @@ import type { BenchRequest } from '$lib/schemas/reading';
 import { formatFrequency, formatTime } from '$lib/units/format-quantity';
 import { shortFigure } from '../exercise/figure';
 import { quantityFrequencyHz } from '../exercise/quantity-frequency';
-import type { DrawnQuestion } from '../exercise/drawn-exercise';
+import type { NumberQuestion } from '../exercise/drawn-exercise';
 import { asksPlace } from './asked';
 import { widthHzOf } from './read-width';
 
@@ -28,7 +28,7 @@ export const quantityName = (kind: string): string =>
 	NAMES[kind as BenchRequest['kind']] ?? kind.replaceAll('-', ' ');
 
 /** What a question asks for, in words: "channel power", "frequency", "distance". */
-export function askedName(question: DrawnQuestion): string {
+export function askedName(question: NumberQuestion): string {
 	const { quantity, part, unit } = question;
 	if (asksPlace(question)) return 'frequency';
 	if (part === undefined || typeof part !== 'string') return quantityName(quantity.kind);

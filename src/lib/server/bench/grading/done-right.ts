@@ -3,12 +3,14 @@ import type { DoneRightStep } from '$lib/schemas/finding';
 import { unitOfPart } from '$lib/schemas/part';
 import type { Unit } from '$lib/units/unit';
 import type { ResolvedSettings } from '$lib/schemas/settings';
+import type { AttemptRecord } from '../exercise/attempt-record';
 import type { SweepWith } from '../exercise/bench-session';
 import { questionOf, type DrawnExercise } from '../exercise/drawn-exercise';
 import { methodStates, type MethodState } from '../exercise/method-states';
 import { runMethod, type PlayedStep } from '../exercise/run-method';
 import { partsOf } from './asked';
 import { resolveSettings } from '../receiver/resolve-settings';
+import { answerWords } from './questions/registry';
 import { describeReading } from './describe-reading';
 import { describeSettings } from './describe-settings';
 import { readingMark } from './reading-mark';
@@ -16,7 +18,8 @@ import { shownDigits } from './spreads';
 
 const sentence = (text: string): string => text[0].toUpperCase() + text.slice(1);
 
-function described(drawn: DrawnExercise, { step, taken, value }: PlayedStep): DoneRightStep {
+function described(drawn: DrawnExercise, record: AttemptRecord, played: PlayedStep): DoneRightStep {
+	const { step, taken, value } = played;
 	const why = step.why === undefined ? {} : { why: step.why };
 	switch (step.do) {
 		case 'set':
@@ -34,9 +37,12 @@ function described(drawn: DrawnExercise, { step, taken, value }: PlayedStep): Do
 		}
 		case 'answer': {
 			const question = questionOf(drawn, step.question);
-			const { unit, text } = question;
-			const measured = { value: value as number, unit, digits: shownDigits(question) };
-			return { text: `Answer: ${text}`, value: measured, ...why };
+			const text = `Answer: ${question.text}`;
+			if (question.type !== 'number') {
+				return { text, answer: answerWords(question, record.answers[question.id]), ...why };
+			}
+			const measured = { value: value as number, unit: question.unit, digits: shownDigits(question) };
+			return { text, value: measured, ...why };
 		}
 	}
 }
@@ -49,8 +55,10 @@ function digitsOf(unit: Unit, spread: number): number {
 }
 
 /** The taught method on the learner's own seed, step by step, with what it reads there. */
-export const doneRight = (drawn: DrawnExercise, sweepWith?: SweepWith): DoneRightStep[] =>
-	runMethod(drawn, drawn.method, sweepWith).steps.map((played) => described(drawn, played));
+export function doneRight(drawn: DrawnExercise, sweepWith?: SweepWith): DoneRightStep[] {
+	const { steps, record } = runMethod(drawn, drawn.method, sweepWith);
+	return steps.map((played) => described(drawn, record, played));
+}
 
 /** The taught method as it is played: each step in words, with the receiver and the rows it leaves behind. */
 export interface PlayedExercise {
@@ -70,7 +78,7 @@ export function playDoneRight(drawn: DrawnExercise): PlayedExercise {
 		start: resolveSettings(drawn.brief.start, drawn.profile),
 		states,
 		steps: steps.map((played, i) => ({
-			...described(drawn, played),
+			...described(drawn, record, played),
 			do: played.step.do,
 			resolved: states[i].resolved,
 			rows: states[i].rows,

@@ -1,6 +1,6 @@
 import type { ResolvedSettings } from '$lib/schemas/settings';
-import type { AttemptRecord, GivenAnswer, TakenReading } from '../exercise/attempt-record';
-import type { DrawnExercise, DrawnQuestion } from '../exercise/drawn-exercise';
+import type { AttemptRecord, NumberAnswer, TakenReading } from '../exercise/attempt-record';
+import type { DrawnExercise, NumberQuestion } from '../exercise/drawn-exercise';
 import { quantityFrequencyHz } from '../exercise/quantity-frequency';
 import { resolveSettings } from '../receiver/resolve-settings';
 import { tableDb } from '../receiver/table-db';
@@ -29,8 +29,8 @@ export interface Source extends TakenReading {
 
 export interface Evidence {
 	drawn: DrawnExercise;
-	question: DrawnQuestion;
-	answer: GivenAnswer | undefined;
+	question: NumberQuestion;
+	answer: NumberAnswer | undefined;
 	attached: Source | undefined;
 	/** What the answer may rest on: the reading attached, else every reading taken. */
 	pool: Source[];
@@ -40,11 +40,12 @@ export interface Evidence {
 	setUps: SetUp[];
 }
 
-const correctionAt = (correctionDb: ResolvedSettings['correctionDb'], frequencyHz: number): number =>
+/** What a correction adds back at a frequency, dB. */
+export const correctionAt = (correctionDb: ResolvedSettings['correctionDb'], frequencyHz: number): number =>
 	typeof correctionDb === 'number' ? correctionDb : tableDb(correctionDb, frequencyHz);
 
 /** Whether the number a reading gives to a question is a level, which the lead shifts. */
-function isLevelGiven({ reading }: TakenReading, { unit, part }: DrawnQuestion): boolean {
+function isLevelGiven({ reading }: TakenReading, { unit, part }: NumberQuestion): boolean {
 	if (!unit.startsWith('dB')) return false;
 	return isAbsoluteLevel(part === undefined ? reading.unit : unit);
 }
@@ -52,7 +53,7 @@ function isLevelGiven({ reading }: TakenReading, { unit, part }: DrawnQuestion):
 function sourceOf(
 	taken: TakenReading,
 	drawn: DrawnExercise,
-	question: DrawnQuestion,
+	question: NumberQuestion,
 	record: AttemptRecord
 ): Source[] {
 	const counted = taken.request.kind === 'count';
@@ -83,8 +84,8 @@ function sourceOf(
 }
 
 /** What there is to judge one question by, from what the log and the readings say. */
-export function evidenceFor(drawn: DrawnExercise, question: DrawnQuestion, record: AttemptRecord): Evidence {
-	const answer = record.answers[question.id];
+export function evidenceFor(drawn: DrawnExercise, question: NumberQuestion, record: AttemptRecord): Evidence {
+	const answer = record.answers[question.id] as NumberAnswer | undefined;
 	const sources = record.readings.flatMap((taken) => sourceOf(taken, drawn, question, record));
 	const attached = sources.find((source) => source.id === answer?.readingId);
 	const swept = record.log.filter((entry) => entry.sweeps > 0).reverse();

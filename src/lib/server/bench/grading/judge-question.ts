@@ -1,6 +1,6 @@
-import type { Verdict } from '$lib/schemas/finding';
+import type { Verdict } from '$lib/schemas/questions/finding';
 import type { AttemptRecord } from '../exercise/attempt-record';
-import type { DrawnExercise, DrawnQuestion } from '../exercise/drawn-exercise';
+import type { DrawnExercise, NumberQuestion } from '../exercise/drawn-exercise';
 import { evidenceFor, type Evidence, type Source } from './evidence';
 import { fromSource, type Candidate } from './explanations';
 import { matchMistakes } from './match-mistakes';
@@ -26,13 +26,13 @@ export interface Judgement {
 	remarks: Remark[];
 }
 
-const gives = (source: Source, value: number, question: DrawnQuestion): boolean =>
+const gives = (source: Source, value: number, question: NumberQuestion): boolean =>
 	[source.planeValue, source.cleanValue].some((given) => Math.abs(given - value) <= copyingReach(question));
 
 /** Judges one question. Pure: the same record always gets the same judgement. */
 export function judgeQuestion(
 	drawn: DrawnExercise,
-	question: DrawnQuestion,
+	question: NumberQuestion,
 	record: AttemptRecord
 ): Judgement {
 	const evidence = evidenceFor(drawn, question, record);

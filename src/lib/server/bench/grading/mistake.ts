@@ -4,7 +4,7 @@
  */
 import type { z } from 'zod';
 import type { ResolvedSettings } from '$lib/schemas/settings';
-import type { DrawnExercise, DrawnQuestion, FilledStep } from '../exercise/drawn-exercise';
+import type { DrawnExercise, NumberQuestion, FilledStep } from '../exercise/drawn-exercise';
 import { ExerciseError } from '../exercise/exercise-error';
 import { issuesOf } from '../exercise/zod-issues';
 import type { Source } from './evidence';
@@ -12,7 +12,7 @@ import type { Family } from './family';
 
 export interface Context {
 	drawn: DrawnExercise;
-	question: DrawnQuestion;
+	question: NumberQuestion;
 }
 
 /** How the receiver stood for a reading: the trace it was taken from and the rows swept. */

@@ -1,4 +1,4 @@
-import type { DrawnExercise } from '../exercise/drawn-exercise';
+import { numberQuestions, type DrawnExercise } from '../exercise/drawn-exercise';
 import type { Prediction } from './mistake';
 import { predictMistake } from './predict-mistake';
 import { watchedMistakes } from './watched-mistakes';
@@ -13,7 +13,7 @@ export const spreadsBetween = (a: Prediction, b: Prediction): number =>
 
 /** Whether the mistakes watched on each question would report numbers that can be told apart. */
 export const mistakesApart = (drawn: DrawnExercise): boolean =>
-	drawn.questions.every((question) => {
+	numberQuestions(drawn).every((question) => {
 		const outcomes = watchedMistakes(question)
 			.map((watched) => predictMistake(watched, { drawn, question }))
 			.filter((outcome) => outcome !== null);

@@ -6,17 +6,22 @@ import { connectionGain } from '../receiver/front-end/connection';
 import { connectorPowerMw, isOverload } from '../receiver/front-end/input-level';
 import type { Context } from './mistake';
 
+/** A scene and the receiver before it. */
+interface Bench {
+	drawn: Pick<Context['drawn'], 'scene' | 'profile'>;
+}
+
 /** From connector to mixer, dB. */
-const mixerGainDb = ({ attenuationDb, preamp }: ResolvedSettings, profile: ReceiverProfile): number =>
+export const mixerGainDb = ({ attenuationDb, preamp }: ResolvedSettings, profile: ReceiverProfile): number =>
 	(preamp && profile.preamp ? profile.preamp.gainDb : 0) - attenuationDb;
 
 /** Total power of the scene at the mixer, dBm. */
-export const mixerLevelDbm = ({ drawn }: Context, resolved: ResolvedSettings): number =>
+export const mixerLevelDbm = ({ drawn }: Bench, resolved: ResolvedSettings): number =>
 	milliwattsToDbm(connectorPowerMw(drawn.scene, connectionGain(drawn.scene, resolved).at)) +
 	mixerGainDb(resolved, drawn.profile);
 
 /** Whether the receiver warns of overload. */
-export const overloads = (context: Context, resolved: ResolvedSettings): boolean =>
+export const overloads = (context: Bench, resolved: ResolvedSettings): boolean =>
 	resolved.input.connected && isOverload(mixerLevelDbm(context, resolved), context.drawn.profile);
 
 /**

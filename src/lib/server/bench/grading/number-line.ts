@@ -1,4 +1,4 @@
-import type { FindingNumberLine } from '$lib/schemas/finding';
+import type { FindingNumberLine } from '$lib/schemas/questions/finding';
 import type { Judgement } from './judge-question';
 import type { Context, Prediction, SetUp } from './mistake';
 import { predictMistake } from './predict-mistake';

@@ -1,4 +1,4 @@
-import type { FindingLadder, FindingMistake, QuestionFinding } from '$lib/schemas/finding';
+import type { FindingLadder, FindingMistake, NumberFinding } from '$lib/schemas/questions/finding';
 import type { SettingsLogEntry } from '../exercise/attempt-record';
 import { accountFor, type Account } from './account-for';
 import { isAbsoluteLevel } from './asked';
@@ -7,10 +7,11 @@ import type { Judgement } from './judge-question';
 import { numberLine } from './number-line';
 import { questionPlot } from './question-plot';
 import { questionTitle } from './question-title';
+import { said } from './said';
 import { shownDigits } from './spreads';
 
 export interface ExplainedQuestion {
-	finding: QuestionFinding;
+	finding: NumberFinding;
 	accounts: Account[];
 }
 
@@ -42,10 +43,12 @@ export function explainQuestion(judgement: Judgement, log: readonly SettingsLogE
 	return {
 		accounts,
 		finding: {
+			type: 'number',
 			id: question.id,
 			text: question.text,
 			verdict,
 			title: questionTitle(judgement),
+			answer: answer ? said(answer.value, question) : null,
 			yours: answer ? measured(answer.value) : null,
 			true: measured(question.truth),
 			difference,

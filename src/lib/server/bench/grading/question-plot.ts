@@ -1,8 +1,8 @@
-import type { FindingPlot } from '$lib/schemas/finding';
+import type { FindingPlot } from '$lib/schemas/questions/finding';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import { formatFrequency } from '$lib/units/format-quantity';
 import type { SettingsLogEntry } from '../exercise/attempt-record';
-import type { DrawnQuestion } from '../exercise/drawn-exercise';
+import type { NumberQuestion } from '../exercise/drawn-exercise';
 import { resolveSettings } from '../receiver/resolve-settings';
 import { askedName } from './describe-reading';
 import type { Judgement } from './judge-question';
@@ -27,7 +27,7 @@ export function questionPlot({ evidence, source }: Judgement, log: readonly Sett
 }
 
 /** The band asked for, at its true level; a bandwidth that is asked for is a band itself. */
-function bandOf(question: DrawnQuestion): FindingPlot['band'] {
+function bandOf(question: NumberQuestion): FindingPlot['band'] {
 	const { quantity, frequencyHz, truth: value, unit } = question;
 	const isWidth = quantity.kind === 'occupied-bandwidth' || quantity.kind === 'x-db-bandwidth';
 	const width = isWidth && question.part === undefined ? value : widthHzOf(quantity);
@@ -42,7 +42,7 @@ function bandOf(question: DrawnQuestion): FindingPlot['band'] {
 }
 
 /** The frequency asked for, where it is one on the axis: not a width, a deviation or a modulating frequency. */
-function atOf(question: DrawnQuestion): FindingPlot['at'] {
+function atOf(question: NumberQuestion): FindingPlot['at'] {
 	const { quantity, part, truth: frequencyHz, unit } = question;
 	const onAxis =
 		['count', 'peak', 'next-peak', 'marker'].includes(quantity.kind) ||
@@ -50,7 +50,8 @@ function atOf(question: DrawnQuestion): FindingPlot['at'] {
 	return unit === 'Hz' && onAxis ? { frequencyHz, text: `true ${askedName(question)}` } : null;
 }
 
-function drawnTrace(rows: { from: number; to: number }, resolved: ResolvedSettings, trace: number) {
+/** Which rows make a trace of a set-up. */
+export function drawnTrace(rows: { from: number; to: number }, resolved: ResolvedSettings, trace: number) {
 	const { mode, count } = resolved.traces[trace - 1];
 	return { fromRow: rows.from, toRow: rows.to, trace, mode, count, scale: resolved.scale };
 }

@@ -1,6 +1,6 @@
 import { dbToPowerRatio } from '$lib/units/decibel';
 import { truth } from '../truth/truth';
-import type { DrawnQuestion } from '../exercise/drawn-exercise';
+import type { NumberQuestion } from '../exercise/drawn-exercise';
 import type { Context } from './mistake';
 
 /** Power in a channel of the scene, dBm at the reference plane. */
@@ -18,5 +18,5 @@ export function flatWidthHz(context: Context, widthHz: number): number {
 }
 
 /** Width the question asks over; for one that names none, what its mistakes are told. */
-export const askedWidthHz = (question: DrawnQuestion): number | undefined =>
+export const askedWidthHz = (question: NumberQuestion): number | undefined =>
 	(question.quantity as { widthHz?: number }).widthHz;

@@ -1,4 +1,4 @@
-import type { FindingPlot } from '$lib/schemas/finding';
+import type { FindingPlot } from '$lib/schemas/questions/finding';
 import type { Scene } from '$lib/schemas/scene';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import { milliwattsToDbm } from '$lib/units/decibel';

@@ -2,7 +2,7 @@
 import type { Part } from '$lib/schemas/part';
 import type { BenchRequest } from '$lib/schemas/reading';
 import type { Settings } from '$lib/schemas/settings';
-import type { DrawnQuestion, FilledStep } from '../exercise/drawn-exercise';
+import type { NumberQuestion, FilledStep } from '../exercise/drawn-exercise';
 import type { Scope } from '../exercise/expression';
 import { patchSettings } from '../exercise/patch-settings';
 
@@ -22,10 +22,10 @@ export const heldLonger = (
 		step.do === 'sweep' ? { ...step, sweeps: 2 * step.sweeps } : step
 	);
 
-type AnswerStep = Extract<FilledStep, { do: 'answer' }>;
+type AnswerStep = Extract<FilledStep, { do: 'answer'; reading: string }>;
 type ReadStep = Extract<FilledStep, { do: 'read' }>;
 const isAnswer = (step: FilledStep, questionId: string): step is AnswerStep =>
-	step.do === 'answer' && step.question === questionId;
+	step.do === 'answer' && step.question === questionId && 'reading' in step;
 
 /** The step that takes the reading a question is answered from. */
 export function readStepOf(steps: readonly FilledStep[], questionId: string): ReadStep {
@@ -97,7 +97,7 @@ export const withSweeps = (steps: readonly FilledStep[], count: number): FilledS
 /** The method with the reading handed in for a question answered as it stands, lead counted, no other sum done. */
 export function withRawReading(
 	steps: readonly FilledStep[],
-	{ id, leadDb }: Pick<DrawnQuestion, 'id' | 'leadDb'>
+	{ id, leadDb }: Pick<NumberQuestion, 'id' | 'leadDb'>
 ): FilledStep[] {
 	const { as } = readStepOf(steps, id);
 	const byHandDb = correctsOnBench(steps) ? 0 : leadDb;

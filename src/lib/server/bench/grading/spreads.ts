@@ -1,8 +1,8 @@
 /** How exact things are in a question's own unit: what theory leaves open, what copying a number off a reading rounds away. */
 import type { SetUp } from './mistake';
-import type { DrawnQuestion } from '../exercise/drawn-exercise';
+import type { NumberQuestion } from '../exercise/drawn-exercise';
 
-type Asked = Pick<DrawnQuestion, 'unit' | 'digits' | 'tolerance' | 'truth'>;
+type Asked = Pick<NumberQuestion, 'unit' | 'digits' | 'tolerance' | 'truth'>;
 
 const inDecibels = ({ unit }: Asked): boolean => unit.startsWith('dB');
 /** Half of the last digit asked for. */
@@ -22,7 +22,7 @@ export const modelSpread = (question: Asked): number =>
  * end of a distance does. 0 for anything but a frequency, and for a count.
  */
 export function pointsSpread(
-	{ quantity, unit }: Pick<DrawnQuestion, 'quantity' | 'unit'>,
+	{ quantity, unit }: Pick<NumberQuestion, 'quantity' | 'unit'>,
 	{ resolved }: SetUp
 ): number {
 	if (unit !== 'Hz' || quantity.kind === 'count') return 0;

@@ -1,6 +1,6 @@
 /** Whether a reading can carry an answer: of what is asked, where it is asked, done finely enough for the tolerance. */
 import type { BenchRequest } from '$lib/schemas/reading';
-import type { DrawnQuestion } from '../exercise/drawn-exercise';
+import type { NumberQuestion } from '../exercise/drawn-exercise';
 import { quantityFrequencyHz } from '../exercise/quantity-frequency';
 import { asksPlace } from './asked';
 import type { Source } from './evidence';
@@ -8,7 +8,7 @@ import { familyOf } from './family';
 import { takenAtHz, trueHz } from './place';
 import { sameWidth, widthHzOf } from './read-width';
 
-type Check = (source: Source, question: DrawnQuestion) => boolean;
+type Check = (source: Source, question: NumberQuestion) => boolean;
 type Fields = Record<string, number | undefined>;
 
 /** Distance between two points of the trace. */
@@ -132,7 +132,7 @@ const CHECKS: Partial<Record<BenchRequest['kind'] | 'point' | 'band' | 'density'
 const isWidth = (family: string): boolean => family === 'occupied-bandwidth' || family === 'x-db-bandwidth';
 
 /** Whether a reading is of what the question asks: the same quantity, at the same place, over the same width, as finely as asked. */
-export function supports(source: Source, question: DrawnQuestion): boolean {
+export function supports(source: Source, question: NumberQuestion): boolean {
 	const asked = familyOf(question.quantity.kind);
 	if (asked !== 'count' && asked !== 'point' && source.family !== asked) return false;
 	// An edge of a bandwidth is a place that its own reading gives.

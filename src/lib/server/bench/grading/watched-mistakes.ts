@@ -1,5 +1,5 @@
-import type { WatchedMistake } from '$lib/schemas/exercise';
-import type { DrawnQuestion } from '../exercise/drawn-exercise';
+import type { WatchedMistake } from '$lib/schemas/questions/number';
+import type { NumberQuestion } from '../exercise/drawn-exercise';
 import { ExerciseError } from '../exercise/exercise-error';
 import type { Mistake } from './mistake';
 import { mistakeKinds } from './mistakes/registry';
@@ -29,7 +29,7 @@ export const mistakeId = ({ kind, id: _, ...parameters }: WatchedMistake): strin
 	[kind, ...Object.values(parameters).map((value) => String(value).replace(/^=/, ''))].join(' ');
 
 /** The mistakes watched on a question. */
-export const watchedMistakes = (question: DrawnQuestion): Watched[] =>
+export const watchedMistakes = (question: NumberQuestion): Watched[] =>
 	question.mistakes.map((watched, i) => ({
 		id: typeof watched.id === 'string' ? watched.id : mistakeId(watched),
 		kind: watched.kind,

@@ -1,6 +1,6 @@
 import { formatFrequency } from '$lib/units/format-quantity';
 import { figure, shortFigure } from '../exercise/figure';
-import type { DrawnQuestion } from '../exercise/drawn-exercise';
+import type { NumberQuestion } from '../exercise/drawn-exercise';
 
 /** A width to a hundredth of its leading unit: 11 030.7 Hz is “11.03 kHz”. */
 export const widthText = (hz: number): string => {
@@ -9,7 +9,7 @@ export const widthText = (hz: number): string => {
 };
 
 /** How a width that a question asks for is cut off: “99 % of the power”, “26 dB under the top”. */
-export function cutText({ quantity }: Pick<DrawnQuestion, 'quantity'>): string {
+export function cutText({ quantity }: Pick<NumberQuestion, 'quantity'>): string {
 	if (quantity.kind === 'occupied-bandwidth') return `${shortFigure(quantity.percent, 2)} % of the power`;
 	if (quantity.kind === 'x-db-bandwidth') return `${shortFigure(quantity.db, 2)} dB under the top`;
 	return 'the width asked';

@@ -1,6 +1,7 @@
 import { SPREADS_APART } from '../grading/mistakes-apart';
 import { brief } from './brief';
-import type { Outcome, SeedProof } from './prove-seed';
+import type { Outcome } from './outcome';
+import type { SeedProof } from './prove-seed';
 
 /** Shares that a proof asks for. */
 export const LIMITS = {
@@ -25,6 +26,8 @@ export interface ProofRow {
 	mistake: string | null;
 	/** Seeds on which it could be done. */
 	done: number;
+	/** Of them, those that gave a number: only they have errors. */
+	numbers: number;
 	passShare: number;
 	/** Named as the mistake made; for the taught method, found faultless. */
 	namedShare: number;
@@ -70,7 +73,8 @@ function rowOf(outcomes: readonly Outcome[], tolerance: number): ProofRow {
 	const row: ProofRow = {
 		question,
 		mistake,
-		done: errors.length,
+		done: outcomes.filter(({ problem }) => problem === undefined).length,
+		numbers: errors.length,
 		passShare: share(({ passes }) => passes),
 		namedShare: share(({ named }) => named),
 		meanError: mean(errors),

@@ -1,6 +1,7 @@
 import type { Exercise } from '$lib/schemas/exercise';
 import type { SweepWith } from '../exercise/bench-session';
 import { drawExercise } from '../exercise/draw-exercise';
+import { numberQuestions } from '../exercise/drawn-exercise';
 import { proofTable, type ProofTable } from './proof-table';
 import { proveSeed, type SeedProof } from './prove-seed';
 
@@ -26,8 +27,8 @@ export function proveSeeds(exercise: Exercise, options: ProofOptions): SeedProof
 
 /** What proofs of seeds from `fromSeed` upwards, in order, say together. */
 export function tableOf(exercise: Exercise, fromSeed: number, proofs: readonly SeedProof[]): ProofTable {
-	const { questions } = drawExercise(exercise, fromSeed);
-	const tolerances = new Map(questions.map(({ id, tolerance }) => [id, tolerance]));
+	const asked = numberQuestions(drawExercise(exercise, fromSeed));
+	const tolerances = new Map(asked.map(({ id, tolerance }) => [id, tolerance]));
 	return proofTable(exercise.slug, fromSeed, proofs, tolerances);
 }
 

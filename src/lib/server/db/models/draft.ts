@@ -1,12 +1,12 @@
 import { DataTypes, Model, type InferAttributes, type InferCreationAttributes } from 'sequelize';
-import type { TypedAnswer } from '$lib/schemas/attempt';
+import type { TypedAnswers } from '$lib/schemas/answer';
 import { sequelize } from '../connection';
 
 /** What is typed in an attempt's answer fields so far, right or wrong. */
 export class Draft extends Model<InferAttributes<Draft>, InferCreationAttributes<Draft>> {
 	declare attemptId: number;
 	/** By question id. */
-	declare answers: Record<string, TypedAnswer>;
+	declare answers: TypedAnswers;
 	declare savedAt: Date;
 }
 

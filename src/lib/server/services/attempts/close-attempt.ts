@@ -1,5 +1,5 @@
 import type { Transaction } from 'sequelize';
-import type { AnswersRequest } from '$lib/schemas/attempt';
+import type { TypedAnswer, TypedAnswers } from '$lib/schemas/answer';
 import type { Finding as FindingDocument } from '$lib/schemas/finding';
 import type { AttemptRecord, GivenAnswer } from '$lib/server/bench/exercise/attempt-record';
 import { Answer } from '$lib/server/db/models/answer';
@@ -15,9 +15,9 @@ import { gradeInWorker } from './grade-in-worker';
 import { setUpLog } from './set-up-log';
 import { exerciseOf } from './signal-source';
 
-/** What is handed in: as typed, and as numbers in the questions' own units. Both empty when the attempt is given up. */
+/** What is handed in: as typed, and as the grader takes it. Both empty when the attempt is given up. */
 export interface HandedIn {
-	typed: AnswersRequest['answers'];
+	typed: TypedAnswers;
 	given: Record<string, GivenAnswer>;
 }
 /** Checks what is handed in against a locked, open attempt. */
@@ -75,11 +75,10 @@ async function keep(
 	transaction: Transaction
 ): Promise<void> {
 	const { id: attemptId, engineVersion } = attempt;
-	const rows = Object.entries(given).map(([question, { value }]) => {
+	const rows = Object.entries(given).map(([question, answer]) => {
 		const found = finding.questions.find(({ id }) => id === question);
-		const { text, unit, readingId } = typed[question];
 		return {
-			...{ attemptId, question, text, unit, value, readingId: readingId ?? null },
+			...{ attemptId, question, ...columnsOf(typed[question], answer) },
 			verdict: found?.verdict ?? 'unanswered',
 			mistakes: found?.mistakes.map(({ kind }) => kind) ?? []
 		};
@@ -90,4 +89,13 @@ async function keep(
 		{ transaction }
 	);
 	await attempt.update({ closedAt: now, streamToken: null }, { transaction });
+}
+
+/** A number has columns of its own; any other answer is kept whole, as it was handed in. */
+function columnsOf(typed: TypedAnswer, given: GivenAnswer) {
+	if (typed.type !== 'number' || !('value' in given)) {
+		return { text: null, unit: null, value: null, readingId: null, typed };
+	}
+	const { text, unit, readingId } = typed;
+	return { text, unit, value: given.value, readingId: readingId ?? null, typed: null };
 }

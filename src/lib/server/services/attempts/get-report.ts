@@ -51,13 +51,14 @@ export async function getReport(actor: Actor, attemptId: number): Promise<Report
 		setUp: resolved,
 		picture: picture && { ...picture, marks },
 		readings,
-		answers: stored.finding.questions.map(({ id, text, yours, verdict }) => ({
-			id,
-			text,
-			yours,
-			verdict,
-			toleranceText: exercise.questions.find((question) => question.id === id)?.toleranceText ?? '',
-			readingId: restsOn(id)
+		answers: stored.finding.questions.map((found) => ({
+			id: found.id,
+			text: found.text,
+			yours: found.type === 'number' ? found.yours : null,
+			answer: found.answer,
+			verdict: found.verdict,
+			toleranceText: exercise.questions.find(({ id }) => id === found.id)?.toleranceText ?? '',
+			readingId: restsOn(found.id)
 		})),
 		passed: stored.passed
 	};

@@ -1,36 +1,29 @@
-import type { TypedAnswer } from '$lib/schemas/attempt';
-import type { ExerciseQuestion } from '$lib/schemas/exercise';
+import type { TypedAnswers } from '$lib/schemas/answer';
+import type { ExerciseQuestion } from '$lib/schemas/questions/question';
 import type { GivenAnswer } from '$lib/server/bench/exercise/attempt-record';
+import { readAnswer } from '$lib/server/bench/grading/questions/registry';
 import { DomainError, type Issue } from '$lib/server/errors';
-import { dimensionOf } from '$lib/units/dimension';
-import { parseQuantity } from '$lib/units/parse-quantity';
 
 /**
- * What was typed, as numbers in the questions' own units. A question left out or left blank stays unanswered.
+ * What was typed, chosen or pointed at, as the grader takes it. A question left out or left blank stays unanswered.
  * @param answers only to questions that are asked
- * @throws DomainError `invalid` naming each question whose answer isn't a quantity of the kind asked for
+ * @throws DomainError `invalid` naming each question, and the field within, whose answer is none of the kind asked for
  */
 export function parseAnswers(
-	questions: Pick<ExerciseQuestion, 'id' | 'unit'>[],
-	answers: Record<string, TypedAnswer>
+	questions: readonly ExerciseQuestion[],
+	answers: TypedAnswers
 ): Record<string, GivenAnswer> {
 	const issues: Issue[] = [];
 	const given: Record<string, GivenAnswer> = {};
-	for (const { id, unit } of questions) {
-		const typed = Object.hasOwn(answers, id) ? answers[id] : undefined;
-		if (!typed || typed.text.trim() === '') continue;
-		const dimension = dimensionOf(unit);
-		if (!dimension) throw new Error(`Question ${id} asks for ${unit}, which nobody can type`);
-		if (dimensionOf(typed.unit) !== dimension) {
-			issues.push({
-				field: `answers.${id}.unit`,
-				message: `${typed.unit} is no unit for an answer in ${unit}.`
-			});
-			continue;
-		}
-		const parsed = parseQuantity(typed.text, dimension, typed.unit);
-		if (!parsed.ok) issues.push({ field: `answers.${id}.text`, message: parsed.message });
-		else given[id] = { value: parsed.value, readingId: typed.readingId?.toString() };
+	for (const question of questions) {
+		const typed = Object.hasOwn(answers, question.id) ? answers[question.id] : undefined;
+		const read = typed ? readAnswer(question, typed) : null;
+		if (!read) continue;
+		if ('given' in read) given[question.id] = read.given;
+		else
+			issues.push(
+				...read.issues.map(({ field, message }) => ({ field: `answers.${question.id}.${field}`, message }))
+			);
 	}
 	if (issues.length > 0) throw new DomainError('invalid', 'Some of the answers can’t be read.', { issues });
 	return given;

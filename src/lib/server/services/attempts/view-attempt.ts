@@ -1,4 +1,5 @@
 import type { Transaction } from 'sequelize';
+import { typedAnswers } from '$lib/schemas/answer';
 import type { AttemptView, BenchView, DraftsView } from '$lib/schemas/attempt';
 import { fillText } from '$lib/server/bench/exercise/fill-text';
 import { ENGINE_VERSION } from '$lib/server/bench/receiver/random';
@@ -79,5 +80,6 @@ async function viewBench(
 
 async function viewDrafts(attemptId: number, transaction?: Transaction): Promise<DraftsView> {
 	const draft = await Draft.findByPk(attemptId, { transaction });
-	return { answers: draft?.answers ?? {}, savedAt: draft?.savedAt.toISOString() ?? null };
+	// Drafts kept before there were types of questions name none.
+	return { answers: typedAnswers.parse(draft?.answers ?? {}), savedAt: draft?.savedAt.toISOString() ?? null };
 }

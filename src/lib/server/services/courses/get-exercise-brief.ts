@@ -24,7 +24,7 @@ export async function getExerciseBrief(actor: Actor, slug: string, now: Date): P
 		exercise: presentProgress(exercise, await attemptsAtExercise(actor.id, exercise), now),
 		client: definition.client,
 		receiver: presentReceiver(typeof receiver === 'string' ? profileNamed(receiver) : receiver),
-		questions: definition.questions.length,
+		questions: definition.questions.map(({ type }) => type),
 		hints: definition.hints.length,
 		benchTimeS: definition.benchTimeS
 	};

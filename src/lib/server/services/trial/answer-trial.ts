@@ -1,5 +1,5 @@
 import type { TrialAnswerRequest, TrialFinding } from '$lib/schemas/trial';
-import { questionOf } from '$lib/server/bench/exercise/drawn-exercise';
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { judgeQuestion } from '$lib/server/bench/grading/judge-question';
 import { explainQuestion } from '$lib/server/bench/grading/question-finding';
 import { trialRecord } from '$lib/server/bench/trial/trial-record';
@@ -22,14 +22,15 @@ export async function answerTrial(
 	const bench = await openTrialBench(token, now);
 	const { drawn } = bench;
 	const id = drawn.exercise.trial!.question;
-	const given = parseAnswers(drawn.exercise.questions, { [id]: { text, unit } })[id];
-	if (!given) {
+	const given = parseAnswers(drawn.exercise.questions, { [id]: { type: 'number', text, unit } })[id];
+	const question = numberQuestions(drawn).find((asked) => asked.id === id)!;
+	if (!given || !('value' in given)) {
 		const issues = [{ field: `answers.${id}.text`, message: 'Give a number with its unit.' }];
 		throw new DomainError('invalid', 'There is nothing to hand in yet.', { issues });
 	}
 	const levelsDbm = sweepTrial(bench, looks[looks.length - 1].choice, row);
 	const record = trialRecord(drawn, { looks, levelsDbm, fromHz, toHz, value: given.value });
-	const judgement = judgeQuestion(drawn, questionOf(drawn, id), record);
+	const judgement = judgeQuestion(drawn, question, record);
 	const { finding } = explainQuestion(judgement, record.log);
 	const { verdict, title, yours, difference, mistakes, remarks } = finding;
 	return {

@@ -2,7 +2,7 @@ import { randomBytes } from 'node:crypto';
 import type { TrialView } from '$lib/schemas/trial';
 import { resolveSettings } from '$lib/server/bench/receiver/resolve-settings';
 import { trialSetUp } from '$lib/server/bench/trial/trial-set-up';
-import { presentTolerance, presentUnits } from '$lib/server/present/exercise';
+import { presentTolerance, presentUnits } from '$lib/server/present/question';
 import { trialSweeps } from './trial-limits';
 import { newTrialBench, presentSweep, sweepTrial, trialExercise } from './trial-bench';
 
@@ -16,7 +16,8 @@ export async function startTrial(address: string, now: Date): Promise<TrialView>
 	const { token, bench } = await newTrialBench(exercise, randomBytes(16).toString('hex'), now);
 	const { trial, questions, slug, title } = exercise.definition;
 	const written = questions.find(({ id }) => id === trial?.question);
-	if (!trial || !written) throw new Error(`${slug} is open to trial without a question`);
+	if (!trial || written?.type !== 'number')
+		throw new Error(`${slug} is open to trial without a number to ask for`);
 	const { startHz, stopHz, referenceDbm } = resolveSettings(trialSetUp(bench.drawn, 0), bench.drawn.profile);
 	return {
 		token,

@@ -1,14 +1,14 @@
 import { z } from 'zod';
 import { partOf } from '$lib/schemas/part';
 import { truth } from '$lib/server/bench/truth/truth';
-import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
+import type { NumberQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import { defineMistake, type Context } from '../mistake';
 import { ownError } from '../own-error';
 import { readStepOf, withReading } from '../spoil';
 import { widthText } from '../width-words';
 
 /** The channel's centre: that of the window asked over. */
-const channelHz = ({ frequencyHz }: DrawnQuestion): number => frequencyHz;
+const channelHz = ({ frequencyHz }: NumberQuestion): number => frequencyHz;
 
 /** An edge worked out from the width and the assigned frequency, as if the carrier stood there. */
 export const edgeFromWidth = defineMistake('edge-from-width', z.strictObject({}), () => {

@@ -29,7 +29,7 @@ function byMarker(steps: readonly FilledStep[], rbwDb: number): FilledStep[] {
 			names.add(step.as);
 			return { ...step, reading: { kind: 'marker', atHz: step.reading.atHz } };
 		}
-		if (step.do !== 'answer') return step;
+		if (step.do !== 'answer' || !('value' in step)) return step;
 		const perHertz = (scope: Scope): Scope =>
 			Object.fromEntries(
 				Object.entries(scope).map(([name, value]) => [

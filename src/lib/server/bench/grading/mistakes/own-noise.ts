@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
+import type { NumberQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import { figure, shortFigure } from '$lib/server/bench/exercise/figure';
 import type { ReadingRequest } from '$lib/measure/reading-request';
 import { askedReading } from '../asked-reading';
@@ -16,7 +16,7 @@ const decides = (context: Context, setUp: SetUp, request: ReadingRequest): boole
 	);
 };
 
-const asksWidth = ({ quantity }: DrawnQuestion): boolean =>
+const asksWidth = ({ quantity }: NumberQuestion): boolean =>
 	quantity.kind === 'occupied-bandwidth' || quantity.kind === 'x-db-bandwidth';
 
 /** Too much attenuation: the receiver's noise read as part of what is measured, leakage or width. */

@@ -1,6 +1,6 @@
 import { formatFrequency } from '$lib/units/format-quantity';
 import { z } from 'zod';
-import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
+import type { NumberQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import { figure } from '$lib/server/bench/exercise/figure';
 import { askedReading } from '../asked-reading';
 import { defineMistake } from '../mistake';
@@ -14,7 +14,7 @@ const LARGEST_SHARE = 0.05;
 /** Through a filter that follows its symbols a signal strays more than noise would. */
 const SYMBOLS = 2;
 
-const widthHzOf = ({ quantity, truth }: DrawnQuestion): number =>
+const widthHzOf = ({ quantity, truth }: NumberQuestion): number =>
 	// An edge is a place, not a width: the window it lies in says how wide things are.
 	quantity.kind === 'occupied-bandwidth' && truth > (quantity.widthHz ?? Infinity)
 		? quantity.widthHz! / 2

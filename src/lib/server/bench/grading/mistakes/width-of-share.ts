@@ -1,13 +1,13 @@
 import { z } from 'zod';
 import { shortFigure } from '$lib/server/bench/exercise/figure';
-import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
+import type { NumberQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import { defineMistake } from '../mistake';
 import { shownPrediction } from '../shown-reading';
 import { withReading } from '../spoil';
 import { cutText, wideText, widthText } from '../width-words';
 
 /** The same window with another share; for a question that has none, over all that is swept. */
-const requestFor = ({ quantity }: DrawnQuestion, percent: number) => ({
+const requestFor = ({ quantity }: NumberQuestion, percent: number) => ({
 	...(quantity.kind === 'occupied-bandwidth' &&
 		quantity.centreHz !== undefined && { centreHz: quantity.centreHz, widthHz: quantity.widthHz }),
 	kind: 'occupied-bandwidth' as const,

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import type { ReadingRequest } from '$lib/measure/reading-request';
-import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
+import type { NumberQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import { askedReading } from '../asked-reading';
 import { defineMistake, type Context, type SetUp } from '../mistake';
 import { setUpOf } from '../set-up-of';
@@ -9,7 +9,7 @@ import { withReading, withSettings } from '../spoil';
 import { wideText, widthText } from '../width-words';
 
 /** The width asked, without a window: of all that is swept. */
-function unwindowed({ quantity }: DrawnQuestion): ReadingRequest {
+function unwindowed({ quantity }: NumberQuestion): ReadingRequest {
 	if (quantity.kind === 'x-db-bandwidth') return { kind: 'x-db-bandwidth', db: quantity.db };
 	const { percent } = quantity as Extract<typeof quantity, { kind: 'occupied-bandwidth' }>;
 	return { kind: 'occupied-bandwidth', percent };

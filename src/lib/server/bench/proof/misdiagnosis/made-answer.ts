@@ -1,4 +1,4 @@
-import type { Verdict } from '$lib/schemas/finding';
+import type { Verdict } from '$lib/schemas/questions/finding';
 
 /** How a person leaves what an answer rests on. */
 export const evidences = ['attached', 'not attached', 'no reading'] as const;

@@ -1,8 +1,12 @@
 import type { Exercise } from '$lib/schemas/exercise';
 import { BenchError } from '$lib/server/bench/bench-error';
-import type { AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
+import { numberAnswers, type AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
-import type { DrawnExercise, DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
+import {
+	numberQuestions,
+	type DrawnExercise,
+	type NumberQuestion
+} from '$lib/server/bench/exercise/drawn-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { judgeQuestion } from '$lib/server/bench/grading/judge-question';
 import { watchedMistakes, type Watched } from '$lib/server/bench/grading/watched-mistakes';
@@ -46,12 +50,12 @@ function makeAnswer(exercise: Exercise, answer: number): MadeAnswer {
 	return { ...base, verdict: null, problem, found: [] };
 }
 
-/** Every mistake of every question by turns, and now and then none. */
+/** Every mistake of every question that asks for a number by turns, and now and then none. */
 function whatToDo(
 	drawn: DrawnExercise,
 	answer: number
-): { question: DrawnQuestion; watched: Watched | null } {
-	const { questions } = drawn;
+): { question: NumberQuestion; watched: Watched | null } {
+	const questions = numberQuestions(drawn);
 	if (answer % ONE_RIGHT_IN === 0) {
 		return { question: questions[(answer / ONE_RIGHT_IN) % questions.length], watched: null };
 	}
@@ -63,7 +67,7 @@ function whatToDo(
 
 function make(
 	drawn: DrawnExercise,
-	question: DrawnQuestion,
+	question: NumberQuestion,
 	watched: Watched | null,
 	evidence: EvidenceLeft,
 	random: Random
@@ -72,7 +76,7 @@ function make(
 	const own = { ...drawn, method };
 	const made = watched ? watched.mistake.make(method, { drawn: own, question }) : method;
 	const { record } = runMethod(own, varyMethod(made, own, question, random, watched === null));
-	const { value, readingId } = record.answers[question.id];
+	const { value, readingId } = numberAnswers(record)[question.id];
 	const given = { value: typed(value, question, random) };
 	const answers = { [question.id]: evidence === 'attached' ? { ...given, readingId } : given };
 	return { ...record, readings: evidence === 'no reading' ? [] : record.readings, answers };

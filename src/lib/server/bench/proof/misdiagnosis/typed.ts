@@ -1,11 +1,11 @@
-import type { DrawnQuestion } from '$lib/server/bench/exercise/drawn-exercise';
+import type { NumberQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import type { Random } from '$lib/server/bench/receiver/random';
 
 /**
  * A number as people type it: to the decimals asked, now and then one more or one fewer where that keeps what the tolerance
  * needs; of what isn't a level, often three significant digits.
  */
-export function typed(value: number, question: DrawnQuestion, random: Random): number {
+export function typed(value: number, question: NumberQuestion, random: Random): number {
 	const { digits, tolerance, unit } = question;
 	const habit = random.uniform();
 	const toDigits = (decimals: number) => Math.round(value * 10 ** decimals) / 10 ** decimals;

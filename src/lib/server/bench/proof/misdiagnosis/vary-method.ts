@@ -1,7 +1,7 @@
 /** The same thing done by different people: other spans, filters, points, sweeps, a marker not quite in the middle. */
 import type { BenchRequest } from '$lib/schemas/reading';
 import type { Settings } from '$lib/schemas/settings';
-import type { DrawnExercise, DrawnQuestion, FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
+import type { DrawnExercise, NumberQuestion, FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
 import { sameWidth, widthHzOf } from '$lib/server/bench/grading/read-width';
 import { isAbsoluteLevel } from '$lib/server/bench/grading/asked';
 import { correctsOnBench, withSettings, withSum } from '$lib/server/bench/grading/spoil';
@@ -12,7 +12,7 @@ const between = (random: Random, from: number, to: number): number => from + (to
 const chance = (random: Random, share: number): boolean => random.uniform() < share;
 
 /** The lead added back by hand, by some of those who are taught to type it as a correction. */
-export function byHandOrBench(drawn: DrawnExercise, question: DrawnQuestion, random: Random): FilledStep[] {
+export function byHandOrBench(drawn: DrawnExercise, question: NumberQuestion, random: Random): FilledStep[] {
 	const { method } = drawn;
 	const typed = method.flatMap((step) =>
 		step.do === 'set' && step.settings.correctionDb !== undefined ? [step.settings.correctionDb] : []
@@ -33,7 +33,7 @@ export function byHandOrBench(drawn: DrawnExercise, question: DrawnQuestion, ran
 export function varyMethod(
 	steps: readonly FilledStep[],
 	drawn: DrawnExercise,
-	question: DrawnQuestion,
+	question: NumberQuestion,
 	random: Random,
 	sound: boolean
 ): FilledStep[] {
@@ -107,7 +107,7 @@ const holds = (centreHz: number, spanHz: number, { lowHz, highHz }: Extent): boo
  * A bracket typed or dragged is right to a hundredth of its width, a wrong one is of any such width; a marker stands
  * somewhere about the middle of a hump; a gate is whatever people choose.
  */
-function varyReading(request: BenchRequest, question: DrawnQuestion, random: Random): BenchRequest {
+function varyReading(request: BenchRequest, question: NumberQuestion, random: Random): BenchRequest {
 	const asked = widthHzOf(question.quantity);
 	if (request.kind === 'count') return { ...request, gateS: request.gateS * between(random, 0.7, 2) };
 	if (request.kind === 'marker' && request.atHz !== undefined && asked !== undefined) {

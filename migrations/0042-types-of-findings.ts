@@ -1,0 +1,24 @@
+import type { MigrationStep } from '../src/lib/server/db/migration';
+
+/** What was found before questions had types was found of numbers. No exercise asks more than six. */
+export const up: MigrationStep = ({ context }) =>
+	context.sequelize.query(`
+		UPDATE findings SET finding = JSON_INSERT(finding,
+			'$.questions[0].type', 'number',
+			'$.questions[1].type', 'number',
+			'$.questions[2].type', 'number',
+			'$.questions[3].type', 'number',
+			'$.questions[4].type', 'number',
+			'$.questions[5].type', 'number')
+	`);
+
+export const down: MigrationStep = ({ context }) =>
+	context.sequelize.query(`
+		UPDATE findings SET finding = JSON_REMOVE(finding,
+			'$.questions[0].type',
+			'$.questions[1].type',
+			'$.questions[2].type',
+			'$.questions[3].type',
+			'$.questions[4].type',
+			'$.questions[5].type')
+	`);
