@@ -5,7 +5,7 @@ import { units } from '$lib/units/unit';
 import { part } from '../part';
 import { quantity } from '../quantity';
 import { templateOf } from '../template';
-import { line, slug } from './words';
+import { slug } from './words';
 
 /** Units that answers are kept in; what people may type instead follows from the unit's dimension. */
 export const answerUnits = units;

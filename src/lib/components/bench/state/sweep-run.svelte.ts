@@ -7,11 +7,9 @@ import { Refusal, type BenchWire } from './bench-wire';
 import { Askings } from './askings';
 import { DrawnRows } from './drawn-rows';
 import type { TraceSet } from './trace-set.svelte';
+import { nextPaint, pause } from './waits';
 import { withProtection } from './with-protection';
 
-/** Resolves when the browser has painted; a hidden page does not paint, so its receiver waits. */
-const nextPaint = () => new Promise<void>((resolve) => requestAnimationFrame(() => resolve()));
-const pause = (ms: number) => new Promise<void>((resolve) => setTimeout(resolve, ms));
 /** Waits before asking again after a lost connection, ms. */
 const retryAfterMs = [300, 1000, 2000, 4000, 8000];
 
