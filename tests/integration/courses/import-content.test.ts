@@ -65,7 +65,7 @@ describe('importContent({root, now})', () => {
 		const [edition] = await editions();
 		const unit = await Unit.findOne({ where: { editionId: edition.id }, rejectOnEmpty: true });
 		expect(unit).toMatchObject({ needs: [], doneWith: 1 });
-		change(exerciseFile(), '  - id: power', '  - skill: nothing\n    id: power');
+		change(exerciseFile(), '    id: power', '    id: power\n    skill: nothing');
 		await expect(run()).rejects.toMatchObject({
 			file: `${slug}/${exerciseFile()}`,
 			field: 'questions[0].skill',

@@ -80,7 +80,7 @@ describe('getExerciseBrief(actor, slug)', () => {
 		expect(exerciseBrief.parse(brief)).toEqual(brief);
 		expect(brief).toMatchObject({
 			client: 'Northmoor Telemetry',
-			questions: 2,
+			questions: ['number', 'number'],
 			hints: 2,
 			receiver: { name: 'field' },
 			exercise: { standing: 'not-started' }
