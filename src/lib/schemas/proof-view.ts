@@ -1,5 +1,6 @@
 /** The proof of an exercise as it is kept and shown. */
 import { z } from 'zod';
+import { questionTypes } from './questions/question';
 
 export const proofRow = z.strictObject({
 	question: z.string(),
@@ -11,7 +12,10 @@ export const proofRow = z.strictObject({
 	passShare: z.number(),
 	/** The share asked: at least of the taught method, at most of a mistake. */
 	limit: z.number(),
-	/** Answered − true of each seed in turn, in the question's unit; null where it could not be done. */
+	/**
+	 * Answered − true of each seed in turn, in the question's unit; of what is no number 0 for right and 1 for wrong. Null where
+	 * it could not be done.
+	 */
 	errors: z.array(z.number().nullable()),
 	/** One standard deviation of the errors. */
 	scatter: z.number(),
@@ -20,6 +24,8 @@ export const proofRow = z.strictObject({
 
 export const proofQuestion = z.strictObject({
 	id: z.string(),
+	/** Of what is no number there is no tolerance: half of what lies between right and wrong stands for it. */
+	type: z.enum(questionTypes),
 	text: z.string(),
 	unit: z.string(),
 	digits: z.int(),

@@ -1,3 +1,4 @@
+import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { beforeAll, describe, expect, it } from 'vitest';
 import {
 	attemptResponse,
@@ -11,6 +12,7 @@ import { readStream, secretsOf } from '../../factories/attempt';
 import { createCourse } from '../../factories/course';
 import { createEvent } from '../../factories/event';
 import { createUser } from '../../factories/user';
+import { numberFindings } from '../../factories/number-findings';
 
 import {
 	checksums,
@@ -145,7 +147,7 @@ describe('an attempt over its endpoints', () => {
 		expect(leaks).toEqual([]);
 
 		const found = findingResponse.parse(await send('answers', own, { answers: { power } }, 200));
-		expect(found.finding.questions[0].true.value).toBe(secrets.drawn.questions[0].truth);
+		expect(numberFindings(found.finding)[0].true.value).toBe(numberQuestions(secrets.drawn)[0].truth);
 		const kept = await gets.finding(createEvent(learner, { id: own }));
 		expect(findingResponse.parse(await kept.json())).toEqual(found);
 		await send('answers', own, { answers: { power } }, 409);

@@ -2,7 +2,15 @@ import { describe, expect, it } from 'vitest';
 import type { ProofRow } from '$lib/schemas/proof-view';
 import { adviseOn, greatestTolerance, leastTolerance } from '$lib/server/bench/proof/advise';
 
-const question = { id: 'power', text: 'Power', unit: 'dBm', digits: 1, tolerance: 0.7, absolute: true };
+const question = {
+	id: 'power',
+	text: 'Power',
+	type: 'number' as const,
+	unit: 'dBm',
+	digits: 1,
+	tolerance: 0.7,
+	absolute: true
+};
 /** Errors spread evenly over two limits, 200 of them. */
 const spread = (from: number, to: number) =>
 	Array.from({ length: 200 }, (_, i) => from + ((to - from) * i) / 199);

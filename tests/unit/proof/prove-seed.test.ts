@@ -3,7 +3,8 @@ import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { memoSweeps } from '$lib/server/bench/proof/memo-sweeps';
 import { proofTable } from '$lib/server/bench/proof/proof-table';
-import { proveSeed, type Outcome, type SeedProof } from '$lib/server/bench/proof/prove-seed';
+import type { Outcome } from '$lib/server/bench/proof/outcome';
+import { proveSeed, type SeedProof } from '$lib/server/bench/proof/prove-seed';
 import { prepareSweep } from '$lib/server/bench/receiver/sweep';
 import { changedExercise, firstExercise } from '../../factories/first-exercise';
 

@@ -8,7 +8,7 @@ import { readingRequest, type ReadingRequest } from '$lib/schemas/reading';
 import type { ResolvedSettings } from '$lib/schemas/settings';
 import { prepareSweep } from '../receiver/sweep';
 import { drawExercise } from './draw-exercise';
-import type { DrawnExercise } from './drawn-exercise';
+import { numberQuestions, type DrawnExercise } from './drawn-exercise';
 import { methodStates } from './method-states';
 
 /** An author is waiting: a held or averaged trace is shown after at most so many sweeps. */
@@ -31,7 +31,7 @@ export function previewExercise(exercise: Exercise, seed: number): SignalPreview
 			shown: exercise.shown.includes(name)
 		})),
 		situation: drawn.brief.situation,
-		truths: drawn.questions.map(({ id, text, truth, unit, digits, tolerance }) => ({
+		truths: numberQuestions(drawn).map(({ id, text, truth, unit, digits, tolerance }) => ({
 			...{ question: id, text, value: truth, unit, digits, tolerance }
 		})),
 		requests,

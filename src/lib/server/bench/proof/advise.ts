@@ -49,6 +49,7 @@ export function adviseOn(
 		const own = rows.filter((row) => row.question === question.id);
 		const taught = own.find(({ mistake }) => mistake === null);
 		if (!taught) return [];
+		if (question.type !== 'number') return own.flatMap((row) => ofNoNumber(question, row));
 		const mistakes = own.filter(({ mistake }) => mistake !== null);
 		return [...ofTaught(question, taught), ...mistakes.flatMap((row) => ofMistake(question, taught, row))];
 	});
@@ -60,6 +61,17 @@ export function adviseOn(
 		advice.push({ question: null, says: `${sentence(failure)}.`, tolerance: null });
 	return advice;
 }
+
+/** What is right or wrong has no tolerance to widen: it is answered by the wrong reasoning, or watched where it isn't wrong. */
+const ofNoNumber = ({ id }: ProofQuestion, { mistake, label, failures }: ProofRow): ProofAdvice[] =>
+	failures.map((failure) => ({
+		question: id,
+		says:
+			mistake === null
+				? `The taught method ${failure}: open a seed on which it is wrong and follow it.`
+				: `“${sentence(label)}” ${failure}: what it changes doesn’t make the answer wrong there, or breaks more than it says.`,
+		tolerance: null
+	}));
 
 function ofTaught(question: ProofQuestion, row: ProofRow): ProofAdvice[] {
 	const { id, unit, tolerance, absolute } = question;
