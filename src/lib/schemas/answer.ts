@@ -1,5 +1,6 @@
 /** An answer as it crosses the wire: as typed, chosen or pointed at, one shape for each type of question. */
 import { z } from 'zod';
+import { frequency } from './number';
 import { withType } from './questions/question';
 
 export const readingId = z.int().min(1);
@@ -21,7 +22,40 @@ export const typedSetUp = z.strictObject({
 	setUp: z.int().min(0).max(1_000_000).nullable()
 });
 
-const union = z.discriminatedUnion('type', [typedNumber, typedChoice, typedSetUp]);
+/** Places on the frequency axis, Hz: of a flag the first alone; null where none is marked yet. */
+export const typedMark = z.strictObject({
+	type: z.literal('mark'),
+	atHz: frequency.nullable(),
+	toHz: frequency.nullish()
+});
+/** The items in their order; none is no answer. */
+export const typedOrder = z.strictObject({ type: z.literal('order'), order: z.array(optionKey).max(26) });
+const typedFigure = z.strictObject({ text: z.string().max(60), unit: z.string().min(1).max(16) });
+/** Rows of a table; a row with neither frequency nor level is none. */
+export const typedEmissions = z.strictObject({
+	type: z.literal('emissions'),
+	rows: z
+		.array(z.strictObject({ frequency: typedFigure, level: typedFigure, breaks: z.boolean().nullable() }))
+		.max(24)
+});
+/** A value, its expanded uncertainty in dB and the coverage factor, as typed. */
+export const typedUncertainty = z.strictObject({
+	type: z.literal('uncertainty'),
+	value: typedFigure,
+	expanded: z.string().max(60),
+	k: z.string().max(60),
+	readingId: readingId.nullish()
+});
+
+const union = z.discriminatedUnion('type', [
+	typedNumber,
+	typedChoice,
+	typedSetUp,
+	typedMark,
+	typedOrder,
+	typedEmissions,
+	typedUncertainty
+]);
 /** One that names no type is a number. */
 export const typedAnswer = z.preprocess(withType, union);
 export const typedAnswers = z

@@ -79,6 +79,27 @@ export const methodStep = z.discriminatedUnion('do', [
 		reading: valueName.optional(),
 		/** A choice: whether each option is chosen, as the readings say; one left out isn't. A set-up needs nothing. */
 		chosen: z.record(slug, truthful).optional(),
+		/** A mark: where it stands on the screen; of a band, both edges. */
+		atHz: expression.optional(),
+		toHz: expression.optional(),
+		/** An order: by what each item is ordered, as the readings say. */
+		by: z.record(slug, expression).optional(),
+		/** A table of emissions, row by row. */
+		rows: z
+			.array(
+				z.strictObject({
+					when: when.optional(),
+					atHz: expression,
+					levelDbm: expression,
+					breaks: truthful.optional()
+				})
+			)
+			.min(1)
+			.max(24)
+			.optional(),
+		/** An uncertainty: beside value and reading, the expanded uncertainty in dB and its coverage factor. */
+		expandedDb: expression.optional(),
+		k: z.number().min(1).max(4).optional(),
 		why
 	})
 ]);

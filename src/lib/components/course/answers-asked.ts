@@ -3,7 +3,11 @@ import type { QuestionTypeName } from '$lib/schemas/questions/question';
 const WORDS: Record<QuestionTypeName, [one: string, several: string]> = {
 	number: ['number with its unit', 'numbers with their units'],
 	choice: ['choice', 'choices'],
-	'set-up': ['set-up', 'set-ups']
+	'set-up': ['set-up', 'set-ups'],
+	mark: ['mark on the plot', 'marks on the plot'],
+	order: ['order', 'orders'],
+	emissions: ['table of emissions', 'tables of emissions'],
+	uncertainty: ['value with its uncertainty', 'values with their uncertainties']
 };
 
 /** What an exercise asks for, in words: "3: 2 numbers with their units, 1 choice". */

@@ -115,7 +115,63 @@ export const setUpFinding = z.strictObject({
 	conditions: z.array(z.strictObject({ asked: z.string(), found: z.string(), met: z.boolean() }))
 });
 
-export const questionFinding = z.discriminatedUnion('type', [numberFinding, choiceFinding, setUpFinding]);
+/** Hz; of a flag the first alone. */
+const places = z.strictObject({ atHz: z.number(), toHz: z.number().optional() });
+export const markFinding = z.strictObject({
+	type: z.literal('mark'),
+	...common,
+	yours: places.nullable(),
+	true: places,
+	toleranceHz: z.number()
+});
+
+export const orderFinding = z.strictObject({
+	type: z.literal('order'),
+	...common,
+	/** Texts of the items, first to last. */
+	yours: z.array(z.string()).nullable(),
+	true: z.array(z.string())
+});
+
+const emission = z.strictObject({ atHz: z.number(), levelDbm: z.number(), breaks: z.boolean().nullable() });
+export const emissionsFinding = z.strictObject({
+	type: z.literal('emissions'),
+	...common,
+	/** True ones in order of frequency, each beside the row that meant it; then rows that are none of them. */
+	rows: z.array(
+		z.strictObject({
+			name: z.string().nullable(),
+			yours: emission.nullable(),
+			true: emission.nullable(),
+			/** What is wrong with it, in a few words. */
+			fault: z.string().nullable()
+		})
+	),
+	asksBreaks: z.boolean()
+});
+
+export const uncertaintyFinding = z.strictObject({
+	type: z.literal('uncertainty'),
+	...common,
+	yours: z.strictObject({ value: measured, expandedDb: z.number(), k: z.number() }).nullable(),
+	true: measured,
+	toleranceDb: z.number(),
+	/** ± as it is known, and the standard uncertainty it stands for, dB. */
+	budget: z.array(z.strictObject({ text: z.string(), db: z.number(), standardDb: z.number() })),
+	/** Combined standard uncertainty, and expanded with the coverage factor stated, or 2; dB. */
+	combinedDb: z.number(),
+	expandedDb: z.number()
+});
+
+export const questionFinding = z.discriminatedUnion('type', [
+	numberFinding,
+	choiceFinding,
+	setUpFinding,
+	markFinding,
+	orderFinding,
+	emissionsFinding,
+	uncertaintyFinding
+]);
 
 export type Verdict = (typeof verdicts)[number];
 export type Measured = z.infer<typeof measured>;

@@ -27,6 +27,37 @@ export const choiceView = z.strictObject({
 });
 export const setUpView = z.strictObject({ type: z.literal('set-up'), ...common });
 
-export const questionView = z.discriminatedUnion('type', [numberView, choiceView, setUpView]);
+export const markView = z.strictObject({
+	type: z.literal('mark'),
+	...common,
+	shape: z.enum(['flag', 'band'])
+});
+export const orderView = z.strictObject({
+	type: z.literal('order'),
+	...common,
+	items: z.array(z.strictObject({ key: optionKey, text: z.string() }))
+});
+export const emissionsView = z.strictObject({
+	type: z.literal('emissions'),
+	...common,
+	/** Whether each row says if its limit is broken. */
+	asksBreaks: z.boolean()
+});
+export const uncertaintyView = z.strictObject({
+	type: z.literal('uncertainty'),
+	...common,
+	unit: z.enum(answerUnits),
+	units: z.array(z.string())
+});
+
+export const questionView = z.discriminatedUnion('type', [
+	numberView,
+	choiceView,
+	setUpView,
+	markView,
+	orderView,
+	emissionsView,
+	uncertaintyView
+]);
 export type QuestionView = z.infer<typeof questionView>;
 export type QuestionViewAs<T extends QuestionView['type']> = Extract<QuestionView, { type: T }>;

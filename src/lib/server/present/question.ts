@@ -8,12 +8,13 @@ import { formatFigure, formatFrequency, formatTime } from '$lib/units/format-qua
 export interface AskedQuestion {
 	id: string;
 	text: string;
-	/** Offered in this order. */
+	/** Options or items, in the order they are offered. */
 	options?: { key: string; text: string }[];
+	items?: { key: string; text: string }[];
 }
 
 export function presentQuestion(
-	{ id, text, options = [] }: AskedQuestion,
+	{ id, text, options = [], items = [] }: AskedQuestion,
 	written: ExerciseQuestion
 ): QuestionView {
 	switch (written.type) {
@@ -29,6 +30,40 @@ export function presentQuestion(
 		}
 		case 'set-up':
 			return { type: 'set-up', id, text, toleranceText: 'Judged by what the receiver did' };
+		case 'mark': {
+			const { shape, tolerance } = written;
+			const within =
+				'absolute' in tolerance
+					? formatFrequency(tolerance.absolute)
+					: `${shortest(tolerance.relative * 100)} % of the width`;
+			return {
+				type: 'mark',
+				id,
+				text,
+				shape,
+				toleranceText: `Right within ±${within}${shape === 'band' ? ' at each edge' : ''}`
+			};
+		}
+		case 'order': {
+			const offered = items.map(({ key, text: item }) => ({ key, text: item }));
+			return {
+				type: 'order',
+				id,
+				text,
+				items: offered,
+				toleranceText: 'Right when each stands in its place'
+			};
+		}
+		case 'emissions': {
+			const { toleranceHz, toleranceDb, emissions } = written;
+			const toleranceText = `Right within ±${formatFrequency(toleranceHz)} and ±${shortest(toleranceDb)} dB, none missing, none invented`;
+			return { type: 'emissions', id, text, asksBreaks: emissions[0].breaks !== undefined, toleranceText };
+		}
+		case 'uncertainty': {
+			const { unit, toleranceDb, within } = written;
+			const toleranceText = `Value right within ±${shortest(toleranceDb)} dB, uncertainty within ${shortest(within * 100)} % of its budget`;
+			return { type: 'uncertainty', id, text, unit, units: presentUnits(unit), toleranceText };
+		}
 	}
 }
 

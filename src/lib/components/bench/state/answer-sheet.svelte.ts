@@ -57,8 +57,15 @@ export class AnswerSheet {
 		this.#touched(id);
 	}
 
+	/** The reading that an answer rests on; nothing but a number and a value with its uncertainty rests on one. */
+	backing(id: string): number | null {
+		const answer = this.answers[id];
+		return 'readingId' in answer ? (answer.readingId ?? null) : null;
+	}
+
 	attach(id: string, readingId: number | null): void {
-		this.number(id).readingId = readingId;
+		const answer = this.answers[id];
+		if (answer.type === 'number' || answer.type === 'uncertainty') answer.readingId = readingId;
 		this.#touched(id);
 	}
 
@@ -70,7 +77,7 @@ export class AnswerSheet {
 
 	/** Names of the questions (by position, from 1) that a reading is attached to. */
 	attachedTo(readingId: number): number[] {
-		return this.#positions((answer) => answer.type === 'number' && answer.readingId === readingId);
+		return this.#positions((answer) => 'readingId' in answer && answer.readingId === readingId);
 	}
 
 	/** Questions with nothing answered. */
@@ -80,7 +87,9 @@ export class AnswerSheet {
 
 	/** Numbers (by position, from 1) that no reading is attached to. */
 	get bare(): number[] {
-		return this.#positions((answer) => answer.type === 'number' && !answer.readingId);
+		return this.#positions((answer) =>
+			answer.type === 'number' || answer.type === 'uncertainty' ? !answer.readingId : false
+		);
 	}
 
 	#positions(is: (answer: TypedAnswer) => boolean): number[] {

@@ -47,7 +47,27 @@ export interface ChoiceAnswer {
 export interface SetUpAnswer {
 	entry: number;
 }
-export type GivenAnswer = NumberAnswer | ChoiceAnswer | SetUpAnswer;
+/** As displayed, Hz; of a flag the first alone. */
+export interface MarkAnswer {
+	atHz: number;
+	toHz?: number;
+}
+/** Keys of the items, first to last. */
+export interface OrderAnswer {
+	order: string[];
+}
+export interface EmissionsAnswer {
+	rows: { atHz: number; levelDbm: number; breaks: boolean | null }[];
+}
+export interface UncertaintyAnswer {
+	/** In the question's unit. */
+	stated: number;
+	expandedDb: number;
+	k: number;
+	readingId?: string;
+}
+export type GivenAnswer =
+	NumberAnswer | ChoiceAnswer | SetUpAnswer | MarkAnswer | OrderAnswer | EmissionsAnswer | UncertaintyAnswer;
 
 export interface AttemptRecord {
 	log: SettingsLogEntry[];

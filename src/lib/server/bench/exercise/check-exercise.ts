@@ -88,10 +88,12 @@ function checkNames(exercise: Exercise): ExerciseIssue[] {
 
 /** What of a question the learner reads while the attempt is open. */
 function textsOf(question: ExerciseQuestion, field: string): [string, string][] {
-	const options = question.type === 'choice' ? question.options : [];
+	const options =
+		question.type === 'choice' ? question.options : question.type === 'order' ? question.items : [];
+	const list = question.type === 'order' ? 'items' : 'options';
 	return [
 		[`${field}.text`, question.text],
-		...options.map(({ text }, i): [string, string] => [`${field}.options[${i}].text`, text])
+		...options.map(({ text }, i): [string, string] => [`${field}.${list}[${i}].text`, text])
 	];
 }
 

@@ -11,7 +11,8 @@ import type { ReceiverProfile } from '$lib/schemas/receiver';
 import type { LossTable, Scene } from '$lib/schemas/scene';
 import type { Settings } from '$lib/schemas/settings';
 import type { Seed } from '../receiver/random';
-import type { GivenAnswer } from './attempt-record';
+import type { WrittenUncertainty } from '$lib/schemas/questions/uncertainty';
+import type { GivenAnswer, TakenReading } from './attempt-record';
 import type { Scope } from './expression';
 
 /** Asks for a number with its unit. */
@@ -68,7 +69,67 @@ export interface SetUpQuestion {
 	mistakes: { id: string; settings: Settings; breaks: string[] }[];
 }
 
-export type DrawnQuestion = NumberQuestion | ChoiceQuestion | SetUpQuestion;
+/** Where something stands, Hz as it truly is; of a flag the first alone. */
+export interface Places {
+	atHz: number;
+	toHz?: number;
+}
+export interface MarkQuestion {
+	type: 'mark';
+	id: string;
+	text: string;
+	shape: 'flag' | 'band';
+	truth: Places;
+	toleranceHz: number;
+	mistakes: (Foreseen & Places & { id: string })[];
+}
+export interface OrderQuestion {
+	type: 'order';
+	id: string;
+	text: string;
+	/** As offered. */
+	items: { key: string; id: string; text: string; by: number }[];
+	first: 'least' | 'greatest';
+	/** Keys as they belong, first to last. */
+	truth: string[];
+	mistakes: (Foreseen & { id: string; items: [string, string] })[];
+}
+export interface EmissionsQuestion {
+	type: 'emissions';
+	id: string;
+	text: string;
+	/** In order of frequency. */
+	emissions: { id: string; name: string; atHz: number; levelDbm: number; breaks: boolean | null }[];
+	asksBreaks: boolean;
+	toleranceHz: number;
+	toleranceDb: number;
+	ghosts: (Foreseen & { id: string; atHz: number })[];
+}
+export interface UncertaintyQuestion {
+	type: 'uncertainty';
+	id: string;
+	text: string;
+	unit: WrittenUncertainty['unit'];
+	digits: number;
+	/** At the reference plane. */
+	truth: number;
+	toleranceDb: number;
+	/** What is lost between the reference plane and the connector there, dB. */
+	leadDb: number;
+	/** Without the spread of the reading. */
+	budget: { id: string; text: string; db: number; standardDb: number }[];
+	spreadDb: number;
+	within: number;
+}
+
+export type DrawnQuestion =
+	| NumberQuestion
+	| ChoiceQuestion
+	| SetUpQuestion
+	| MarkQuestion
+	| OrderQuestion
+	| EmissionsQuestion
+	| UncertaintyQuestion;
 export type DrawnAs<T extends DrawnQuestion['type']> = Extract<DrawnQuestion, { type: T }>;
 
 /** What an answer that is no number may follow from: the values read so far, and the set-up in force. */
@@ -76,6 +137,8 @@ export interface AnsweredFrom {
 	values: Scope;
 	/** The last entry of the log. */
 	entry: number;
+	/** Readings taken, by name. */
+	taken: ReadonlyMap<string, TakenReading>;
 }
 /** A step of the taught method with its numbers in place. */
 export type FilledStep =

@@ -50,7 +50,7 @@ export function runMethod(
 			}
 			case 'answer': {
 				if ('gives' in step) {
-					record.answers[step.question] = step.gives({ values, entry: bench.log.length - 1 });
+					record.answers[step.question] = step.gives({ values, entry: bench.log.length - 1, taken: byName });
 					return { step };
 				}
 				const value = step.value(values);

@@ -94,7 +94,8 @@ async function keep(
 /** A number has columns of its own; any other answer is kept whole, as it was handed in. */
 function columnsOf(typed: TypedAnswer, given: GivenAnswer) {
 	if (typed.type !== 'number' || !('value' in given)) {
-		return { text: null, unit: null, value: null, readingId: null, typed };
+		const readingId = typed.type === 'uncertainty' ? (typed.readingId ?? null) : null;
+		return { text: null, unit: null, value: null, readingId, typed };
 	}
 	const { text, unit, readingId } = typed;
 	return { text, unit, value: given.value, readingId: readingId ?? null, typed: null };

@@ -38,7 +38,8 @@ function strangerIn(
 	taken: ReadonlySet<number>,
 	swept: ReadonlySet<number>
 ): Issue | undefined {
-	if (answer.type === 'number' && answer.readingId && !taken.has(answer.readingId)) {
+	const isBacked = answer.type === 'number' || answer.type === 'uncertainty';
+	if (isBacked && answer.readingId && !taken.has(answer.readingId)) {
 		return { field: 'readingId', message: 'no such reading was taken in this attempt' };
 	}
 	if (answer.type === 'set-up' && answer.setUp !== null && !swept.has(answer.setUp)) {

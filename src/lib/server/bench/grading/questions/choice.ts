@@ -7,7 +7,7 @@ import { isTrue } from '$lib/server/bench/exercise/truthful';
 import { checkChoice, checkChosen } from './choice/check';
 import { fillChoice } from './choice/fill';
 import { judgeChoice } from './choice/judge';
-import { optionKey } from './choice/option-keys';
+import { optionKey } from './option-keys';
 import type { QuestionType, Read, WrongWay } from './question-type';
 
 export const choice: QuestionType<'choice'> = {

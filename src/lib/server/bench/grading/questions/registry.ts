@@ -7,11 +7,23 @@ import type { DrawnExercise, DrawnQuestion } from '$lib/server/bench/exercise/dr
 import type { ExerciseIssue } from '$lib/server/bench/exercise/exercise-error';
 import type { Scope } from '$lib/server/bench/exercise/expression';
 import { choice } from './choice';
+import { emissions } from './emissions';
+import { mark } from './mark';
 import { number } from './number';
+import { order } from './order';
 import type { Answering, AnswerStep, Draw, Judged, QuestionType, Read, WrongWay } from './question-type';
 import { setUp } from './set-up';
+import { uncertainty } from './uncertainty';
 
-const types: { [T in QuestionTypeName]: QuestionType<T> } = { number, choice, 'set-up': setUp };
+const types: { [T in QuestionTypeName]: QuestionType<T> } = {
+	number,
+	choice,
+	'set-up': setUp,
+	mark,
+	order,
+	emissions,
+	uncertainty
+};
 
 /** A question's own type. A question is only ever given to that, so one type stands here for whichever it is. */
 const typeOf = ({ type }: { type: QuestionTypeName }): QuestionType<'number'> =>

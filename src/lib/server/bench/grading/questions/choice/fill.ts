@@ -1,32 +1,22 @@
-import { quantity as quantitySchema } from '$lib/schemas/quantity';
 import type { WrittenChoice } from '$lib/schemas/questions/choice';
 import type { ChoiceQuestion } from '$lib/server/bench/exercise/drawn-exercise';
 import { ExerciseError } from '$lib/server/bench/exercise/exercise-error';
 import { fillText } from '$lib/server/bench/exercise/fill-text';
-import { filled } from '$lib/server/bench/exercise/filled';
 import { isTrue } from '$lib/server/bench/exercise/truthful';
-import { truth } from '$lib/server/bench/truth/truth';
+import { withTruths } from '../fill-truths';
 import type { Draw } from '../question-type';
 import { fillConditions } from '../set-up/fill-conditions';
-import { optionKey, shuffled } from './option-keys';
+import { optionKey, shuffled } from '../option-keys';
 
 /** @throws ExerciseError when not one option is right, where one is to be chosen, or none at all */
-export function fillChoice(
-	written: WrittenChoice,
-	{ scene, scope, seed }: Draw,
-	field: string
-): ChoiceQuestion {
+export function fillChoice(written: WrittenChoice, draw: Draw, field: string): ChoiceQuestion {
 	const { id, pick, inOrder, looked } = written;
-	const truths = Object.fromEntries(
-		Object.entries(written.truths).map(([name, quantity]) => [
-			name,
-			truth(scene, filled(quantitySchema, quantity, scope, `${field}.truths.${name}`)).value
-		])
-	);
+	const { scope, seed } = draw;
+	const known = withTruths(written.truths, draw, field);
 	const options = written.options.map((option, i) => ({
 		...option,
 		text: fillText(option.text, scope, `${field}.options[${i}].text`),
-		right: isTrue(option.right, { ...scope, ...truths }, `${field}.options[${i}].right`)
+		right: isTrue(option.right, known, `${field}.options[${i}].right`)
 	}));
 	const right = options.filter((option) => option.right).length;
 	if (right === 0 || (pick === 'one' && right !== 1)) {
