@@ -15,7 +15,7 @@ export interface AskedExercise {
 /** Every exercise under content/, in order. */
 export const exerciseFiles = (): string[] =>
 	readdirSync(CONTENT, { recursive: true, encoding: 'utf8' })
-		.filter((path) => path.endsWith('.yaml') && basename(path) !== 'course.yaml')
+		.filter((path) => path.endsWith('.yaml') && !['course.yaml', 'glossary.yaml'].includes(basename(path)))
 		.sort()
 		.map((path) => join(CONTENT, path));
 

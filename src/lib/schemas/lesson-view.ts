@@ -1,6 +1,7 @@
 /** A unit's lesson as a page shows it, with what stands around it. */
 import { z } from 'zod';
 import { exerciseProgress, lockView } from './course-view';
+import { termNote } from './glossary';
 import { figureView } from './figure-view';
 
 const unitLine = z.strictObject({ number: z.int(), slug: z.string(), title: z.string() });
@@ -19,6 +20,8 @@ export const lessonView = z.strictObject({
 	title: z.string(),
 	words: z.int(),
 	parts: z.array(lessonPartView),
+	/** Those marked in it, in the order of their first use. */
+	terms: z.array(termNote),
 	/** Of this unit, with what the reader has done. */
 	exercises: z.array(exerciseProgress),
 	/** The units around it. */

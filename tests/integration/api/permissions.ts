@@ -93,6 +93,8 @@ export const REACH: Record<string, Reach> = {
 	'action /learn/exercises/[slug]?/start': learners,
 	'action /learn/exercises/[slug]?/practise': learners,
 	'load /learn/skills': learners,
+	'load /learn/glossary': learners,
+	'load /learn/find': { ...learners, query: '?q=marker' },
 	'load /learn/units/[slug]': { ...learners, absent: true },
 	'POST /api/attempts': { ...learners, body: { exercise: 'spread-carrier-1' } },
 	'POST /api/figures/[unitId]/[figureId]': { ...learners, absent: true, body: { values: { rbwHz: 1000 } } },

@@ -1,7 +1,10 @@
 import { describe, expect, it } from 'vitest';
+import { glossaryView } from '$lib/schemas/glossary';
 import { lessonView } from '$lib/schemas/lesson-view';
+import { Edition } from '$lib/server/db/models/edition';
 import { Unit } from '$lib/server/db/models/unit';
 import { getLesson } from '$lib/server/services/courses/get-lesson';
+import { listGlossary } from '$lib/server/services/glossary/list-glossary';
 import { startAttempt } from '$lib/server/services/attempts/start-attempt';
 import { createCourse, createEdition } from '../../factories/course';
 import { createUser } from '../../factories/user';
@@ -31,6 +34,31 @@ describe('getLesson(actor, slug)', () => {
 		if (part.kind !== 'figure') throw new Error('no figure');
 		expect(part.figure.start.traces[0].levelsDbm).toHaveLength(201);
 		expect(JSON.stringify(lesson)).not.toMatch(/emitters|symbolRateHz|seed|truth|mistake/);
+	});
+
+	it('brings the definitions of the terms that are marked in it, and the glossary lists them all', async () => {
+		const { actor } = await createUser('apprentice');
+		const { exercise, slug } = await course();
+		const written = { definition: 'In plain words.', forms: [], unit: slug };
+		const glossary = [
+			{ ...written, slug: 'marker', term: 'Marker' },
+			{ ...written, slug: 'peak', term: 'Peak', source: 'computed' }
+		];
+		await Edition.update({ glossary }, { where: { id: exercise.editionId } });
+		const unit = await Unit.findByPk(exercise.unitId, { rejectOnEmpty: true });
+		const html = '<p>A <a class="term" href="/learn/glossary#marker" data-term="marker">marker</a>.</p>';
+		await unit.update({ lesson: { ...unit.lesson, parts: [{ kind: 'text', html }] } });
+		const lesson = await getLesson(actor, slug, now);
+		expect(lessonView.parse(lesson)).toEqual(lesson);
+		expect(lesson.terms).toEqual([{ slug: 'marker', term: 'Marker', definition: 'In plain words.' }]);
+		const listed = (await listGlossary(actor)).find(({ terms }) => terms.at(0)?.unit.slug === slug);
+		expect(glossaryView.parse(listed)).toEqual(listed);
+		expect(listed?.terms.map(({ term, source }) => [term, source])).toEqual([
+			['Marker', null],
+			['Peak', 'computed']
+		]);
+		const { actor: coordinator } = await createUser('coordinator');
+		await expect(listGlossary(coordinator)).rejects.toMatchObject({ code: 'forbidden' });
 	});
 
 	it('names the units around it', async () => {

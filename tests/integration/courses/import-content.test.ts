@@ -74,6 +74,31 @@ describe('importContent({root, now})', () => {
 		expect(await editions()).toHaveLength(1);
 	});
 
+	it('keeps the glossary with the edition, marks its terms in lessons, and names what is wrong in it', async () => {
+		const entry = { term: 'Marker', forms: ['markers'], definition: 'A point on a trace.', unit: 'spread' };
+		write('glossary.yaml', [entry]);
+		await run();
+		const [edition] = await editions();
+		expect(edition.glossary).toEqual([{ ...entry, slug: 'marker' }]);
+		const unit = await Unit.findOne({ where: { editionId: edition.id }, rejectOnEmpty: true });
+		expect(JSON.stringify(unit.lesson.parts)).toContain('/learn/glossary#marker');
+		const refusals: [unknown[], string, string][] = [
+			[[{ ...entry, unit: 'nothing' }], '[0].unit', 'nothing is no unit of this course'],
+			[[entry, { ...entry, forms: [] }], '[1].term', '“Marker” stands here twice'],
+			[[entry, { ...entry, term: 'Flag' }], '[1].term', '“markers” is a name of “marker” already'],
+			[[{ ...entry, meaning: 'x' }], '[0]', 'meaning']
+		];
+		for (const [entries, field, reason] of refusals) {
+			write('glossary.yaml', entries);
+			await expect(run()).rejects.toMatchObject({
+				file: `${slug}/glossary.yaml`,
+				field: expect.stringContaining(field) as string,
+				message: expect.stringContaining(reason) as string
+			});
+		}
+		expect(await editions()).toHaveLength(1);
+	});
+
 	it('publishes a course with its units, lessons and exercises', async () => {
 		expect(await run()).toEqual([{ slug, edition: 1, created: true, writtenAtDesk: false }]);
 		const [edition] = await editions();

@@ -134,7 +134,7 @@ describe('choiceShown(setting, choice)', () => {
 describe('nextStep(exercises)', () => {
 	const exercise = (over: Partial<ExerciseProgress>): ExerciseProgress => ({
 		...{ slug: 'a', title: 'A', number: 1, tries: 3, triesLeft: 3, attempts: [] },
-		...{ standing: 'not-started', openAttemptId: null, ...over }
+		...{ standing: 'not-started', openAttemptId: null, repeat: null, ...over }
 	});
 
 	it('goes on with what is open before anything new', () =>

@@ -1,5 +1,6 @@
 import type { CourseUnit } from '$lib/schemas/course-file';
 import type { Exercise } from '$lib/schemas/exercise';
+import type { GlossaryTerm } from '$lib/schemas/glossary';
 import type { Figure } from '$lib/schemas/figure';
 
 export interface UnitContent extends Omit<CourseUnit, 'exercises'> {
@@ -15,4 +16,6 @@ export interface CourseContent {
 	title: string;
 	summary: string;
 	units: UnitContent[];
+	/** Empty for a course without glossary.yaml. */
+	glossary: GlossaryTerm[];
 }

@@ -3,6 +3,7 @@ import { ContentError } from './content-error';
 import { addressIn, filesUnder, foldersIn, textIn, type ContentTree } from './content-tree';
 import type { CourseContent, UnitContent } from './course-content';
 import { readExercise, type CheckedExercises } from './read-exercise';
+import { GLOSSARY, readGlossary } from './read-glossary';
 import { readLesson } from './read-lesson';
 import { readYaml } from './read-yaml';
 
@@ -45,9 +46,10 @@ export function readCourse(
 		);
 		return { ...unit, ...lesson, exercises } as UnitContent;
 	});
+	const glossary = tried(() => readGlossary(tree, outline.units));
 	if (!faulty) tried(() => refuseUnknownSkills(tree, units));
 	const { slug, title, summary } = outline;
-	return faulty ? null : { slug, title, summary, units };
+	return faulty || !glossary ? null : { slug, title, summary, units, glossary };
 }
 
 /** What course.yaml says. @throws ContentError */
@@ -57,7 +59,7 @@ export function readOutline(tree: ContentTree) {
 	const expected = value.units.map(folderOf);
 	const stray = foldersIn(tree).find((name) => !expected.includes(name));
 	if (stray) throw errorAt('units', `the folder ${stray} is no unit of this course`);
-	const other = tree.paths.find((path) => !path.includes('/') && path !== 'course.yaml');
+	const other = tree.paths.find((path) => !path.includes('/') && !['course.yaml', GLOSSARY].includes(path));
 	if (other) throw new ContentError(addressIn(tree, other), 1, '', 'belongs to no unit');
 	return value;
 }

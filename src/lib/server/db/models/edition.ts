@@ -6,6 +6,7 @@ import {
 	type InferCreationAttributes,
 	type NonAttribute
 } from 'sequelize';
+import type { GlossaryTerm } from '$lib/schemas/glossary';
 import { sequelize } from '../connection';
 import { Course } from './course';
 
@@ -17,6 +18,7 @@ export class Edition extends Model<InferAttributes<Edition>, InferCreationAttrib
 	declare number: number;
 	declare title: string;
 	declare summary: string;
+	declare glossary: CreationOptional<GlossaryTerm[]>;
 	/** SHA-256 of the content it was made of. */
 	declare contentHash: string;
 	declare createdAt: Date;
@@ -32,6 +34,7 @@ Edition.init(
 		number: DataTypes.INTEGER.UNSIGNED,
 		title: DataTypes.STRING(300),
 		summary: DataTypes.STRING(300),
+		glossary: { type: DataTypes.JSON, defaultValue: [] },
 		contentHash: DataTypes.CHAR(64),
 		createdAt: DataTypes.DATE(3),
 		publishedBy: { type: DataTypes.BIGINT.UNSIGNED, allowNull: true }

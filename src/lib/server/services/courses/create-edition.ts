@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto';
 import type { Transaction } from 'sequelize';
+import type { GlossaryTerm } from '$lib/schemas/glossary';
 import type { ContentTree } from '$lib/server/content/content-tree';
 import type { CourseContent, UnitContent } from '$lib/server/content/course-content';
 import { Edition } from '$lib/server/db/models/edition';
@@ -29,24 +30,30 @@ export async function createEdition(
 	{ courseId, number, content, tree, publishedBy, now }: NewEdition,
 	transaction: Transaction
 ): Promise<Edition> {
-	const { title, summary } = content;
+	const { title, summary, glossary } = content;
 	const contentHash = hashOfContent(content);
 	const edition = await Edition.create(
-		{ courseId, number, title, summary, contentHash, createdAt: now, publishedBy },
+		{ courseId, number, title, summary, glossary, contentHash, createdAt: now, publishedBy },
 		{ transaction }
 	);
-	for (const unit of content.units) await createUnit(edition.id, unit, transaction);
+	for (const unit of content.units) await createUnit(edition.id, unit, glossary, transaction);
 	await noteEditionFiles(edition.id, tree, transaction);
 	return edition;
 }
 
-async function createUnit(editionId: number, content: UnitContent, transaction: Transaction): Promise<void> {
+async function createUnit(
+	editionId: number,
+	content: UnitContent,
+	glossary: readonly GlossaryTerm[],
+	transaction: Transaction
+): Promise<void> {
 	const { number, slug, title, summary, needs, doneWith = null } = content;
 	const { lessonMarkdown, figures, exercises } = content;
 	const lesson = renderLesson(
 		lessonMarkdown,
 		figures.map(({ id }) => id),
-		title
+		title,
+		glossary
 	);
 	const unit = await Unit.create(
 		{ editionId, number, slug, title, summary, needs, doneWith, lesson, figures },

@@ -8,8 +8,10 @@ import { may } from '$lib/server/domain/policy';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 import { presentFigure } from '$lib/server/present/figure';
+import { presentTerm } from '$lib/server/present/glossary';
 import { presentProgress } from '$lib/server/present/progress';
 import { firstState } from '../figures/figure-states';
+import { termsIn } from './mark-terms';
 import { findLocks } from '../progress/find-locks';
 
 /** The lesson of a unit as published now, with what this person has done of its exercises. @throws DomainError `not_found` */
@@ -32,6 +34,10 @@ export async function getLesson(actor: Actor, slug: string, now: Date): Promise<
 		title: lesson.title,
 		words: lesson.words,
 		parts: lesson.parts.map((part) => presentPart(unit, part)),
+		terms: termsIn(lesson.parts).flatMap((name) => {
+			const found = edition.glossary.find((term) => term.slug === name);
+			return found ? [presentTerm(found)] : [];
+		}),
 		exercises: exercises.map((exercise) =>
 			presentProgress(
 				exercise,
