@@ -94,6 +94,12 @@ export const REACH: Record<string, Reach> = {
 	'action /learn/exercises/[slug]?/practise': learners,
 	'load /learn/skills': learners,
 	'load /learn/glossary': learners,
+	'load /learn/logbook': learners,
+	'load /learn/logbook/[id]': { ...learners, absent: true },
+	'action /learn/logbook/[id]?/note': { ...learners, absent: true },
+	'action /learn/logbook/[id]?/remove': { ...learners, absent: true },
+	'GET /learn/logbook/csv': learners,
+	'GET /learn/logbook/pdf': { ...learners, absent: true, query: '?entry=999999' },
 	'load /learn/find': { ...learners, query: '?q=marker' },
 	'load /learn/units/[slug]': { ...learners, absent: true },
 	'POST /api/attempts': { ...learners, body: { exercise: 'spread-carrier-1' } },
@@ -106,6 +112,7 @@ export const REACH: Record<string, Reach> = {
 	'load /learn/attempts/[id]/finding': readable,
 	'load /learn/attempts/[id]/done-right': readable,
 	'load /learn/attempts/[id]/report': readable,
+	'action /learn/attempts/[id]/report?/keep': owner,
 	'GET /api/attempts/[id]': readable,
 	'GET /api/attempts/[id]/set-ups': readable,
 	'GET /api/attempts/[id]/rows': { ...readable, query: '?from=0&to=0' },
@@ -120,6 +127,7 @@ export const REACH: Record<string, Reach> = {
 		body: { answers: { power: { text: '-23', unit: 'dBm', readingId: null } } }
 	},
 	'POST /api/attempts/[id]/hints': owner,
+	'POST /api/attempts/[id]/logbook': { ...owner, body: { kind: 'set-up' } },
 	'PUT /api/attempts/[id]/markings': { ...owner, body: { markings } },
 	'POST /api/attempts/[id]/readings': {
 		...owner,

@@ -37,6 +37,7 @@ const table: Record<Action, [string[], string[], string[], string[], string[]]> 
 	'unit.open-any': [[], any, [], [], any],
 	'attempt.start': [mine, mine, [], [], mine],
 	'attempt.work': [mine, mine, [], [], mine],
+	'logbook.keep': [mine, mine, [], [], mine],
 	'saved-set-up.keep': [mine, mine, [], [], mine],
 	'attempt.read': [mine, [...mine, ...cohort], mine, mine, any],
 	'answer-key.read': [['mine, closed'], any, [], [], any],

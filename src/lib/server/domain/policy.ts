@@ -14,6 +14,7 @@ export type Action =
 	| 'attempt.start'
 	| 'attempt.work' // settings, sweeps, readings, drafts, hints, answers
 	| 'attempt.read'
+	| 'logbook.keep' // readings, pictures and set-ups across exercises
 	| 'saved-set-up.keep' // set-ups put by under a name
 	| 'answer-key.read' // truths, scene and seed of an attempt
 	| 'progress.read' // names and progress
@@ -66,6 +67,7 @@ export const PERMISSIONS: Record<Action, Partial<Record<Role, readonly Reach[]>>
 	// Whoever works on an attempt is told the truth at its end, so these go with 'answer-key.read'.
 	'attempt.start': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
 	'attempt.work': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
+	'logbook.keep': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
 	'saved-set-up.keep': { apprentice: ['own'], instructor: ['own'], administrator: ['own'] },
 	'attempt.read': { ...THEIR_OWN, instructor: ['own', 'own-cohort'] },
 	'answer-key.read': { apprentice: ['own-closed'], instructor: ANY, administrator: ANY },

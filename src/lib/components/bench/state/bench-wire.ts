@@ -3,6 +3,7 @@ import type { TypedAnswer } from '$lib/schemas/answer';
 import type { AttemptView, HintResponse, ReadingView, TakeReadingRequest } from '$lib/schemas/attempt';
 import type { Frame } from '$lib/schemas/frames';
 import type { SavedSetUpView } from '$lib/schemas/saved-set-up';
+import type { KeepRequest } from '$lib/schemas/logbook';
 import type { LoggedSetUp } from '$lib/schemas/set-up-log';
 import type { Settings } from '$lib/schemas/settings';
 import type { Markings } from '$lib/schemas/markings';
@@ -37,6 +38,8 @@ export interface BenchWire {
 		save(name: string, settings: Settings): Promise<boolean>;
 		remove(id: number): Promise<void>;
 	};
+	/** Puts something in the logbook; absent where nobody is signed in. */
+	keep?(request: KeepRequest): Promise<void>;
 	/** What was set so far; absent where nothing is logged. */
 	setUps?(): Promise<LoggedSetUp[]>;
 	acknowledge(row: number): Promise<void>;

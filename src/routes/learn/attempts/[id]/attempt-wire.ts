@@ -34,6 +34,9 @@ export function attemptWire(attemptId: AttemptView['id']): BenchWire {
 		rows: async (from, to) => framesOf(await answered(fetch(`${base}/rows?from=${from}&to=${to}`))),
 		setUps: async () => setUpsResponse.parse(await (await answered(fetch(`${base}/set-ups`))).json()).setUps,
 		savedSetUps,
+		keep: async (request) => {
+			await send('POST', '/logbook', request);
+		},
 		acknowledge: async (row) => {
 			await send('POST', '/acknowledgements', { row });
 		},
