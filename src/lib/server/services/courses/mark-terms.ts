@@ -2,6 +2,8 @@ import { JSDOM } from 'jsdom';
 import type { GlossaryTerm } from '$lib/schemas/glossary';
 import type { LessonPart } from '$lib/schemas/lesson';
 
+/** To take HTML apart in; nothing of it is kept. */
+let page: JSDOM['window'] | undefined;
 /** Where a word is no word of the text: links, formulas, headings. */
 const APART = 'a, code, pre, blockquote, h2, h3, h4, th';
 
@@ -20,7 +22,7 @@ export function markTerms(parts: readonly LessonPart[], glossary: readonly Gloss
 		`(?<![\\p{L}\\p{N}-])(?:${names.map(({ name }) => escaped(name)).join('|')})(?![\\p{L}\\p{N}-])`,
 		'giu'
 	);
-	const { document } = new JSDOM('').window;
+	const { document } = (page ??= new JSDOM('').window);
 	const used = new Set<string>();
 	const termOf = (text: string) =>
 		names.find(({ name }) =>
