@@ -52,7 +52,7 @@ test('a reading and a picture go from the bench into the logbook, and out of it 
 	await page.getByRole('button', { name: 'Marker', exact: true }).click();
 	const row = readingRow(page, 'Marker');
 	await row.getByRole('button', { name: /^Log/ }).click();
-	await expect(row.getByRole('link', { name: 'logbook' })).toBeVisible();
+	await expect(row.getByRole('link', { name: /^Logged/ })).toBeVisible();
 	await page.getByRole('button', { name: 'Keep' }).click();
 	await page.getByRole('button', { name: /^Put the picture in the logbook/ }).click();
 	await expect(page.getByText('The picture is in the logbook.')).toBeVisible();
