@@ -1,6 +1,7 @@
 /** The logbook: readings, pictures and set-ups that a person has put by, across exercises. */
 import { z } from 'zod';
-import { readingId, readingView } from './attempt';
+import { readingId } from './answer';
+import { readingView } from './attempt';
 import { reportPicture } from './report';
 import { resolvedSettings } from './settings';
 import { rowNumber } from './sweep-stream';

@@ -57,7 +57,7 @@ describe('importContent({root, now})', () => {
 		const imported = await importContent({ root: 'content', now });
 		expect(imported.length).toBeGreaterThan(0);
 		expect(imported.every(({ edition, created }) => edition === 1 && created)).toBe(true);
-	});
+	}, 120_000);
 
 	it('keeps what a unit needs, and refuses a skill that no unit teaches', async () => {
 		change('course.yaml', 'summary: Wide.', 'summary: Wide.\n    doneWith: 1');

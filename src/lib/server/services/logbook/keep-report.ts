@@ -1,5 +1,6 @@
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
+import { getAttempt } from '../attempts/get-attempt';
 import { getReport } from '../attempts/get-report';
 import { keepInLogbook } from './keep-in-logbook';
 
@@ -17,6 +18,8 @@ export async function keepReport(
 	what: 'picture' | 'readings',
 	now: Date
 ): Promise<number> {
+	// Whoever may read another's report still keeps a logbook of their own work only.
+	await getAttempt(actor, 'attempt.work', attemptId);
 	const { picture, readings } = await getReport(actor, attemptId);
 	const requests =
 		what === 'readings'
