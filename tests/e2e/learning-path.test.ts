@@ -1,5 +1,5 @@
 import { expect, test } from '@playwright/test';
-import { collectFaults, expectAccessible, openExercise, readingRow, signIn } from './bench-page';
+import { collectFaults, expectAccessible, openBench, readingRow, signIn } from './bench-page';
 import { ready } from './ready';
 
 test.use({ viewport: { width: 1440, height: 900 } });
@@ -48,7 +48,7 @@ test('a reading and a picture go from the bench into the logbook, and out of it 
 }) => {
 	const faults = await collectFaults(page);
 	await signIn(page, 'bridget.hale@tarnvale.example');
-	await openExercise(page, 'strongest-and-its-neighbour');
+	await openBench(page, 'two-carriers-or-one');
 	await page.getByRole('button', { name: 'Marker', exact: true }).click();
 	const row = readingRow(page, 'Marker');
 	await row.getByRole('button', { name: /^Log/ }).click();
