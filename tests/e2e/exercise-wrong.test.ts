@@ -67,8 +67,8 @@ test('a lead left out is named, and a fresh attempt starts from the finding', as
 		const rows = { from: 0, to: 15 };
 		const taken = { rows, trace: 1, request };
 		const { reading } = await ask<ReadingResponse>(page, `/api/attempts/${attemptId}/readings`, taken);
-		const { id, unit } = exercise.questions[i];
-		answers[id] = { text: reading.value.toFixed(1), unit, readingId: reading.id };
+		const { id } = exercise.questions[i];
+		answers[id] = { text: reading.value.toFixed(1), unit: reading.unit, readingId: reading.id };
 	}
 	await ask(page, `/api/attempts/${attemptId}/drafts`, { answers }, 'PUT');
 	await page.goto(`/learn/attempts/${attemptId}`);

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
+import { numberAnswers, type AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
 import type { FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { gradeAnswer } from '$lib/server/bench/grading/grade-answer';
@@ -23,7 +23,7 @@ const graded = (answers: AttemptRecord['answers']) => gradeAnswer({ drawn, ...re
 describe('a difference worked out between two markers', () => {
 	const attached = record.readings.at(-1)?.id;
 	const answers = Object.fromEntries(
-		Object.entries(taught.answers).map(([id, { value }]) => [id, { value, readingId: attached }])
+		Object.entries(numberAnswers(taught)).map(([id, { value }]) => [id, { value, readingId: attached }])
 	);
 
 	it('is told that the sum is sound, and that one marker read from the other is one reading', () => {
@@ -35,7 +35,9 @@ describe('a difference worked out between two markers', () => {
 	});
 
 	it('is told the same when no reading is attached', () => {
-		const bare = Object.fromEntries(Object.entries(taught.answers).map(([id, { value }]) => [id, { value }]));
+		const bare = Object.fromEntries(
+			Object.entries(numberAnswers(taught)).map(([id, { value }]) => [id, { value }])
+		);
 		for (const { remarks } of graded(bare))
 			expect(remarks.map(({ code }) => code)).toEqual(['between-markers']);
 	});

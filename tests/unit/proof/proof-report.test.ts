@@ -6,6 +6,7 @@ const row = (over: Partial<ProofRow>): ProofRow => ({
 	question: 'q',
 	mistake: null,
 	done: 200,
+	numbers: 200,
 	passShare: 1,
 	namedShare: 1,
 	meanError: 0,

@@ -1,4 +1,5 @@
 /** Every mistake watched in units 1 to 3: what theory says of it is what the bench gives when it is made there, and it is named. */
+import { numberFindings } from '../../../factories/number-findings';
 import { numberQuestions } from '$lib/server/bench/exercise/drawn-exercise';
 import { describe, expect, it } from 'vitest';
 import { gradeAnswer } from '$lib/server/bench/grading/grade-answer';
@@ -41,7 +42,7 @@ describe.each(kinds)('%s', (kind) => {
 	it('is explained with the learner’s own numbers', () => {
 		const [{ drawn, question, watched }] = ofKind;
 		const { record } = runMethod(drawn, watched.mistake.make(drawn.method, { drawn, question }));
-		const finding = gradeAnswer({ drawn, ...record }).questions.find(({ id }) => id === question.id)!;
+		const finding = numberFindings(gradeAnswer({ drawn, ...record })).find(({ id }) => id === question.id)!;
 		expect(finding.mistakes).toHaveLength(1);
 		const [{ title, text, sum }] = finding.mistakes;
 		expect(`${title} ${text} ${sum}`).not.toMatch(/undefined|NaN|Infinity|too much|too far/);
