@@ -11,6 +11,8 @@ export async function startBuilt(folder: string, { host, port, origin }: Address
 		HOST: host,
 		PORT: String(port),
 		ORIGIN: origin,
+		// A course comes in as a zip; whatever else reads a body has a limit of its own.
+		BODY_SIZE_LIMIT: process.env.BODY_SIZE_LIMIT ?? '13M',
 		// Streams of sweeps would hold up the end for half a minute.
 		SHUTDOWN_TIMEOUT: process.env.SHUTDOWN_TIMEOUT ?? '3'
 	};

@@ -1,5 +1,7 @@
 /** What crosses the wire at the authoring desk. */
 import { z } from 'zod';
+import { exercisePreview, lessonPreview } from './preview-view';
+import { proofState } from './proof-view';
 
 /** Characters a file of a course may have. */
 export const MOST_CHARACTERS = 120_000;
@@ -17,7 +19,7 @@ export const saveFileRequest = z.strictObject({ path: filePath, text, revision }
 export const restoreRequest = z.strictObject({ path: filePath, versionId: z.int().min(1), revision });
 /** `POST …/presence`: this file is open here. */
 export const presenceRequest = z.strictObject({ path: filePath });
-export const fileQuery = z.object({ path: filePath });
+export const fileQuery = z.strictObject({ path: filePath });
 
 /** A draft's file as its editor gets it. */
 export const draftFileView = z.strictObject({
@@ -87,3 +89,76 @@ export type OutlineChange = z.infer<typeof outlineChange>;
 
 export const newCourse = z.strictObject({ title: line, summary: line, unit: line });
 export type NewCourse = z.infer<typeof newCourse>;
+
+/** How an exercise of a draft stands: its text as it is kept now. */
+export const exerciseStates = ['published', 'proven', 'failed', 'proving', 'draft'] as const;
+
+const changed = { changedBy: z.string(), changedAt: z.iso.datetime() };
+export const draftView = z.strictObject({
+	slug: z.string(),
+	title: z.string(),
+	summary: z.string(),
+	/** The newest edition; null before the first. */
+	newest: z.strictObject({ number: z.int(), publishedAt: z.iso.datetime() }).nullable(),
+	units: z.array(
+		z.strictObject({
+			number: z.int(),
+			slug: z.string(),
+			title: z.string(),
+			summary: z.string(),
+			lesson: z.strictObject({ path: z.string(), published: z.boolean(), ...changed }),
+			exercises: z.array(
+				z.strictObject({
+					slug: z.string(),
+					title: z.string(),
+					path: z.string(),
+					state: z.enum(exerciseStates),
+					...changed
+				})
+			)
+		})
+	),
+	archive: z.strictObject({
+		units: z.array(z.strictObject({ folder: z.string(), title: z.string() })),
+		exercises: z.array(z.strictObject({ path: z.string(), title: z.string() }))
+	}),
+	/** Against the newest edition. */
+	changes: z.array(
+		z.strictObject({ path: z.string(), what: z.enum(['added', 'changed', 'moved', 'taken out']) })
+	),
+	/** What must be proven before an edition can be published. */
+	unproven: z.array(z.strictObject({ path: z.string(), title: z.string() }))
+});
+
+export const authoredCourse = z.strictObject({
+	slug: z.string(),
+	title: z.string(),
+	edition: z.int().nullable(),
+	publishedAt: z.iso.datetime().nullable(),
+	draft: z.strictObject(changed).nullable()
+});
+
+export type ExerciseState = (typeof exerciseStates)[number];
+export type DraftView = z.infer<typeof draftView>;
+export type AuthoredCourse = z.infer<typeof authoredCourse>;
+
+const filePlace = {
+	course: z.strictObject({ slug: z.string(), title: z.string() }),
+	unit: z.strictObject({ number: z.int(), title: z.string() }),
+	file: draftFileView
+};
+/** What the desk of one file shows at first. */
+export const fileDesk = z.discriminatedUnion('kind', [
+	z.strictObject({ kind: z.literal('lesson'), ...filePlace, preview: lessonPreview }),
+	z.strictObject({
+		kind: z.literal('exercise'),
+		...filePlace,
+		/** Within its unit, from 1. */
+		number: z.int(),
+		preview: exercisePreview,
+		proof: proofState
+	})
+]);
+export type FileDesk = z.infer<typeof fileDesk>;
+export type LessonDesk = Extract<FileDesk, { kind: 'lesson' }>;
+export type ExerciseDesk = Extract<FileDesk, { kind: 'exercise' }>;

@@ -1,5 +1,6 @@
 /** What a draft's file looks like before it is published. */
 import { z } from 'zod';
+import { figureChoice } from './figure';
 import { figureState } from './figure-view';
 import { lessonPartView } from './lesson-view';
 import { readingRequest } from './reading';
@@ -51,6 +52,11 @@ export const lessonPreview = z.strictObject({
 
 const text = z.string().max(120_000);
 export const lessonPreviewRequest = z.strictObject({ text });
+export const figureTurnRequest = z.strictObject({
+	text,
+	id: z.string().max(80),
+	values: z.array(figureChoice).max(3)
+});
 export const exercisePreviewRequest = z.strictObject({
 	text,
 	/** Of the file, in its unit's folder: its slug must be the same. */

@@ -50,7 +50,10 @@ it('the table names every load, action and endpoint that there is, and no other'
 describe.each(Object.entries(REACH).filter(([, { thing }]) => thing !== 'attempt'))('%s', (door, reach) => {
 	it('lets in whom the table says', async () => {
 		const { exercise } = await createCourse();
-		const params = { slug: exercise.slug, id: '999999', unitId: '999999', figureId: 'none' };
+		const params = {
+			...{ slug: exercise.slug, id: '999999', unitId: '999999', figureId: 'none' },
+			...{ course: 'none', unit: '06-spread', file: 'lesson.md' }
+		};
 		for (const role of [null, ...roles]) {
 			// A fresh person, since signing out or starting an attempt changes one.
 			const actor = role && (door.startsWith('load') ? people[role] : (await createUser(role)).actor);

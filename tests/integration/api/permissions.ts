@@ -12,6 +12,8 @@ export interface Reach {
 	absent?: boolean;
 	/** A body that is read without complaint, so that the refusal is one of the person. */
 	body?: unknown;
+	/** Parts of it that may be as long as a file. */
+	longTexts?: readonly string[];
 	/** The same where a form is sent. */
 	form?: Record<string, string>;
 	query?: string;
@@ -24,6 +26,10 @@ const learners: Reach = { who: ['apprentice', 'instructor', 'administrator'] };
 const owner: Reach = { who: [], thing: 'attempt' };
 /** Also whoever may read everybody's attempts. */
 const readable: Reach = { who: ['administrator'], thing: 'attempt' };
+const authors: Reach = { who: ['instructor', 'administrator'] };
+/** Of a course that has no draft. */
+const ofDraft: Reach = { ...authors, absent: true };
+const PATH = '06-spread/lesson.md';
 const settings = {
 	centreHz: 450e6,
 	spanHz: 1e6,
@@ -85,6 +91,46 @@ export const REACH: Record<string, Reach> = {
 
 	'load /learn': learners,
 	'load /teach': { who: ['instructor', 'administrator'] },
+	'load /teach/courses': authors,
+	'action /teach/courses?/create': authors,
+	'action /teach/courses?/start': { ...authors, absent: true },
+	'load /teach/courses/[course]': { ...authors, absent: true },
+	'action /teach/courses/[course]?/change': { ...authors, absent: true },
+	'action /teach/courses/[course]?/publish': { ...authors, absent: true },
+	'load /teach/courses/[course]/[unit]/[file]': { ...authors, absent: true },
+	'PUT /api/drafts/[course]/files': {
+		...ofDraft,
+		body: { path: PATH, text: 'x', revision: 1 },
+		longTexts: ['text']
+	},
+	'POST /api/drafts/[course]/restorations': {
+		...ofDraft,
+		body: { path: PATH, versionId: 1, revision: 1 }
+	},
+	'POST /api/drafts/[course]/presence': { ...ofDraft, body: { path: PATH } },
+	'GET /api/drafts/[course]/versions': { ...ofDraft, query: `?path=${PATH}` },
+	'GET /api/drafts/[course]/versions/[id]': { ...ofDraft, query: `?path=${PATH}` },
+	'GET /api/drafts/[course]/proofs': { ...ofDraft, query: `?path=${PATH}` },
+	'POST /api/drafts/[course]/proofs': { ...ofDraft, body: { path: PATH } },
+	'DELETE /api/drafts/[course]/proofs': { ...ofDraft, query: `?path=${PATH}` },
+	'POST /api/drafts/[course]/previews/lesson': {
+		...ofDraft,
+		body: { text: 'A lesson.' },
+		longTexts: ['text']
+	},
+	'POST /api/drafts/[course]/previews/exercise': {
+		...ofDraft,
+		body: { text: 'slug: [', path: PATH, seed: 1 },
+		longTexts: ['text']
+	},
+	'POST /api/drafts/[course]/previews/figure': {
+		...ofDraft,
+		body: { text: 'No figure.', id: 'none', values: [] },
+		longTexts: ['text']
+	},
+	'GET /api/drafts/[course]/zip': ofDraft,
+	'POST /api/drafts/[course]/zip': ofDraft,
+	'POST /api/drafts/zip': authors,
 	'load /office': { who: ['coordinator', 'administrator'] },
 	'load /company': { who: ['company-contact', 'administrator'] },
 	'load /admin': { who: ['administrator'] },

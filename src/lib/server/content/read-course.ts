@@ -64,6 +64,20 @@ export function readOutline(tree: ContentTree) {
 	return value;
 }
 
+/**
+ * What course.yaml says, when every file that it names is there and no other; what the files say is not looked at.
+ * @throws ContentError
+ */
+export function readStructure(tree: ContentTree) {
+	const outline = readOutline(tree);
+	for (const unit of outline.units) {
+		refuseStrays(tree, unit);
+		const names = ['lesson.md', ...unit.exercises.map((slug) => `${slug}.yaml`)];
+		for (const name of names) textIn(tree, `${folderOf(unit)}/${name}`);
+	}
+	return outline;
+}
+
 function refuseStrays(tree: ContentTree, unit: CourseUnit): void {
 	const folder = folderOf(unit);
 	const expected = ['lesson.md', ...unit.exercises.map((slug) => `${slug}.yaml`)];

@@ -8,7 +8,7 @@ export class JobRunner {
 	#stopped = false;
 	#wake: () => void = () => undefined;
 	#woken = false;
-	#loop: Promise<void> | undefined;
+	#started = false;
 
 	constructor(
 		private readonly handlers: JobHandlers,
@@ -16,7 +16,9 @@ export class JobRunner {
 	) {}
 
 	start(): void {
-		this.#loop ??= this.#run();
+		if (this.#started) return;
+		this.#started = true;
+		void this.#run();
 	}
 
 	/** Looks for jobs at once. */

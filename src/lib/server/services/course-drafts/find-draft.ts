@@ -51,3 +51,9 @@ export async function getDraftFileRow(
 	if (!file) throw new DomainError('not_found', 'The draft has no such file.');
 	return file;
 }
+
+/** For what reads its input before it looks for the draft: refuses first. @throws DomainError `forbidden`; `not_found` */
+export async function requireDraft(actor: Actor, slug: string): Promise<void> {
+	refuseReaders(actor);
+	await getDraft(slug);
+}

@@ -58,7 +58,8 @@ export function work(task: DeskTask): DeskWork[keyof DeskWork]['answer'] {
 			return figures(task.text);
 		case 'turn': {
 			const figure = figuresIn(task.text, 'lesson.md').find(({ id }) => id === task.id);
-			return figure ? computeFigure(figure, task.values) : null;
+			const offered = figure?.controls.every(({ choices }, i) => choices.includes(task.values[i]));
+			return figure && offered ? computeFigure(figure, task.values) : null;
 		}
 		case 'course':
 			return course(task);

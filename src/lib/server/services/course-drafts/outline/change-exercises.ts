@@ -75,7 +75,7 @@ export function archiveExercise(before: Before, { exercise }: ChangeOf<'archive-
 }
 
 /** Where a file goes that is taken out; beside one of the same name that was taken out before. */
-export function archivedPath({ paths }: Before, path: string): string {
+export function archivedPath({ paths }: Pick<Before, 'paths'>, path: string): string {
 	const [, stem, ending] = /^(.*?)(\.[a-z]+)$/.exec(path) ?? [path, path, ''];
 	let candidate = `archive/${path}`;
 	for (let n = 2; paths.includes(candidate); n++) candidate = `archive/${stem}~${n}${ending}`;

@@ -24,6 +24,10 @@ export class DraftOutline {
 		this.#document = parseDocument(text);
 	}
 
+	get title(): string {
+		return String(this.#document.get('title'));
+	}
+
 	get units(): UnitEntry[] {
 		return this.#unitSeq.items.map((item) => {
 			const node = item as YAMLMap;

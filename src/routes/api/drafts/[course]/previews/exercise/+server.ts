@@ -1,0 +1,13 @@
+import { exercisePreviewRequest } from '$lib/schemas/preview-view';
+import { requireActor } from '$lib/server/auth/require-actor';
+import { FILE_BODY_BYTES, readJson } from '$lib/server/read-json';
+import { respondJson } from '$lib/server/respond';
+import { previewExerciseText } from '$lib/server/services/course-drafts/preview-file';
+import type { RequestHandler } from './$types';
+
+export const POST: RequestHandler = ({ locals, params, request }) =>
+	respondJson(async () => {
+		const actor = requireActor(locals);
+		const asked = await readJson(request, exercisePreviewRequest, FILE_BODY_BYTES);
+		return previewExerciseText(actor, params.course, asked);
+	});
