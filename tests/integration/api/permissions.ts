@@ -92,7 +92,10 @@ export const REACH: Record<string, Reach> = {
 	'load /learn': learners,
 	'load /teach': { who: ['instructor', 'administrator'] },
 	'load /teach/courses': authors,
-	'action /teach/courses?/create': authors,
+	'action /teach/courses?/create': {
+		...authors,
+		form: { title: 'Quay', summary: 'From the quay.', unit: 'First steps' }
+	},
 	'action /teach/courses?/start': { ...authors, absent: true },
 	'load /teach/courses/[course]': { ...authors, absent: true },
 	'action /teach/courses/[course]?/change': { ...authors, absent: true },

@@ -9,6 +9,7 @@ export class ProofRun {
 	problem = $state('');
 	busy = $state(false);
 	#timer: ReturnType<typeof setTimeout> | undefined;
+	#turns = 0;
 
 	constructor(
 		first: ProofState,
@@ -32,19 +33,29 @@ export class ProofRun {
 	}
 
 	look = (): Promise<void> => this.#ask(() => this.wire.proof());
-	start = (): Promise<void> => this.#ask(() => this.wire.askForProof());
-	cancel = (): Promise<void> => this.#ask(() => this.wire.cancelProof());
+	start = (): Promise<void> => this.#act(() => this.wire.askForProof());
+	cancel = (): Promise<void> => this.#act(() => this.wire.cancelProof());
 
-	async #ask(question: () => Promise<ProofState>): Promise<void> {
-		this.problem = '';
+	/** Only what was pressed holds the buttons: looking on must not take them away under a finger. */
+	async #act(question: () => Promise<ProofState>): Promise<void> {
 		this.busy = true;
+		await this.#ask(question);
+		this.busy = false;
+	}
+
+	/** Of several questions under way, the last one's answer counts. */
+	async #ask(question: () => Promise<ProofState>): Promise<void> {
+		clearTimeout(this.#timer);
+		const turn = ++this.#turns;
 		try {
-			this.state = await question();
+			const state = await question();
+			if (turn !== this.#turns) return;
+			this.state = state;
+			this.problem = '';
 		} catch (cause) {
+			if (turn !== this.#turns) return;
 			this.problem = cause instanceof Error ? cause.message : String(cause);
-		} finally {
-			this.busy = false;
-			this.follow();
 		}
+		this.follow();
 	}
 }

@@ -5,6 +5,7 @@ import { readForm } from '$lib/server/read-form';
 import { parseWith } from '$lib/server/read-json';
 import { refusalOf, respond } from '$lib/server/respond';
 import { createCourse } from '$lib/server/services/course-drafts/create-course';
+import { refuseReaders } from '$lib/server/services/course-drafts/find-draft';
 import { listAuthoredCourses } from '$lib/server/services/course-drafts/list-authored-courses';
 import { startDraft } from '$lib/server/services/course-drafts/start-draft';
 import type { Actions, PageServerLoad } from './$types';
@@ -20,6 +21,7 @@ export const actions: Actions = {
 		let course: string;
 		let typed: Record<string, FormDataEntryValue> = {};
 		try {
+			refuseReaders(actor);
 			typed = await readForm(event.request);
 			course = await createCourse(actor, parseWith(newCourse, typed), new Date());
 		} catch (cause) {
