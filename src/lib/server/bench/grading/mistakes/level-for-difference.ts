@@ -20,7 +20,7 @@ export const levelForDifference = defineMistake('level-for-difference', z.strict
 		value:
 			lineDbm(context, toHz(context)) +
 			drawReceiverError(context.drawn.profile, context.drawn.seed).levelDb(toHz(context)),
-		spread: modelSpread(context.question)
+		spread: 1.5 * modelSpread(context.question)
 	}),
 	explain({ question, drawn, yours }) {
 		const { fromHz = 0 } = question.quantity as { fromHz?: number };
