@@ -106,7 +106,7 @@ export const ROOMS: Room[] = [
 
 /** Packages that belong to few rooms, whatever those may import besides. */
 export const OWNED_PACKAGES: Record<string, string[]> = {
-	sequelize: [...server('db', 'services', 'auth'), 'migrations', 'src/cli'],
+	sequelize: [...server('db', 'services', 'auth', 'jobs'), 'migrations', 'src/cli'],
 	mariadb: ['src/cli'],
 	umzug: server('db'),
 	lucia: server('auth'),
