@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { choiceShown, stateWords } from '$lib/components/figure/choice-words';
 import { figureMarks } from '$lib/components/figure/figure-marks';
-import { nextStep } from '$lib/components/lesson/next-step';
+import { afterLesson } from '$lib/components/lesson/after-lesson';
 import type { ExerciseProgress } from '$lib/schemas/course-view';
 
 const taken = (kind: string, value: number, unit: string, parts?: unknown) => ({
@@ -131,25 +131,25 @@ describe('choiceShown(setting, choice)', () => {
 		).toBe('300\u00a0Hz, average'));
 });
 
-describe('nextStep(exercises)', () => {
+describe('afterLesson(exercises)', () => {
 	const exercise = (over: Partial<ExerciseProgress>): ExerciseProgress => ({
 		...{ slug: 'a', title: 'A', number: 1, tries: 3, triesLeft: 3, attempts: [] },
 		...{ standing: 'not-started', openAttemptId: null, repeat: null, ...over }
 	});
 
 	it('goes on with what is open before anything new', () =>
-		expect(nextStep([exercise({}), exercise({ slug: 'b', openAttemptId: 7 })])).toMatchObject({
+		expect(afterLesson([exercise({}), exercise({ slug: 'b', openAttemptId: 7 })])).toMatchObject({
 			kind: 'go-on',
 			attemptId: 7
 		}));
 	it('takes the first exercise that is not right and can still be tried', () =>
 		expect(
-			nextStep([
+			afterLesson([
 				exercise({ standing: 'passed' }),
 				exercise({ slug: 'b', standing: 'not-passed', triesLeft: 0 }),
 				exercise({ slug: 'c', standing: 'not-passed', triesLeft: 1 })
 			])
 		).toMatchObject({ kind: 'exercise', exercise: { slug: 'c' } }));
 	it('is done when there is none', () =>
-		expect(nextStep([exercise({ standing: 'passed' })]).kind).toBe('done'));
+		expect(afterLesson([exercise({ standing: 'passed' })]).kind).toBe('done'));
 });

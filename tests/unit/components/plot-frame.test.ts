@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { plotFrame } from '$lib/components/bench/plot/plot-frame';
+import { levelAt, plotFrame } from '$lib/components/bench/plot/plot-frame';
 
 const margins = { top: 10, right: 20, bottom: 30, left: 40 };
 const frame = plotFrame({ width: 1060, height: 340 }, margins, {
@@ -42,5 +42,18 @@ describe('plotFrame(size, margins, window)', () => {
 		});
 		expect(tiny.rightPx).toBeGreaterThan(tiny.leftPx);
 		expect(tiny.bottomPx).toBeGreaterThan(tiny.topPx);
+	});
+});
+
+describe('levelAt(levelsDbm, window, at)', () => {
+	const window = { start: 100e6, stop: 101e6 };
+	it('is the level of the nearest point', () => {
+		expect(levelAt([-10, -20, -30], window, 100.5e6)).toBe(-20);
+		expect(levelAt([-10, -20, -30], window, 100.8e6)).toBe(-30);
+	});
+	it('is none outside the window, of nothing, and where nothing was swept yet', () => {
+		expect(levelAt([-10, -20, -30], window, 102e6)).toBeUndefined();
+		expect(levelAt([], window, 100.5e6)).toBeUndefined();
+		expect(levelAt([-10, NaN, -30], window, 100.5e6)).toBeUndefined();
 	});
 });

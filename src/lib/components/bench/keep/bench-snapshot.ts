@@ -2,6 +2,7 @@
 import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
 import { traceWords } from '../setup/setup-words';
 import { readingKind } from '../readings/reading-kinds';
+import { levelAt } from '../plot/plot-frame';
 import type { PlottedBand, PlottedMarker } from '../plot/plotted';
 import { shownReading } from '../shown-quantity';
 import type { Bench } from '../state/bench.svelte';
@@ -45,8 +46,8 @@ export function snapshotOf(bench: Bench, order: string): BenchSnapshot {
 		})),
 		markers: bench.markers.list.flatMap(({ letter, at, trace }) => {
 			const line = levels[trace - 1] ?? [];
-			const levelDbm = line[Math.round(((at - axis.start) / (axis.stop - axis.start)) * (line.length - 1))];
-			if (levelDbm === undefined || Number.isNaN(levelDbm)) return [];
+			const levelDbm = levelAt(line, axis, at);
+			if (levelDbm === undefined) return [];
 			return [{ letter, at, levelDbm, selected: false, where: '' }];
 		}),
 		bands: recording ? [] : bandsOf(bench),

@@ -1,4 +1,5 @@
 /** Where the flags of markers stand: each turns away from its neighbour and rises until none overlap. */
+import type { PlotFrame } from './plot-frame';
 
 export const flagPx = { width: 19, height: 15, leastStem: 24, mostStem: 46 };
 
@@ -11,6 +12,12 @@ export interface FlagPlace {
 	/** Which way the cloth flies. */
 	side: 'left' | 'right';
 }
+
+/** Where a marker's foot stands on its trace, px: inside the drawing, with room for the flag above it. */
+export const footOf = (frame: PlotFrame, at: number, levelDbm: number): { x: number; y: number } => ({
+	x: frame.x(at),
+	y: Math.max(frame.topPx + 18, Math.min(frame.bottomPx, frame.y(levelDbm)))
+});
 
 interface Box {
 	left: number;

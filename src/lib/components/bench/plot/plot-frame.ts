@@ -34,6 +34,22 @@ export interface PlotFrame extends PlotWindow {
 	at: (px: number) => number;
 }
 
+/** The room that the bench keeps around its drawing. @param morePx for level lines that bear their own unit, at the left */
+export const benchMargins = (narrow: boolean, morePx = 0): PlotMargins =>
+	narrow
+		? { top: 16, right: 12, bottom: 28, left: 36 + morePx }
+		: { top: 14, right: 8, bottom: 28, left: 44 + morePx };
+
+/** The level that a trace over a whole window shows at a place; undefined where it holds nothing. */
+export function levelAt(
+	levelsDbm: ArrayLike<number>,
+	{ start, stop }: Pick<PlotWindow, 'start' | 'stop'>,
+	at: number
+): number | undefined {
+	const level = levelsDbm[Math.round(((at - start) / (stop - start)) * (levelsDbm.length - 1))];
+	return Number.isNaN(level) ? undefined : level;
+}
+
 /**
  * Lays a window of frequency (or time) and level over a drawing of `width` × `height` px. A window without width puts
  * everything in the middle.

@@ -4,6 +4,7 @@ import type { AttemptView } from '$lib/schemas/attempt';
 import type { BenchRequest } from '$lib/schemas/reading';
 import type { LoggedSetUp } from '$lib/schemas/set-up-log';
 import type { ResolvedSettings, Settings } from '$lib/schemas/settings';
+import { levelAt } from '../plot/plot-frame';
 import { Playback } from '../over-time/playback.svelte';
 import type { View } from '../over-time/ViewSwitch.svelte';
 import type { ReadingContext } from '../readings/reading-kinds';
@@ -122,11 +123,7 @@ export class Bench {
 	 */
 	levelAt(at: number, trace: number): number | undefined {
 		const drawn = this.traces.read[trace - 1]?.drawnDbm;
-		if (!drawn || drawn.length < 2) return undefined;
-		const { start, stop } = this.axis;
-		const index = Math.round(((at - start) / (stop - start)) * (drawn.length - 1));
-		const level = drawn[index];
-		return level === undefined || Number.isNaN(level) ? undefined : level;
+		return drawn && levelAt(drawn, this.axis, at);
 	}
 
 	/** One point of the trace, in the axis' unit. */
