@@ -31,7 +31,7 @@ test('markers, a count, a table, what is kept, and sweeps over time are had on t
 		await keyboard.type('110, 53');
 		await keyboard.press('Tab');
 		await keyboard.press('Enter');
-		await expect(page.getByRole('button', { name: 'Correction, table of 2' })).toBeVisible();
+		await expect(page.getByRole('button', { name: 'Correction, table of 2' })).toBeFocused();
 	});
 
 	await test.step('a marker’s sentence moves it, and another is read from it', async () => {
