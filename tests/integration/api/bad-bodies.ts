@@ -29,7 +29,7 @@ const BEYOND = '@beyond@';
 export function bentBodies(good: unknown): [string, string, string][] {
 	const strangeWhole = JSON.stringify({ ...(good as object), strange: 1 });
 	const ofWhole: [string, string, string] = ['strange', 'a part that it does not know', strangeWhole];
-	const ofParts = partsOf(good).flatMap(([path, value]) => {
+	const ofParts = partsOf(good).flatMap(([path, value]): [string, string, string][] => {
 		const bend = (what: string, to: unknown): [string, string, string] => [
 			path,
 			what,
