@@ -6,6 +6,7 @@ import { sameWidth, widthHzOf } from '$lib/server/bench/grading/read-width';
 import { isAbsoluteLevel } from '$lib/server/bench/grading/asked';
 import { correctsOnBench, withSettings, withSum } from '$lib/server/bench/grading/spoil';
 import type { Random } from '$lib/server/bench/receiver/random';
+import { coarsestStepHz } from './coarsest-step';
 import { extentOf, type Extent } from './extent';
 
 const between = (random: Random, from: number, to: number): number => from + (to - from) * random.uniform();
@@ -45,6 +46,7 @@ export function varyMethod(
 		filterBy: chance(random, 0.25) ? -1 : !sound && chance(random, 0.15) ? 1 : 0,
 		points: [501, 1001, 1501, 2001][Math.floor(4 * random.uniform())]
 	};
+	const coarsest = (rbwHz: number) => coarsestStepHz(rbwHz, { steps, question, sound });
 	const lookedFirst = chance(random, 0.4);
 	const taught = new Set(drawn.method.flatMap((step) => (step.do === 'set' ? [step.settings.rbwHz] : [])));
 	const varied = steps.map((step): FilledStep => {
@@ -52,7 +54,7 @@ export function varyMethod(
 			const isTaught = taught.has(step.settings.rbwHz);
 			return {
 				...step,
-				settings: varySettings(step.settings, drawn, { ...view, extent, sweepsBy, isTaught })
+				settings: varySettings(step.settings, drawn, { ...view, extent, sweepsBy, isTaught, coarsest })
 			};
 		}
 		if (step.do === 'sweep') return { ...step, sweeps: Math.max(1, Math.round(step.sweeps * sweepsBy)) };
@@ -71,6 +73,8 @@ interface View {
 	extent: Extent;
 	sweepsBy: number;
 	isTaught: boolean;
+	/** How far apart points of one's own choosing may lie with a filter of so many hertz. */
+	coarsest: (rbwHz: number) => number;
 }
 
 function varySettings(settings: Settings, drawn: DrawnExercise, view: View): Settings {
@@ -88,7 +92,7 @@ function varySettings(settings: Settings, drawn: DrawnExercise, view: View): Set
 	const spanHz = next.spanHz ?? 0;
 	const finest = typeof next.rbwHz === 'number' ? next.rbwHz : spanHz / 100;
 	const asked = settings.points ?? 1001;
-	if (spanHz > 0 && spanHz / (view.points - 1) <= Math.max(0.6 * finest, spanHz / (asked - 1))) {
+	if (spanHz > 0 && spanHz / (view.points - 1) <= Math.max(view.coarsest(finest), spanHz / (asked - 1))) {
 		next.points = view.points;
 	}
 	if (settings.traces) {
