@@ -2,6 +2,7 @@
 import { z } from 'zod';
 import { readingId } from './answer';
 import { readingView } from './attempt';
+import { digits } from './number';
 import { reportPicture } from './report';
 import { resolvedSettings } from './settings';
 import { rowNumber } from './sweep-stream';
@@ -46,6 +47,11 @@ export const logbookFilter = z.object({
 	from: day,
 	to: day,
 	page: z.coerce.number().int().min(1).max(1000).default(1)
+});
+
+/** `GET /learn/logbook/pdf?entry=&entry=`: the entries of a document. */
+export const documentQuery = z.strictObject({
+	entry: z.array(digits.pipe(z.int().min(1).max(4_294_967_295)))
 });
 
 /** An entry as a list shows it. */

@@ -149,7 +149,7 @@ export const REACH: Record<string, Reach> = {
 	'action /learn/logbook/[id]?/remove': { ...learners, absent: true },
 	'GET /learn/logbook/csv': learners,
 	'GET /learn/logbook/pdf': { ...learners, absent: true, query: '?entry=999999' },
-	'load /learn/find': { ...learners, query: '?q=marker' },
+	'load /learn/find': learners,
 	'load /learn/units/[slug]': { ...learners, absent: true },
 	'POST /api/attempts': { ...learners, body: { exercise: 'spread-carrier-1' } },
 	'POST /api/figures/[unitId]/[figureId]': { ...learners, absent: true, body: { values: { rbwHz: 1000 } } },

@@ -34,7 +34,12 @@ beforeAll(async () => {
 afterAll(() => server.close());
 
 const ask = (id: number, body: unknown, signal?: AbortSignal) =>
-	fetch(`${base}/${id}`, { method: 'POST', body: JSON.stringify(body), signal });
+	fetch(`${base}/${id}`, {
+		method: 'POST',
+		headers: { 'content-type': 'application/json' },
+		body: JSON.stringify(body),
+		signal
+	});
 
 describe('POST …/sweeps over a socket', () => {
 	it('brings the rows one by one, as they are swept', async () => {

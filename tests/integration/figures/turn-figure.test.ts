@@ -59,7 +59,7 @@ describe('POST /api/figures/[unitId]/[figureId]', () => {
 		['a control that isn’t there', { values: { rbwHz: 300, spanHz: 1e9 } }, 422, 'values.spanHz'],
 		['a list for a value', { values: { rbwHz: [300] } }, 422, 'values.rbwHz'],
 		['no values', {}, 422, 'values'],
-		['settings of one’s own', { values: { rbwHz: 300 }, settings: {} }, 422, '']
+		['settings of one’s own', { values: { rbwHz: 300 }, settings: {} }, 422, 'settings']
 	])('refuses %s with 4xx, naming the control', async (_, body, status, field) => {
 		const refusal = await refused(await post(body));
 		expect(refusal.status).toBe(status);

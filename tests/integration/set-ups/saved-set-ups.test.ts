@@ -72,8 +72,8 @@ describe('/api/set-ups', () => {
 		['a name of two lines', { name: 'a\nb', settings }, 'name'],
 		['a name too long', { name: 'x'.repeat(61), settings }, 'name'],
 		['a resolution below nothing', { name: 'a', settings: { rbwHz: -1 } }, 'settings.rbwHz'],
-		['a field it doesn’t know', { name: 'a', settings: { colour: 1 } }, 'settings'],
-		['more than is asked for', { name: 'a', settings, userId: 1 }, ''],
+		['a field it doesn’t know', { name: 'a', settings: { colour: 1 } }, 'settings.colour'],
+		['more than is asked for', { name: 'a', settings, userId: 1 }, 'userId'],
 		[
 			'a table too long',
 			{

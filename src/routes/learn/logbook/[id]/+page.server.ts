@@ -16,10 +16,11 @@ export const load: PageServerLoad = async (event) => {
 export const actions = {
 	note: async (event) => {
 		const actor = requireUser(event);
-		const typed = await readForm(event.request);
+		const id = await respond(() => readId(event.params.id, 'entry'));
+		const typed = await respond(() => readForm(event.request));
 		try {
 			const { note } = parseWith(noteForm, typed);
-			await noteEntry(actor, readId(event.params.id, 'entry'), note);
+			await noteEntry(actor, id, note);
 			return { done: 'Note kept.', message: undefined, note };
 		} catch (cause) {
 			const { status, message, issues } = refusalOf(cause);

@@ -1,5 +1,6 @@
+import { documentQuery } from '$lib/schemas/logbook';
 import { requireActor } from '$lib/server/auth/require-actor';
-import { readId } from '$lib/server/read-id';
+import { parseWith } from '$lib/server/read-json';
 import { respondWith } from '$lib/server/respond';
 import { exportLogbookPdf } from '$lib/server/services/logbook/export-pdf';
 import type { RequestHandler } from './$types';
@@ -7,8 +8,11 @@ import type { RequestHandler } from './$types';
 export const GET: RequestHandler = ({ locals, url }) =>
 	respondWith(async () => {
 		const actor = requireActor(locals);
-		const ids = url.searchParams.getAll('entry').map((text) => readId(text, 'entry'));
-		const document = await exportLogbookPdf(actor, ids, new Date());
+		const { entry } = parseWith(documentQuery, {
+			...Object.fromEntries(url.searchParams),
+			entry: url.searchParams.getAll('entry')
+		});
+		const document = await exportLogbookPdf(actor, entry, new Date());
 		return new Response(new Uint8Array(document), {
 			headers: {
 				'content-type': 'application/pdf',
