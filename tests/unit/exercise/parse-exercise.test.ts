@@ -54,6 +54,11 @@ describe('parseExercise(data)', () => {
 			'parameters.carrierOffsetHz.to'
 		],
 		[
+			'a filter swept with where nothing was read yet',
+			(d: never) => set(d, 'method.0.settings.spanHz', '=sweptRbwHz'),
+			'method[0].settings.spanHz'
+		],
+		[
 			'an expression that is none',
 			(d: never) => set(d, 'scene.emitters.0.levelDbm', 'high'),
 			'scene.emitters[0].levelDbm'

@@ -6,7 +6,7 @@ import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { judgeQuestion } from '$lib/server/bench/grading/judge-question';
 import { isDeaf, noiseMw, ownDensityMwPerHz, withNoiseDbm } from '$lib/server/bench/grading/noise-in-reading';
 import { setUpOf } from '$lib/server/bench/grading/set-up-of';
-import { withRawReading, withSettings } from '$lib/server/bench/grading/spoil';
+import { withRawReading, withReading, withSettings } from '$lib/server/bench/grading/spoil';
 import { powerRatioToDb } from '$lib/units/decibel';
 import { contentExercise } from '../../factories/content-exercise';
 
@@ -55,6 +55,35 @@ describe('noise in a reading', () => {
 		expect(isDeaf(antenna, setUp)).toBe(false);
 		expect(isDeaf(antenna, off)).toBe(true);
 	});
+});
+
+describe('a weak carrier', () => {
+	const { drawn, question } = contextOf('weak-carrier-from-an-outstation');
+
+	it.each([100, 300, 1000])(
+		'comes out right through a filter of %d Hz, whose own noise is taken off',
+		(rbwHz) => {
+			const { record } = runMethod(drawn, withSettings(drawn.method, { rbwHz }));
+			expect(Math.abs(numberAnswers(record)[question.id].value - question.truth)).toBeLessThan(0.75);
+		}
+	);
+
+	it.each(['peak', 'marker'] as const)(
+		'looked for with a deaf receiver by a %s, is the floor and no lead left out, even when no reading was kept',
+		(kind) => {
+			const deaf = withRawReading(withSettings(drawn.method, { attenuationDb: 30, points: 1501 }), question);
+			const request = kind === 'peak' ? { kind } : { kind, atHz: question.frequencyHz };
+			const { record } = runMethod(drawn, withReading(deaf, question.id, request));
+			const { value } = numberAnswers(record)[question.id];
+			const { verdict, matched } = judgeQuestion(drawn, question, {
+				...record,
+				readings: [],
+				answers: { [question.id]: { value } }
+			});
+			expect(verdict).toBe('wrong');
+			expect(matched!.watched.map(({ id }) => id)).toEqual(['floor-as-signal attenuator 30']);
+		}
+	);
 });
 
 describe('an answer with the noise taken off', () => {

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import type { SetUp } from '$lib/server/bench/grading/mistake';
 import {
 	averagesDecibels,
+	crestPower,
 	LOG_AVERAGE_DB,
 	pointSpreadDb,
 	shownPower
@@ -27,6 +28,15 @@ describe('how noise is shown', () => {
 			2
 		)
 	);
+
+	it('has its crest at the harmonic number of its points, nearer the mean the more is averaged', () => {
+		const samples: Settings = { detector: 'sample', scale: 'power', points: 501, sweepTimeS: 4 };
+		expect(crestPower(setUp(samples, 1))).toBeCloseTo(harmonic(501), 1);
+		const averaged = setUp({ ...samples, traces: [{ mode: 'average', count: 100 }] }, 100);
+		// The mean of a hundred scatters by a tenth; the greatest of 501 normal numbers stands 3.04 over their mean (from memory).
+		expect(crestPower(averaged)).toBeGreaterThan(1.3);
+		expect(crestPower(averaged)).toBeLessThan(1.4);
+	});
 
 	it('reads higher the longer it is held, and with a peak detector', () => {
 		const held = (sweeps: number) => shownPower(setUp({ traces: [{ mode: 'max-hold' }] }, sweeps));

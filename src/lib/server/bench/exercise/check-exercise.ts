@@ -6,6 +6,7 @@ import { BenchError } from '../bench-error';
 import { refusalsOf, type ExerciseIssue } from './exercise-error';
 import { parseExpression } from './expression';
 import { DISPLAYED_PER_HZ } from './displayed-per-hz';
+import { SWEPT_RBW_HZ } from './swept-rbw';
 import { eachExpression } from './fill-template';
 import { namesInText } from './fill-text';
 
@@ -75,7 +76,7 @@ function checkNames(exercise: Exercise): ExerciseIssue[] {
 	});
 	known.add(DISPLAYED_PER_HZ);
 	exercise.method.forEach((step, i) => {
-		check(step, `method[${i}]`, known);
+		check(step, `method[${i}]`, step.do === 'answer' ? new Set([...known, SWEPT_RBW_HZ]) : known);
 		if (step.do === 'read') known.add(step.as);
 	});
 	const drawn = new Set([...Object.keys(exercise.parameters), ...Object.keys(exercise.derived)]);

@@ -1,9 +1,11 @@
 import { partOf, type Part } from '$lib/schemas/part';
 import { BenchError } from '../bench-error';
+import { resolveSettings } from '../receiver/resolve-settings';
 import { prepareSweep } from '../receiver/sweep';
 import type { AttemptRecord, TakenReading } from './attempt-record';
 import { BenchSession, type SweepWith } from './bench-session';
 import type { DrawnExercise, FilledStep } from './drawn-exercise';
+import { SWEPT_RBW_HZ } from './swept-rbw';
 
 /** A step as it was done: the reading taken, and the number it named or answered with. */
 export interface PlayedStep {
@@ -45,6 +47,7 @@ export function runMethod(
 			case 'read': {
 				const taken = bench.read(step.reading, step.trace);
 				byName.set(step.as, taken);
+				values[SWEPT_RBW_HZ] = resolveSettings(bench.log[bench.log.length - 1].settings, drawn.profile).rbwHz;
 				values[step.as] = named(taken, step.part);
 				return { step, taken, value: values[step.as] };
 			}

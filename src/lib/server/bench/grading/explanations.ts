@@ -76,6 +76,8 @@ function rightOnes(watched: readonly Watched[], evidence: Evidence): Candidate[]
 	const value = evidence.question.truth + ownError(evidence);
 	const [setUp] = evidence.setUps;
 	const noisy = evidence.question.noiseTakenOff && setUp ? readSpreadDb(evidence, setUp) : 0;
+	// In so much noise there is no right reading to start from.
+	if (noisy > evidence.question.tolerance) return [];
 	return [{ watched: [], value, spread: Math.hypot(modelSpread(evidence.question), noisy), setUp }];
 }
 

@@ -115,17 +115,28 @@ export function shownPower(setUp: SetUp): number {
 	});
 }
 
+const rowsOf = ({ trace, sweeps }: SetUp): number =>
+	trace.mode === 'average' ? Math.max(1, Math.min(trace.count, sweeps)) : 1;
+
+/** How many independent levels one point of a trace is the mean of. */
+const metAtPoint = (setUp: SetUp): number =>
+	rowsOf(setUp) * (setUp.resolved.detector === 'average' ? 1 + NOISE_BANDWIDTH * bucketOf(setUp) : 1);
+
 /** Standard deviation in dB of one point of an averaged trace of noise: 5.57 dB of a single level, 10/ln 10 dB of a mean power, over √rows. */
-export function pointSpreadDb({ trace, sweeps, resolved }: SetUp): number {
-	const rows = trace.mode === 'average' ? Math.max(1, Math.min(trace.count, sweeps)) : 1;
-	const each =
-		resolved.detector === 'average' ? 1 + NOISE_BANDWIDTH * bucketOf({ trace, sweeps, resolved }) : 1;
-	return (resolved.scale === 'log' ? 5.57 : 4.34) / Math.sqrt(rows * each);
+export const pointSpreadDb = (setUp: SetUp): number =>
+	(setUp.resolved.scale === 'log' ? 5.57 : 4.34) / Math.sqrt(metAtPoint(setUp));
+
+/** Mean power of the highest point of a trace of noise of mean power 1: the greatest of as many as stand apart by more than a filter's memory. */
+export function crestPower(setUp: SetUp): number {
+	const { points } = setUp.resolved;
+	const apart = Math.max(1, Math.round(points * Math.min(1, bucketOf(setUp))));
+	const met = metAtPoint(setUp);
+	return cached(`crest ${met.toPrecision(4)} ${apart}`, () => meanOfGreatest(meanLaw(met), apart));
 }
 
 /** Standard deviation in dB of a band's power read off a trace of noise: that of the mean of all that was met in the band. */
-export function bandSpreadDb({ trace, sweeps, resolved }: SetUp, widthHz: number): number {
-	const rows = trace.mode === 'average' ? Math.max(1, Math.min(trace.count, sweeps)) : 1;
+export function bandSpreadDb(setUp: SetUp, widthHz: number): number {
+	const { resolved } = setUp;
 	const dwellS = (resolved.sweepTimeS * widthHz) / resolved.spanHz;
-	return 4.34 / Math.sqrt(Math.max(1, rows * dwellS * NOISE_BANDWIDTH * resolved.rbwHz));
+	return 4.34 / Math.sqrt(Math.max(1, rowsOf(setUp) * dwellS * NOISE_BANDWIDTH * resolved.rbwHz));
 }

@@ -1,8 +1,10 @@
 import { z } from 'zod';
-import { milliwattsToDbm } from '$lib/units/decibel';
+import { milliwattsToDbm, powerRatioToDb } from '$lib/units/decibel';
 import { figure, shortFigure } from '$lib/server/bench/exercise/figure';
-import { defineMistake, type Context, type SetUp } from '../mistake';
+import { familyOf } from '../family';
+import { defineMistake, type Context, type Prediction, type SetUp } from '../mistake';
 import { isDeaf, noiseMw, noiseSpreadDb, withNoiseDbm } from '../noise-in-reading';
+import { crestPower } from '../noise-law';
 import { setUpOf } from '../set-up-of';
 import { withRawReading, withSettings } from '../spoil';
 import { modelSpread } from '../spreads';
@@ -11,6 +13,22 @@ const parameters = z.discriminatedUnion('by', [
 	z.strictObject({ by: z.literal('attenuator'), attenuationDb: z.number().positive() }),
 	z.strictObject({ by: z.literal('preamplifier') })
 ]);
+
+/** Of a rectangular distribution: its standard deviation over its width. */
+const RECTANGULAR = 1 / Math.sqrt(12);
+
+/**
+ * What is read on the floor. A line isn't to be seen there: some put the marker where it should be and read the floor's mean,
+ * some take the highest peak, the floor's crest; any level between is as likely.
+ */
+function floorRead(context: Context, setUp: SetUp): Prediction {
+	const isLine = familyOf(context.question.quantity.kind) === 'point';
+	const crestDb = isLine ? powerRatioToDb(crestPower(setUp)) : 0;
+	return {
+		value: withNoiseDbm(context, setUp) + crestDb / 2,
+		spread: Math.hypot(modelSpread(context.question), noiseSpreadDb(context, setUp), RECTANGULAR * crestDb)
+	};
+}
 
 /** The receiver's floor read as what stands under it: attenuation left in, or the preamplifier left off. */
 export const floorAsSignal = defineMistake('floor-as-signal', parameters, (given) => {
@@ -32,12 +50,7 @@ export const floorAsSignal = defineMistake('floor-as-signal', parameters, (given
 		shows: ({ setUp }, context) => isCause(context, setUp),
 		fromReading: ({ planeValue }) => planeValue,
 		predict: (context, setUp) =>
-			isCause(context, setUp) && setUp.resolved.input.connected
-				? {
-						value: withNoiseDbm(context, setUp),
-						spread: Math.hypot(modelSpread(context.question), noiseSpreadDb(context, setUp))
-					}
-				: null,
+			isCause(context, setUp) && setUp.resolved.input.connected ? floorRead(context, setUp) : null,
 		explain({ setUp, yours, ...context }) {
 			const { question } = context;
 			const floorDbm = setUp ? milliwattsToDbm(noiseMw(context, setUp)) : yours;

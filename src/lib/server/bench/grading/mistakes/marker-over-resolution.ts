@@ -3,6 +3,7 @@ import { dbmToMilliwatts, powerRatioToDb } from '$lib/units/decibel';
 import { formatFrequency } from '$lib/units/format-quantity';
 import { figure, shortFigure } from '$lib/server/bench/exercise/figure';
 import type { Scope } from '$lib/server/bench/exercise/expression';
+import { SWEPT_RBW_HZ } from '$lib/server/bench/exercise/swept-rbw';
 import type { FilledStep } from '$lib/server/bench/exercise/drawn-exercise';
 import { defineMistake, type Context, type SetUp } from '../mistake';
 import { noiseMw } from '../noise-in-reading';
@@ -21,8 +22,8 @@ function spreadDb(context: Context, setUp: SetUp): number {
 	return Math.hypot(modelSpread(context.question), pointSpreadDb(setUp) * Math.hypot(1 + share, share));
 }
 
-/** Every noise density of a method read with a marker instead, and divided by the resolution. */
-function byMarker(steps: readonly FilledStep[], rbwDb: number): FilledStep[] {
+/** Every noise density of a method read with a marker instead, and divided by the resolution it was swept with. */
+function byMarker(steps: readonly FilledStep[]): FilledStep[] {
 	const names = new Set<string>();
 	return steps.map((step) => {
 		if (step.do === 'read' && step.reading.kind === 'noise-density') {
@@ -30,13 +31,12 @@ function byMarker(steps: readonly FilledStep[], rbwDb: number): FilledStep[] {
 			return { ...step, reading: { kind: 'marker', atHz: step.reading.atHz } };
 		}
 		if (step.do !== 'answer' || !('value' in step)) return step;
-		const perHertz = (scope: Scope): Scope =>
-			Object.fromEntries(
-				Object.entries(scope).map(([name, value]) => [
-					name,
-					names.has(name) ? (value as number) - rbwDb : value
-				])
-			);
+		const perHertz = (scope: Scope): Scope => {
+			const rbwDb = powerRatioToDb(scope[SWEPT_RBW_HZ] as number);
+			const divided = (name: string, value: Scope[string]) =>
+				names.has(name) ? (value as number) - rbwDb : value;
+			return Object.fromEntries(Object.entries(scope).map(([name, value]) => [name, divided(name, value)]));
+		};
 		return { ...step, value: (scope: Scope) => step.value(perHertz(scope)) };
 	});
 }
@@ -67,16 +67,5 @@ export const markerOverResolution = defineMistake('marker-over-resolution', z.st
 			bad: { at: 'reading', text: 'Here: a marker on noise; take the noise density' }
 		};
 	},
-	make(steps, { drawn }) {
-		const logged = withSettings(steps, { scale: 'log' });
-		const rbwHz = rbwOf(logged) ?? drawn.profile.rbwHz[0];
-		return byMarker(logged, powerRatioToDb(rbwHz));
-	}
+	make: (steps) => byMarker(withSettings(steps, { scale: 'log' }))
 }));
-
-const rbwOf = (steps: readonly FilledStep[]): number | undefined =>
-	steps
-		.flatMap((step) =>
-			step.do === 'set' && typeof step.settings.rbwHz === 'number' ? [step.settings.rbwHz] : []
-		)
-		.at(-1);
