@@ -7,7 +7,6 @@ import {
 	collectFaults,
 	expectAccessible,
 	expectSweeping,
-	order,
 	readingRow,
 	setUp,
 	signIn,
@@ -38,10 +37,10 @@ const ofClosed =
 	};
 
 async function openBench(page: Page): Promise<void> {
-	const { id } = await startAttempt(page);
+	const { id } = await startAttempt(page, 'two-carriers-or-one');
 	await page.goto(`/learn/attempts/${id}`);
 	await expectSweeping(page);
-	const { channel } = await order(page);
+	const channel = '450.025 MHz';
 	await setUp(page, 'Centre', channel);
 	await page.getByRole('button', { name: 'Marker', exact: true }).click();
 	await startReading(page, 'Channel power', { Centre: channel, Width: '25k' });
@@ -49,6 +48,27 @@ async function openBench(page: Page): Promise<void> {
 	// A bench that sweeps changes under the eyes of whoever looks closely.
 	await page.getByRole('button', { name: 'Stop' }).click();
 }
+
+async function openLogbookEntry(page: Page): Promise<void> {
+	const { id } = await startAttempt(page, 'two-carriers-or-one');
+	await ask(page, `/api/attempts/${id}/logbook`, { kind: 'set-up' });
+	await page.goto('/learn/logbook');
+	await page.locator('main a[href^="/learn/logbook/"]:not([href*="csv"], [href*="pdf"])').first().click();
+	await expect(page).toHaveURL(/logbook\/\d+$/);
+	await ready(page);
+}
+
+/** A page of the desk, which is there once the course's draft has been begun. */
+const ofDraft =
+	(part: string): Open =>
+	async (page) => {
+		const begun = await page.context().request.post('/teach/courses?/start', {
+			form: { course: 'spectrum-measurement' },
+			headers: { origin: process.env.E2E_ORIGIN ?? '', accept: 'text/html' }
+		});
+		expect(begun.ok()).toBe(true);
+		await plain(`/teach/courses/spectrum-measurement${part}`)(page);
+	};
 
 const PAGES: Record<string, Open> = {
 	'/': plain('/'),
@@ -61,6 +81,10 @@ const PAGES: Record<string, Open> = {
 	'/learn/attempts/[id]/finding': ofClosed('finding'),
 	'/learn/attempts/[id]/report': ofClosed('report'),
 	'/learn/exercises/[slug]': plain('/learn/exercises/power-behind-a-coupler'),
+	'/learn/find': plain('/learn/find?q=marker'),
+	'/learn/glossary': plain('/learn/glossary'),
+	'/learn/logbook': plain('/learn/logbook'),
+	'/learn/logbook/[id]': openLogbookEntry,
 	'/learn/skills': plain('/learn/skills'),
 	'/learn/units/[slug]': plain('/learn/units/power-of-a-spread-signal'),
 	'/office': plain('/office'),
@@ -68,7 +92,10 @@ const PAGES: Record<string, Open> = {
 		await page.context().clearCookies();
 		await plain('/sign-in')(page);
 	},
-	'/teach': plain('/teach')
+	'/teach': plain('/teach'),
+	'/teach/courses': plain('/teach/courses'),
+	'/teach/courses/[course]': ofDraft(''),
+	'/teach/courses/[course]/[unit]/[file]': ofDraft('/01-connect-safely/power-behind-a-coupler.yaml')
 };
 
 const routes = readdirSync('src/routes', { recursive: true, encoding: 'utf8' })

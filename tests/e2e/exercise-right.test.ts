@@ -71,8 +71,11 @@ test('an exercise can be done on the keyboard alone', async ({ page }) => {
 	const before = Number(await at());
 	await page.keyboard.press('ArrowRight');
 	await expect.poll(async () => Number(await at())).toBeGreaterThan(before);
-	await page.keyboard.press('Space');
-	await expect(page.locator('p[aria-live=assertive]')).toHaveText(/Marker A: .*MHz.*dBm/);
+	// Until the first sweep of the new span is there, it says that there is none.
+	await expect(async () => {
+		await page.keyboard.press('Space');
+		await expect(page.locator('p[aria-live=assertive]')).toHaveText(/Marker A: .*MHz.*dBm/, { timeout: 500 });
+	}).toPass({ timeout: 20_000 });
 
 	await tabTo(page, page.getByRole('button', { name: 'Reading', exact: true }));
 	await page.keyboard.press('Enter');

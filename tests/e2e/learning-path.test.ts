@@ -8,7 +8,8 @@ test('a term is explained where it stands, everything can be found, and a shut u
 	page
 }) => {
 	const faults = await collectFaults(page);
-	await signIn(page, 'ailsa.tyson@northmoor.example');
+	// Whoever does the exercises of unit 6 right in other tests finds unit 7 open.
+	await signIn(page, 'ewan.brack@skerrycoast.example');
 	await page.goto('/learn/units/the-floor');
 	await ready(page);
 	const term = page.locator('a.term', { hasText: /^noise figure$/i });
