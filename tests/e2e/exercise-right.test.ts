@@ -83,6 +83,7 @@ test('an exercise can be done on the keyboard alone', async ({ page }) => {
 	await page.keyboard.press('ArrowDown');
 	await expect(page.getByRole('button', { name: /^Channel power/ })).toBeFocused();
 	await page.keyboard.press('Enter');
+	await expect(page.getByRole('textbox', { name: 'Centre', exact: true })).toBeFocused();
 	await tabTo(page, page.getByRole('textbox', { name: 'Width', exact: true }));
 	await page.keyboard.type('25k');
 	await page.keyboard.press('Enter');

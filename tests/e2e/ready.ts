@@ -12,7 +12,10 @@ export const personMenu = (page: Page): Locator => page.locator('[data-person-me
 export async function tabTo(page: Page, target: Locator): Promise<void> {
 	const key = await target.evaluate((element) => {
 		const all = [...document.querySelectorAll('a[href], button, input, select, textarea, [tabindex="0"]')];
-		const steps = all.indexOf(element) - all.indexOf(document.activeElement ?? element);
+		const from = all.indexOf(document.activeElement ?? element);
+		// Nothing has the focus: forward, since what comes next is not known to be nearer behind.
+		if (from < 0) return 'Tab';
+		const steps = all.indexOf(element) - from;
 		return (steps + all.length) % all.length <= all.length / 2 ? 'Tab' : 'Shift+Tab';
 	});
 	for (let i = 0; i < 90; i++) {
