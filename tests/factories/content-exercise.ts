@@ -7,7 +7,7 @@ import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
 const ROOT = 'content';
 const files = readdirSync(ROOT, { recursive: true, encoding: 'utf8' })
 	// In the folder of a unit; beside those lie the course's own files.
-	.filter((path) => /\/\d\d-[^/]+\/[^/]+\.yaml$/.test(path) && !basename(path).startsWith('demonstration-'))
+	.filter((path) => /\/\d\d-[^/]+\/[^/]+\.yaml$/.test(path))
 	.sort()
 	.map((path) => join(ROOT, path));
 

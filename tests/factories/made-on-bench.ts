@@ -1,23 +1,16 @@
 /** A mistake watched on a question of content/, made on the bench with one seed, beside what theory says of it. */
-import { readdirSync, readFileSync } from 'node:fs';
-import { join } from 'node:path';
 import { numberAnswers, type AttemptRecord } from '$lib/server/bench/exercise/attempt-record';
 import { drawExercise } from '$lib/server/bench/exercise/draw-exercise';
 import { numberQuestions, type DrawnExercise } from '$lib/server/bench/exercise/drawn-exercise';
-import { parseExerciseText } from '$lib/server/bench/exercise/parse-exercise';
 import { runMethod } from '$lib/server/bench/exercise/run-method';
 import { judgeQuestion } from '$lib/server/bench/grading/judge-question';
 import { predictMistake } from '$lib/server/bench/grading/predict-mistake';
 import { ownError } from '$lib/server/bench/grading/own-error';
 import { watchedMistakes } from '$lib/server/bench/grading/watched-mistakes';
+import { contentExercise } from './content-exercise';
 
-export function drawnFrom(slug: string, seed: number): DrawnExercise {
-	const name = readdirSync('content', { recursive: true, encoding: 'utf8' }).find((path) =>
-		path.endsWith(`/${slug}.yaml`)
-	)!;
-	const file = join('content', name);
-	return drawExercise(parseExerciseText(readFileSync(file, 'utf8'), file), seed);
-}
+export const drawnFrom = (slug: string, seed: number): DrawnExercise =>
+	drawExercise(contentExercise(slug), seed);
 
 export function madeOnBench(drawn: DrawnExercise, questionId: string, id: string) {
 	const question = numberQuestions(drawn).find((one) => one.id === questionId)!;

@@ -1,12 +1,10 @@
-import { combineRows } from '$lib/measure/combine-rows';
 import { takeReading } from '$lib/measure/take-reading';
-import type { Trace } from '$lib/measure/trace';
 import type { Exercise } from '$lib/schemas/exercise';
 import type { FigureState } from '$lib/schemas/figure-view';
 import type { SignalPreview } from '$lib/schemas/preview-view';
 import { readingRequest, type ReadingRequest } from '$lib/schemas/reading';
-import type { ResolvedSettings } from '$lib/schemas/settings';
 import { prepareSweep } from '../receiver/sweep';
+import { traceOfRows } from '../receiver/trace-of-rows';
 import { drawExercise } from './draw-exercise';
 import { numberQuestions, type DrawnExercise } from './drawn-exercise';
 import { methodStates } from './method-states';
@@ -55,7 +53,7 @@ function firstSweep(drawn: DrawnExercise): { state: FigureState; requests: Readi
 		rows.push(plan.row(n, clockS));
 		clockS += plan.durationS(n);
 	}
-	const traces = rows.length === 0 ? [] : resolved.traces.map((_, i) => traceOf(rows, resolved, i));
+	const traces = rows.length === 0 ? [] : resolved.traces.map((_, i) => traceOfRows(rows, resolved, i));
 	const requests = requestsAfter(drawn, at);
 	return {
 		requests,
@@ -82,16 +80,4 @@ function requestsAfter({ method }: DrawnExercise, at: number): ReadingRequest[] 
 		if (request.success) requests.push(request.data);
 	}
 	return requests;
-}
-
-function traceOf(rows: Float32Array[], resolved: ResolvedSettings, index: number): Trace {
-	const { startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb } = resolved;
-	const { mode, count } = resolved.traces[index];
-	const used = mode === 'average' ? Math.min(count, rows.length) : mode === 'live' ? 1 : rows.length;
-	return {
-		...{ startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb },
-		mode,
-		count: used,
-		levelsDbm: combineRows(rows, mode, count, scale)
-	};
 }

@@ -1,13 +1,12 @@
-import { combineRows } from '$lib/measure/combine-rows';
 import { takeReading } from '$lib/measure/take-reading';
-import type { Trace } from '$lib/measure/trace';
 import type { Figure } from '$lib/schemas/figure';
 import type { FigureState } from '$lib/schemas/figure-view';
-import { settings as settingsSchema, type ResolvedSettings } from '$lib/schemas/settings';
+import { settings as settingsSchema } from '$lib/schemas/settings';
 import { parseInput } from '../commands/parse-input';
 import { profileNamed } from '../receiver/profiles';
 import { resolveSettings } from '../receiver/resolve-settings';
 import { prepareSweep } from '../receiver/sweep';
+import { traceOfRows } from '../receiver/trace-of-rows';
 import { settingsAt, type FigureValues } from './choices';
 
 /**
@@ -25,7 +24,7 @@ export function computeFigure(figure: Figure, values: FigureValues): FigureState
 		rows.push(plan.row(n, clockS));
 		clockS += plan.durationS(n);
 	}
-	const traces = rows.length === 0 ? [] : resolved.traces.map((_, i) => traceOf(rows, resolved, i));
+	const traces = rows.length === 0 ? [] : resolved.traces.map((_, i) => traceOfRows(rows, resolved, i));
 	return {
 		values: [...values],
 		resolved,
@@ -35,17 +34,5 @@ export function computeFigure(figure: Figure, values: FigureValues): FigureState
 			levelsDbm: Array.from(levelsDbm, (levelDbm) => Math.round(levelDbm * 100) / 100)
 		})),
 		readings: traces.length === 0 ? [] : figure.readings.map((request) => takeReading(traces[0], request))
-	};
-}
-
-function traceOf(rows: Float32Array[], resolved: ResolvedSettings, index: number): Trace {
-	const { startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb } = resolved;
-	const { mode, count } = resolved.traces[index];
-	const used = mode === 'average' ? Math.min(count, rows.length) : mode === 'live' ? 1 : rows.length;
-	return {
-		...{ startHz, stopHz, rbwHz, vbwHz, sweepTimeS, detector, scale, correctionDb },
-		mode,
-		count: used,
-		levelsDbm: combineRows(rows, mode, count, scale)
 	};
 }

@@ -2,7 +2,7 @@ import type { Transaction } from 'sequelize';
 import { Course } from '$lib/server/db/models/course';
 import { CourseDraft } from '$lib/server/db/models/course-draft';
 import { DraftFile } from '$lib/server/db/models/draft-file';
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 
@@ -10,9 +10,8 @@ import { DomainError } from '$lib/server/errors';
 export const ARCHIVE = 'archive/';
 
 /** @throws DomainError `forbidden` for whoever may not write courses */
-export function refuseReaders(actor: Actor): void {
-	if (!may(actor, 'course.author')) throw new DomainError('forbidden', 'Courses are written by instructors.');
-}
+export const refuseReaders = (actor: Actor): void =>
+	refuseUnless(actor, 'course.author', { message: 'Courses are written by instructors.' });
 
 /**
  * The draft of the course `slug`.

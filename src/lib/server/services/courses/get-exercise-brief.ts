@@ -2,7 +2,7 @@ import type { ExerciseBrief } from '$lib/schemas/course-view';
 import { profileNamed } from '$lib/server/bench/receiver/profiles';
 import { attemptsAtExercise } from '$lib/server/db/queries/attempts-at-exercise';
 import { findPublishedExercise } from '$lib/server/db/queries/find-exercise';
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 import { presentReceiver } from '$lib/server/present/exercise';
@@ -11,8 +11,7 @@ import { findLocks } from '../progress/find-locks';
 
 /** What an exercise is, before it is started: nothing that a seed decides. @throws DomainError `not_found` */
 export async function getExerciseBrief(actor: Actor, slug: string, now: Date): Promise<ExerciseBrief> {
-	if (!may(actor, 'learn.enter'))
-		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	refuseUnless(actor, 'learn.enter');
 	const exercise = await findPublishedExercise(slug);
 	if (!exercise) throw new DomainError('not_found', 'There is no such exercise.');
 	const { unit, edition, definition } = exercise;

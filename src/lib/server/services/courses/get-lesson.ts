@@ -4,7 +4,7 @@ import { Exercise } from '$lib/server/db/models/exercise';
 import { Unit } from '$lib/server/db/models/unit';
 import { listAttempts } from '$lib/server/db/queries/attempts-at-exercise';
 import { findPublishedUnit, type PlacedUnit } from '$lib/server/db/queries/find-unit';
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 import { presentFigure } from '$lib/server/present/figure';
@@ -16,8 +16,7 @@ import { findLocks } from '../progress/find-locks';
 
 /** The lesson of a unit as published now, with what this person has done of its exercises. @throws DomainError `not_found` */
 export async function getLesson(actor: Actor, slug: string, now: Date): Promise<LessonView> {
-	if (!may(actor, 'lesson.read'))
-		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	refuseUnless(actor, 'lesson.read');
 	const unit = await findPublishedUnit(slug);
 	if (!unit) throw new DomainError('not_found', 'There is no such unit.');
 	const { id, number, title, summary, lesson, edition } = unit;

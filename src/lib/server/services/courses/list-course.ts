@@ -3,7 +3,7 @@ import { Exercise } from '$lib/server/db/models/exercise';
 import { Unit } from '$lib/server/db/models/unit';
 import { listAttempts } from '$lib/server/db/queries/attempts-at-exercise';
 import { newestEditions, type PublishedCourse } from '$lib/server/db/queries/newest-editions';
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
 import { DomainError } from '$lib/server/errors';
 import { presentProgress } from '$lib/server/present/progress';
@@ -11,21 +11,16 @@ import { findLocks } from '../progress/find-locks';
 
 /** Every course as published now, with what this person has done in it. */
 export async function listCourses(actor: Actor, now: Date): Promise<CourseProgress[]> {
-	refuseStrangers(actor);
+	refuseUnless(actor, 'learn.enter');
 	return Promise.all((await newestEditions()).map((course) => courseWithProgress(actor, course, now)));
 }
 
 /** One course as published now, with what this person has done in it. @throws DomainError `not_found` */
 export async function listCourse(actor: Actor, slug: string, now: Date): Promise<CourseProgress> {
-	refuseStrangers(actor);
+	refuseUnless(actor, 'learn.enter');
 	const course = (await newestEditions()).find((candidate) => candidate.slug === slug);
 	if (!course) throw new DomainError('not_found', 'There is no such course.');
 	return courseWithProgress(actor, course, now);
-}
-
-function refuseStrangers(actor: Actor): void {
-	if (!may(actor, 'learn.enter'))
-		throw new DomainError('forbidden', 'This part of the site is not for your role.');
 }
 
 async function courseWithProgress(actor: Actor, course: PublishedCourse, now: Date): Promise<CourseProgress> {

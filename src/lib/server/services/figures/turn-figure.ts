@@ -1,7 +1,7 @@
 import type { Figure, FigureChoice } from '$lib/schemas/figure';
 import type { FigureRequest, FigureState } from '$lib/schemas/figure-view';
 import { Unit } from '$lib/server/db/models/unit';
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
 import type { Limit } from '$lib/server/domain/sign-in-limit';
 import { DomainError, type Issue } from '$lib/server/errors';
@@ -25,8 +25,7 @@ export async function turnFigure(
 	{ values }: FigureRequest,
 	now: Date
 ): Promise<FigureState> {
-	if (!may(actor, 'lesson.read'))
-		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	refuseUnless(actor, 'lesson.read');
 	const unit = await Unit.findByPk(unitId, { attributes: ['id', 'figures'] });
 	const figure = unit?.figures.find(({ id }) => id === figureId);
 	if (!figure) throw new DomainError('not_found', 'There is no such figure.');

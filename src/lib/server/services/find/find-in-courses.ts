@@ -1,17 +1,15 @@
 import { longestQuery, type FindView } from '$lib/schemas/find-view';
 import { newestEditions } from '$lib/server/db/queries/newest-editions';
 import { findIn } from '$lib/server/domain/find/find-in';
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
-import { DomainError } from '$lib/server/errors';
 import { courseDocuments } from './course-documents';
 
 const MOST_SHOWN = 40;
 
 /** What the courses published now say of a query: terms, exercises and places in lessons. Of a long query, its beginning. */
 export async function findInCourses(actor: Actor, query: string): Promise<FindView> {
-	if (!may(actor, 'lesson.read'))
-		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	refuseUnless(actor, 'lesson.read');
 	const asked = query.slice(0, longestQuery).trim();
 	const editions = await newestEditions();
 	const documents = await Promise.all(editions.map(({ editionId }) => courseDocuments(editionId)));

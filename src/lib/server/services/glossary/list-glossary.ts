@@ -2,15 +2,13 @@ import type { GlossaryView } from '$lib/schemas/glossary';
 import { Edition } from '$lib/server/db/models/edition';
 import { Unit } from '$lib/server/db/models/unit';
 import { newestEditions } from '$lib/server/db/queries/newest-editions';
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
-import { DomainError } from '$lib/server/errors';
 import { presentGlossaryTerm } from '$lib/server/present/glossary';
 
 /** The terms of every course as published now, by term. */
 export async function listGlossary(actor: Actor): Promise<GlossaryView[]> {
-	if (!may(actor, 'lesson.read'))
-		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	refuseUnless(actor, 'lesson.read');
 	const courses = await newestEditions();
 	return Promise.all(
 		courses.map(async ({ editionId, slug, title }) => {

@@ -1,9 +1,9 @@
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
-import { DomainError } from '$lib/server/errors';
 
 /** @throws DomainError `forbidden` for a role that has no bench */
-export function refuseStrangers(actor: Actor): void {
-	if (!may(actor, 'logbook.keep', { ownerId: actor.id }))
-		throw new DomainError('forbidden', 'A logbook is kept by whoever has a bench.');
-}
+export const refuseStrangers = (actor: Actor): void =>
+	refuseUnless(actor, 'logbook.keep', {
+		resource: { ownerId: actor.id },
+		message: 'A logbook is kept by whoever has a bench.'
+	});

@@ -7,8 +7,8 @@ import {
 } from '$lib/server/db/queries/bench-overview';
 import { publishedOutline } from '$lib/server/db/queries/published-outline';
 import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
-import { DomainError } from '$lib/server/errors';
 
 /** Somebody who has touched nothing for so long is not at the bench. */
 const AT_BENCH_MS = 15 * 60_000;
@@ -16,8 +16,7 @@ const MOST_SHOWN = 20;
 
 /** How the exercises go, who is at the bench and what was handed in last. Names only of those whose progress the actor may see. */
 export async function getTeachOverview(actor: Actor, now: Date): Promise<TeachOverview> {
-	if (!may(actor, 'teach.enter'))
-		throw new DomainError('forbidden', 'This part of the site is not for your role.');
+	refuseUnless(actor, 'teach.enter');
 	const since = new Date(now.getTime() - AT_BENCH_MS);
 	const [outline, figures, atBench, latest] = await Promise.all([
 		publishedOutline(),

@@ -1,9 +1,9 @@
-import { may } from '$lib/server/domain/policy';
+import { refuseUnless } from '$lib/server/domain/refuse-unless';
 import type { Actor } from '$lib/server/domain/role';
-import { DomainError } from '$lib/server/errors';
 
 /** @throws DomainError `forbidden` for a role that has no bench */
-export function refuseStrangers(actor: Actor): void {
-	if (!may(actor, 'saved-set-up.keep', { ownerId: actor.id }))
-		throw new DomainError('forbidden', 'Set-ups are kept by whoever has a bench.');
-}
+export const refuseStrangers = (actor: Actor): void =>
+	refuseUnless(actor, 'saved-set-up.keep', {
+		resource: { ownerId: actor.id },
+		message: 'Set-ups are kept by whoever has a bench.'
+	});
